@@ -1,0 +1,99 @@
+import type { Level, MeasureCase, Side } from "./node";
+import type { Step } from "./trace/trace";
+
+export const COMPONENT_IDS = [
+  "joint-moment",
+  "column-web-shear",
+  "column-web-compression",
+  "column-web-tension",
+  "column-flange-bending",
+  "end-plate-bending",
+  "flange-cleat-bending",
+  "beam-flange-compression",
+  "beam-web-tension",
+  "bolt-tension",
+  "bolt-shear",
+  "connection-weld",
+  "transverse-stiffener",
+  "diagonal-stiffener",
+  "stiffener-weld",
+  "web-plate",
+  "web-plate-weld",
+  "backing-plate",
+  "bar-tension",
+  "bar-compression",
+  "far-flange",
+  "detailing",
+] as const;
+
+export type ComponentId = (typeof COMPONENT_IDS)[number];
+
+/** One check of one component in one load case. Demand and resistance share `unit`. */
+export interface ComponentCheck {
+  readonly component: ComponentId;
+  readonly side: Side;
+  readonly level?: Level;
+  /** 1 = first in `bolts.rows`. */
+  readonly row?: number;
+  readonly rows?: readonly number[];
+  readonly loadCase: string;
+  readonly clause: string;
+  /** Words that tell which of several rules of a component this is (detailing, welds). */
+  readonly what?: string;
+  readonly unit: "N" | "Nmm" | "mm" | "ratio";
+  readonly demand: number;
+  readonly resistance: number;
+  readonly utilisation: number;
+  readonly stiffnessCoefficientMm?: number;
+  readonly step?: Step;
+}
+
+export type StiffnessClass = "pinned" | "semi-rigid" | "rigid";
+export type StrengthClass = "pinned" | "partial-strength" | "full-strength";
+
+/** One joint in one load case. */
+export interface JointResult {
+  readonly side: Side;
+  readonly loadCase: string;
+  readonly momentResistanceNmm: number;
+  readonly initialStiffnessNmmPerRad: number;
+  /** At the load case's own moment; null where the moment exceeds the resistance. */
+  readonly secantStiffnessNmmPerRad: number | null;
+  readonly leverArmMm: number;
+  readonly stiffnessClass: StiffnessClass;
+  readonly strengthClass: StrengthClass;
+  readonly rows: readonly { readonly row: number; readonly forceN: number }[];
+  /** Steps of M_j,Rd, S_j,ini and the classification. */
+  readonly steps?: readonly Step[];
+}
+
+export interface Governing {
+  readonly component: ComponentId;
+  readonly side: Side;
+  readonly loadCase: string;
+  readonly utilisation: number;
+}
+
+export interface EvaluatedOption {
+  readonly kind: "evaluated";
+  readonly measures: readonly MeasureCase[];
+  readonly passes: boolean;
+  /** Largest utilisation of all checks. */
+  readonly utilisation: number;
+  /** Every joint in every load case reaches the target stiffness. */
+  readonly stiffnessReached: boolean;
+  readonly governing: Governing;
+  /** Words on what fails on the connection's own side, that no column stiffening can cure; null if nothing does. */
+  readonly connectionFailure: string | null;
+  readonly cautions: readonly string[];
+  readonly joints: readonly JointResult[];
+  readonly checks: readonly ComponentCheck[];
+}
+
+export interface OutsideScopeOption {
+  readonly kind: "outside-scope";
+  readonly measures: readonly MeasureCase[];
+  readonly reason: string;
+}
+
+export type OptionOutcome = EvaluatedOption | OutsideScopeOption;
