@@ -1,0 +1,12 @@
+import { demoOrganisation } from "./demo-organisation";
+import type { Seeder } from "./seeder";
+
+/**
+ * Every seeder in the order of running: what others refer to comes first. Catalogue and figures
+ * before the demo organisation, whose project uses them.
+ */
+export const seeders: readonly Seeder[] = [
+  // Catalogue: sections, angles, steels, fasteners, stock plates.
+  // Figures: time tables, rate books.
+  demoOrganisation,
+];
