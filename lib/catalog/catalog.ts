@@ -1,6 +1,16 @@
 /** The catalogue as plain rows: what the seeders load, the database keeps and the resolver looks names up in. */
 
-export const SECTION_FAMILIES = ["IPE", "IPE A", "IPE O", "HE A", "HE B", "HE M", "UB", "UC", "custom"] as const;
+export const SECTION_FAMILIES = [
+  "IPE",
+  "IPE A",
+  "IPE O",
+  "HE A",
+  "HE B",
+  "HE M",
+  "UB",
+  "UC",
+  "custom",
+] as const;
 export type SectionFamily = (typeof SECTION_FAMILIES)[number];
 
 export interface SectionRow {
@@ -54,7 +64,10 @@ export interface FastenerRow {
   readonly preloaded: {
     readonly acrossFlatsMm: number;
     readonly acrossPointsMm: number;
+    /** EN 14399-3 (HR). */
     readonly nutHeightMm: number;
+    /** EN 14399-4 (HV); null where that part lists no such size. */
+    readonly nutHeightHvMm: number | null;
     readonly washerDiameterMm: number;
     readonly washerThicknessMm: number;
   } | null;
