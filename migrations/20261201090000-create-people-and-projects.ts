@@ -104,6 +104,8 @@ CREATE TABLE comparisons (
   node_version integer NOT NULL,
   engine text NOT NULL CHECK (engine <> ''),
   prices_key text NOT NULL CHECK (prices_key <> ''),
+  catalog_key text NOT NULL CHECK (catalog_key <> ''),
+  summary jsonb NOT NULL CHECK (jsonb_typeof(summary) = 'object'),
   result jsonb NOT NULL CHECK (jsonb_typeof(result) = 'object'),
   created_by uuid NOT NULL REFERENCES people(id) ON DELETE RESTRICT,
   created_at timestamptz NOT NULL DEFAULT now(),

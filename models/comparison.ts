@@ -1,4 +1,5 @@
 import { type CreationOptional, DataTypes, type InferAttributes, type InferCreationAttributes, Model, type Sequelize } from "sequelize";
+import type { ComparisonSummary } from "@/lib/schemas/comparison";
 import type { ResultDocument } from "@/lib/schemas/result-document";
 
 /** One calculation of a node with everything it was made from. Never changed afterwards. */
@@ -9,6 +10,10 @@ export class Comparison extends Model<InferAttributes<Comparison>, InferCreation
   declare engine: string;
   /** Names the rate book version and time table that priced it. */
   declare pricesKey: string;
+  /** Fingerprint of the catalogue it was sized from. */
+  declare catalogKey: string;
+  /** What the register shows of it, so that a list of nodes need not read every result. */
+  declare summary: ComparisonSummary;
   /** Without the steps of the working. */
   declare result: ResultDocument;
   declare createdBy: string;
@@ -23,6 +28,8 @@ export function initComparison(sequelize: Sequelize): void {
       nodeVersion: DataTypes.INTEGER,
       engine: DataTypes.TEXT,
       pricesKey: DataTypes.TEXT,
+      catalogKey: DataTypes.TEXT,
+      summary: DataTypes.JSONB,
       result: DataTypes.JSONB,
       createdBy: DataTypes.UUID,
       createdAt: { type: DataTypes.DATE, defaultValue: DataTypes.NOW },

@@ -7,6 +7,7 @@ const Environment = z.object({
   authSecret: z.string().min(16).optional(),
   baseUrl: z.url().optional(),
   isProduction: z.boolean(),
+  logLevel: z.enum(["trace", "debug", "info", "warn", "error", "fatal", "silent"]).default("info"),
 });
 export type Environment = Readonly<z.infer<typeof Environment>>;
 
@@ -19,6 +20,7 @@ export function environment(): Environment {
     dataDir: process.env["PANELWRIGHT_DATA_DIR"],
     authSecret: process.env["NEXTAUTH_SECRET"],
     baseUrl: process.env["NEXTAUTH_URL"],
+    logLevel: process.env["LOG_LEVEL"],
     isProduction: process.env["NODE_ENV"] === "production",
   });
   return checked;
