@@ -1,0 +1,96 @@
+import type { OtherConnection } from "@/lib/calc/node";
+import type { Connection } from "@/lib/schemas/node-document";
+import { shownMm } from "./resolve-errors";
+import {
+  resolveAngle,
+  resolveFastenerGrade,
+  resolveFastenerSize,
+  resolveSteel,
+  type Resolving,
+} from "./resolve-parts";
+
+type CleatInput = Extract<Connection, { kind: "flange-cleats" }>;
+type WebCleatInput = NonNullable<CleatInput["webCleats"]>;
+
+interface Leg {
+  /** The leg of an unequal angle that points this way is not stated, so the longer one is allowed. */
+  readonly longestMm: number;
+  readonly innerFaceMm: number;
+}
+
+function legOf(context: Resolving, section: string, path: string): Leg | null {
+  const angle = resolveAngle(context, section, `${path}.section`);
+  return angle && { longestMm: Math.max(angle.legAMm, angle.legBMm), innerFaceMm: angle.thicknessMm };
+}
+
+function checkAngle(
+  context: Resolving,
+  cleat: { readonly section: string; readonly steel: CleatInput["cleat"]["steel"] },
+  path: string,
+): Leg | null {
+  const leg = legOf(context, cleat.section, path);
+  if (leg) resolveSteel(context, cleat.steel, leg.innerFaceMm, `${path}.steel`);
+  return leg;
+}
+
+/** Each hole must lie on the leg: beyond the other leg's inner face and short of the leg's toe. */
+function checkHolesOnLeg(
+  context: Resolving,
+  leg: Leg | null,
+  holeMm: number | null,
+  rows: readonly number[],
+  pathOf: (index: number) => string,
+): void {
+  if (!leg || holeMm === null) return;
+  rows.forEach((fromHeelMm, index) => {
+    if (fromHeelMm + holeMm / 2 >= leg.longestMm) {
+      context.problems.add(
+        pathOf(index),
+        `The hole at ${shownMm(fromHeelMm)} mm from the heel passes the end of the ${shownMm(leg.longestMm)} mm leg.`,
+      );
+    }
+    if (fromHeelMm - holeMm / 2 <= leg.innerFaceMm) {
+      context.problems.add(
+        pathOf(index),
+        `The hole at ${shownMm(fromHeelMm)} mm from the heel meets the other leg.`,
+      );
+    }
+  });
+}
+
+function holeOf(
+  context: Resolving,
+  bolts: { readonly size: string; readonly grade: string },
+  path: string,
+): number | null {
+  resolveFastenerGrade(context, bolts.grade, `${path}.grade`);
+  return resolveFastenerSize(context, bolts.size, `${path}.size`)?.holeMm ?? null;
+}
+
+function checkWebCleats(context: Resolving, input: WebCleatInput, path: string): void {
+  checkAngle(context, input, path);
+  holeOf(context, input.bolts, `${path}.bolts`);
+  holeOf(context, input.beamBolts, `${path}.beamBolts`);
+}
+
+/** Looks every name of a cleat connection up and refuses holes off the angle; the calculation does not take cleats yet. */
+export function resolveCleats(context: Resolving, input: CleatInput, path: string): OtherConnection {
+  const leg = checkAngle(context, input.cleat, `${path}.cleat`);
+  const hole = holeOf(context, input.bolts, `${path}.bolts`);
+  const beamHole = holeOf(context, input.beamBolts, `${path}.beamBolts`);
+  checkHolesOnLeg(context, leg, hole, [input.bolts.distance], () => `${path}.bolts.distance`);
+  checkHolesOnLeg(context, leg, beamHole, input.beamBolts.rows, (index) => `${path}.beamBolts.rows.${index}`);
+  for (const [bolts, holeMm] of [
+    ["bolts", hole],
+    ["beamBolts", beamHole],
+  ] as const) {
+    if (holeMm !== null && input[bolts].gauge + holeMm >= input.cleat.length) {
+      context.problems.add(
+        `${path}.${bolts}.gauge`,
+        `The holes pass the end of the ${shownMm(input.cleat.length)} mm long cleat.`,
+      );
+    }
+  }
+  if (input.webCleats) checkWebCleats(context, input.webCleats, `${path}.webCleats`);
+  return { kind: "flange-cleats" };
+}
