@@ -121,8 +121,7 @@ export const demoOrganisation: Seeder = {
     const organisation = await findOrCreateOrganisation(transaction);
     const added = await addPeople(organisation.id, transaction);
     const lines = added.map((person) => `${person.role.padEnd(10)} ${person.email}  password ${person.password}`);
-    const { dataDir } = environment();
-    if (added.length > 0 && dataDir !== undefined) lines.push(`kept in ${await keepPasswords(dataDir, added)}`);
+    if (added.length > 0) lines.push(`kept in ${await keepPasswords(environment().dataFolder, added)}`);
     return [...lines, ...(await addProject(organisation.id, transaction))];
   },
 };

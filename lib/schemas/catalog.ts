@@ -56,6 +56,7 @@ const Fastener = z.object({
       acrossFlatsMm: figure,
       acrossPointsMm: figure,
       nutHeightMm: figure,
+      nutHeightHvMm: figure.nullable(),
       washerDiameterMm: figure,
       washerThicknessMm: figure,
     })

@@ -61,6 +61,8 @@ export const NodeRevision = z.object({ version: z.number().int(), savedBy: Perso
 export const NodeRevisionListReply = z.object({ revisions: z.array(NodeRevision) });
 export const NodeRevisionReply = z.object({ revision: SavedDocument });
 
+export const DeletedReply = z.object({ deleted: z.literal(true) });
+
 export type CreateNode = z.infer<typeof CreateNode>;
 export type SaveNode = z.infer<typeof SaveNode>;
 export type SavedDocument = z.infer<typeof SavedDocument>;
