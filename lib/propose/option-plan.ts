@@ -1,0 +1,94 @@
+import type { Level, NodeCase } from "@/lib/calc/node";
+import { combineSpaces, fixedShape, type DesignSpace } from "./design-space";
+import { forceLevels } from "./force-levels";
+import { partialLengthsMm, stiffenerSpace } from "./stiffener-space";
+import type { Stock } from "./stock";
+import { webPlateSpace } from "./web-plate-space";
+
+/** One way to stiffen the node, not yet sized. */
+export interface PlannedOption {
+  /** Stays the same as long as the kind of stiffening does. */
+  readonly key: string;
+  readonly name: string;
+  readonly space: DesignSpace;
+}
+
+const BOTH: readonly Level[] = ["top", "bottom"];
+const levelWords = (levels: readonly Level[]): string => (levels.length === 2 ? "top and bottom" : `at ${levels[0] ?? ""}`);
+
+/** Single levels by what the loads do there; where they do both, by where they are. */
+function singleLevels(node: NodeCase): readonly { readonly key: string; readonly level: Level }[] {
+  const { tension, compression } = forceLevels(node);
+  const [pulled] = tension;
+  const [pushed] = compression;
+  if (tension.length === 1 && compression.length === 1 && pulled !== undefined && pushed !== undefined) {
+    return [
+      { key: "compression", level: pushed },
+      { key: "tension", level: pulled },
+    ];
+  }
+  return BOTH.map((level) => ({ key: level, level }));
+}
+
+function stiffenerOptions(node: NodeCase, stock: Stock): readonly PlannedOption[] {
+  const space = (levels: readonly Level[]): DesignSpace => stiffenerSpace(node, stock, levels, ["full"]);
+  const single = singleLevels(node);
+  const full = single.map(({ key, level }) => ({
+    key: `stiffeners-${key}`,
+    name: `Stiffeners ${levelWords([level])}`,
+    space: space([level]),
+  }));
+  const both = { key: "stiffeners-both", name: `Stiffeners ${levelWords(BOTH)}`, space: space(BOTH) };
+  // With a beam on both sides each flange needs its own short pair: more parts than one of full depth.
+  const isOneSided = node.joints.length === 1;
+  const partial = !isOneSided
+    ? []
+    : single.map(({ key, level }) => ({
+        key: `stiffeners-${key}-partial`,
+        name: `Partial-depth stiffeners ${levelWords([level])}`,
+        space: stiffenerSpace(node, stock, [level], partialLengthsMm(node)),
+      }));
+  return [...full, both, ...partial];
+}
+
+function webPlateOptions(node: NodeCase, stock: Stock): readonly PlannedOption[] {
+  return [
+    { key: "web-plate-one-side", name: "Web plate, one side", space: webPlateSpace(node, stock, 1) },
+    { key: "web-plate-both-sides", name: "Web plates, both sides", space: webPlateSpace(node, stock, 2) },
+  ];
+}
+
+function barSpace(stock: Stock, levels: readonly Level[]): DesignSpace {
+  return stock.bars.map(({ size, grade }) => fixedShape([{ kind: "through-bars", levels, size, grade, innerNuts: true }]));
+}
+
+function barOptions(node: NodeCase, stock: Stock): readonly PlannedOption[] {
+  if (!node.joints.every(({ connection }) => connection.kind === "end-plate")) return [];
+  const alone = [["top"], ["bottom"], BOTH] as const;
+  const bars = alone.map((levels) => ({
+    key: levels.length === 2 ? "bars-both" : `bars-${levels[0]}`,
+    name: `Bars ${levelWords(levels)}`,
+    space: barSpace(stock, levels),
+  }));
+  const mixed = BOTH.map((level) => {
+    const other: Level = level === "top" ? "bottom" : "top";
+    return {
+      key: `bars-${level}-stiffeners-${other}`,
+      name: `Bars at ${level}, stiffeners at ${other}`,
+      space: combineSpaces(barSpace(stock, [level]), stiffenerSpace(node, stock, [other], ["full"])),
+    };
+  });
+  return [...bars, ...mixed];
+}
+
+/** Every kind of option that makes sense on this node, the bare column first; at most 14. */
+export function planOptions(node: NodeCase, stock: Stock): readonly PlannedOption[] {
+  const heavier = stock.columns.map(({ section, steel }) => fixedShape([{ kind: "heavier-column", section, steel }]));
+  return [
+    { key: "bare", name: "Bare column", space: [fixedShape([])] },
+    ...stiffenerOptions(node, stock),
+    ...webPlateOptions(node, stock),
+    ...barOptions(node, stock),
+    { key: "heavier-column", name: "Heavier column", space: heavier },
+  ].filter(({ space }) => space.length > 0);
+}

@@ -1,0 +1,75 @@
+import type { JointCase, MeasureCase, NodeCase, Weld } from "@/lib/calc/node";
+import type { DesignSpace } from "./design-space";
+import type { Stock } from "./stock";
+
+/** Plates are cut to whole steps of 10 mm in height (common practice, no source). */
+const HEIGHT_STEP_MM = 10;
+/** EN 1993-1-8:2005, 6.2.6.1: b_s below 40 epsilon t_s. */
+const SLENDERNESS_LIMIT = 40;
+
+const throatOf = (weld: Weld): number => (weld.kind === "fillet" ? weld.throatMm : 0);
+
+/**
+ * How far above and below the beam the plate must reach on one side, mm, so that it covers the web
+ * that works in tension and in compression at both levels (each level may be either).
+ */
+function reachBeyondFlangeMm(node: NodeCase, joint: JointCase): number {
+  const { section } = node.column;
+  const root = section.rootMm;
+  const spread = 5 * (section.flangeThicknessMm + root);
+  if (joint.connection.kind === "flange-cleats") return spread;
+  const { welds } = joint.connection;
+  const weld = Math.SQRT2 * Math.max(throatOf(welds.topFlange), throatOf(welds.bottomFlange));
+  if (joint.connection.kind === "welded") return spread / 2 + weld;
+  const { plate, bolts } = joint.connection;
+  const compression = spread / 2 + weld + plate.thicknessMm;
+  const m = (bolts.gaugeMm - section.webThicknessMm) / 2 - 0.8 * root;
+  const e = (section.widthMm - bolts.gaugeMm) / 2;
+  const first = bolts.rowsMm[0] ?? 0;
+  const last = bolts.rowsMm.at(-1) ?? 0;
+  const beyond = Math.max(-first, last - joint.beam.section.depthMm);
+  // Table 6.4: half of the longer of the two patterns of a row by itself.
+  const tension = beyond + Math.max(2 * Math.PI * m, 4 * m + 1.25 * e) / 2;
+  return Math.max(compression, tension);
+}
+
+/** Height that covers both levels of every joint, mm, in whole steps. */
+export function webPlateHeightMm(node: NodeCase): number {
+  const heights = node.joints.map((joint) => joint.beam.section.depthMm + 2 * reachBeyondFlangeMm(node, joint));
+  return Math.ceil(Math.max(...heights) / HEIGHT_STEP_MM) * HEIGHT_STEP_MM;
+}
+
+/** Every stock shape of a supplementary web plate on one or both sides, between the root toes. */
+export function webPlateSpace(node: NodeCase, stock: Stock, sides: 1 | 2): DesignSpace {
+  const { depthMm, flangeThicknessMm, rootMm, webThicknessMm } = node.column.section;
+  const widthMm = Math.floor(depthMm - 2 * flangeThicknessMm - 2 * rootMm);
+  const heightMm = webPlateHeightMm(node);
+  return stock.plates
+    .filter(
+      ({ thicknessMm, steel }) =>
+        thicknessMm >= webThicknessMm &&
+        widthMm < SLENDERNESS_LIMIT * Math.sqrt(235 / steel.yieldMpa) * thicknessMm,
+    )
+    .map(({ thicknessMm, steel }) => {
+      // Fillets count in tension from t / sqrt 2 on (6.2.6.3(7)); a butt weld is the strongest and the dearest.
+      const fillets = stock.throatsMm.filter((throat) => throat >= thicknessMm / Math.SQRT2);
+      const welds: readonly Weld[] = [
+        ...fillets.map((throatMm) => ({ kind: "fillet" as const, throatMm })),
+        { kind: "butt" },
+      ];
+      return {
+        ladders: [welds.length],
+        build: ([step]: readonly number[]): readonly MeasureCase[] => [
+          {
+            kind: "web-plates",
+            sides,
+            thicknessMm,
+            widthMm,
+            heightMm,
+            steel,
+            weld: welds[step ?? 0] ?? { kind: "butt" },
+          },
+        ],
+      };
+    });
+}
