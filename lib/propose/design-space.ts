@@ -13,7 +13,10 @@ export interface Shape {
 export type DesignSpace = readonly Shape[];
 
 /** A complete list of measures as a shape. */
-export const fixedShape = (measures: readonly MeasureCase[]): Shape => ({ ladders: [], build: () => measures });
+export const fixedShape = (measures: readonly MeasureCase[]): Shape => ({
+  ladders: [],
+  build: () => measures,
+});
 
 /** Each shape of one space together with each of another: an option made of both. */
 export function combineSpaces(first: DesignSpace, second: DesignSpace): DesignSpace {

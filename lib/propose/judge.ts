@@ -74,6 +74,8 @@ function reaches(outcome: OptionOutcome, goal: Goal): boolean {
 /** The load case in which the option is worst: over-utilised, else softest where it is not stiff enough. */
 function severestCase(outcome: EvaluatedOption, target: number): string {
   if (outcome.utilisation > target || outcome.stiffnessReached) return outcome.governing.loadCase;
-  const softest = outcome.joints.reduce((a, b) => (b.initialStiffnessNmmPerRad < a.initialStiffnessNmmPerRad ? b : a));
+  const softest = outcome.joints.reduce((a, b) =>
+    b.initialStiffnessNmmPerRad < a.initialStiffnessNmmPerRad ? b : a,
+  );
   return softest.loadCase;
 }

@@ -14,7 +14,8 @@ export interface PlannedOption {
 }
 
 const BOTH: readonly Level[] = ["top", "bottom"];
-const levelWords = (levels: readonly Level[]): string => (levels.length === 2 ? "top and bottom" : `at ${levels[0] ?? ""}`);
+const levelWords = (levels: readonly Level[]): string =>
+  levels.length === 2 ? "top and bottom" : `at ${levels[0] ?? ""}`;
 
 /** Single levels by what the loads do there; where they do both, by where they are. */
 function singleLevels(node: NodeCase): readonly { readonly key: string; readonly level: Level }[] {
@@ -59,7 +60,9 @@ function webPlateOptions(node: NodeCase, stock: Stock): readonly PlannedOption[]
 }
 
 function barSpace(stock: Stock, levels: readonly Level[]): DesignSpace {
-  return stock.bars.map(({ size, grade }) => fixedShape([{ kind: "through-bars", levels, size, grade, innerNuts: true }]));
+  return stock.bars.map(({ size, grade }) =>
+    fixedShape([{ kind: "through-bars", levels, size, grade, innerNuts: true }]),
+  );
 }
 
 function barOptions(node: NodeCase, stock: Stock): readonly PlannedOption[] {
@@ -83,7 +86,9 @@ function barOptions(node: NodeCase, stock: Stock): readonly PlannedOption[] {
 
 /** Every kind of option that makes sense on this node, the bare column first; at most 14. */
 export function planOptions(node: NodeCase, stock: Stock): readonly PlannedOption[] {
-  const heavier = stock.columns.map(({ section, steel }) => fixedShape([{ kind: "heavier-column", section, steel }]));
+  const heavier = stock.columns.map(({ section, steel }) =>
+    fixedShape([{ kind: "heavier-column", section, steel }]),
+  );
   return [
     { key: "bare", name: "Bare column", space: [fixedShape([])] },
     ...stiffenerOptions(node, stock),

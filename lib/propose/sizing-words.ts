@@ -19,7 +19,9 @@ export function sizingWords(node: NodeCase, outcome: OptionOutcome): string | nu
       : `${words}, and the connection itself fails, which no stiffening of the column cures.`;
   }
   if (!outcome.stiffnessReached) {
-    const softest = outcome.joints.reduce((a, b) => (b.initialStiffnessNmmPerRad < a.initialStiffnessNmmPerRad ? b : a));
+    const softest = outcome.joints.reduce((a, b) =>
+      b.initialStiffnessNmmPerRad < a.initialStiffnessNmmPerRad ? b : a,
+    );
     const reached = Math.round(softest.initialStiffnessNmmPerRad / NMM_PER_KNM);
     return `No stock size is stiff enough: the ${softest.side} joint stays at ${reached} kNm/rad in ${softest.loadCase}.`;
   }

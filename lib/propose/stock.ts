@@ -8,7 +8,11 @@ export interface Stock {
   readonly throatsMm: readonly number[];
   readonly bars: readonly { readonly size: FastenerSize; readonly grade: FastenerGrade }[];
   /** Heavier ones of the column's own family, ascending mass. */
-  readonly columns: readonly { readonly section: ISection; readonly steel: Steel; readonly massKgPerM: number }[];
+  readonly columns: readonly {
+    readonly section: ISection;
+    readonly steel: Steel;
+    readonly massKgPerM: number;
+  }[];
 }
 
 export type StockPlate = Stock["plates"][number];

@@ -35,7 +35,9 @@ function reachBeyondFlangeMm(node: NodeCase, joint: JointCase): number {
 
 /** Height that covers both levels of every joint, mm, in whole steps. */
 export function webPlateHeightMm(node: NodeCase): number {
-  const heights = node.joints.map((joint) => joint.beam.section.depthMm + 2 * reachBeyondFlangeMm(node, joint));
+  const heights = node.joints.map(
+    (joint) => joint.beam.section.depthMm + 2 * reachBeyondFlangeMm(node, joint),
+  );
   return Math.ceil(Math.max(...heights) / HEIGHT_STEP_MM) * HEIGHT_STEP_MM;
 }
 

@@ -20,7 +20,9 @@ export interface Judged {
 
 /** Positive where `a` is better than `b`. */
 const advantage = (criterion: Criterion, a: Judged, b: Judged): number =>
-  BETTER[criterion] === "less" ? b.values[criterion] - a.values[criterion] : a.values[criterion] - b.values[criterion];
+  BETTER[criterion] === "less"
+    ? b.values[criterion] - a.values[criterion]
+    : a.values[criterion] - b.values[criterion];
 
 /** At least as good in every criterion and better in one. */
 function dominates(a: Judged, b: Judged, criteria: readonly Criterion[]): boolean {

@@ -25,7 +25,8 @@ function reasonNotRanked(option: RankedInput): string | null {
   if (option.outsideScope) return "outside scope";
   if (option.excluded === true) return "excluded";
   if (!option.passes) return "fails";
-  if (option.shopCannot !== undefined && option.shopCannot !== null) return `shop cannot: ${option.shopCannot}`;
+  if (option.shopCannot !== undefined && option.shopCannot !== null)
+    return `shop cannot: ${option.shopCannot}`;
   return null;
 }
 

@@ -72,7 +72,8 @@ function failureWords(option: Evaluated, result: ResultDocument): string {
   return option.stiffnessReached ? governingWords(option) : stiffnessWords(option, stiffness);
 }
 
-const endSentence = (words: string): string => (/[.!?]$/.test(words.trim()) ? words.trim() : `${words.trim()}.`);
+const endSentence = (words: string): string =>
+  /[.!?]$/.test(words.trim()) ? words.trim() : `${words.trim()}.`;
 const lowerFirst = (words: string): string =>
   /^[A-Z][a-z]/.test(words) ? words.charAt(0).toLowerCase() + words.slice(1) : words;
 
@@ -112,20 +113,32 @@ function connectionParts(failure: string): readonly VerdictPart[] {
   return [
     { text: "The connection itself " },
     { text: "fails", tone: "fail" },
-    { text: `: ${endSentence(lowerFirst(failure))} No stiffening of the column cures that; change the connection first.` },
+    {
+      text: `: ${endSentence(lowerFirst(failure))} No stiffening of the column cures that; change the connection first.`,
+    },
   ];
 }
 
 function nothingPassesParts(result: ResultDocument): readonly VerdictPart[] {
   const evaluated = result.options.filter((option) => isEvaluated(option) && option.notRanked !== "excluded");
-  const best = evaluated.filter(isEvaluated).sort((a, b) => a.governing.utilisation - b.governing.utilisation)[0];
+  const best = evaluated
+    .filter(isEvaluated)
+    .sort((a, b) => a.governing.utilisation - b.governing.utilisation)[0];
   if (best === undefined) {
-    return [{ text: "No option", tone: "strong" }, { text: " can be judged: each is outside the method or set aside." }];
+    return [
+      { text: "No option", tone: "strong" },
+      { text: " can be judged: each is outside the method or set aside." },
+    ];
   }
   const why = best.passes ? (best.notRanked ?? "it is not ranked") : failureWords(best, result);
   const lead: VerdictPart[] = [{ text: "No option passes", tone: "fail" }];
   if (isBare(best)) return [...lead, { text: ": none does better than the bare column." }];
-  return [...lead, { text: ". The nearest is " }, { text: best.name, tone: "strong" }, { text: `, where ${why}.` }];
+  return [
+    ...lead,
+    { text: ". The nearest is " },
+    { text: best.name, tone: "strong" },
+    { text: `, where ${why}.` },
+  ];
 }
 
 /** "84 EUR more", or equal to the unit shown. */
@@ -142,7 +155,11 @@ function rankedParts(result: ResultDocument, ranked: readonly Evaluated[]): read
     const dearer: VerdictPart[] =
       next === undefined
         ? []
-        : [{ text: ` The cheapest stiffening would be ` }, { text: lowerFirst(next.name) }, { text: `, ${dearerWords(best, next)} a node.` }];
+        : [
+            { text: ` The cheapest stiffening would be ` },
+            { text: lowerFirst(next.name) },
+            { text: `, ${dearerWords(best, next)} a node.` },
+          ];
     return [{ text: "No stiffening is needed", tone: "strong" }, { text: "." }, ...dearer];
   }
   const { cost, currency, shopMinutes } = best.estimate;

@@ -11,7 +11,11 @@ import { cheapestIn } from "@/lib/propose/search";
  * dimensions, and utilisation and price are drawn tables that obey the two laws the search relies on.
  */
 interface World {
-  readonly shapes: readonly { readonly ladders: readonly number[]; readonly base: number; readonly price: number }[];
+  readonly shapes: readonly {
+    readonly ladders: readonly number[];
+    readonly base: number;
+    readonly price: number;
+  }[];
   /** What a step less on any ladder adds to utilisation, by load case. */
   readonly need: readonly (readonly number[])[];
   readonly stepPrice: readonly number[];
@@ -30,7 +34,10 @@ const marker = (shape: number, steps: readonly number[]): readonly MeasureCase[]
   },
 ];
 
-function read(measures: readonly MeasureCase[]): { readonly shape: number; readonly steps: readonly number[] } {
+function read(measures: readonly MeasureCase[]): {
+  readonly shape: number;
+  readonly steps: readonly number[];
+} {
   const [measure] = measures;
   if (measure?.kind !== "backing-plates") throw new Error("not a marker");
   return { shape: measure.thicknessMm, steps: [measure.widthMm, measure.lengthMm] };
@@ -43,14 +50,19 @@ function utilisationIn(world: World, measures: readonly MeasureCase[], loadCase:
   const { shape, steps } = read(measures);
   const { base, ladders } = world.shapes[shape]!;
   const needs = world.need[loadCase]!;
-  const missing = steps.map((step, ladder) => Math.max(0, (ladders[ladder] ?? 1) - 1 - step) * (needs[ladder] ?? 0));
+  const missing = steps.map(
+    (step, ladder) => Math.max(0, (ladders[ladder] ?? 1) - 1 - step) * (needs[ladder] ?? 0),
+  );
   const added = world.together === "sum" ? missing.reduce((sum, one) => sum + one, 0) : Math.max(...missing);
   return base + added + (needs[2] ?? 0);
 }
 
 const priceIn = (world: World, measures: readonly MeasureCase[]): number => {
   const { shape, steps } = read(measures);
-  return world.shapes[shape]!.price + steps.reduce((sum, step, ladder) => sum + step * (world.stepPrice[ladder] ?? 0), 0);
+  return (
+    world.shapes[shape]!.price +
+    steps.reduce((sum, step, ladder) => sum + step * (world.stepPrice[ladder] ?? 0), 0)
+  );
 };
 
 function nodeOf(world: World): NodeCase {
@@ -78,7 +90,9 @@ function evaluateIn(world: World, counter: { calls: number }) {
 function everyCandidate(world: World): readonly (readonly MeasureCase[])[] {
   return spaceOf(world).flatMap((shape) => {
     const [first = 1, second = 1] = shape.ladders;
-    return Array.from({ length: first }, (_, i) => Array.from({ length: second }, (__, j) => shape.build([i, j]))).flat();
+    return Array.from({ length: first }, (_, i) =>
+      Array.from({ length: second }, (__, j) => shape.build([i, j])),
+    ).flat();
   });
 }
 
@@ -91,7 +105,13 @@ const anyWorld: fc.Arbitrary<World> = fc.record({
     }),
     { minLength: 1, maxLength: 6 },
   ),
-  need: fc.array(fc.array(fc.integer({ min: 0, max: 20 }).map((n) => n / 100), { minLength: 3, maxLength: 3 }), { minLength: 1, maxLength: 4 }),
+  need: fc.array(
+    fc.array(
+      fc.integer({ min: 0, max: 20 }).map((n) => n / 100),
+      { minLength: 3, maxLength: 3 },
+    ),
+    { minLength: 1, maxLength: 4 },
+  ),
   stepPrice: fc.tuple(fc.integer({ min: 0, max: 30 }), fc.integer({ min: 0, max: 30 })),
   together: fc.constantFrom("sum", "worst"),
 });
@@ -101,7 +121,11 @@ describe("cheapestIn", () => {
     fc.assert(
       fc.property(anyWorld, (world) => {
         const node = nodeOf(world);
-        const judge = new Judge(node, (measures) => priceIn(world, measures), evaluateIn(world, { calls: 0 }));
+        const judge = new Judge(
+          node,
+          (measures) => priceIn(world, measures),
+          evaluateIn(world, { calls: 0 }),
+        );
         const found = cheapestIn(spaceOf(world), judge)!;
         const all = everyCandidate(world).map((measures) => ({
           price: priceIn(world, measures),
@@ -110,7 +134,10 @@ describe("cheapestIn", () => {
         const passing = all.filter(({ utilisation }) => utilisation <= 1);
         expect(found.meetsTarget).toBe(passing.length > 0);
         const lowest = Math.min(...all.map(({ utilisation }) => utilisation));
-        const rivals = passing.length > 0 ? passing : all.filter(({ utilisation }) => utilisation <= Math.max(1, lowest + 0.005));
+        const rivals =
+          passing.length > 0
+            ? passing
+            : all.filter(({ utilisation }) => utilisation <= Math.max(1, lowest + 0.005));
         expect(priceIn(world, found.measures)).toBe(Math.min(...rivals.map(({ price }) => price)));
       }),
       { numRuns: 500 },
@@ -118,10 +145,26 @@ describe("cheapestIn", () => {
   });
 
   it("tries a small part of a large space", () => {
-    const shapes = Array.from({ length: 10 }, (_, index) => ({ ladders: [8, 8], base: 0.9 - index / 100, price: 100 + index }));
-    const world: World = { shapes, need: [[0.02, 0.01, 0], [0.03, 0.02, 0]], stepPrice: [5, 3], together: "worst" };
+    const shapes = Array.from({ length: 10 }, (_, index) => ({
+      ladders: [8, 8],
+      base: 0.9 - index / 100,
+      price: 100 + index,
+    }));
+    const world: World = {
+      shapes,
+      need: [
+        [0.02, 0.01, 0],
+        [0.03, 0.02, 0],
+      ],
+      stepPrice: [5, 3],
+      together: "worst",
+    };
     const counter = { calls: 0 };
-    const judge = new Judge(nodeOf(world), (measures) => priceIn(world, measures), evaluateIn(world, counter));
+    const judge = new Judge(
+      nodeOf(world),
+      (measures) => priceIn(world, measures),
+      evaluateIn(world, counter),
+    );
     cheapestIn(spaceOf(world), judge);
     expect(counter.calls).toBeLessThan(everyCandidate(world).length / 4);
   });

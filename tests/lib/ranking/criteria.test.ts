@@ -4,7 +4,16 @@ import { CRITERIA, paretoFront, scoreOptions, type Criterion, type Judged } from
 
 const judged = (key: string, values: Partial<Record<Criterion, number>>): Judged => ({
   key,
-  values: { cost: 0, "shop-time": 0, "site-time": 0, reserve: 0, stiffness: 0, mass: 0, carbon: 0, ...values },
+  values: {
+    cost: 0,
+    "shop-time": 0,
+    "site-time": 0,
+    reserve: 0,
+    stiffness: 0,
+    mass: 0,
+    carbon: 0,
+    ...values,
+  },
 });
 
 describe("paretoFront", () => {
@@ -22,7 +31,12 @@ describe("paretoFront", () => {
   });
 
   it("is never empty and always holds the best of a single criterion", () => {
-    const values = fc.record(Object.fromEntries(CRITERIA.map((c) => [c, fc.integer({ min: 0, max: 9 })])) as Record<Criterion, fc.Arbitrary<number>>);
+    const values = fc.record(
+      Object.fromEntries(CRITERIA.map((c) => [c, fc.integer({ min: 0, max: 9 })])) as Record<
+        Criterion,
+        fc.Arbitrary<number>
+      >,
+    );
     fc.assert(
       fc.property(fc.array(values, { minLength: 1, maxLength: 10 }), (drawn) => {
         const options = drawn.map((one, index) => judged(String(index), one));

@@ -55,7 +55,10 @@ const outside = (key: string, reason: string): OutsideScopeOptionDocument => ({
   notRanked: "outside scope",
 });
 
-function result(options: OptionDocument[], target: ResultDocument["node"]["target"] = { utilisation: 1, stiffness: "any" }): ResultDocument {
+function result(
+  options: OptionDocument[],
+  target: ResultDocument["node"]["target"] = { utilisation: 1, stiffness: "any" },
+): ResultDocument {
   const node = { reference: "C4", target } as ResultDocument["node"];
   return { node, basis: "EN 1993-1-8:2005", engine: "test", options };
 }
@@ -92,7 +95,9 @@ describe("verdictSentence", () => {
   });
 
   it("says when only one option passes", () => {
-    expect(say(result([evaluated("bare", "Bare column", 1.31), bars]))).toMatch(/a node\. No other option passes\.$/);
+    expect(say(result([evaluated("bare", "Bare column", 1.31), bars]))).toMatch(
+      /a node\. No other option passes\.$/,
+    );
   });
 
   it("says when the bare column is good enough and what stiffening would cost all the same", () => {
@@ -106,7 +111,9 @@ describe("verdictSentence", () => {
 
   it("does not print 1.00 for what is over 1", () => {
     expect(say(result([evaluated("bare", "Bare column", 1.0032), bars]))).toContain("reaches 1.003 in");
-    expect(say(result([evaluated("bare", "Bare column", 1.0001), bars]))).toContain("reaches just over 1.00 in");
+    expect(say(result([evaluated("bare", "Bare column", 1.0001), bars]))).toContain(
+      "reaches just over 1.00 in",
+    );
   });
 
   it("tells the target where it is not 1", () => {
@@ -119,7 +126,11 @@ describe("verdictSentence", () => {
   it("tells a want of stiffness from a want of strength", () => {
     const joint = { side: "left", loadCase: "ULS 2", initialStiffness: 71400 } as Evaluated["joints"][number];
     const stiffer = { ...joint, side: "right", initialStiffness: 90000 } as Evaluated["joints"][number];
-    const bare = evaluated("bare", "Bare column", 0.8, { passes: false, stiffnessReached: false, joints: [stiffer, joint] });
+    const bare = evaluated("bare", "Bare column", 0.8, {
+      passes: false,
+      stiffnessReached: false,
+      joints: [stiffer, joint],
+    });
     expect(say(result([bare, bars], { utilisation: 1, stiffness: 84000 }))).toMatch(
       /^The bare column fails: the left joint reaches 71 400 kNm\/rad of the 84 000 kNm\/rad asked for in ULS 2\. /,
     );
@@ -140,7 +151,10 @@ describe("verdictSentence", () => {
 
   it("says when the connection itself fails that no stiffening cures it", () => {
     const failing = { connectionFailure: "Bolt tension on the left reaches 1.20 in ULS 1" };
-    const document = result([evaluated("bare", "Bare column", 1.31, failing), evaluated("x", "X", 1.2, failing)]);
+    const document = result([
+      evaluated("bare", "Bare column", 1.31, failing),
+      evaluated("x", "X", 1.2, failing),
+    ]);
     expect(say(document)).toMatch(
       /The connection itself fails: bolt tension on the left reaches 1\.20 in ULS 1\. No stiffening of the column cures that; change the connection first\.$/,
     );
@@ -148,8 +162,12 @@ describe("verdictSentence", () => {
 
   it("says when the bare column or everything is outside the method", () => {
     const bare = outside("bare", "The beams' depths differ.");
-    expect(say(result([bare, bars]))).toMatch(/^The bare column is outside the method: the beams' depths differ\. The cheapest/);
-    expect(say(result([bare, outside("x", "h above 400 mm")]))).toMatch(/No option can be judged: each is outside the method or set aside\.$/);
+    expect(say(result([bare, bars]))).toMatch(
+      /^The bare column is outside the method: the beams' depths differ\. The cheapest/,
+    );
+    expect(say(result([bare, outside("x", "h above 400 mm")]))).toMatch(
+      /No option can be judged: each is outside the method or set aside\.$/,
+    );
   });
 
   it("judges given options without a bare column", () => {
@@ -163,7 +181,11 @@ describe("verdictSentence", () => {
     expect(say(result([bare, cheap, { ...stiffeners, estimate: estimate(1234.6, 60) }]))).toMatch(
       /: 4\.20 EUR and 5 min in the shop a node\. Next comes stiffeners top and bottom, 1 230 EUR more\.$/,
     );
-    expect(say(result([bare, bars, { ...stiffeners, estimate: bars.estimate }]))).toMatch(/, at the same cost\.$/);
-    expect(say(result([bare, { ...bars, estimate: estimate(618, 0) }]))).toContain("618 EUR and no added shop time a node.");
+    expect(say(result([bare, bars, { ...stiffeners, estimate: bars.estimate }]))).toMatch(
+      /, at the same cost\.$/,
+    );
+    expect(say(result([bare, { ...bars, estimate: estimate(618, 0) }]))).toContain(
+      "618 EUR and no added shop time a node.",
+    );
   });
 });
