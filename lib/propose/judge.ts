@@ -1,4 +1,4 @@
-import type { MeasureCase, NodeCase } from "@/lib/calc/node";
+import type { LoadCase, MeasureCase, NodeCase } from "@/lib/calc/node";
 import type { EvaluatedOption, OptionOutcome } from "@/lib/calc/result";
 
 export type PriceOf = (measures: readonly MeasureCase[]) => number;
@@ -8,23 +8,24 @@ export type Evaluate = (node: NodeCase, measures: readonly MeasureCase[]) => Opt
 export type Goal = { readonly kind: "target" } | { readonly kind: "utilisation"; readonly atMost: number };
 
 /**
- * Evaluates and prices candidates of one node, each at most once. A candidate is first held against the
- * load case that last refused one, alone: a case that fails alone fails among the others, and most
- * candidates that fail do so in the same case, at a fraction of the work.
+ * Evaluates and prices candidates of one node, each at most once.
+ *
+ * Searching looks only at the load cases that have decided so far (the watched ones), at a fraction of
+ * the work; what the search ends on is confirmed in every case, and a case that refuses it is watched from
+ * then on. The cheapest candidate of fewer demands that meets all demands is the cheapest of all, so
+ * nothing is lost by it.
  */
 export class Judge {
   private readonly outcomes = new Map<string, OptionOutcome>();
   private readonly prices = new Map<string, number>();
-  private readonly alone = new Map<string, NodeCase>();
-  private readonly refused = new Set<string>();
-  private severest: string | null = null;
+  private watched: NodeCase;
 
   constructor(
     private readonly node: NodeCase,
     private readonly price: PriceOf,
     private readonly evaluate: Evaluate,
   ) {
-    for (const loadCase of node.loadCases) this.alone.set(loadCase.name, { ...node, loadCases: [loadCase] });
+    this.watched = { ...node, loadCases: node.loadCases.slice(0, 1) };
   }
 
   /** Utilisation that no component may exceed. */
@@ -42,27 +43,49 @@ export class Judge {
     return price;
   }
 
-  /** The full outcome in every load case. */
+  /** The full outcome, in every load case. */
   outcomeOf(measures: readonly MeasureCase[]): OptionOutcome {
-    const key = JSON.stringify(measures);
-    const known = this.outcomes.get(key);
-    if (known !== undefined) return known;
-    const outcome = this.evaluate(this.node, measures);
-    this.outcomes.set(key, outcome);
-    if (outcome.kind === "evaluated") this.severest = severestCase(outcome, this.node.target.utilisation);
-    return outcome;
+    return this.remember(this.node, measures);
   }
 
-  /** Is the candidate good enough in every load case? */
+  /** Largest utilisation in the watched load cases; null where the candidate is outside scope. */
+  watchedUtilisation(measures: readonly MeasureCase[]): number | null {
+    const outcome = this.remember(this.watched, measures);
+    return outcome.kind === "evaluated" ? outcome.utilisation : null;
+  }
+
+  /** Is the candidate good enough in the watched load cases? */
   meets(measures: readonly MeasureCase[], goal: Goal): boolean {
-    const key = `${goal.kind === "target" ? "" : goal.atMost}|${JSON.stringify(measures)}`;
-    if (this.refused.has(key)) return false;
-    const one = this.severest === null ? undefined : this.alone.get(this.severest);
-    if (one !== undefined && this.node.loadCases.length > 1 && !reaches(this.evaluate(one, measures), goal)) {
-      this.refused.add(key);
-      return false;
-    }
-    return reaches(this.outcomeOf(measures), goal);
+    return reaches(this.remember(this.watched, measures), goal);
+  }
+
+  /** Is it good enough in every load case? Where it is not, the case that refuses it is watched from now on. */
+  confirms(measures: readonly MeasureCase[], goal: Goal): boolean {
+    const outcome = this.outcomeOf(measures);
+    if (reaches(outcome, goal)) return true;
+    const refusing =
+      outcome.kind === "evaluated"
+        ? this.node.loadCases.filter(({ name }) => name === severestCase(outcome, this.targetUtilisation))
+        : [];
+    this.watch(refusing);
+    return false;
+  }
+
+  /** Adds load cases to the watched ones; where that adds none, all are watched, so that a search ends. */
+  private watch(loadCases: readonly LoadCase[]): void {
+    const before = this.watched.loadCases;
+    const added = loadCases.filter((loadCase) => !before.includes(loadCase));
+    const now = added.length > 0 ? [...before, ...added] : this.node.loadCases;
+    this.watched = now.length >= this.node.loadCases.length ? this.node : { ...this.node, loadCases: now };
+  }
+
+  private remember(node: NodeCase, measures: readonly MeasureCase[]): OptionOutcome {
+    const key = `${node.loadCases.map(({ name }) => name).join("|")}#${JSON.stringify(measures)}`;
+    const known = this.outcomes.get(key);
+    if (known !== undefined) return known;
+    const outcome = this.evaluate(node, measures);
+    this.outcomes.set(key, outcome);
+    return outcome;
   }
 }
 

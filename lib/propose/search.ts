@@ -21,17 +21,33 @@ export interface Found {
 export function cheapestIn(space: DesignSpace, judge: Judge): Found | null {
   const first = space[0];
   if (first === undefined) return null;
-  const meeting = cheapestMeeting(space, judge, { kind: "target" });
+  const meeting = confirmedCheapest(space, judge, () => ({ kind: "target" }));
   if (meeting !== null) return { measures: meeting, meetsTarget: true };
-  const strongest = space.map((shape) => shape.build(highest(shape)));
-  const reached = strongest.flatMap((measures) => {
-    const outcome = judge.outcomeOf(measures);
-    return outcome.kind === "evaluated" ? [outcome.utilisation] : [];
-  });
-  if (reached.length === 0) return { measures: first.build(lowest(first)), meetsTarget: false };
-  const atMost = Math.max(judge.targetUtilisation, Math.min(...reached) + SAME_UTILISATION);
-  const best = cheapestMeeting(space, judge, { kind: "utilisation", atMost });
+  const best = confirmedCheapest(space, judge, () => nearestGoal(space, judge));
   return { measures: best ?? first.build(lowest(first)), meetsTarget: false };
+}
+
+/** Searches in the watched load cases until what it finds holds in every case. */
+function confirmedCheapest(
+  space: DesignSpace,
+  judge: Judge,
+  goalNow: () => Goal | null,
+): readonly MeasureCase[] | null {
+  for (;;) {
+    const goal = goalNow();
+    const found = goal === null ? null : cheapestMeeting(space, judge, goal);
+    if (goal === null || found === null || judge.confirms(found, goal)) return found;
+  }
+}
+
+/** The lowest utilisation that the strongest welds of any shape reach; null where all are outside scope. */
+function nearestGoal(space: DesignSpace, judge: Judge): Goal | null {
+  const reached = space.flatMap((shape) => judge.watchedUtilisation(shape.build(highest(shape))) ?? []);
+  if (reached.length === 0) return null;
+  return {
+    kind: "utilisation",
+    atMost: Math.max(judge.targetUtilisation, Math.min(...reached) + SAME_UTILISATION),
+  };
 }
 
 const lowest = (shape: Shape): readonly number[] => shape.ladders.map(() => 0);
