@@ -46,6 +46,7 @@ export type ShapeKind =
   | "fastener"
   | "shank"
   | "weld"
+  | "weld-run"
   | "root"
   | "end"
   | "break"

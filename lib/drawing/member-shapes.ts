@@ -56,7 +56,7 @@ function beamWelds(placed: PlacedJoint): Shape[] {
   const tf = joint.beam.section.flangeThicknessMm;
   const webLeg = welds.web.kind === "fillet" ? legMm(welds.web.throatMm) : joint.beam.section.webThicknessMm / 2;
   return [
-    rectBetween("weld", "weld", { x, y: topMm + tf + webLeg }, { x: x + sign * webLeg, y: bottomMm - tf - webLeg }, { side }),
+    rectBetween("weld", "weld-run", { x, y: topMm + tf + webLeg }, { x: x + sign * webLeg, y: bottomMm - tf - webLeg }, { side }),
     ...flangeWeld(placed, welds.topFlange, topMm, tf, 1),
     ...flangeWeld(placed, welds.bottomFlange, bottomMm, tf, -1),
   ];

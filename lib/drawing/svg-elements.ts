@@ -96,7 +96,7 @@ export function hatchElements(options: SvgOptions): SvgElement {
         ...(turned ? { patternTransform: "rotate(45)" } : {}),
       },
       [
-        element("rect", { width: size(pixels), height: size(pixels), fill: colour("sheet"), ...(turned ? {} : { "fill-opacity": 0.75 }) }),
+        element("rect", { width: size(pixels), height: size(pixels), fill: colour("sheet") }),
         element("path", { d: path, fill: "none", stroke: colour("added"), "stroke-width": size(width) }),
       ],
     );
