@@ -1,0 +1,42 @@
+import type { QuantityRecord } from "../drivers";
+import { type Quantities, type WeldRun, weldAreaMm2 } from "./quantities";
+
+/** One way to bring the welds into reach: its turns and the position each run is then welded in. */
+export interface HandlingPlan {
+  readonly key: "vertical-up" | "turned";
+  readonly records: readonly QuantityRecord[];
+}
+
+function weldRecord(run: WeldRun, flangeRunsUpright: boolean): QuantityRecord {
+  const upright = run.on === "flange" && flangeRunsUpright;
+  const shared = {
+    lengthM: run.lengthM,
+    runs: run.runs,
+    areaMm2: weldAreaMm2(run),
+    thickestMm: run.thickestMm,
+    clearGapMm: run.clearGapMm,
+    gunAngle: run.gunAngle,
+    position: upright ? "PF" : "PB",
+  };
+  if (run.type === "fillet") return { driver: "fillet-weld", group: "", values: { throatMm: run.sizeMm, ...shared } };
+  return { driver: "butt-weld", group: "", values: { depthMm: run.sizeMm, ...shared } };
+}
+
+function plan(key: HandlingPlan["key"], turns: number, upright: boolean, { weldRuns, pieceMassKg }: Quantities, nodesPerLift: number): HandlingPlan {
+  const records = weldRuns.map((run) => weldRecord(run, upright));
+  // The whole lift is turned once for all nodes on it.
+  if (turns > 0) records.push({ driver: "turn", group: "", values: { turns: turns / nodesPerLift, pieceMassKg } });
+  return { key, records };
+}
+
+/**
+ * The ways to weld the option: with the column's web level on trestles, runs on the web are PB and
+ * runs against a flange PF, and the second web face needs one turn; turned onto each flange as well,
+ * three turns, every run is PB. Which is cheaper depends on the rates, so both are priced.
+ */
+export function handlingPlans(quantities: Quantities, nodesPerLift: number): readonly HandlingPlan[] {
+  if (quantities.weldRuns.length === 0) return [];
+  const upright = plan("vertical-up", quantities.facesWelded - 1, true, quantities, nodesPerLift);
+  if (!quantities.weldRuns.some((run) => run.on === "flange")) return [upright];
+  return [upright, plan("turned", 3, false, quantities, nodesPerLift)];
+}
