@@ -1,0 +1,98 @@
+import { createElement, type ReactNode } from "react";
+import { formatFigures } from "@/components/ui/format-number";
+import { parseExpression, type Expression } from "./parse-expression";
+import { splitSymbol } from "./symbol-text";
+
+/* MathML: drawn by the browser itself, read aloud by screen readers, and free of style attributes. */
+const tag = (name: string, props: object | null, ...children: readonly ReactNode[]) => createElement(name, props, ...children);
+const operator = (text: string, props: object = {}) => tag("mo", props, text);
+const row = (...children: readonly ReactNode[]) => tag("mrow", null, ...children);
+
+const OPERATORS: Readonly<Record<string, string>> = { "*": "·", "-": "−", "<=": "≤", ">=": "≥", "==": "=", "!=": "≠", "+": "+", "<": "<", ">": ">" };
+
+/** How a name of the formula is set: by its symbol, or by the number put in for it. */
+type NameSetter = (name: string) => ReactNode;
+
+function symbolMath(symbol: string): ReactNode {
+  const { base, below } = splitSymbol(symbol);
+  const letter = base.length === 1 ? tag("mi", null, base) : tag("mtext", null, base);
+  return below === null ? letter : tag("msub", null, letter, tag("mtext", null, below));
+}
+
+function numberMath(value: number): ReactNode {
+  const [mantissa = "", exponent] = formatFigures(value, 5).split(" × 10^");
+  const plain = tag("mn", null, mantissa);
+  const number = exponent === undefined ? plain : row(plain, operator("×"), tag("msup", null, tag("mn", null, "10"), tag("mn", null, exponent)));
+  return value < 0 ? row(operator("("), number, operator(")")) : number;
+}
+
+const withoutGroup = (expression: Expression): Expression => (expression.kind === "group" ? withoutGroup(expression.of) : expression);
+
+function callMath(name: string, given: readonly Expression[], set: NameSetter): ReactNode {
+  const [first] = given;
+  if (name === "sqrt" && first) return tag("msqrt", null, math(withoutGroup(first), set));
+  if (name === "abs" && first) return row(operator("|"), math(first, set), operator("|"));
+  const list = given.flatMap((item, index) => (index === 0 ? [math(item, set)] : [operator(";"), math(item, set)]));
+  return row(tag("mi", { mathvariant: "normal" }, name), operator("("), ...list, operator(")"));
+}
+
+function choiceMath(expression: Extract<Expression, { kind: "choice" }>, set: NameSetter): ReactNode {
+  const line = (value: Expression, words: ReactNode) => tag("mtr", null, tag("mtd", null, math(value, set)), tag("mtd", null, words));
+  return row(
+    operator("{"),
+    tag(
+      "mtable",
+      { columnalign: "left left" },
+      line(expression.then, row(tag("mtext", null, "where "), math(expression.condition, set))),
+      line(expression.otherwise, tag("mtext", null, "otherwise")),
+    ),
+  );
+}
+
+/** A product of fractions reads as one fraction: `a * b / c` arrives as (a * b) / c. */
+function operationMath({ operator: sign, left, right }: Extract<Expression, { kind: "operation" }>, set: NameSetter): ReactNode {
+  if (sign === "/") return tag("mfrac", null, math(withoutGroup(left), set), math(withoutGroup(right), set));
+  if (sign === "^") return tag("msup", null, math(left, set), math(withoutGroup(right), set));
+  return row(math(left, set), operator(OPERATORS[sign] ?? sign), math(right, set));
+}
+
+function math(expression: Expression, set: NameSetter): ReactNode {
+  switch (expression.kind) {
+    case "number":
+      return tag("mn", null, expression.text);
+    case "name":
+      return expression.name === "pi" ? tag("mi", null, "π") : set(expression.name);
+    case "negative":
+      return row(operator("−"), math(expression.of, set));
+    case "group":
+      return row(operator("("), math(expression.of, set), operator(")"));
+    case "call":
+      return callMath(expression.name, expression.given, set);
+    case "choice":
+      return choiceMath(expression, set);
+    case "operation":
+      return operationMath(expression, set);
+  }
+}
+
+export interface ExpressionMathProps {
+  /** mathjs syntax, as a step carries it. */
+  readonly expression: string;
+  readonly symbols: Readonly<Record<string, readonly [symbol: string, unit: string]>>;
+  /** Given: each name is replaced by its number. Left out: by its symbol. */
+  readonly inputs?: Readonly<Record<string, number>>;
+  /** Stands before an equals sign. */
+  readonly symbol?: string;
+}
+
+/** One line of a calculation set as mathematics; the line as it is written where it cannot be. */
+export function ExpressionMath({ expression, symbols, inputs, symbol }: ExpressionMathProps) {
+  const parsed = parseExpression(expression);
+  if (!parsed) return <code className="break-words">{symbol ? `${symbol} = ${expression}` : expression}</code>;
+  const set: NameSetter = (name) => {
+    const value = inputs?.[name];
+    return value === undefined ? symbolMath(symbols[name]?.[0] ?? name) : numberMath(value);
+  };
+  const body = math(parsed, set);
+  return tag("math", { display: "block", className: "working-math" }, symbol ? row(symbolMath(symbol), operator("="), body) : row(operator("="), body));
+}

@@ -1,0 +1,34 @@
+const GREEK: Readonly<Record<string, string>> = {
+  alpha: "α", beta: "β", gamma: "γ", epsilon: "ε", lambda: "λ", mu: "μ", eta: "η", rho: "ρ", chi: "χ", omega: "ω", psi: "ψ", sigma: "σ", tau: "τ", pi: "π", delta: "δ", phi: "φ",
+};
+
+/** A symbol of the standard split into its letter and what stands below the line: "M_j,Rd" is M and j,Rd. */
+export function splitSymbol(symbol: string): { readonly base: string; readonly below: string | null } {
+  const at = symbol.indexOf("_");
+  const base = at < 0 ? symbol : symbol.slice(0, at);
+  return { base: GREEK[base] ?? base, below: at < 0 ? null : symbol.slice(at + 1) };
+}
+
+/** A symbol in running text, with its index below the line. */
+export function SymbolText({ symbol }: { readonly symbol: string }) {
+  const { base, below } = splitSymbol(symbol);
+  const isLetter = base.length === 1;
+  return (
+    <span>
+      {isLetter ? <i>{base}</i> : base}
+      {below === null ? null : <sub className="text-[0.78em]">{below}</sub>}
+    </span>
+  );
+}
+
+const UNITS: Readonly<Record<string, string>> = {
+  "1": "",
+  "N/mm2": "N/mm²",
+  mm2: "mm²",
+  mm3: "mm³",
+  mm4: "mm⁴",
+  "1/mm": "1/mm",
+};
+
+/** A unit as it is printed; a plain number has none. */
+export const unitText = (unit: string): string => UNITS[unit] ?? unit;
