@@ -59,8 +59,14 @@ function webPlateOptions(node: NodeCase, stock: Stock): readonly PlannedOption[]
   ];
 }
 
+/** Sizes within the bounds of the bar model; the others would all be outside scope. */
+const BAR_DIAMETERS_MM = { least: 16, most: 30 };
+
 function barSpace(stock: Stock, levels: readonly Level[]): DesignSpace {
-  return stock.bars.map(({ size, grade }) =>
+  const bars = stock.bars.filter(
+    ({ size }) => size.diameterMm >= BAR_DIAMETERS_MM.least && size.diameterMm <= BAR_DIAMETERS_MM.most,
+  );
+  return bars.map(({ size, grade }) =>
     fixedShape([{ kind: "through-bars", levels, size, grade, innerNuts: true }]),
   );
 }

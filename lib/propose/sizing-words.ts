@@ -1,6 +1,7 @@
 import type { NodeCase } from "@/lib/calc/node";
 import type { OptionOutcome } from "@/lib/calc/result";
 import { componentOnSide } from "@/lib/ranking/component-words";
+import { utilisationWords } from "@/lib/ranking/utilisation-words";
 
 const NMM_PER_KNM = 1e6;
 
@@ -13,7 +14,7 @@ export function sizingWords(node: NodeCase, outcome: OptionOutcome): string | nu
   if (outcome.kind === "outside-scope" || outcome.passes) return null;
   const { governing, utilisation } = outcome;
   if (utilisation > node.target.utilisation) {
-    const words = `No stock size does: ${componentOnSide(governing.component, governing.side)} stays at ${overWords(utilisation)} in ${governing.loadCase}`;
+    const words = `No stock size does: ${componentOnSide(governing.component, governing.side)} stays at ${utilisationWords(utilisation)} in ${governing.loadCase}`;
     return outcome.connectionFailure === null
       ? `${words}.`
       : `${words}, and the connection itself fails, which no stiffening of the column cures.`;
@@ -26,10 +27,4 @@ export function sizingWords(node: NodeCase, outcome: OptionOutcome): string | nu
     return `No stock size is stiff enough: the ${softest.side} joint stays at ${reached} kNm/rad in ${softest.loadCase}.`;
   }
   return `No stock size does: ${componentOnSide(governing.component, governing.side)} is not in order in ${governing.loadCase}.`;
-}
-
-/** Two digits, or three where two would hide that it is over. */
-function overWords(utilisation: number): string {
-  const short = utilisation.toFixed(2);
-  return utilisation > 1 && short === "1.00" ? utilisation.toFixed(4) : short;
 }

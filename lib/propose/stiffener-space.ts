@@ -62,7 +62,9 @@ export function stiffenerSpace(
   const shapes = lengths.flatMap((length) =>
     stiffenerPlates(node, stock).flatMap(({ thicknessMm, steel }) =>
       stiffenerWidthsMm(node)
-        .filter((widthMm) => widthMm <= OUTSTAND_LIMIT * epsilon(steel.yieldMpa) * thicknessMm)
+        .filter(
+          (widthMm) => widthMm > clipMm && widthMm <= OUTSTAND_LIMIT * epsilon(steel.yieldMpa) * thicknessMm,
+        )
         .map((widthMm) => ({ length, thicknessMm, steel, widthMm })),
     ),
   );

@@ -49,6 +49,7 @@ export function webPlateSpace(node: NodeCase, stock: Stock, sides: 1 | 2): Desig
   return stock.plates
     .filter(
       ({ thicknessMm, steel }) =>
+        widthMm > 0 &&
         thicknessMm >= webThicknessMm &&
         widthMm < SLENDERNESS_LIMIT * Math.sqrt(235 / steel.yieldMpa) * thicknessMm,
     )

@@ -1,5 +1,6 @@
 import type { EvaluatedOptionDocument, OptionDocument, ResultDocument } from "@/lib/schemas/result-document";
 import { componentOnSide } from "./component-words";
+import { utilisationWords } from "./utilisation-words";
 
 export interface VerdictPart {
   readonly text: string;
@@ -35,12 +36,6 @@ function hours(minutes: number): string {
   return left === 0
     ? `${Math.floor(whole / 60)}${NBSP}h`
     : `${Math.floor(whole / 60)}${NBSP}h ${String(left).padStart(2, "0")}${NBSP}min`;
-}
-
-/** A figure just over 1 must not read "1.00": then a third digit is shown. */
-function utilisationWords(value: number): string {
-  const short = value.toFixed(2);
-  return value > 1 && short === "1.00" ? (value > 1.0005 ? value.toFixed(3) : "just over 1.00") : short;
 }
 
 function governingWords(option: Evaluated): string {
