@@ -1,5 +1,5 @@
 import type { EndPlateConnection, ISection, JointCase, MeasureCase, NodeCase } from "@/lib/calc/node";
-import type { NodeDocument, SectionInput } from "@/lib/schemas/node-document";
+import type { NodeDocument } from "@/lib/schemas/node-document";
 import { shownMm, type Problems } from "./resolve-errors";
 import { weldLegMm } from "./resolve-parts";
 
@@ -7,33 +7,6 @@ import { weldLegMm } from "./resolve-parts";
  * What cannot be built. Only the impossible is refused here: material where a hole is, parts that pass through each
  * other or hang in the air. Distances that are merely poor are the business of the detailing checks.
  */
-
-/** A section whose parts do not fit together. Faults of a section given by name stand at the name. */
-export function checkSection(section: ISection, input: SectionInput, path: string, problems: Problems): void {
-  const at = (field: string): string => (typeof input === "string" ? path : `${path}.${field}`);
-  const { depthMm, widthMm, webThicknessMm, flangeThicknessMm, rootMm, make } = section;
-  if (2 * flangeThicknessMm >= depthMm) {
-    problems.add(
-      at("tf"),
-      `Two flanges of ${shownMm(flangeThicknessMm)} mm leave no web in a depth of ${shownMm(depthMm)} mm.`,
-    );
-  } else if (2 * (flangeThicknessMm + rootMm) >= depthMm) {
-    const root = make === "rolled" ? "root radius" : "weld";
-    problems.add(
-      at(make === "rolled" ? "r" : "weld"),
-      `The ${root} leaves no straight web between the flanges.`,
-    );
-  }
-  if (webThicknessMm >= widthMm) {
-    problems.add(
-      at("tw"),
-      `The web (${shownMm(webThicknessMm)} mm) is as wide as the flange (${shownMm(widthMm)} mm).`,
-    );
-  } else if (webThicknessMm + 2 * rootMm >= widthMm) {
-    const root = make === "rolled" ? "root radius" : "weld";
-    problems.add(at(make === "rolled" ? "r" : "weld"), `The ${root} reaches past the edge of the flange.`);
-  }
-}
 
 /**
  * Why bolts of this gauge cannot pass a column's flange, or null. A hole must stay on the flange and clear of the web and of

@@ -18,6 +18,10 @@ export class Problems {
     return null;
   }
 
+  get count(): number {
+    return this.found.length;
+  }
+
   get isEmpty(): boolean {
     return this.found.length === 0;
   }

@@ -1,7 +1,7 @@
 import type { ISection, MeasureCase } from "@/lib/calc/node";
 import type { Catalog } from "@/lib/catalog/catalog";
 import type { MeasureInput, NodeDocument } from "@/lib/schemas/node-document";
-import { checkMeasures, checkSection } from "./check-geometry";
+import { checkMeasures } from "./check-geometry";
 import { Problems, type DocumentError } from "./resolve-errors";
 import {
   describeSection,
@@ -100,7 +100,6 @@ function heavierColumn(
 ): Case<"heavier-column"> | null {
   const section = resolveSection(context, input.section, `${path}.section`);
   if (!section) return null;
-  checkSection(section, input.section, `${path}.section`, context.problems);
   const steel = resolveSteel(context, document.column.steel, section.flangeThicknessMm, `${path}.section`);
   return steel && { kind: input.kind, section, steel };
 }

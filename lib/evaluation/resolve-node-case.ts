@@ -10,7 +10,7 @@ import type {
 } from "@/lib/calc/node";
 import type { Catalog } from "@/lib/catalog/catalog";
 import type { Connection, LoadCaseInput, NodeDocument } from "@/lib/schemas/node-document";
-import { checkGeometry, checkSection } from "./check-geometry";
+import { checkGeometry } from "./check-geometry";
 import { resolveCleats } from "./resolve-cleats";
 import { Problems, type DocumentError } from "./resolve-errors";
 import { resolveMeasures } from "./resolve-measures";
@@ -87,7 +87,6 @@ function jointOf(context: Resolving, document: NodeDocument, side: Side): JointC
   const input = document[side];
   if (!input) return null;
   const section = resolveSection(context, input.beam.section, `${side}.beam.section`);
-  if (section) checkSection(section, input.beam.section, `${side}.beam.section`, context.problems);
   const steel =
     section && resolveSteel(context, input.beam.steel, section.flangeThicknessMm, `${side}.beam.steel`);
   const connection = connectionOf(context, input.connection, `${side}.connection`);
@@ -103,7 +102,6 @@ function jointOf(context: Resolving, document: NodeDocument, side: Side): JointC
 function columnOf(context: Resolving, { column }: NodeDocument): NodeCase["column"] | null {
   const section = resolveSection(context, column.section, "column.section");
   if (!section) return null;
-  checkSection(section, column.section, "column.section", context.problems);
   const steel = resolveSteel(context, column.steel, section.flangeThicknessMm, "column.steel");
   return (
     steel && {

@@ -4,6 +4,7 @@ import { findFastener, findFastenerGrade } from "@/lib/catalog/find-fastener";
 import { findAngle, findSection } from "@/lib/catalog/find-section";
 import { betaWOf, findSteel, type StrengthTable } from "@/lib/catalog/find-steel";
 import type { NodeDocument, SectionInput, SteelInput, WeldInput } from "@/lib/schemas/node-document";
+import { checkSection } from "./check-section";
 import { shownMm, type Problems } from "./resolve-errors";
 
 /** What every look-up needs: where to look, which strengths, and where faults go. */
@@ -30,7 +31,7 @@ export const sectionToCase = (row: SectionRow): ISection => ({
 
 /**
  * A section by name or by its dimensions, mm. A welded section's web-to-flange weld is given by its throat and kept
- * as its leg, throat x sqrt 2.
+ * as its leg, throat x sqrt 2. Null, and the faults told, for an unknown name or parts that do not fit together.
  */
 export function resolveSection(
   { catalog, problems }: Resolving,
@@ -46,7 +47,7 @@ export function resolveSection(
     );
   }
   const make = "weld" in input ? "welded" : "rolled";
-  return {
+  const section: ISection = {
     designation: `${make} ${input.h}x${input.b}x${input.tw}x${input.tf}`,
     make,
     depthMm: input.h,
@@ -55,6 +56,7 @@ export function resolveSection(
     flangeThicknessMm: input.tf,
     rootMm: "weld" in input ? input.weld * Math.SQRT2 : input.r,
   };
+  return checkSection(section, path, problems) ? section : null;
 }
 
 /** Whether a section was given by its dimensions and so has no name in the catalogue. */
