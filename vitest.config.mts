@@ -11,6 +11,7 @@ export default defineConfig({
   test: {
     passWithNoTests: false,
     allowOnly: false,
+    env: { LOG_LEVEL: "silent" },
     projects: [
       {
         extends: true,

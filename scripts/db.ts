@@ -71,7 +71,9 @@ const commands: Readonly<Record<string, () => Promise<void>>> = { status, migrat
 
 /** What a person can do about an error of the database driver. */
 function inWords(error: unknown): string {
-  const text = error instanceof Error ? error.message || String(error.cause ?? error.name) : String(error);
+  // Sequelize wraps the driver's error, sometimes with an empty message of its own.
+  const cause = error instanceof Error && error.message === "" ? error.cause : error;
+  const text = cause instanceof Error ? cause.message || cause.name : "unknown error";
   if (/ECONNREFUSED|ENOTFOUND|EAI_AGAIN/.test(text)) {
     return `The database does not answer (${text}). Is it running, and is its address right?`;
   }

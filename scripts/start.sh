@@ -112,5 +112,7 @@ ensure_secret session-secret
 export NEXTAUTH_SECRET=${NEXTAUTH_SECRET:-$(read_secret session-secret)}
 export NEXTAUTH_URL=${NEXTAUTH_URL:-http://127.0.0.1:$web_port}
 fill_database
-if [[ $mode == start ]]; then build_if_changed; fi
+if [[ $mode == start ]]; then
+  build_if_changed || fail "the program could not be built (the reason is above)."
+fi
 serve
