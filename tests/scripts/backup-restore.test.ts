@@ -2,7 +2,6 @@
  * Guards the promise that nothing is lost: what was backed up comes back, whole, on the same machine or
  * another; and nothing that is there is overwritten unasked. Runs the real scripts on real clusters.
  */
-import { execFile } from "node:child_process";
 import {
   chmodSync,
   existsSync,
@@ -15,46 +14,13 @@ import {
 } from "node:fs";
 import { tmpdir } from "node:os";
 import path from "node:path";
-import { Client } from "pg";
 import { afterAll, beforeAll, describe, expect, it } from "vitest";
+import { runScript, sql } from "./run-script";
 
-interface Run {
-  readonly status: number;
-  readonly output: string;
-}
-
-const root = process.cwd();
 const folder = mkdtempSync(path.join(tmpdir(), "panelwright-backup-"));
 const home = path.join(folder, "first");
 const elsewhere = path.join(folder, "second");
 const archive = path.join(folder, "kept.tar");
-
-function script(name: string, args: readonly string[], dataFolder: string): Promise<Run> {
-  const env = { ...process.env, PANELWRIGHT_DATA_DIR: dataFolder };
-  delete env.DATABASE_URL;
-  return new Promise((resolve) => {
-    execFile(
-      "bash",
-      [path.join(root, "scripts", name), ...args],
-      { env, cwd: folder },
-      (error, stdout, stderr) => {
-        resolve({ status: error ? Number(error.code) : 0, output: stdout + stderr });
-      },
-    );
-  });
-}
-
-async function sql(dataFolder: string, text: string): Promise<Record<string, unknown>[]> {
-  const client = new Client({
-    connectionString: readFileSync(path.join(dataFolder, "secrets", "database-url"), "utf8").trim(),
-  });
-  await client.connect();
-  try {
-    return (await client.query<Record<string, unknown>>(text)).rows;
-  } finally {
-    await client.end();
-  }
-}
 
 const secretOf = (dataFolder: string): string =>
   readFileSync(path.join(dataFolder, "secrets", "session-secret"), "utf8");
@@ -63,7 +29,7 @@ const modeOf = (file: string): string => (statSync(file).mode & 0o777).toString(
 beforeAll(async () => {
   // The database's own user has to pass through, as it has to pass through a checkout.
   chmodSync(folder, 0o711);
-  expect(await script("database.sh", ["throw-away"], home)).toMatchObject({ status: 0 });
+  expect(await runScript("database.sh", ["throw-away"], home)).toMatchObject({ status: 0 });
   await sql(home, "create table sheet (id int primary key, mark text not null)");
   await sql(home, "insert into sheet values (1, 'C4 / level 2')");
   writeFileSync(path.join(home, "files", "certificate.txt"), "weld 42");
@@ -73,20 +39,20 @@ beforeAll(async () => {
 
 afterAll(async () => {
   for (const dataFolder of [home, elsewhere]) {
-    if (existsSync(dataFolder)) await script("database.sh", ["remove"], dataFolder);
+    if (existsSync(dataFolder)) await runScript("database.sh", ["remove"], dataFolder);
   }
   rmSync(folder, { recursive: true, force: true });
 });
 
 describe("backup and restore", () => {
   it("writes one archive that only its owner can read", async () => {
-    expect(await script("backup.sh", [archive], home)).toMatchObject({ status: 0 });
+    expect(await runScript("backup.sh", [archive], home)).toMatchObject({ status: 0 });
     expect(modeOf(archive)).toBe("600");
   });
 
   it("never writes over an earlier backup", async () => {
     const before = readFileSync(archive);
-    const run = await script("backup.sh", [archive], home);
+    const run = await runScript("backup.sh", [archive], home);
     expect(run.status).toBe(1);
     expect(run.output).toContain("already there");
     expect(readFileSync(archive).equals(before)).toBe(true);
@@ -94,7 +60,7 @@ describe("backup and restore", () => {
 
   it("leaves a database that holds something alone", async () => {
     await sql(home, "update sheet set mark = 'changed later'");
-    const run = await script("restore.sh", [archive], home);
+    const run = await runScript("restore.sh", [archive], home);
     expect(run.status).toBe(1);
     expect(run.output).toContain("--replace");
     expect(await sql(home, "select mark from sheet")).toEqual([{ mark: "changed later" }]);
@@ -107,7 +73,7 @@ describe("backup and restore", () => {
     expect(at).toBeGreaterThan(0);
     bytes.write("weld 43", at);
     writeFileSync(damaged, bytes);
-    const run = await script("restore.sh", [damaged, "--replace"], home);
+    const run = await runScript("restore.sh", [damaged, "--replace"], home);
     expect(run.status).toBe(1);
     expect(run.output).toContain("damaged");
     expect(await sql(home, "select mark from sheet")).toEqual([{ mark: "changed later" }]);
@@ -117,7 +83,7 @@ describe("backup and restore", () => {
     await sql(home, "create table later_table (id int)");
     writeFileSync(path.join(home, "files", "certificate.txt"), "overwritten");
     writeFileSync(path.join(home, "secrets", "session-secret"), "second secret\n");
-    expect(await script("restore.sh", [archive, "--replace"], home)).toMatchObject({ status: 0 });
+    expect(await runScript("restore.sh", [archive, "--replace"], home)).toMatchObject({ status: 0 });
     expect(await sql(home, "select mark from sheet")).toEqual([{ mark: "C4 / level 2" }]);
     expect(await sql(home, "select to_regclass('later_table') is null as gone")).toEqual([{ gone: true }]);
     expect(readFileSync(path.join(home, "files", "certificate.txt"), "utf8")).toBe("weld 42");
@@ -128,15 +94,15 @@ describe("backup and restore", () => {
       name.startsWith("before-restore-"),
     );
     expect(safety).toHaveLength(1);
-    const back = await script("restore.sh", [path.join(home, "backups", safety[0]!), "--replace"], home);
+    const back = await runScript("restore.sh", [path.join(home, "backups", safety[0]!), "--replace"], home);
     expect(back.status).toBe(0);
     expect(await sql(home, "select mark from sheet")).toEqual([{ mark: "changed later" }]);
     expect(secretOf(home)).toBe("second secret\n");
   });
 
   it("fills an empty data folder elsewhere, without asking", async () => {
-    expect(await script("database.sh", ["throw-away"], elsewhere)).toMatchObject({ status: 0 });
-    expect(await script("restore.sh", [archive], elsewhere)).toMatchObject({ status: 0 });
+    expect(await runScript("database.sh", ["throw-away"], elsewhere)).toMatchObject({ status: 0 });
+    expect(await runScript("restore.sh", [archive], elsewhere)).toMatchObject({ status: 0 });
     expect(await sql(elsewhere, "select id, mark from sheet")).toEqual([{ id: 1, mark: "C4 / level 2" }]);
     expect(readFileSync(path.join(elsewhere, "files", "certificate.txt"), "utf8")).toBe("weld 42");
     expect(secretOf(elsewhere)).toBe("first secret\n");
