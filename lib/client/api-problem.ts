@@ -16,6 +16,13 @@ export class ApiProblem extends Error {
     super(message);
   }
 
+  /** Faults of a node document with their paths inside the document, as the form knows them. */
+  documentFields(): FieldError[] {
+    return this.fields
+      .filter((field) => field.path === "document" || field.path.startsWith("document."))
+      .map((field) => ({ path: field.path.replace(/^document\.?/, ""), message: field.message }));
+  }
+
   /** The message for one field, or null. */
   messageFor(path: string): string | null {
     return this.fields.find((field) => field.path === path)?.message ?? null;

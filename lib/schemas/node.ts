@@ -12,6 +12,13 @@ export const SaveNode = z.strictObject({
   expectedVersion: z.number().int().positive(),
 });
 
+/**
+ * What the routes check first: the document inside is checked by the evaluator, whose faults also cover
+ * sections, steels and bolts that the catalogue does not know.
+ */
+export const CreateNodeEnvelope = CreateNode.extend({ document: z.unknown() });
+export const SaveNodeEnvelope = SaveNode.extend({ document: z.unknown() });
+
 /** Query of a DELETE. */
 export const DeleteNodeQuery = z.strictObject({ expectedVersion: z.coerce.number().int().positive() });
 

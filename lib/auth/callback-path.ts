@@ -1,0 +1,16 @@
+/** Where somebody lands who came without a wish. */
+export const HOME_PATH = "/projects";
+
+/**
+ * A path of this site to go to after signing in, or the home path when the text could lead elsewhere:
+ * another scheme or host, `//host`, a backslash that browsers read as a slash, control characters.
+ */
+export function safeCallbackPath(wish: string | null | undefined, ownOrigin?: string): string {
+  if (wish === null || wish === undefined || wish === "") return HOME_PATH;
+  const path = ownOrigin !== undefined && wish.startsWith(`${ownOrigin}/`) ? wish.slice(ownOrigin.length) : wish;
+  // eslint-disable-next-line no-control-regex
+  const canLeadElsewhere = !path.startsWith("/") || /^\/[/\\]/.test(path) || /[\\\u0000-\u001f\u007f]/.test(path);
+  if (canLeadElsewhere) return HOME_PATH;
+  const landed = new URL(path, "http://own.invalid");
+  return landed.origin === "http://own.invalid" ? `${landed.pathname}${landed.search}${landed.hash}` : HOME_PATH;
+}

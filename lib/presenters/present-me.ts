@@ -1,0 +1,18 @@
+import type { SignedIn } from "@/lib/auth/current-actor";
+import { canManagePeople } from "@/lib/policies/people";
+import { canCreateProject } from "@/lib/policies/project";
+import { canEditRates } from "@/lib/policies/rates";
+import { canEditStockPlates } from "@/lib/policies/stock-plates";
+import type { Me } from "@/lib/schemas/me";
+
+/** Left out: the session's id. */
+export const presentMe = (actor: SignedIn): Me => ({
+  person: { id: actor.personId, name: actor.name, email: actor.email, role: actor.role },
+  organisation: { id: actor.organisationId, name: actor.organisationName },
+  abilities: {
+    createProject: canCreateProject(actor),
+    editStockPlates: canEditStockPlates(actor),
+    editRates: canEditRates(actor, { organisationId: actor.organisationId }),
+    managePeople: canManagePeople(actor),
+  },
+});
