@@ -1,3 +1,4 @@
+import { catalogue } from "./catalog";
 import { demoOrganisation } from "./demo-organisation";
 import type { Seeder } from "./seeder";
 
@@ -6,7 +7,7 @@ import type { Seeder } from "./seeder";
  * before the demo organisation, whose project uses them.
  */
 export const seeders: readonly Seeder[] = [
-  // Catalogue: sections, angles, steels, fasteners, stock plates.
+  catalogue,
   // Figures: time tables, rate books.
   demoOrganisation,
 ];
