@@ -1,12 +1,12 @@
 /** From quantities to lines of money and minutes, and from lines to an estimate. */
-import type { QuantityRecord } from "./drivers";
+import type { DriverName, QuantityRecord } from "./drivers";
 import { COST_CATEGORIES, type CostCategory, type Estimate, type EstimateLine, type FabricationCase } from "./estimate";
 import { costMinor } from "./money";
 import type { CarbonTable, RateBook, RuleUse } from "./prices";
 import { PRODUCTS, type ProductMasses } from "./products";
-import { rateIn } from "./rate-book";
-import { RuleFailed } from "./rules";
-import type { CompiledRule, CompiledTimeTable, CompiledUse } from "./time-table";
+import { type PreparedRates, rateIn } from "./rate-book";
+import { type NumberOf, RuleFailed } from "./rules";
+import { type CompiledRule, type CompiledTimeTable, type CompiledUse, slotsOf } from "./time-table";
 
 /** A line with the minutes that an estimate keeps apart and a line does not show. */
 export interface PricedLine {
@@ -17,148 +17,184 @@ export interface PricedLine {
   readonly touchMinutes: number;
 }
 
-type MutableScope = Record<string, number | string>;
 interface ScopedRecord {
   readonly group: string;
-  readonly scope: MutableScope;
+  readonly scope: (number | string)[];
 }
 
-const NO_MINUTES = { minutes: 0, elapsedMinutes: 0, touchMinutes: 0 };
+/** Takes the lines as they are priced; null where only the sum is wanted. */
+type LineSink = PricedLine[] | null;
 
-function finite(value: number, rule: CompiledRule): number {
-  if (!Number.isFinite(value)) throw new RuleFailed(rule.rule.key, "the quantities divide by nothing or go beyond all bounds");
+/** What one rule is priced with. */
+interface Pricing {
+  readonly compiled: CompiledRule;
+  readonly records: readonly ScopedRecord[];
+  readonly rates: PreparedRates;
+  readonly batch: number;
+  readonly sink: LineSink;
+}
+
+function finite(value: number, compiled: CompiledRule): number {
+  if (!Number.isFinite(value)) throw new RuleFailed(compiled.rule.key, "the quantities divide by nothing or go beyond all bounds");
   return value;
 }
 
-interface Ruled {
-  readonly quantity: number;
+interface RuleMinutes {
   readonly run: number;
+  /** Of the whole batch. */
   readonly setUp: number;
   readonly machine: number;
 }
 
-/** Applies one rule to every record of its driver. */
-function apply(compiled: CompiledRule, records: readonly ScopedRecord[]): Ruled {
-  const { rule } = compiled;
-  let [quantity, run, setUp, machine] = [0, 0, 0, 0];
-  const groups = new Set<string>();
+/** Applies a rule's times to every record of its driver. */
+function minutesOf({ compiled, records }: Pricing): RuleMinutes {
+  let run = 0;
+  let setUp = 0;
+  let machine = 0;
+  let groups: Set<string> | null = null;
   for (const { group, scope } of records) {
-    const minutes = compiled.run === null ? 0 : finite(compiled.run(scope), compiled);
-    if (rule.gives !== null) scope[rule.gives] = minutes;
+    const minutes = compiled.run === null ? 0 : compiled.run(scope);
+    if (compiled.givesSlot !== null) scope[compiled.givesSlot] = minutes;
     run += minutes;
-    quantity += compiled.quantity(scope);
-    if (compiled.machine !== null) machine += finite(compiled.machine(scope), compiled);
-    if (compiled.setUp !== null && minutes !== 0 && !groups.has(group)) {
-      groups.add(group);
-      setUp += finite(compiled.setUp(scope), compiled);
-    }
+    if (compiled.machine !== null) machine += compiled.machine(scope);
+    if (compiled.setUp === null || minutes === 0) continue;
+    groups ??= new Set();
+    if (groups.has(group)) continue;
+    groups.add(group);
+    setUp += compiled.setUp(scope);
   }
-  return { quantity: finite(quantity, compiled), run, setUp, machine };
+  finite(run + setUp + machine, compiled);
+  return { run, setUp, machine };
 }
 
-function labourLine(compiled: CompiledRule, ruled: Ruled, book: RateBook, batch: number): PricedLine[] {
-  const { rule } = compiled;
-  const elapsedMinutes = ruled.setUp / batch + ruled.run;
-  if (rule.trade === null || elapsedMinutes === 0) return [];
+/** Sum of an expression over a rule's records. */
+function sumOf({ compiled, records }: Pricing, of: NumberOf): number {
+  let sum = 0;
+  for (const { scope } of records) sum += of(scope);
+  return finite(sum, compiled);
+}
+
+function priceLabour(pricing: Pricing, { run, setUp }: RuleMinutes): number {
+  const { compiled, rates, batch, sink } = pricing;
+  const { rule, labourItem } = compiled;
+  const elapsedMinutes = setUp / batch + run;
+  if (rule.trade === null || elapsedMinutes === 0) return 0;
   const minutes = elapsedMinutes * rule.crew;
-  const rate = rateIn(book, `labour:${rule.trade}`);
+  const cost = costMinor(minutes, rates.likelyOf(labourItem), 60, rates.minorUnits);
+  if (sink === null) return cost;
   const line: EstimateLine = {
     operation: rule.operation,
     category: rule.category,
     trade: rule.trade,
     workCentre: rule.workCentre,
     where: rule.where,
-    quantity: ruled.quantity,
+    quantity: sumOf(pricing, compiled.quantity),
     quantityUnit: rule.quantity.unit,
     minutes,
-    costMinor: costMinor(minutes, rate.likely, 60, book.minorDigits),
-    source: `${compiled.source}; rate: ${rate.source}`,
+    costMinor: cost,
+    source: `${compiled.source}; rate: ${rateIn(rates.book, labourItem).source}`,
   };
-  return [{ line, elapsedMinutes, touchMinutes: ruled.run * rule.crew }];
+  sink.push({ line, elapsedMinutes, touchMinutes: run * rule.crew });
+  return cost;
 }
 
-function machineLine(compiled: CompiledRule, ruled: Ruled, book: RateBook): PricedLine[] {
-  const { rule } = compiled;
-  if (rule.workCentre === null || rule.machineMinutes === null || ruled.machine === 0) return [];
-  const rate = rateIn(book, `machine:${rule.workCentre}`);
+function priceMachine({ compiled, rates, sink }: Pricing, { machine }: RuleMinutes): number {
+  const { rule, machineItem } = compiled;
+  if (rule.machineMinutes === null || machine === 0) return 0;
+  const cost = costMinor(machine, rates.likelyOf(machineItem), 60, rates.minorUnits);
+  if (sink === null) return cost;
   const line: EstimateLine = {
     operation: `${rule.operation}: machine`,
     category: "machine",
     trade: null,
     workCentre: rule.workCentre,
     where: rule.where,
-    quantity: ruled.machine,
+    quantity: machine,
     quantityUnit: "machine min",
     minutes: 0,
-    costMinor: costMinor(ruled.machine, rate.likely, 60, book.minorDigits),
-    source: `${rule.machineMinutes.source}; rate: ${rate.source}`,
+    costMinor: cost,
+    source: `${rule.machineMinutes.source}; rate: ${rateIn(rates.book, machineItem).source}`,
   };
-  return [{ ...NO_MINUTES, line }];
+  sink.push({ line, elapsedMinutes: 0, touchMinutes: 0 });
+  return cost;
+}
+
+function priceItem({ compiled, rates, sink }: Pricing, use: RuleUse, item: string, amount: number): number {
+  if (amount === 0) return 0;
+  const cost = costMinor(finite(amount, compiled), rates.likelyOf(item), 1, rates.minorUnits);
+  if (sink === null) return cost;
+  const line: EstimateLine = {
+    operation: use.label,
+    category: use.category,
+    trade: null,
+    workCentre: null,
+    where: compiled.rule.where,
+    quantity: amount,
+    quantityUnit: use.unit,
+    minutes: 0,
+    costMinor: cost,
+    source: `${use.quantity.source}; rate: ${rateIn(rates.book, item).source}`,
+  };
+  sink.push({ line, elapsedMinutes: 0, touchMinutes: 0 });
+  return cost;
 }
 
 /** One line per item of the rate book that the use names. */
-function useLines(compiled: CompiledRule, use: RuleUse, compiledUse: CompiledUse, records: readonly ScopedRecord[], book: RateBook): PricedLine[] {
+function priceUse(pricing: Pricing, use: RuleUse, { itemOf, fixedItem, quantity }: CompiledUse): number {
+  if (fixedItem !== null) return priceItem(pricing, use, fixedItem, sumOf(pricing, quantity));
   const amounts = new Map<string, number>();
-  for (const { scope } of records) {
-    const amount = finite(compiledUse.quantity(scope), compiled);
-    if (amount === 0) continue;
-    const item = compiledUse.itemOf(scope);
-    amounts.set(item, (amounts.get(item) ?? 0) + amount);
+  for (const { scope } of pricing.records) {
+    const item = itemOf(scope);
+    amounts.set(item, (amounts.get(item) ?? 0) + quantity(scope));
   }
-  return [...amounts].map(([item, amount]) => {
-    const rate = rateIn(book, item);
-    const line: EstimateLine = {
-      operation: use.label,
-      category: use.category,
-      trade: null,
-      workCentre: null,
-      where: compiled.rule.where,
-      quantity: amount,
-      quantityUnit: use.unit,
-      minutes: 0,
-      costMinor: costMinor(amount, rate.likely, 1, book.minorDigits),
-      source: `${use.quantity.source}; rate: ${rate.source}`,
-    };
-    return { ...NO_MINUTES, line };
-  });
+  let sum = 0;
+  for (const [item, amount] of amounts) sum += priceItem(pricing, use, item, amount);
+  return sum;
+}
+
+/** Records by driver, each value in the slot its rules read it from. */
+function scopedByDriver(records: readonly QuantityRecord[], fabrication: FabricationCase): ReadonlyMap<DriverName, ScopedRecord[]> {
+  const byDriver = new Map<DriverName, ScopedRecord[]>();
+  for (const record of records) {
+    const scoped = { group: record.group, scope: slotsOf(record, fabrication) };
+    const others = byDriver.get(record.driver);
+    if (others === undefined) byDriver.set(record.driver, [scoped]);
+    else others.push(scoped);
+  }
+  return byDriver;
 }
 
 /**
  * Prices records of quantities: (set-up / batch + run minutes) x crew x labour rate, machine minutes
  * x machine rate, and what is used x its rate. Each line is rounded half-even to minor units.
  *
+ * @param sink - takes the lines; null where only their sum is wanted.
+ * @returns the sum of the lines, minor units.
  * @throws RateMissing where the rate book lacks an item, RuleFailed where a rule gives no number.
  */
-export function priceRecords(table: CompiledTimeTable, book: RateBook, records: readonly QuantityRecord[], fabrication: FabricationCase): PricedLine[] {
-  const byDriver = new Map<string, ScopedRecord[]>();
-  for (const { driver, group, values } of records) {
-    const scope: MutableScope = {
-      ...values,
-      batch: fabrication.quantity,
-      nodesPerLift: fabrication.nodesPerLift,
-      executionClass: fabrication.executionClass,
-      coating: fabrication.coating,
-    };
-    const others = byDriver.get(driver);
-    if (others === undefined) byDriver.set(driver, [{ group, scope }]);
-    else others.push({ group, scope });
+export function priceRecords(
+  table: CompiledTimeTable,
+  rates: PreparedRates,
+  records: readonly QuantityRecord[],
+  fabrication: FabricationCase,
+  sink: LineSink,
+): number {
+  let sum = 0;
+  for (const [driver, scoped] of scopedByDriver(records, fabrication)) {
+    for (const compiled of table.rulesByDriver.get(driver) ?? []) {
+      const pricing: Pricing = { compiled, records: scoped, rates, batch: fabrication.quantity, sink };
+      const minutes = minutesOf(pricing);
+      sum += priceLabour(pricing, minutes) + priceMachine(pricing, minutes);
+      const { uses } = compiled.rule;
+      for (let index = 0; index < uses.length; index += 1) {
+        const use = uses[index];
+        const compiledUse = compiled.uses[index];
+        if (use !== undefined && compiledUse !== undefined) sum += priceUse(pricing, use, compiledUse);
+      }
+    }
   }
-  const lines: PricedLine[] = [];
-  for (const compiled of table.rules) {
-    const scoped = byDriver.get(compiled.rule.driver);
-    if (scoped === undefined) continue;
-    const ruled = apply(compiled, scoped);
-    lines.push(...labourLine(compiled, ruled, book, fabrication.quantity), ...machineLine(compiled, ruled, book));
-    compiled.rule.uses.forEach((use, index) => {
-      const compiledUse = compiled.uses[index];
-      if (compiledUse !== undefined) lines.push(...useLines(compiled, use, compiledUse, scoped, book));
-    });
-  }
-  return lines;
+  return sum;
 }
-
-/** Sum of the lines' money, minor units. */
-export const costOfLines = (lines: readonly PricedLine[]): number => lines.reduce((sum, { line }) => sum + line.costMinor, 0);
 
 /** The carbon table has no factor for a product that an estimate needs. */
 export class CarbonFactorMissing extends Error {
@@ -194,7 +230,7 @@ export function rollUp(priced: readonly PricedLine[], masses: ProductMasses, boo
     if (line.where === "shop") shopMinutes += elapsedMinutes;
     if (line.where === "site") siteMinutes += line.minutes;
   }
-  const total = costOfLines(priced);
+  const total = priced.reduce((sum, { line }) => sum + line.costMinor, 0);
   return {
     currency: book.currency,
     costMinor: total,

@@ -28,7 +28,8 @@ export class RuleFailed extends Error {
   }
 }
 
-export type Scope = Readonly<Record<string, number | string>>;
+/** Values of one record, each in the slot that its name was given when the rule was compiled. */
+export type Scope = readonly (number | string)[];
 export type NumberOf = (scope: Scope) => number;
 type TextOf = (scope: Scope) => string;
 
@@ -37,9 +38,14 @@ type Compiled =
   | { readonly kind: "text"; readonly of: TextOf; readonly constant: boolean }
   | { readonly kind: "condition"; readonly of: (scope: Scope) => boolean; readonly constant: boolean };
 
+export interface NameSlot {
+  readonly kind: NameKind;
+  readonly slot: number;
+}
+
 /** What an expression may refer to. Names not listed here do not exist for it. */
 export interface RuleWorld {
-  readonly names: ReadonlyMap<string, NameKind>;
+  readonly names: ReadonlyMap<string, NameSlot>;
   readonly constants: Readonly<Record<string, TimeConstant>>;
   readonly lookUps: Readonly<Record<string, LookUpTable>>;
 }
@@ -47,13 +53,7 @@ export interface RuleWorld {
 export const MAX_NODES = 200;
 const MAX_CHARACTERS = 2000;
 
-const ARITHMETIC: ReadonlyMap<string, (a: number, b: number) => number> = new Map([
-  ["add", (a, b) => a + b],
-  ["subtract", (a, b) => a - b],
-  ["multiply", (a, b) => a * b],
-  ["divide", (a, b) => a / b],
-  ["pow", (a, b) => a ** b],
-]);
+const ARITHMETIC: ReadonlySet<string> = new Set(["add", "subtract", "multiply", "divide", "pow"]);
 const COMPARISON: ReadonlyMap<string, (a: number, b: number) => boolean> = new Map([
   ["smaller", (a, b) => a < b],
   ["smallerEq", (a, b) => a <= b],
@@ -135,10 +135,11 @@ class Compiler {
   private name({ name }: ReadNode): Compiled {
     if (typeof name !== "string") return this.refuse("a name is needed");
     if (Object.hasOwn(this.world.constants, name)) return this.constant({ type: "ConstantNode", value: this.world.constants[name]?.value });
-    const kind = this.world.names.get(name);
-    if (kind === "number") return { kind, of: (scope) => scope[name] as number, constant: false };
-    if (kind === "text") return { kind, of: (scope) => scope[name] as string, constant: false };
-    return this.refuse(`it does not know the name ${name}`);
+    const known = this.world.names.get(name);
+    if (known === undefined) return this.refuse(`it does not know the name ${name}`);
+    const { kind, slot } = known;
+    if (kind === "number") return { kind, of: (scope) => scope[slot] as number, constant: false };
+    return { kind, of: (scope) => scope[slot] as string, constant: false };
   }
 
   private operator(node: ReadNode): Compiled {
@@ -149,13 +150,12 @@ class Compiler {
     if (second === undefined) return this.unary(fn, first);
     if (fn === "equal" || fn === "unequal") return this.equality(fn, first, second);
     const compare = COMPARISON.get(fn);
-    const combine = ARITHMETIC.get(fn);
-    if (!compare && !combine) return this.refuse(`the operator ${fn} is not allowed`);
+    if (!compare && !ARITHMETIC.has(fn)) return this.refuse(`the operator ${fn} is not allowed`);
     const a = this.number(first);
     const b = this.number(second);
     const constant = a.constant && b.constant;
     if (compare) return { kind: "condition", of: (scope) => compare(a.of(scope), b.of(scope)), constant };
-    return this.folded({ kind: "number", of: arithmetic(fn, a.of, b.of), constant });
+    return this.folded({ kind: "number", of: arithmetic(fn, a, b), constant });
   }
 
   private unary(fn: string, argument: ReadNode | undefined): Compiled {
@@ -220,13 +220,18 @@ class Compiler {
   /** What depends on nothing is worked out once. */
   private folded(compiled: Compiled & { kind: "number" }): Compiled & { kind: "number" } {
     if (!compiled.constant) return compiled;
-    const value = compiled.of({});
+    const value = compiled.of([]);
     return { kind: "number", of: () => value, constant: true };
   }
 }
 
-/** Each operator its own closure, so that the innermost step is plain arithmetic. */
-function arithmetic(fn: string, a: NumberOf, b: NumberOf): NumberOf {
+type CompiledNumber = Compiled & { readonly kind: "number" };
+
+/** Each operator its own closure, a constant side held in it: the innermost step is plain arithmetic. */
+function arithmetic(fn: string, first: CompiledNumber, second: CompiledNumber): NumberOf {
+  const [a, b] = [first.of, second.of];
+  if (first.constant && !second.constant) return constantFirst(fn, a([]), b);
+  if (second.constant && !first.constant) return constantSecond(fn, a, b([]));
   switch (fn) {
     case "add":
       return (scope) => a(scope) + b(scope);
@@ -238,6 +243,36 @@ function arithmetic(fn: string, a: NumberOf, b: NumberOf): NumberOf {
       return (scope) => a(scope) / b(scope);
     default:
       return (scope) => a(scope) ** b(scope);
+  }
+}
+
+function constantFirst(fn: string, a: number, b: NumberOf): NumberOf {
+  switch (fn) {
+    case "add":
+      return (scope) => a + b(scope);
+    case "subtract":
+      return (scope) => a - b(scope);
+    case "multiply":
+      return (scope) => a * b(scope);
+    case "divide":
+      return (scope) => a / b(scope);
+    default:
+      return (scope) => a ** b(scope);
+  }
+}
+
+function constantSecond(fn: string, a: NumberOf, b: number): NumberOf {
+  switch (fn) {
+    case "add":
+      return (scope) => a(scope) + b;
+    case "subtract":
+      return (scope) => a(scope) - b;
+    case "multiply":
+      return (scope) => a(scope) * b;
+    case "divide":
+      return (scope) => a(scope) / b;
+    default:
+      return (scope) => a(scope) ** b;
   }
 }
 

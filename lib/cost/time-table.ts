@@ -1,10 +1,13 @@
 /** A time table made ready to run: every expression compiled once, with the names its driver allows. */
-import { DRIVERS, type DriverName, type NameKind, SHARED_NAMES } from "./drivers";
+import { DRIVER_NAMES, DRIVERS, type DriverName, type NameKind, type QuantityRecord, SHARED_NAMES } from "./drivers";
+import type { FabricationCase } from "./estimate";
 import type { RuleFormula, TimeRule, TimeTable } from "./prices";
-import { compileExpression, type NumberOf, RESERVED_NAMES, RuleRefused, type RuleWorld } from "./rules";
+import { compileExpression, type NameSlot, type NumberOf, RESERVED_NAMES, RuleRefused, type RuleWorld, type Scope } from "./rules";
 
 export interface CompiledUse {
-  readonly itemOf: (scope: Readonly<Record<string, number | string>>) => string;
+  readonly itemOf: (scope: Scope) => string;
+  /** The item where it does not depend on the record. */
+  readonly fixedItem: string | null;
   readonly quantity: NumberOf;
 }
 
@@ -15,12 +18,17 @@ export interface CompiledRule {
   readonly setUp: NumberOf | null;
   readonly machine: NumberOf | null;
   readonly uses: readonly CompiledUse[];
+  readonly labourItem: string;
+  readonly machineItem: string;
+  /** Slot that the run minutes go to; null where no later rule asks for them. */
+  readonly givesSlot: number | null;
   /** Source of the minutes in use. */
   readonly source: string;
 }
 
 export interface CompiledTimeTable {
-  readonly rules: readonly CompiledRule[];
+  /** In the order they stand in the table. */
+  readonly rulesByDriver: ReadonlyMap<DriverName, readonly CompiledRule[]>;
 }
 
 /** The formula that a rule's choice names. */
@@ -32,42 +40,68 @@ export function chosenFormula(rule: TimeRule): RuleFormula | null {
   return formula;
 }
 
-/** Names that rules of one driver may use, in the order the rules stand: later ones see what earlier ones give. */
-function namesOf(driver: DriverName): Map<string, NameKind> {
-  return new Map<string, NameKind>([...Object.entries(SHARED_NAMES), ...Object.entries(DRIVERS[driver])]);
+const slotNames = (driver: DriverName): readonly string[] => [...Object.keys(SHARED_NAMES), ...Object.keys(DRIVERS[driver])];
+
+const SLOT_NAMES = new Map(DRIVER_NAMES.map((driver) => [driver, Object.keys(DRIVERS[driver])]));
+
+/** A record's values in the slots its driver's rules read them from, the shared names first. */
+export function slotsOf({ driver, values }: QuantityRecord, fabrication: FabricationCase): (number | string)[] {
+  const scope: (number | string)[] = [fabrication.quantity, fabrication.nodesPerLift, fabrication.executionClass, fabrication.coating];
+  const read = values as Readonly<Record<string, number | string>>;
+  for (const name of SLOT_NAMES.get(driver) ?? []) scope.push(read[name] ?? Number.NaN);
+  return scope;
+}
+
+/** Names that rules of one driver may use; what a rule gives is added for those that stand after it. */
+function namesOf(driver: DriverName): Map<string, NameSlot> {
+  const kinds: Readonly<Record<string, NameKind>> = { ...SHARED_NAMES, ...DRIVERS[driver] };
+  return new Map(slotNames(driver).map((name, slot) => [name, { kind: kinds[name] ?? "number", slot }]));
 }
 
 /** "threaded-bar-{grade}" with the record's own words, or the table's, put in. */
-function compileItem(pattern: string, { names, constants }: RuleWorld): CompiledUse["itemOf"] {
+function compileItem(pattern: string, { names, constants }: RuleWorld): Pick<CompiledUse, "itemOf" | "fixedItem"> {
   const item = pattern.replace(/\{(\w+)\}/g, (whole, name: string) => {
     const constant = Object.hasOwn(constants, name) ? constants[name]?.value : undefined;
     return typeof constant === "string" ? constant : whole;
   });
   const parts = item.split(/\{(\w+)\}/);
-  if (parts.length === 1) return () => item;
+  if (parts.length === 1) return { itemOf: () => item, fixedItem: item };
   for (const name of parts.filter((_, index) => index % 2 === 1)) {
-    if (names.get(name) !== "text") throw new RuleRefused(item, `${name} is no word of this rule's quantities`);
+    if (names.get(name)?.kind !== "text") throw new RuleRefused(item, `${name} is no word of this rule's quantities`);
   }
-  return (scope) => parts.map((part, index) => (index % 2 === 1 ? scope[part] : part)).join("");
+  const slots = parts.map((part, index) => (index % 2 === 1 ? (names.get(part)?.slot ?? null) : null));
+  const itemOf = (scope: Scope): string => parts.map((part, index) => (slots[index] == null ? part : scope[slots[index]])).join("");
+  return { itemOf, fixedItem: null };
 }
 
-function compileRule(rule: TimeRule, world: RuleWorld): CompiledRule {
+/** Compiles a rule; its own run minutes, where they have a name, are known to all its other expressions and to later rules. */
+function compileRule(rule: TimeRule, names: Map<string, NameSlot>, table: TimeTable): CompiledRule {
+  const world: RuleWorld = { names, constants: table.constants, lookUps: table.lookUps };
   const compile = (expression: string): NumberOf => compileExpression(expression, world);
-  const run = chosenFormula(rule);
+  const chosen = chosenFormula(rule);
   // The formulas that are not in use must be sound too: the shop may select them at any moment.
   for (const { expression } of rule.runMinutes?.formulas ?? []) compile(expression);
+  const run = chosen && compile(chosen.expression);
+  const givesSlot = rule.gives === null ? null : names.size;
+  if (rule.gives !== null && givesSlot !== null) {
+    if (names.has(rule.gives) || RESERVED_NAMES.includes(rule.gives)) throw new RuleRefused(rule.gives, "that name is taken already");
+    names.set(rule.gives, { kind: "number", slot: givesSlot });
+  }
   return {
     rule,
     quantity: compile(rule.quantity.expression),
-    run: run && compile(run.expression),
+    run,
     setUp: rule.setUpMinutes && compile(rule.setUpMinutes.expression),
     machine: rule.machineMinutes && compile(rule.machineMinutes.expression),
-    uses: rule.uses.map((use) => ({ itemOf: compileItem(use.item, world), quantity: compile(use.quantity.expression) })),
-    source: run?.source ?? "",
+    uses: rule.uses.map((use) => ({ ...compileItem(use.item, world), quantity: compile(use.quantity.expression) })),
+    labourItem: `labour:${rule.trade ?? ""}`,
+    machineItem: `machine:${rule.workCentre ?? ""}`,
+    givesSlot,
+    source: chosen?.source ?? "",
   };
 }
 
-function refuseShadows(table: TimeTable, names: ReadonlyMap<string, NameKind>): void {
+function refuseShadows(table: TimeTable, names: ReadonlyMap<string, NameSlot>): void {
   const taken = [...Object.keys(table.constants), ...Object.keys(table.lookUps)];
   for (const name of taken) {
     if (names.has(name) || RESERVED_NAMES.includes(name)) throw new RuleRefused(name, "a table or constant may not take the name of a quantity or function");
@@ -80,19 +114,16 @@ function refuseShadows(table: TimeTable, names: ReadonlyMap<string, NameKind>): 
  * @throws RuleRefused where an expression uses anything outside the sandbox or a name its driver does not carry.
  */
 export function compileTimeTable(table: TimeTable): CompiledTimeTable {
-  const namesByDriver = new Map<DriverName, Map<string, NameKind>>();
-  const rules = table.rules.map((rule) => {
+  const namesByDriver = new Map<DriverName, Map<string, NameSlot>>();
+  const rulesByDriver = new Map<DriverName, CompiledRule[]>();
+  for (const rule of table.rules) {
     const names = namesByDriver.get(rule.driver) ?? namesOf(rule.driver);
     namesByDriver.set(rule.driver, names);
     refuseShadows(table, names);
-    const compiled = compileRule(rule, { names, constants: table.constants, lookUps: table.lookUps });
-    if (rule.gives !== null) {
-      if (names.has(rule.gives) || RESERVED_NAMES.includes(rule.gives)) throw new RuleRefused(rule.gives, "that name is taken already");
-      names.set(rule.gives, "number");
-    }
-    return compiled;
-  });
-  return { rules };
+    const compiled = compileRule(rule, names, table);
+    rulesByDriver.set(rule.driver, [...(rulesByDriver.get(rule.driver) ?? []), compiled]);
+  }
+  return { rulesByDriver };
 }
 
 const compiledTables = new WeakMap<TimeTable, CompiledTimeTable>();

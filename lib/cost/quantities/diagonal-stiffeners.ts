@@ -33,9 +33,10 @@ export function takeDiagonalStiffeners(take: QuantityTake, context: MeasureConte
       clipMm: column.rootMm,
       overlapMm2: 0,
     });
-    const edge = { weld: measure.weld, plateThicknessMm: measure.thicknessMm, clearGapMm: clearMm };
     weldEdges(take, {
-      ...edge,
+      weld: measure.weld,
+      plateThicknessMm: measure.thicknessMm,
+      clearGapMm: clearMm,
       edges: parts,
       edgeLengthMm: lengthMm - 2 * column.rootMm,
       againstMm: column.webThicknessMm,
@@ -44,7 +45,9 @@ export function takeDiagonalStiffeners(take: QuantityTake, context: MeasureConte
     });
     // The acute side of a diagonal's end leaves little room for the gun.
     weldEdges(take, {
-      ...edge,
+      weld: measure.weld,
+      plateThicknessMm: measure.thicknessMm,
+      clearGapMm: clearMm,
       edges: 2 * parts,
       edgeLengthMm: measure.widthMm - column.rootMm,
       againstMm: column.flangeThicknessMm,

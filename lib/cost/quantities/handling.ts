@@ -7,19 +7,17 @@ export interface HandlingPlan {
   readonly records: readonly QuantityRecord[];
 }
 
+// Written out field by field, twice: this runs for every run of every candidate, and spreading an object costs more than all the rest.
 function weldRecord(run: WeldRun, flangeRunsUpright: boolean): QuantityRecord {
-  const upright = run.on === "flange" && flangeRunsUpright;
-  const shared = {
-    lengthM: run.lengthM,
-    runs: run.runs,
-    areaMm2: weldAreaMm2(run),
-    thickestMm: run.thickestMm,
-    clearGapMm: run.clearGapMm,
-    gunAngle: run.gunAngle,
-    position: upright ? "PF" : "PB",
-  };
-  if (run.type === "fillet") return { driver: "fillet-weld", group: "", values: { throatMm: run.sizeMm, ...shared } };
-  return { driver: "butt-weld", group: "", values: { depthMm: run.sizeMm, ...shared } };
+  const { lengthM, runs, thickestMm, clearGapMm, gunAngle } = run;
+  const areaMm2 = weldAreaMm2(run);
+  const position = run.on === "flange" && flangeRunsUpright ? "PF" : "PB";
+  if (run.type === "fillet") {
+    const values = { throatMm: run.sizeMm, lengthM, runs, areaMm2, thickestMm, position, clearGapMm, gunAngle };
+    return { driver: "fillet-weld", group: "", values };
+  }
+  const values = { depthMm: run.sizeMm, lengthM, runs, areaMm2, thickestMm, position, clearGapMm, gunAngle };
+  return { driver: "butt-weld", group: "", values };
 }
 
 function plan(key: HandlingPlan["key"], turns: number, upright: boolean, { weldRuns, pieceMassKg }: Quantities, nodesPerLift: number): HandlingPlan {

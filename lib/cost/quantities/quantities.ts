@@ -1,6 +1,6 @@
 import type { QuantityRecord } from "../drivers";
 import type { ProductMasses, ProductName } from "../products";
-import { PRODUCTS, steelMassKg } from "../products";
+import { steelMassKg } from "../products";
 
 /** Where a run lies while the column is on trestles with its web level: on the web, or against a flange. */
 export type RunOn = "web" | "flange";
@@ -35,11 +35,15 @@ export class QuantityTake {
   readonly weldRuns: WeldRun[] = [];
   facesWelded = 0;
   partsPlaced = 0;
-  readonly masses: Record<ProductName, number>;
-
-  constructor() {
-    this.masses = Object.fromEntries(PRODUCTS.map((product) => [product, 0])) as Record<ProductName, number>;
-  }
+  readonly masses: Record<ProductName, number> = {
+    plate: 0,
+    section: 0,
+    "threaded-bar": 0,
+    bolt: 0,
+    nut: 0,
+    washer: 0,
+    "weld-metal": 0,
+  };
 
   addMass(product: ProductName, kg: number): void {
     this.masses[product] += kg;

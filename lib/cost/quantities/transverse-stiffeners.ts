@@ -29,9 +29,10 @@ export function takeTransverseStiffeners(take: QuantityTake, context: MeasureCon
     clipMm: measure.clipMm,
     overlapMm2: 0,
   });
-  const edge = { plateThicknessMm: measure.thicknessMm, clearGapMm: clearMm, gunAngle: "free" as const };
   weldEdges(take, {
-    ...edge,
+    plateThicknessMm: measure.thicknessMm,
+    clearGapMm: clearMm,
+    gunAngle: "free",
     weld: measure.webWeld,
     edges: parts,
     edgeLengthMm: lengthMm - ends * measure.clipMm,
@@ -39,7 +40,9 @@ export function takeTransverseStiffeners(take: QuantityTake, context: MeasureCon
     on: "web",
   });
   weldEdges(take, {
-    ...edge,
+    plateThicknessMm: measure.thicknessMm,
+    clearGapMm: clearMm,
+    gunAngle: "free",
     weld: measure.flangeWeld,
     edges: parts * ends,
     edgeLengthMm: measure.widthMm - measure.clipMm,

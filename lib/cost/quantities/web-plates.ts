@@ -24,15 +24,23 @@ export function takeWebPlates(take: QuantityTake, context: MeasureContext, measu
     clipMm: 0,
     overlapMm2: widthMm * heightMm,
   });
-  const run = { on: "web" as const, thickestMm: Math.max(thicknessMm, column.webThicknessMm), clearGapMm: clearDepthMm(column) };
-  const long = { ...run, lengthM: (2 * sides * heightMm) / 1000, runs: 2 * sides, gunAngle: "restricted" as const };
-  const endThroatMm = measure.weld.kind === "fillet" ? measure.weld.throatMm : thicknessMm / Math.SQRT2;
-  if (measure.weld.kind === "fillet") {
-    take.weld({ ...long, type: "fillet", sizeMm: measure.weld.throatMm });
-  } else {
-    takeBevels(take, 2 * sides, heightMm, thicknessMm);
-    take.weld({ ...long, type: "butt", sizeMm: thicknessMm });
-  }
-  take.weld({ ...run, type: "fillet", sizeMm: endThroatMm, lengthM: (2 * sides * widthMm) / 1000, runs: 2 * sides, gunAngle: "free" });
+  const runs = 2 * sides;
+  const thickestMm = Math.max(thicknessMm, column.webThicknessMm);
+  const clearGapMm = clearDepthMm(column);
+  const isButt = measure.weld.kind === "butt";
+  const throatMm = measure.weld.kind === "fillet" ? measure.weld.throatMm : thicknessMm / Math.SQRT2;
+  if (isButt) takeBevels(take, runs, heightMm, thicknessMm);
+  take.weld({
+    type: isButt ? "butt" : "fillet",
+    sizeMm: isButt ? thicknessMm : throatMm,
+    lengthM: (runs * heightMm) / 1000,
+    runs,
+    on: "web",
+    thickestMm,
+    clearGapMm,
+    // Beside the root the flange is in the way of the gun.
+    gunAngle: "restricted",
+  });
+  take.weld({ type: "fillet", sizeMm: throatMm, lengthM: (runs * widthMm) / 1000, runs, on: "web", thickestMm, clearGapMm, gunAngle: "free" });
   take.facesWelded = Math.max(take.facesWelded, sides);
 }
