@@ -7,7 +7,8 @@ import { contentSecurityPolicy } from "@/lib/http/content-security-policy";
 /** Pages that need no session. */
 const OPEN_PAGES = ["/sign-in", "/method", "/accessibility"];
 
-const isOpen = (path: string): boolean => OPEN_PAGES.some((page) => path === page || path.startsWith(`${page}/`));
+const isOpen = (path: string): boolean =>
+  OPEN_PAGES.some((page) => path === page || path.startsWith(`${page}/`));
 
 /**
  * For pages only: sends whoever has no session cookie of ours to sign in, and sets the content security

@@ -1,7 +1,17 @@
-import { type CreationOptional, DataTypes, type InferAttributes, type InferCreationAttributes, Model, type Sequelize } from "sequelize";
+import {
+  type CreationOptional,
+  DataTypes,
+  type InferAttributes,
+  type InferCreationAttributes,
+  Model,
+  type Sequelize,
+} from "sequelize";
 
 /** An option that a designer has set aside on a node. */
-export class NodeExclusion extends Model<InferAttributes<NodeExclusion>, InferCreationAttributes<NodeExclusion>> {
+export class NodeExclusion extends Model<
+  InferAttributes<NodeExclusion>,
+  InferCreationAttributes<NodeExclusion>
+> {
   declare nodeId: string;
   declare optionKey: string;
   declare excludedBy: string;

@@ -1,8 +1,17 @@
-import { DataTypes, type InferAttributes, type InferCreationAttributes, Model, type Sequelize } from "sequelize";
+import {
+  DataTypes,
+  type InferAttributes,
+  type InferCreationAttributes,
+  Model,
+  type Sequelize,
+} from "sequelize";
 import type { NodeDocument } from "@/lib/schemas/node-document";
 
 /** Every document that was ever saved for a node. */
-export class NodeRevision extends Model<InferAttributes<NodeRevision>, InferCreationAttributes<NodeRevision>> {
+export class NodeRevision extends Model<
+  InferAttributes<NodeRevision>,
+  InferCreationAttributes<NodeRevision>
+> {
   declare nodeId: string;
   declare version: number;
   declare document: NodeDocument;

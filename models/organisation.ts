@@ -1,7 +1,17 @@
-import { type CreationOptional, DataTypes, type InferAttributes, type InferCreationAttributes, Model, type Sequelize } from "sequelize";
+import {
+  type CreationOptional,
+  DataTypes,
+  type InferAttributes,
+  type InferCreationAttributes,
+  Model,
+  type Sequelize,
+} from "sequelize";
 
 /** A firm. People, projects and figures belong to one. */
-export class Organisation extends Model<InferAttributes<Organisation>, InferCreationAttributes<Organisation>> {
+export class Organisation extends Model<
+  InferAttributes<Organisation>,
+  InferCreationAttributes<Organisation>
+> {
   declare id: CreationOptional<string>;
   declare name: string;
   declare createdAt: CreationOptional<Date>;

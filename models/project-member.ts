@@ -1,7 +1,17 @@
-import { type CreationOptional, DataTypes, type InferAttributes, type InferCreationAttributes, Model, type Sequelize } from "sequelize";
+import {
+  type CreationOptional,
+  DataTypes,
+  type InferAttributes,
+  type InferCreationAttributes,
+  Model,
+  type Sequelize,
+} from "sequelize";
 
 /** Who sees a project; a member may come from another organisation. */
-export class ProjectMember extends Model<InferAttributes<ProjectMember>, InferCreationAttributes<ProjectMember>> {
+export class ProjectMember extends Model<
+  InferAttributes<ProjectMember>,
+  InferCreationAttributes<ProjectMember>
+> {
   declare projectId: string;
   declare personId: string;
   declare addedBy: string;

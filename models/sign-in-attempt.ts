@@ -1,7 +1,17 @@
-import { type CreationOptional, DataTypes, type InferAttributes, type InferCreationAttributes, Model, type Sequelize } from "sequelize";
+import {
+  type CreationOptional,
+  DataTypes,
+  type InferAttributes,
+  type InferCreationAttributes,
+  Model,
+  type Sequelize,
+} from "sequelize";
 
 /** One try to sign in: kept in the database, so that the limit survives a restart. */
-export class SignInAttempt extends Model<InferAttributes<SignInAttempt>, InferCreationAttributes<SignInAttempt>> {
+export class SignInAttempt extends Model<
+  InferAttributes<SignInAttempt>,
+  InferCreationAttributes<SignInAttempt>
+> {
   declare id: CreationOptional<string>;
   /** As typed, lower case; need not be anybody's. */
   declare email: string;

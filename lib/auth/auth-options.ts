@@ -5,7 +5,7 @@ import { writeAudit } from "@/lib/db/repositories/audit";
 import { findLiveSession, revokeSession } from "@/lib/db/repositories/sessions";
 import { inTransaction } from "@/lib/db/transaction";
 import { logger } from "@/lib/log/logger";
-import { signIn } from "@/lib/services/sign-in";
+import { signIn } from "./sign-in";
 import { safeCallbackPath } from "./callback-path";
 import { networkAddress } from "./network-address";
 import { isSecure, SESSION_SECONDS, sessionCookieName } from "./session-cookie";
@@ -36,7 +36,9 @@ const credentials = Credentials({
       address: networkAddress(headers?.["x-forwarded-for"]),
     });
     if (answer.kind === "too-many-tries") throw new Error(TOO_MANY_TRIES);
-    return answer.kind === "signed-in" ? { id: answer.personId, name: answer.name, sessionId: answer.sessionId } : null;
+    return answer.kind === "signed-in"
+      ? { id: answer.personId, name: answer.name, sessionId: answer.sessionId }
+      : null;
   },
 });
 

@@ -7,10 +7,14 @@ export const HOME_PATH = "/projects";
  */
 export function safeCallbackPath(wish: string | null | undefined, ownOrigin?: string): string {
   if (wish === null || wish === undefined || wish === "") return HOME_PATH;
-  const path = ownOrigin !== undefined && wish.startsWith(`${ownOrigin}/`) ? wish.slice(ownOrigin.length) : wish;
+  const path =
+    ownOrigin !== undefined && wish.startsWith(`${ownOrigin}/`) ? wish.slice(ownOrigin.length) : wish;
   // eslint-disable-next-line no-control-regex
-  const canLeadElsewhere = !path.startsWith("/") || /^\/[/\\]/.test(path) || /[\\\u0000-\u001f\u007f]/.test(path);
+  const canLeadElsewhere =
+    !path.startsWith("/") || /^\/[/\\]/.test(path) || /[\\\u0000-\u001f\u007f]/.test(path);
   if (canLeadElsewhere) return HOME_PATH;
   const landed = new URL(path, "http://own.invalid");
-  return landed.origin === "http://own.invalid" ? `${landed.pathname}${landed.search}${landed.hash}` : HOME_PATH;
+  return landed.origin === "http://own.invalid"
+    ? `${landed.pathname}${landed.search}${landed.hash}`
+    : HOME_PATH;
 }

@@ -33,7 +33,11 @@ export class ApiProblem extends Error {
 export function problemFrom(status: number, body: unknown): ApiProblem {
   const parsed = Problem.safeParse(body);
   if (!parsed.success) {
-    return new ApiProblem(status, "unexpected", "The server gave an answer that this page cannot read. Try again.");
+    return new ApiProblem(
+      status,
+      "unexpected",
+      "The server gave an answer that this page cannot read. Try again.",
+    );
   }
   const { code, message, fields, requestId, current } = parsed.data.error;
   return new ApiProblem(status, code, message, fields, requestId, current);

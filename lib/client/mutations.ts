@@ -49,7 +49,8 @@ export const saveNodeMutation = (queryClient: QueryClient, nodeId: string) =>
 export const createNodeMutation = (queryClient: QueryClient, projectId: string) =>
   mutationOptions({
     mutationFn: async (document: NodeDocument): Promise<Node> =>
-      (await request(NodeReply, `/api/projects/${projectId}/nodes`, { method: "POST", body: { document } })).node,
+      (await request(NodeReply, `/api/projects/${projectId}/nodes`, { method: "POST", body: { document } }))
+        .node,
     onSuccess: async (node) => {
       queryClient.setQueryData(nodeKeys.one(node.id), node);
       await queryClient.invalidateQueries({ queryKey: projectKeys.all });
@@ -81,7 +82,12 @@ export const recalculateMutation = (queryClient: QueryClient, nodeId: string) =>
 export const setExclusionsMutation = (queryClient: QueryClient, nodeId: string) =>
   mutationOptions({
     mutationFn: async (optionKeys: readonly string[]): Promise<readonly string[]> =>
-      (await request(ExclusionsReply, `/api/nodes/${nodeId}/exclusions`, { method: "PUT", body: { optionKeys } })).excluded,
+      (
+        await request(ExclusionsReply, `/api/nodes/${nodeId}/exclusions`, {
+          method: "PUT",
+          body: { optionKeys },
+        })
+      ).excluded,
     onSuccess: async () => {
       await Promise.all([
         queryClient.invalidateQueries({ queryKey: comparisonKeys.ofNode(nodeId), exact: true }),
@@ -108,7 +114,8 @@ export const updateProjectMutation = (queryClient: QueryClient, projectId: strin
 export const setStockPlatesMutation = (queryClient: QueryClient) =>
   mutationOptions({
     mutationFn: async (input: SetStockPlates) =>
-      (await request(StockPlatesReply, "/api/catalog/stock-plates", { method: "PUT", body: input })).stockPlates,
+      (await request(StockPlatesReply, "/api/catalog/stock-plates", { method: "PUT", body: input }))
+        .stockPlates,
     onSuccess: async () => {
       await Promise.all([
         queryClient.invalidateQueries({ queryKey: catalogKey }),

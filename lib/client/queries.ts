@@ -12,7 +12,11 @@ const MINUTE_MS = 60_000;
 
 /** Who is signed in and what they may do. */
 export const meOptions = () =>
-  queryOptions({ queryKey: meKey, queryFn: ({ signal }) => request(Me, "/api/me", { signal }), staleTime: 5 * MINUTE_MS });
+  queryOptions({
+    queryKey: meKey,
+    queryFn: ({ signal }) => request(Me, "/api/me", { signal }),
+    staleTime: 5 * MINUTE_MS,
+  });
 
 /** Every project that the signed-in person may see. */
 export const projectsOptions = () =>
@@ -24,7 +28,8 @@ export const projectsOptions = () =>
 export const projectOptions = (projectId: string) =>
   queryOptions({
     queryKey: projectKeys.one(projectId),
-    queryFn: async ({ signal }) => (await request(ProjectReply, `/api/projects/${projectId}`, { signal })).project,
+    queryFn: async ({ signal }) =>
+      (await request(ProjectReply, `/api/projects/${projectId}`, { signal })).project,
   });
 
 /** The register: one row a node, and how money stands in it. */
@@ -62,7 +67,8 @@ export const revisionOptions = (nodeId: string, version: number) =>
 export const comparisonOptions = (nodeId: string) =>
   queryOptions({
     queryKey: comparisonKeys.ofNode(nodeId),
-    queryFn: async ({ signal }) => (await request(ComparisonReply, `/api/nodes/${nodeId}/comparison`, { signal })).comparison,
+    queryFn: async ({ signal }) =>
+      (await request(ComparisonReply, `/api/nodes/${nodeId}/comparison`, { signal })).comparison,
     staleTime: MINUTE_MS,
   });
 
@@ -71,7 +77,9 @@ export const workingOptions = (nodeId: string, comparisonId: string, optionKey: 
   queryOptions({
     queryKey: comparisonKeys.working(nodeId, comparisonId, optionKey),
     queryFn: ({ signal }) =>
-      request(WorkingReply, `/api/nodes/${nodeId}/working?option=${encodeURIComponent(optionKey)}`, { signal }),
+      request(WorkingReply, `/api/nodes/${nodeId}/working?option=${encodeURIComponent(optionKey)}`, {
+        signal,
+      }),
     staleTime: Infinity,
   });
 

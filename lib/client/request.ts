@@ -37,7 +37,11 @@ export async function request<T extends z.ZodType>(
   if (!response.ok) throw problemFrom(response.status, body);
   const parsed = reply.safeParse(body);
   if (!parsed.success) {
-    throw new ApiProblem(response.status, "unexpected", "The server gave an answer that this page cannot read. Load it again.");
+    throw new ApiProblem(
+      response.status,
+      "unexpected",
+      "The server gave an answer that this page cannot read. Load it again.",
+    );
   }
   return parsed.data;
 }

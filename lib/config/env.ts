@@ -14,7 +14,9 @@ const Settings = z.object({
   PANELWRIGHT_DATA_DIR: z.string().default(".data"),
   PANELWRIGHT_DEMO: yesOrNo.default(true),
   NEXTAUTH_SECRET: z.string().min(32, "Give at least 32 characters.").optional(),
-  NEXTAUTH_URL: z.url({ protocol: /^https?$/, error: "Write the address people type, with http:// or https://." }).optional(),
+  NEXTAUTH_URL: z
+    .url({ protocol: /^https?$/, error: "Write the address people type, with http:// or https://." })
+    .optional(),
   LOG_LEVEL: z.enum(LOG_LEVELS, `Choose one of ${LOG_LEVELS.join(", ")}.`).default("info"),
   NODE_ENV: z.enum(["development", "production", "test"]).default("development"),
 });

@@ -33,10 +33,16 @@ async function withUmzug<T>(url: string, work: (umzug: Umzug<QueryInterface>) =>
   const found = await listMigrations(path.join(process.cwd(), "migrations"));
   const run = async (file: string, step: "up" | "down"): Promise<void> => {
     const migration = (await import(/* @vite-ignore */ pathToFileURL(file).href)) as Migration;
-    await sequelize.transaction((transaction) => migration[step]({ queryInterface: sequelize.getQueryInterface(), transaction }));
+    await sequelize.transaction((transaction) =>
+      migration[step]({ queryInterface: sequelize.getQueryInterface(), transaction }),
+    );
   };
   const umzug = new Umzug<QueryInterface>({
-    migrations: found.map(({ name, file }) => ({ name, up: () => run(file, "up"), down: () => run(file, "down") })),
+    migrations: found.map(({ name, file }) => ({
+      name,
+      up: () => run(file, "up"),
+      down: () => run(file, "down"),
+    })),
     context: sequelize.getQueryInterface(),
     storage: new SequelizeStorage({ sequelize, tableName: "schema_migrations" }),
     logger: undefined,

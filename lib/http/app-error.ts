@@ -35,4 +35,5 @@ export class AppError extends Error {
   }
 }
 
-export const notFound = (thing: string): AppError => new AppError("not_found", `That ${thing} does not exist.`);
+export const notFound = (thing: string): AppError =>
+  new AppError("not_found", `That ${thing} does not exist.`);

@@ -3,7 +3,8 @@ import { AppError } from "./app-error";
 /** Largest body that a route reads, bytes. */
 export const BODY_LIMIT_BYTES = 1_048_576;
 
-const tooLarge = (): AppError => new AppError("too_large", "The request is larger than 1 MB. Send fewer load cases or options.");
+const tooLarge = (): AppError =>
+  new AppError("too_large", "The request is larger than 1 MB. Send fewer load cases or options.");
 
 /** Reads no further than the limit, whatever the sender says the length is. */
 async function readLimited(body: ReadableStream<Uint8Array>): Promise<string> {

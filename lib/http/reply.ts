@@ -29,7 +29,10 @@ export function fieldErrors(error: z.ZodError, prefix: readonly string[] = []): 
     const path = [...prefix, ...issue.path.map(String)];
     // One entry for each unknown name, so that it can be pointed at.
     if (issue.code === "unrecognized_keys") {
-      return issue.keys.map((key) => ({ path: [...path, key].join("."), message: "There is no such field." }));
+      return issue.keys.map((key) => ({
+        path: [...path, key].join("."),
+        message: "There is no such field.",
+      }));
     }
     return [{ path: path.join("."), message: issue.message }];
   });

@@ -42,25 +42,40 @@ interface Shapes<P extends z.ZodType, Q extends z.ZodType, B extends z.ZodType> 
   readonly invalidReply?: (fields: readonly FieldError[]) => Response;
 }
 
-type Settings<A extends Access, P extends z.ZodType, Q extends z.ZodType, B extends z.ZodType> = Shapes<P, Q, B> & {
+type Settings<A extends Access, P extends z.ZodType, Q extends z.ZodType, B extends z.ZodType> = Shapes<
+  P,
+  Q,
+  B
+> & {
   readonly access: A;
   readonly run: (
-    asked: Asked<z.output<P>, z.output<Q>, z.output<B>> & (A extends "signed-in" ? object : { readonly project: ProjectRow }),
+    asked: Asked<z.output<P>, z.output<Q>, z.output<B>> &
+      (A extends "signed-in" ? object : { readonly project: ProjectRow }),
   ) => Promise<unknown>;
 };
 
-export type RouteHandler = ((request: Request, context: PathContext) => Promise<Response>) & { readonly access: Access };
+export type RouteHandler = ((request: Request, context: PathContext) => Promise<Response>) & {
+  readonly access: Access;
+};
 
-async function projectOf(access: Access, actor: SignedIn, params: Record<string, unknown>): Promise<ProjectRow | null> {
+async function projectOf(
+  access: Access,
+  actor: SignedIn,
+  params: Record<string, unknown>,
+): Promise<ProjectRow | null> {
   if (access === "signed-in") return null;
   const thing = access === "project" ? "project" : "node";
-  const projectId = access === "project" ? String(params["projectId"]) : await findProjectIdOfNode(String(params["nodeId"]));
+  const projectId =
+    access === "project" ? String(params["projectId"]) : await findProjectIdOfNode(String(params["nodeId"]));
   const project = projectId === null ? null : await findProject(projectId);
   if (project === null || !canViewProject(actor, project)) throw notFound(thing);
   return project;
 }
 
-async function pathParams<P extends z.ZodType>(shape: P | undefined, context: PathContext): Promise<z.output<P>> {
+async function pathParams<P extends z.ZodType>(
+  shape: P | undefined,
+  context: PathContext,
+): Promise<z.output<P>> {
   const parsed = (shape ?? z.object({})).safeParse(await context.params);
   if (!parsed.success) throw notFound("page");
   return parsed.data as z.output<P>;
@@ -75,16 +90,25 @@ async function shapes<Q extends z.ZodType, B extends z.ZodType>(
   const queried = query?.safeParse(search);
   const sent = body?.safeParse(await readJson(request));
   const fields = [queried, sent].flatMap((part) => (part?.success === false ? fieldErrors(part.error) : []));
-  if (fields.length > 0) throw new AppError("invalid", "Some of this cannot be taken as it stands.", { fields });
+  if (fields.length > 0)
+    throw new AppError("invalid", "Some of this cannot be taken as it stands.", { fields });
   return { query: queried?.data as z.output<Q>, body: sent?.data as z.output<B> };
 }
 
-function refusal(error: unknown, request: Request, requestId: string, settings: Pick<Shapes<never, never, never>, "invalidReply">): Response {
+function refusal(
+  error: unknown,
+  request: Request,
+  requestId: string,
+  settings: Pick<Shapes<never, never, never>, "invalidReply">,
+): Response {
   if (error instanceof AppError) {
     if (error.code === "invalid" && settings.invalidReply) return settings.invalidReply(error.fields);
     return problemReply(error, requestId);
   }
-  logger.error({ err: error, requestId, method: request.method, path: new URL(request.url).pathname }, "request failed");
+  logger.error(
+    { err: error, requestId, method: request.method, path: new URL(request.url).pathname },
+    "request failed",
+  );
   const message = "Something went wrong here, and it has been written down. Nothing was saved.";
   return problemReply(new AppError("unexpected", message), requestId);
 }
@@ -111,7 +135,9 @@ export function route<
       const { query, body } = await shapes(request, settings);
       const asked = { actor, params, query, body, request, project };
       const answer = await settings.run(asked as unknown as Parameters<typeof settings.run>[0]);
-      return answer instanceof Response ? answer : jsonReply(answer, settings.status ?? 200, { "x-request-id": requestId });
+      return answer instanceof Response
+        ? answer
+        : jsonReply(answer, settings.status ?? 200, { "x-request-id": requestId });
     } catch (error) {
       return refusal(error, request, requestId, settings);
     }

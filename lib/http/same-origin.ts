@@ -10,7 +10,9 @@ function hostOf(request: Request): string {
 function isOwnOrigin(origin: string, request: Request, baseUrl: string | undefined): boolean {
   if (!URL.canParse(origin)) return false;
   const given = new URL(origin);
-  return given.host === hostOf(request) || (baseUrl !== undefined && given.origin === new URL(baseUrl).origin);
+  return (
+    given.host === hostOf(request) || (baseUrl !== undefined && given.origin === new URL(baseUrl).origin)
+  );
 }
 
 /**
@@ -23,8 +25,12 @@ export function checkOrigin(request: Request, baseUrl: string | undefined): void
   if (READING.has(request.method)) return;
   const origin = request.headers.get("origin");
   const site = request.headers.get("sec-fetch-site");
-  const isFine = origin !== null && isOwnOrigin(origin, request, baseUrl) && (site === null || site === "same-origin");
+  const isFine =
+    origin !== null && isOwnOrigin(origin, request, baseUrl) && (site === null || site === "same-origin");
   if (!isFine) {
-    throw new AppError("other_origin", "Changes are taken only from the pages of this site: send its address as Origin.");
+    throw new AppError(
+      "other_origin",
+      "Changes are taken only from the pages of this site: send its address as Origin.",
+    );
   }
 }

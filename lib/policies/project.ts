@@ -12,7 +12,8 @@ export interface ProjectFacts {
 /** Members may come from another organisation: membership decides, not the organisation alone. */
 const isMember = (actor: Actor, project: ProjectFacts): boolean => project.memberIds.has(actor.personId);
 
-const isOwn = (actor: Actor, project: ProjectFacts): boolean => project.organisationId === actor.organisationId;
+const isOwn = (actor: Actor, project: ProjectFacts): boolean =>
+  project.organisationId === actor.organisationId;
 
 /** An admin sees every project of the own organisation, to look after who is in it. */
 export const canViewProject = (actor: Actor, project: ProjectFacts): boolean =>

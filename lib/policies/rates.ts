@@ -6,7 +6,8 @@ export interface RatesFacts {
 }
 
 /** Everybody in the house sees what work costs it; nobody outside does. */
-export const canViewRates = (actor: Actor, rates: RatesFacts): boolean => rates.organisationId === actor.organisationId;
+export const canViewRates = (actor: Actor, rates: RatesFacts): boolean =>
+  rates.organisationId === actor.organisationId;
 
 export const canEditRates = (actor: Actor, rates: RatesFacts): boolean =>
   canViewRates(actor, rates) && hasRight(actor, "rates.edit");

@@ -7,7 +7,10 @@ import { costIndexer, NO_CURRENCY } from "./cost-index";
 export const SET_ASIDE = "Set aside by the designer.";
 
 /** The options set aside lose their rank and the others close up; the figures stay. */
-export function rankWithout(options: readonly OptionDocument[], excluded: readonly string[]): OptionDocument[] {
+export function rankWithout(
+  options: readonly OptionDocument[],
+  excluded: readonly string[],
+): OptionDocument[] {
   const ranks = options
     .filter((option) => option.rank !== null && !excluded.includes(option.key))
     .map((option) => Number(option.rank))
@@ -62,10 +65,16 @@ export const presentComparison = (comparison: ComparisonRecord, view: Comparison
 function figuresOf(option: OptionDocument | undefined): OptionFigures | null {
   if (option === undefined) return null;
   if ("outsideScope" in option) return { passes: false, utilisation: null, cost: null, rank: null };
-  return { passes: option.passes, utilisation: option.governing.utilisation, cost: option.estimate.cost, rank: option.rank };
+  return {
+    passes: option.passes,
+    utilisation: option.governing.utilisation,
+    cost: option.estimate.cost,
+    rank: option.rank,
+  };
 }
 
-const isSame = (a: OptionFigures | null, b: OptionFigures | null): boolean => JSON.stringify(a) === JSON.stringify(b);
+const isSame = (a: OptionFigures | null, b: OptionFigures | null): boolean =>
+  JSON.stringify(a) === JSON.stringify(b);
 
 /** What came, went or moved between two results, in the order of the later one. */
 export function differencesBetween(
@@ -79,7 +88,12 @@ export function differencesBetween(
   const keys = [...new Set([...is, ...was].map((option) => option.key))];
   return keys.flatMap((key) => {
     const [old, now] = [was, is].map((options) => options.find((option) => option.key === key));
-    const difference = { key, name: (now ?? old)?.name ?? key, before: figuresOf(old), after: figuresOf(now) };
+    const difference = {
+      key,
+      name: (now ?? old)?.name ?? key,
+      before: figuresOf(old),
+      after: figuresOf(now),
+    };
     return isSame(difference.before, difference.after) ? [] : [difference];
   });
 }

@@ -47,7 +47,9 @@ export function presentNodeRow(
   const leading = summary?.ranked.find((option) => !node.excluded.includes(option.key)) ?? null;
   const toIndex = costIndexer(summary?.ranked.map((option) => option.cost) ?? []);
   const shown =
-    leading === null || canSeeMoney(actor, project) ? leading : { ...leading, cost: toIndex(leading.cost), currency: NO_CURRENCY };
+    leading === null || canSeeMoney(actor, project)
+      ? leading
+      : { ...leading, cost: toIndex(leading.cost), currency: NO_CURRENCY };
   return {
     id: node.id,
     reference: node.reference,

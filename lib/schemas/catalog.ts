@@ -64,7 +64,13 @@ const Fastener = z.object({
   source,
 });
 
-const FastenerGrade = z.object({ name: z.string(), yieldMpa: figure, ultimateMpa: figure, alphaV: figure, source });
+const FastenerGrade = z.object({
+  name: z.string(),
+  yieldMpa: figure,
+  ultimateMpa: figure,
+  alphaV: figure,
+  source,
+});
 
 export const StockPlate = z.object({ thicknessMm: figure, source });
 

@@ -70,7 +70,10 @@ export const ComparisonDifference = z.object({
 });
 
 export const ComparisonReply = z.object({ comparison: Comparison });
-export const RecalculationReply = z.object({ comparison: Comparison, differences: z.array(ComparisonDifference) });
+export const RecalculationReply = z.object({
+  comparison: Comparison,
+  differences: z.array(ComparisonDifference),
+});
 
 /** One option of a stored comparison, calculated again from its own inputs with every step of the working. */
 export const WorkingQuery = z.object({ option: z.string().min(1, "Say which option.").max(60) });

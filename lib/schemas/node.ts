@@ -42,7 +42,13 @@ export const Node = SavedDocument.extend({
  * Where a node stands: `bare-passes` nothing to do; `solved` an option ranks first; `nothing-passes`
  * no option does; `outside-scope` the method does not cover it; `not-compared` no result yet.
  */
-export const NODE_STATES = ["bare-passes", "solved", "nothing-passes", "outside-scope", "not-compared"] as const;
+export const NODE_STATES = [
+  "bare-passes",
+  "solved",
+  "nothing-passes",
+  "outside-scope",
+  "not-compared",
+] as const;
 
 export const NodeRow = z.object({
   id: z.uuid(),
@@ -64,7 +70,11 @@ export const NodeRow = z.object({
 export const NodeReply = z.object({ node: Node });
 export const NodeListReply = z.object({ nodes: z.array(NodeRow), money: MoneyShown });
 
-export const NodeRevision = z.object({ version: z.number().int(), savedBy: PersonName, savedAt: z.iso.datetime() });
+export const NodeRevision = z.object({
+  version: z.number().int(),
+  savedBy: PersonName,
+  savedAt: z.iso.datetime(),
+});
 export const NodeRevisionListReply = z.object({ revisions: z.array(NodeRevision) });
 export const NodeRevisionReply = z.object({ revision: SavedDocument });
 

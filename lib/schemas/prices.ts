@@ -8,7 +8,11 @@ import type { ShopPrices } from "@/lib/cost/prices";
 export const PricesReply = z.object({
   prices: z.custom<ShopPrices>(
     (value) =>
-      typeof value === "object" && value !== null && "timeTable" in value && "rateBook" in value && "carbon" in value,
+      typeof value === "object" &&
+      value !== null &&
+      "timeTable" in value &&
+      "rateBook" in value &&
+      "carbon" in value,
     "The prices have a rate book, a time table and a carbon table.",
   ),
 });

@@ -60,7 +60,8 @@ async function mustFind(project: ProjectRow, nodeId: string): Promise<NodeRecord
 export async function comparisonOf(actor: Actor, project: ProjectRow, nodeId: string): Promise<Comparison> {
   const [node, shop] = await Promise.all([mustFind(project, nodeId), loadShop(project.organisationId)]);
   const stored =
-    (await findLatestComparison(nodeId, node.version)) ?? (await calculateAndKeep(actor, project, node, shop));
+    (await findLatestComparison(nodeId, node.version)) ??
+    (await calculateAndKeep(actor, project, node, shop));
   return presentComparison(stored, {
     excluded: node.excluded,
     seesMoney: canSeeMoney(actor, project),

@@ -17,7 +17,10 @@ export interface Calculated extends CalculationKeys {
 
 const refused = (errors: readonly FieldError[]): AppError =>
   new AppError("invalid", "The node cannot be taken as it stands.", {
-    fields: errors.map(({ path, message }) => ({ path: path === "" ? "document" : `document.${path}`, message })),
+    fields: errors.map(({ path, message }) => ({
+      path: path === "" ? "document" : `document.${path}`,
+      message,
+    })),
   });
 
 /**
@@ -56,7 +59,10 @@ export function checkDocument(input: unknown, shop: Shop): Checked {
     return { document: parsed.document, calculated: calculate(parsed.document, shop) };
   } catch (error) {
     if (error instanceof AppError) throw error;
-    logger.error({ err: error, reference: parsed.document.reference }, "a node could not be calculated; it is saved without");
+    logger.error(
+      { err: error, reference: parsed.document.reference },
+      "a node could not be calculated; it is saved without",
+    );
     return { document: parsed.document, calculated: null };
   }
 }

@@ -20,11 +20,18 @@ import { type Calculated, checkDocument } from "./evaluate-node";
 import { loadShop } from "./shop";
 
 function mustEdit(actor: Actor, project: ProjectRow): void {
-  if (project.isLocked) throw new AppError("forbidden", "This project is issued and locked; nobody changes it.");
-  if (!canEditNode(actor, project)) throw new AppError("forbidden", "You may look at this node but not change it.");
+  if (project.isLocked)
+    throw new AppError("forbidden", "This project is issued and locked; nobody changes it.");
+  if (!canEditNode(actor, project))
+    throw new AppError("forbidden", "You may look at this node but not change it.");
 }
 
-async function lockForEdit(tx: Transaction, actor: Actor, projectId: string, nodeId: string): Promise<NodeRecord> {
+async function lockForEdit(
+  tx: Transaction,
+  actor: Actor,
+  projectId: string,
+  nodeId: string,
+): Promise<NodeRecord> {
   const project = await lockProject(tx, projectId);
   const node = await lockNode(tx, projectId, nodeId);
   if (project === null || node === null) throw notFound("node");
@@ -38,7 +45,12 @@ function mustBeCurrent(node: NodeRecord, expectedVersion: number): void {
   throw new AppError("conflict", message, { current: presentSaved(node) });
 }
 
-async function mustHaveFreeReference(tx: Transaction, projectId: string, reference: string, nodeId: string | null): Promise<void> {
+async function mustHaveFreeReference(
+  tx: Transaction,
+  projectId: string,
+  reference: string,
+  nodeId: string | null,
+): Promise<void> {
   if (!(await isReferenceTaken(tx, projectId, reference, nodeId))) return;
   const message = "Another node of this project has that mark already.";
   throw new AppError("invalid", message, { fields: [{ path: "document.reference", message }] });
@@ -50,9 +62,19 @@ async function mustFind(tx: Transaction, projectId: string, nodeId: string): Pro
   return node;
 }
 
-async function keepComparison(tx: Transaction, actor: Actor, node: NodeRecord, calculated: Calculated | null): Promise<void> {
+async function keepComparison(
+  tx: Transaction,
+  actor: Actor,
+  node: NodeRecord,
+  calculated: Calculated | null,
+): Promise<void> {
   if (calculated === null) return;
-  await insertComparison(tx, { ...calculated, nodeId: node.id, nodeVersion: node.version, createdBy: actor.personId });
+  await insertComparison(tx, {
+    ...calculated,
+    nodeId: node.id,
+    nodeVersion: node.version,
+    createdBy: actor.personId,
+  });
 }
 
 /** @throws AppError forbidden, invalid (every fault of the document, or a mark that is taken). */
@@ -65,11 +87,22 @@ export async function createNode(actor: Actor, project: ProjectRow, input: unkno
     if (locked === null) throw notFound("project");
     mustEdit(actor, locked);
     await mustHaveFreeReference(tx, projectId, document.reference, null);
-    const nodeId = await insertNode(tx, projectId, { document, savedBy: actor.personId, savedAt: new Date() });
+    const nodeId = await insertNode(tx, projectId, {
+      document,
+      savedBy: actor.personId,
+      savedAt: new Date(),
+    });
     const node = await mustFind(tx, projectId, nodeId);
     await keepComparison(tx, actor, node, calculated);
     const detail = { reference: document.reference };
-    await writeAudit(tx, { actorId: actor.personId, organisationId, projectId, action: "node.created", subjectId: nodeId, detail });
+    await writeAudit(tx, {
+      actorId: actor.personId,
+      organisationId,
+      projectId,
+      action: "node.created",
+      subjectId: nodeId,
+      detail,
+    });
     return node;
   });
 }
@@ -92,24 +125,47 @@ export async function saveNode(
     const node = await lockForEdit(tx, actor, projectId, nodeId);
     mustBeCurrent(node, input.expectedVersion);
     await mustHaveFreeReference(tx, projectId, document.reference, nodeId);
-    const version = await replaceDocument(tx, node, { document, savedBy: actor.personId, savedAt: new Date() });
+    const version = await replaceDocument(tx, node, {
+      document,
+      savedBy: actor.personId,
+      savedAt: new Date(),
+    });
     const saved = await mustFind(tx, projectId, nodeId);
     await keepComparison(tx, actor, saved, calculated);
     const detail = { version };
-    await writeAudit(tx, { actorId: actor.personId, organisationId, projectId, action: "node.saved", subjectId: nodeId, detail });
+    await writeAudit(tx, {
+      actorId: actor.personId,
+      organisationId,
+      projectId,
+      action: "node.saved",
+      subjectId: nodeId,
+      detail,
+    });
     return saved;
   });
 }
 
 /** Takes a node off the register; its revisions and comparisons stay. @throws AppError forbidden, conflict. */
-export async function deleteNode(actor: Actor, project: ProjectRow, nodeId: string, expectedVersion: number): Promise<void> {
+export async function deleteNode(
+  actor: Actor,
+  project: ProjectRow,
+  nodeId: string,
+  expectedVersion: number,
+): Promise<void> {
   await inTransaction(async (tx) => {
     const { id: projectId, organisationId } = project;
     const node = await lockForEdit(tx, actor, projectId, nodeId);
     mustBeCurrent(node, expectedVersion);
     await markDeleted(tx, nodeId, new Date());
     const detail = { reference: node.reference, version: node.version };
-    await writeAudit(tx, { actorId: actor.personId, organisationId, projectId, action: "node.deleted", subjectId: nodeId, detail });
+    await writeAudit(tx, {
+      actorId: actor.personId,
+      organisationId,
+      projectId,
+      action: "node.deleted",
+      subjectId: nodeId,
+      detail,
+    });
   });
 }
 

@@ -17,8 +17,14 @@ export interface OptionWorking {
 }
 
 /** The stored option calculated again as it was sized, with every step. */
-function withSteps(document: NodeDocument, { key, name, measures }: OptionDocument, shop: Shop): OptionDocument {
-  const evaluated = evaluateDocument({ ...document, options: [{ key, name, measures }] }, shop, { steps: "all" });
+function withSteps(
+  document: NodeDocument,
+  { key, name, measures }: OptionDocument,
+  shop: Shop,
+): OptionDocument {
+  const evaluated = evaluateDocument({ ...document, options: [{ key, name, measures }] }, shop, {
+    steps: "all",
+  });
   const option = evaluated.ok ? evaluated.result.options[0] : undefined;
   if (option === undefined) throw new Error(`The stored option ${key} cannot be calculated any more.`);
   return option;
@@ -26,7 +32,8 @@ function withSteps(document: NodeDocument, { key, name, measures }: OptionDocume
 
 /** Strengths and steps are the new ones; rank and money stand as they were stored, with their neighbours. */
 function asStored(fresh: OptionDocument, stored: OptionDocument): OptionDocument {
-  if ("outsideScope" in fresh || "outsideScope" in stored) return { ...fresh, rank: null, notRanked: stored.notRanked ?? "" };
+  if ("outsideScope" in fresh || "outsideScope" in stored)
+    return { ...fresh, rank: null, notRanked: stored.notRanked ?? "" };
   const { rank, notRanked, estimate, sizing } = stored;
   return { ...fresh, rank, notRanked, estimate, sizing };
 }
@@ -35,12 +42,20 @@ function asStored(fresh: OptionDocument, stored: OptionDocument): OptionDocument
  * One option of the stored comparison with its whole working, rebuilt from the comparison's own inputs.
  * Where the engine has moved on since, `caution` says that the numbers may differ.
  */
-export async function workingOf(actor: Actor, project: ProjectRow, nodeId: string, optionKey: string): Promise<OptionWorking> {
+export async function workingOf(
+  actor: Actor,
+  project: ProjectRow,
+  nodeId: string,
+  optionKey: string,
+): Promise<OptionWorking> {
   // Calculates the comparison where nobody has opened it yet, and shows money only to who may see it.
   const shown = await comparisonOf(actor, project, nodeId);
   const stored = shown.result.options.find((option) => option.key === optionKey);
   if (stored === undefined) throw notFound("option");
-  const [revision, shop] = await Promise.all([findRevision(nodeId, shown.nodeVersion), loadShop(project.organisationId)]);
+  const [revision, shop] = await Promise.all([
+    findRevision(nodeId, shown.nodeVersion),
+    loadShop(project.organisationId),
+  ]);
   if (revision === null) throw notFound("revision");
   const option = asStored(withSteps(revision.document, stored, shop), stored);
   const caution =

@@ -32,28 +32,48 @@ async function mustFind(tx: Transaction, projectId: string): Promise<ProjectRow>
 
 /** @throws AppError forbidden, invalid (a name that is taken). */
 export async function createProject(actor: Actor, input: CreateProject): Promise<ProjectRow> {
-  if (!canCreateProject(actor)) throw new AppError("forbidden", "Designers open projects; your role does not.");
+  if (!canCreateProject(actor))
+    throw new AppError("forbidden", "Designers open projects; your role does not.");
   const { personId, organisationId } = actor;
-  const project = { organisationId, name: input.name, description: input.description ?? "", createdBy: personId };
+  const project = {
+    organisationId,
+    name: input.name,
+    description: input.description ?? "",
+    createdBy: personId,
+  };
   return inTransaction(async (tx) => {
     const projectId = await insertProject(tx, project).catch((error: unknown) => {
       throw isUniqueBreach(error) ? nameTaken() : error;
     });
     const detail = { name: input.name };
-    await writeAudit(tx, { actorId: personId, organisationId, projectId, action: "project.created", subjectId: projectId, detail });
+    await writeAudit(tx, {
+      actorId: personId,
+      organisationId,
+      projectId,
+      action: "project.created",
+      subjectId: projectId,
+      detail,
+    });
     return mustFind(tx, projectId);
   });
 }
 
 /** @throws AppError forbidden, conflict (somebody else's change came first), invalid (a name that is taken). */
-export async function editProject(actor: Actor, projectId: string, input: UpdateProject): Promise<ProjectRow> {
+export async function editProject(
+  actor: Actor,
+  projectId: string,
+  input: UpdateProject,
+): Promise<ProjectRow> {
   return inTransaction(async (tx) => {
     const project = await lockProject(tx, projectId);
     if (project === null) throw notFound("project");
-    if (!canEditProject(actor, project)) throw new AppError("forbidden", "You may look at this project but not change it.");
+    if (!canEditProject(actor, project))
+      throw new AppError("forbidden", "You may look at this project but not change it.");
     if (project.version !== input.expectedVersion) {
       const { name, description, version } = project;
-      throw new AppError("conflict", "Somebody changed this project after you opened it.", { current: { name, description, version } });
+      throw new AppError("conflict", "Somebody changed this project after you opened it.", {
+        current: { name, description, version },
+      });
     }
     const change = {
       name: input.name ?? project.name,
@@ -65,7 +85,14 @@ export async function editProject(actor: Actor, projectId: string, input: Update
     });
     const { personId: actorId } = actor;
     const { organisationId } = project;
-    await writeAudit(tx, { actorId, organisationId, projectId, action: "project.edited", subjectId: projectId, detail: change });
+    await writeAudit(tx, {
+      actorId,
+      organisationId,
+      projectId,
+      action: "project.edited",
+      subjectId: projectId,
+      detail: change,
+    });
     return mustFind(tx, projectId);
   });
 }

@@ -2,8 +2,10 @@ import type { Catalog } from "@/lib/catalog/catalog";
 import { loadCatalog } from "@/lib/db/repositories/catalog";
 import { catalogKeyOf } from "./shop";
 
-/** The whole catalogue with its fingerprint. */
-export async function readCatalog(): Promise<{ readonly catalog: Catalog; readonly key: string }> {
-  const catalog = await loadCatalog(null);
+/** The whole catalogue with the plates that this organisation stocks, and its fingerprint. */
+export async function readCatalog(
+  organisationId: string,
+): Promise<{ readonly catalog: Catalog; readonly key: string }> {
+  const catalog = await loadCatalog(organisationId);
   return { catalog, key: catalogKeyOf(catalog) };
 }

@@ -6,6 +6,7 @@ import type { Actor } from "@/lib/policies/roles";
 
 /** The rate book, time table and carbon table that price an organisation's nodes now. @throws AppError forbidden. */
 export async function readPrices(actor: Actor, organisationId: string): Promise<ShopPrices> {
-  if (!canViewRates(actor, { organisationId })) throw new AppError("forbidden", "These rates belong to another organisation.");
+  if (!canViewRates(actor, { organisationId }))
+    throw new AppError("forbidden", "These rates belong to another organisation.");
   return loadCurrentPrices(organisationId);
 }

@@ -22,6 +22,9 @@ export const pricesKeyOf = ({ rateBook, timeTable, carbon }: ShopPrices): string
 
 /** The catalogue and the figures of one organisation as they stand now. */
 export async function loadShop(organisationId: string): Promise<Shop> {
-  const [catalog, prices] = await Promise.all([loadCatalog(null), loadCurrentPrices(organisationId)]);
+  const [catalog, prices] = await Promise.all([
+    loadCatalog(organisationId),
+    loadCurrentPrices(organisationId),
+  ]);
   return { catalog, prices, catalogKey: catalogKeyOf(catalog), pricesKey: pricesKeyOf(prices) };
 }

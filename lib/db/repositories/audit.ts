@@ -26,5 +26,8 @@ export interface AuditLine {
 
 /** Adds the line in the transaction of the change it tells of. */
 export async function writeAudit(tx: Transaction, { projectId, detail, ...line }: AuditLine): Promise<void> {
-  await AuditEntry.create({ ...line, projectId: projectId ?? null, detail: detail ?? {} }, { transaction: tx });
+  await AuditEntry.create(
+    { ...line, projectId: projectId ?? null, detail: detail ?? {} },
+    { transaction: tx },
+  );
 }

@@ -43,7 +43,9 @@ export async function findLatestComparison(
   nodeVersion: number,
   tx: Transaction | null = null,
 ): Promise<ComparisonRecord | null> {
-  const rows = await database().query<Omit<ComparisonRecord, "createdBy"> & { createdBy: string; createdByName: string }>(
+  const rows = await database().query<
+    Omit<ComparisonRecord, "createdBy"> & { createdBy: string; createdByName: string }
+  >(
     `SELECT c.id, c.node_id AS "nodeId", c.node_version AS "nodeVersion", c.engine, c.prices_key AS "pricesKey",
             c.catalog_key AS "catalogKey", c.result, c.created_by AS "createdBy", p.name AS "createdByName",
             c.created_at AS "createdAt"

@@ -58,15 +58,22 @@ export async function findProjectIdOfNode(nodeId: string): Promise<string | null
 
 /** The nodes on the register of one project, by mark. */
 export async function listNodes(projectId: string): Promise<NodeRecord[]> {
-  const rows = await database().query<RawNode>(`${SELECT} AND n.project_id = :projectId ORDER BY n.reference`, {
-    replacements: { projectId },
-    type: QueryTypes.SELECT,
-  });
+  const rows = await database().query<RawNode>(
+    `${SELECT} AND n.project_id = :projectId ORDER BY n.reference`,
+    {
+      replacements: { projectId },
+      type: QueryTypes.SELECT,
+    },
+  );
   return rows.map(asRecord);
 }
 
 /** A node through its project: a node of another project is not found. */
-export async function findNode(projectId: string, nodeId: string, tx: Transaction | null = null): Promise<NodeRecord | null> {
+export async function findNode(
+  projectId: string,
+  nodeId: string,
+  tx: Transaction | null = null,
+): Promise<NodeRecord | null> {
   const rows = await database().query<RawNode>(`${SELECT} AND n.project_id = :projectId AND n.id = :nodeId`, {
     replacements: { projectId, nodeId },
     type: QueryTypes.SELECT,
@@ -76,8 +83,17 @@ export async function findNode(projectId: string, nodeId: string, tx: Transactio
 }
 
 /** The same, held against every other save until the transaction ends. */
-export async function lockNode(tx: Transaction, projectId: string, nodeId: string): Promise<NodeRecord | null> {
-  await Node.findOne({ where: { id: nodeId, projectId }, attributes: ["id"], transaction: tx, lock: tx.LOCK.UPDATE });
+export async function lockNode(
+  tx: Transaction,
+  projectId: string,
+  nodeId: string,
+): Promise<NodeRecord | null> {
+  await Node.findOne({
+    where: { id: nodeId, projectId },
+    attributes: ["id"],
+    transaction: tx,
+    lock: tx.LOCK.UPDATE,
+  });
   return findNode(projectId, nodeId, tx);
 }
 
@@ -87,7 +103,11 @@ export async function isReferenceTaken(
   reference: string,
   exceptNodeId: string | null,
 ): Promise<boolean> {
-  const other = await Node.findOne({ where: { projectId, reference, deletedAt: null }, attributes: ["id"], transaction: tx });
+  const other = await Node.findOne({
+    where: { projectId, reference, deletedAt: null },
+    attributes: ["id"],
+    transaction: tx,
+  });
   return other !== null && other.id !== exceptNodeId;
 }
 
@@ -102,7 +122,10 @@ async function keepRevision(tx: Transaction, nodeId: string, version: number, sa
 }
 
 export async function insertNode(tx: Transaction, projectId: string, save: NodeSave): Promise<string> {
-  const { id } = await Node.create({ projectId, reference: save.document.reference, version: 1, ...save }, { transaction: tx });
+  const { id } = await Node.create(
+    { projectId, reference: save.document.reference, version: 1, ...save },
+    { transaction: tx },
+  );
   await keepRevision(tx, id, 1, save);
   return id;
 }
@@ -110,7 +133,10 @@ export async function insertNode(tx: Transaction, projectId: string, save: NodeS
 /** Writes the next version over a locked node and keeps it as a revision. */
 export async function replaceDocument(tx: Transaction, node: NodeRecord, save: NodeSave): Promise<number> {
   const version = node.version + 1;
-  await Node.update({ reference: save.document.reference, version, ...save }, { where: { id: node.id }, transaction: tx });
+  await Node.update(
+    { reference: save.document.reference, version, ...save },
+    { where: { id: node.id }, transaction: tx },
+  );
   await keepRevision(tx, node.id, version, save);
   return version;
 }
@@ -126,7 +152,10 @@ export async function replaceExclusions(
   excludedBy: string,
 ): Promise<void> {
   await NodeExclusion.destroy({ where: { nodeId }, transaction: tx });
-  await NodeExclusion.bulkCreate(optionKeys.map((optionKey) => ({ nodeId, optionKey, excludedBy })), { transaction: tx });
+  await NodeExclusion.bulkCreate(
+    optionKeys.map((optionKey) => ({ nodeId, optionKey, excludedBy })),
+    { transaction: tx },
+  );
 }
 
 /** Every save of a node, newest first; `document` is heavy and read one at a time. */

@@ -13,7 +13,10 @@ export interface SignInPerson {
 }
 
 /** The person of an e-mail (lower case), in whatever organisation: who signs in has not said which. */
-export async function findPersonByEmail(email: string, tx: Transaction | null = null): Promise<SignInPerson | null> {
+export async function findPersonByEmail(
+  email: string,
+  tx: Transaction | null = null,
+): Promise<SignInPerson | null> {
   database();
   const person = await Person.findOne({ where: { email }, transaction: tx });
   if (person === null) return null;

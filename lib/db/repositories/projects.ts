@@ -56,13 +56,19 @@ export async function listProjectsAround(actor: Actor): Promise<ProjectRow[]> {
       WHERE p.organisation_id = :organisationId
          OR EXISTS (SELECT 1 FROM project_members m WHERE m.project_id = p.id AND m.person_id = :personId)
       ORDER BY p.name, p.id`,
-    { replacements: { organisationId: actor.organisationId, personId: actor.personId }, type: QueryTypes.SELECT },
+    {
+      replacements: { organisationId: actor.organisationId, personId: actor.personId },
+      type: QueryTypes.SELECT,
+    },
   );
   return rows.map(asRow);
 }
 
 /** One project with the facts that decide who may see it; the caller asks the policy before showing any of it. */
-export async function findProject(projectId: string, tx: Transaction | null = null): Promise<ProjectRow | null> {
+export async function findProject(
+  projectId: string,
+  tx: Transaction | null = null,
+): Promise<ProjectRow | null> {
   const rows = await database().query<RawProject>(`${SELECT} WHERE p.id = :projectId`, {
     replacements: { projectId },
     type: QueryTypes.SELECT,
@@ -79,10 +85,18 @@ export async function lockProject(tx: Transaction, projectId: string): Promise<P
 
 export async function insertProject(
   tx: Transaction,
-  project: { readonly organisationId: string; readonly name: string; readonly description: string; readonly createdBy: string },
+  project: {
+    readonly organisationId: string;
+    readonly name: string;
+    readonly description: string;
+    readonly createdBy: string;
+  },
 ): Promise<string> {
   const { id } = await Project.create({ ...project }, { transaction: tx });
-  await ProjectMember.create({ projectId: id, personId: project.createdBy, addedBy: project.createdBy }, { transaction: tx });
+  await ProjectMember.create(
+    { projectId: id, personId: project.createdBy, addedBy: project.createdBy },
+    { transaction: tx },
+  );
   return id;
 }
 

@@ -15,13 +15,25 @@ export interface LiveSession {
   readonly lastSeenAt: Date;
 }
 
-export async function createSession(personId: string, now: Date, expiresAt: Date, tx: Transaction): Promise<string> {
-  const session = await Session.create({ personId, createdAt: now, lastSeenAt: now, expiresAt }, { transaction: tx });
+export async function createSession(
+  personId: string,
+  now: Date,
+  expiresAt: Date,
+  tx: Transaction,
+): Promise<string> {
+  const session = await Session.create(
+    { personId, createdAt: now, lastSeenAt: now, expiresAt },
+    { transaction: tx },
+  );
   return session.id;
 }
 
 /** Null when it was ended, has expired, was idle since before `idleSince`, or its person may no longer sign in. */
-export async function findLiveSession(sessionId: string, now: Date, idleSince: Date): Promise<LiveSession | null> {
+export async function findLiveSession(
+  sessionId: string,
+  now: Date,
+  idleSince: Date,
+): Promise<LiveSession | null> {
   const rows = await database().query<LiveSession>(
     `SELECT s.id AS "sessionId", p.id AS "personId", p.name, p.email, p.role, o.id AS "organisationId",
             o.name AS "organisationName", s.last_seen_at AS "lastSeenAt"
@@ -45,6 +57,9 @@ export async function revokeSession(sessionId: string, now: Date): Promise<void>
 
 /** Ends every session of a person: after a change of password or role, or when somebody leaves. */
 export async function revokeSessionsOf(personId: string, now: Date, tx: Transaction): Promise<number> {
-  const [count] = await Session.update({ revokedAt: now }, { where: { personId, revokedAt: null }, transaction: tx });
+  const [count] = await Session.update(
+    { revokedAt: now },
+    { where: { personId, revokedAt: null }, transaction: tx },
+  );
   return count;
 }

@@ -24,7 +24,11 @@ export async function forgetAttempt(attemptId: string): Promise<void> {
   await SignInAttempt.destroy({ where: { id: attemptId } });
 }
 
-export async function countRecentFailures(email: string, address: string, since: Date): Promise<RecentFailures> {
+export async function countRecentFailures(
+  email: string,
+  address: string,
+  since: Date,
+): Promise<RecentFailures> {
   const [row] = await database().query<{ of_email: number; of_address: number }>(
     `SELECT
        (SELECT count(*)::int FROM sign_in_attempts WHERE email = :email AND NOT succeeded AND attempted_at >= :since
@@ -37,5 +41,7 @@ export async function countRecentFailures(email: string, address: string, since:
 
 /** Tries older than the window count for nothing and need not be kept. */
 export async function removeAttemptsBefore(time: Date): Promise<void> {
-  await database().query("DELETE FROM sign_in_attempts WHERE attempted_at < :time", { replacements: { time } });
+  await database().query("DELETE FROM sign_in_attempts WHERE attempted_at < :time", {
+    replacements: { time },
+  });
 }

@@ -5,7 +5,9 @@ import { comparisonOf, recalculate } from "@/lib/services/compare-node";
 export const GET = route({
   access: "node",
   params: NodePath,
-  run: async ({ actor, project, params }) => ({ comparison: await comparisonOf(actor, project, params.nodeId) }),
+  run: async ({ actor, project, params }) => ({
+    comparison: await comparisonOf(actor, project, params.nodeId),
+  }),
 });
 
 export const POST = route({

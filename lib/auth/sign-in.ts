@@ -1,6 +1,6 @@
-import { passwordFits } from "@/lib/auth/passwords";
-import { SESSION_SECONDS } from "@/lib/auth/session-cookie";
-import { mayTry, SIGN_IN_LIMIT } from "@/lib/auth/sign-in-limit";
+import { passwordFits } from "./passwords";
+import { SESSION_SECONDS } from "./session-cookie";
+import { mayTry, SIGN_IN_LIMIT } from "./sign-in-limit";
 import { writeAudit } from "@/lib/db/repositories/audit";
 import { findPersonByEmail } from "@/lib/db/repositories/people";
 import { createSession } from "@/lib/db/repositories/sessions";
@@ -14,7 +14,12 @@ import {
 import { inTransaction } from "@/lib/db/transaction";
 
 export type SignInAnswer =
-  | { readonly kind: "signed-in"; readonly personId: string; readonly name: string; readonly sessionId: string }
+  | {
+      readonly kind: "signed-in";
+      readonly personId: string;
+      readonly name: string;
+      readonly sessionId: string;
+    }
   /** Wrong password, nobody of that e-mail, or deactivated: the answer does not say which. */
   | { readonly kind: "refused" }
   | { readonly kind: "too-many-tries" };
@@ -26,7 +31,10 @@ export interface SignInTry {
 }
 
 /** Checks a password and opens a session. The limit stands in the database, so a restart does not lift it. */
-export async function signIn({ email: typed, password, address }: SignInTry, now = new Date()): Promise<SignInAnswer> {
+export async function signIn(
+  { email: typed, password, address }: SignInTry,
+  now = new Date(),
+): Promise<SignInAnswer> {
   const email = typed.trim().toLowerCase().slice(0, 254);
   const since = new Date(now.getTime() - SIGN_IN_LIMIT.windowMinutes * 60_000);
   const attemptId = await recordAttempt({ email, address, attemptedAt: now });
@@ -41,7 +49,12 @@ export async function signIn({ email: typed, password, address }: SignInTry, now
   const sessionId = await inTransaction(async (tx) => {
     const id = await createSession(person.id, now, expiresAt, tx);
     await markSucceeded(attemptId, tx);
-    await writeAudit(tx, { actorId: person.id, organisationId: person.organisationId, action: "person.signed-in", subjectId: person.id });
+    await writeAudit(tx, {
+      actorId: person.id,
+      organisationId: person.organisationId,
+      action: "person.signed-in",
+      subjectId: person.id,
+    });
     return id;
   });
   await removeAttemptsBefore(since);
