@@ -21,7 +21,7 @@ ensure_npm_packages() {
   [[ -w $root ]] || fail "you may not write into $root." "Start as the user who owns the folder."
   need_disk "$root" 2000 "for the packages and the build"
   say "Installing the npm packages ($reason). This takes a few minutes."
-  run_stoppable npm ci --include=dev --no-audit --no-fund ||
+  run_stoppable npm ci --include=dev --ignore-scripts --no-audit --no-fund ||
     fail "npm could not install the packages (its own words are above)." \
       "Most often the registry cannot be reached: check the network or proxy, then start again."
 }

@@ -84,19 +84,10 @@ serve() {
   wait "$running_child" || fail "the web server has ended by itself (its own words are above)."
 }
 
-# The passwords are shown at the start that made them, and kept for later.
+# The seeder has printed the passwords at the start that made them.
 show_demo_people() {
   local people=$data_folder/demo-people.json
-  [[ -f $people ]] || return 0
-  if [[ ! $people -ot $data_folder/this-start ]]; then
-    say "The demo people, with their passwords, shown this once:"
-    node -e '
-      for (const { role, email, password, name } of JSON.parse(require("node:fs").readFileSync(process.argv[1], "utf8"))) {
-        console.log(`  ${role.padEnd(11)} ${email.padEnd(32)} ${password}   ${name}`);
-      }
-    ' "$people"
-  fi
-  say "The demo people and their passwords are kept in $people."
+  if [[ -f $people ]]; then say "The demo people and their passwords are kept in $people."; fi
 }
 
 require_node
@@ -105,14 +96,14 @@ require_web_port
 prepare_data_folder
 lock_data_folder "Panelwright already runs with the data in $data_folder." \
   "Stop that one first, or start another with PANELWRIGHT_DATA_DIR=/another/folder PORT=3001 npm start."
-touch "$data_folder/this-start"
 ensure_npm_packages
 reach_database
 ensure_secret session-secret
 export NEXTAUTH_SECRET=${NEXTAUTH_SECRET:-$(read_secret session-secret)}
 export NEXTAUTH_URL=${NEXTAUTH_URL:-http://127.0.0.1:$web_port}
-fill_database
 if [[ $mode == start ]]; then
   build_if_changed || fail "the program could not be built (the reason is above)."
 fi
+# After the build: a program that cannot be built migrates nothing, and the passwords stay in sight.
+fill_database
 serve
