@@ -46,7 +46,10 @@ async function addPeople(organisationId: string, transaction: Transaction): Prom
   for (const person of DEMO_PEOPLE) {
     if ((await Person.findOne({ where: { email: person.email }, transaction })) !== null) continue;
     const password = randomPassword();
-    await Person.create({ ...person, organisationId, passwordHash: await hashPassword(password) }, { transaction });
+    await Person.create(
+      { ...person, organisationId, passwordHash: await hashPassword(password) },
+      { transaction },
+    );
     added.push({ ...person, password });
   }
   return added;
@@ -82,10 +85,16 @@ async function readDemoNodes(): Promise<DemoNodes | null> {
   return text === null ? null : (JSON.parse(text) as DemoNodes);
 }
 
-async function addNode(projectId: string, designer: Person, input: unknown, transaction: Transaction): Promise<boolean> {
+async function addNode(
+  projectId: string,
+  designer: Person,
+  input: unknown,
+  transaction: Transaction,
+): Promise<boolean> {
   const document = NodeDocument.parse(input);
   // Also one that was taken off the register: it must not come back at the next start.
-  if ((await Node.findOne({ where: { projectId, reference: document.reference }, transaction })) !== null) return false;
+  if ((await Node.findOne({ where: { projectId, reference: document.reference }, transaction })) !== null)
+    return false;
   const saved = { document, version: 1, savedBy: designer.id, savedAt: new Date() };
   const node = await Node.create({ projectId, reference: document.reference, ...saved }, { transaction });
   await NodeRevision.create({ nodeId: node.id, ...saved }, { transaction });
@@ -94,22 +103,35 @@ async function addNode(projectId: string, designer: Person, input: unknown, tran
 
 async function addProject(organisationId: string, transaction: Transaction): Promise<string[]> {
   const demo = await readDemoNodes();
-  const people = await Person.findAll({ where: { organisationId, email: DEMO_PEOPLE.map((person) => person.email) }, transaction });
+  const people = await Person.findAll({
+    where: { organisationId, email: DEMO_PEOPLE.map((person) => person.email) },
+    transaction,
+  });
   const designer = people.find((person) => person.email === DEMO_PEOPLE[0]?.email);
   if (demo === null || designer === undefined) return [];
   const [project, isNew] = await Project.findOrCreate({
     where: { organisationId, name: demo.project.name },
-    defaults: { organisationId, name: demo.project.name, description: demo.project.description ?? "", createdBy: designer.id },
+    defaults: {
+      organisationId,
+      name: demo.project.name,
+      description: demo.project.description ?? "",
+      createdBy: designer.id,
+    },
     transaction,
   });
   if (isNew) {
-    const members = people.map((person) => ({ projectId: project.id, personId: person.id, addedBy: designer.id }));
+    const members = people.map((person) => ({
+      projectId: project.id,
+      personId: person.id,
+      addedBy: designer.id,
+    }));
     await ProjectMember.bulkCreate(members, { transaction });
     const line = { organisationId, projectId: project.id, action: "project.seeded", subjectId: project.id };
     await AuditEntry.create(line, { transaction });
   }
   let count = 0;
-  for (const node of demo.nodes) if (await addNode(project.id, designer, node.document, transaction)) count += 1;
+  for (const node of demo.nodes)
+    if (await addNode(project.id, designer, node.document, transaction)) count += 1;
   return count === 0 ? [] : [`${count} nodes in the project "${demo.project.name}"`];
 }
 
@@ -120,7 +142,9 @@ export const demoOrganisation: Seeder = {
   run: async ({ transaction }) => {
     const organisation = await findOrCreateOrganisation(transaction);
     const added = await addPeople(organisation.id, transaction);
-    const lines = added.map((person) => `${person.role.padEnd(10)} ${person.email}  password ${person.password}`);
+    const lines = added.map(
+      (person) => `${person.role.padEnd(10)} ${person.email}  password ${person.password}`,
+    );
     if (added.length > 0) lines.push(`kept in ${await keepPasswords(environment().dataFolder, added)}`);
     return [...lines, ...(await addProject(organisation.id, transaction))];
   },
