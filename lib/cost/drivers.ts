@@ -84,7 +84,13 @@ export const DRIVERS = {
     preloaded: "number",
   },
   /** Bolts that bars replace: all quantities negative. */
-  "bolt-saved": { bolts: "number", grade: "text", diameterMm: "number", massKg: "number", preloaded: "number" },
+  "bolt-saved": {
+    bolts: "number",
+    grade: "text",
+    diameterMm: "number",
+    massKg: "number",
+    preloaded: "number",
+  },
   /** Difference of the whole lift, divided by the nodes it serves. */
   column: { massKg: "number", lengthM: "number", areaM2: "number" },
   /** Details to be drawn and checked. */
@@ -94,10 +100,16 @@ export const DRIVERS = {
 export type DriverName = keyof typeof DRIVERS;
 export const DRIVER_NAMES = Object.keys(DRIVERS) as DriverName[];
 
-type ValuesOf<T extends Record<string, NameKind>> = { readonly [K in keyof T]: T[K] extends "number" ? number : string };
+type ValuesOf<T extends Record<string, NameKind>> = {
+  readonly [K in keyof T]: T[K] extends "number" ? number : string;
+};
 export type DriverValues<D extends DriverName> = ValuesOf<(typeof DRIVERS)[D]>;
 
 /** One record of quantities. Records with the same `group` share a set-up within the batch. */
 export type QuantityRecord = {
-  readonly [D in DriverName]: { readonly driver: D; readonly group: string; readonly values: DriverValues<D> };
+  readonly [D in DriverName]: {
+    readonly driver: D;
+    readonly group: string;
+    readonly values: DriverValues<D>;
+  };
 }[DriverName];

@@ -31,12 +31,21 @@ function take({ node, measures, fabrication, prices }: EstimateRequest): Take {
   const table = compiledTimeTable(prices.timeTable);
   const rates = preparedRates(prices.rateBook);
   const common = priceRecords(table, rates, quantities.records, fabrication, null);
-  let cheapest: { readonly cost: number; readonly records: readonly QuantityRecord[] } = { cost: 0, records: [] };
+  let cheapest: { readonly cost: number; readonly records: readonly QuantityRecord[] } = {
+    cost: 0,
+    records: [],
+  };
   for (const [index, plan] of handlingPlans(quantities, fabrication.nodesPerLift).entries()) {
     const cost = priceRecords(table, rates, plan.records, fabrication, null);
     if (index === 0 || cost < cheapest.cost) cheapest = { cost, records: plan.records };
   }
-  return { quantities, recordSets: [quantities.records, cheapest.records], costMinor: common + cheapest.cost, table, rates };
+  return {
+    quantities,
+    recordSets: [quantities.records, cheapest.records],
+    costMinor: common + cheapest.cost,
+    table,
+    rates,
+  };
 }
 
 /**

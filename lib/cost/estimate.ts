@@ -1,6 +1,15 @@
 /** What the cost core answers of one option: always the difference from the bare node. */
 
-export const COST_CATEGORIES = ["labour", "machine", "material", "consumables", "column", "inspection", "site", "drawing"] as const;
+export const COST_CATEGORIES = [
+  "labour",
+  "machine",
+  "material",
+  "consumables",
+  "column",
+  "inspection",
+  "site",
+  "drawing",
+] as const;
 export type CostCategory = (typeof COST_CATEGORIES)[number];
 
 export interface EstimateLine {

@@ -68,7 +68,8 @@ export function costMinor(amount: number, rate: ExactRate, per: 1 | 60, minorUni
   const denominator = per * MILLION * rate.denominator;
   const numerator = millionths * factor;
   // A product within 2^53 of whole factors is itself exact.
-  if (Number.isSafeInteger(factor) && Number.isSafeInteger(numerator)) return divideHalfEvenSafe(numerator, denominator);
+  if (Number.isSafeInteger(factor) && Number.isSafeInteger(numerator))
+    return divideHalfEvenSafe(numerator, denominator);
   const exact = BigInt(millionths) * BigInt(rate.numerator) * BigInt(minorUnits);
   return Number(divideHalfEven(exact, BigInt(denominator)));
 }

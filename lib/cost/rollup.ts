@@ -1,6 +1,12 @@
 /** From quantities to lines of money and minutes, and from lines to an estimate. */
 import type { DriverName, QuantityRecord } from "./drivers";
-import { COST_CATEGORIES, type CostCategory, type Estimate, type EstimateLine, type FabricationCase } from "./estimate";
+import {
+  COST_CATEGORIES,
+  type CostCategory,
+  type Estimate,
+  type EstimateLine,
+  type FabricationCase,
+} from "./estimate";
 import { costMinor } from "./money";
 import type { CarbonTable, RateBook, RuleUse } from "./prices";
 import { PRODUCTS, type ProductMasses } from "./products";
@@ -35,7 +41,8 @@ interface Pricing {
 }
 
 function finite(value: number, compiled: CompiledRule): number {
-  if (!Number.isFinite(value)) throw new RuleFailed(compiled.rule.key, "the quantities divide by nothing or go beyond all bounds");
+  if (!Number.isFinite(value))
+    throw new RuleFailed(compiled.rule.key, "the quantities divide by nothing or go beyond all bounds");
   return value;
 }
 
@@ -153,7 +160,10 @@ function priceUse(pricing: Pricing, use: RuleUse, { itemOf, fixedItem, quantity 
 }
 
 /** Records by driver, each value in the slot its rules read it from. */
-function scopedByDriver(records: readonly QuantityRecord[], fabrication: FabricationCase): ReadonlyMap<DriverName, ScopedRecord[]> {
+function scopedByDriver(
+  records: readonly QuantityRecord[],
+  fabrication: FabricationCase,
+): ReadonlyMap<DriverName, ScopedRecord[]> {
   const byDriver = new Map<DriverName, ScopedRecord[]>();
   for (const record of records) {
     const scoped = { group: record.group, scope: slotsOf(record, fabrication) };
@@ -218,8 +228,17 @@ function carbonOf(masses: ProductMasses, carbon: CarbonTable): number {
 }
 
 /** Adds lines up into the estimate of one node. */
-export function rollUp(priced: readonly PricedLine[], masses: ProductMasses, book: RateBook, carbon: CarbonTable, quantity: number): Estimate {
-  const costByCategoryMinor = Object.fromEntries(COST_CATEGORIES.map((category) => [category, 0])) as Record<CostCategory, number>;
+export function rollUp(
+  priced: readonly PricedLine[],
+  masses: ProductMasses,
+  book: RateBook,
+  carbon: CarbonTable,
+  quantity: number,
+): Estimate {
+  const costByCategoryMinor = Object.fromEntries(COST_CATEGORIES.map((category) => [category, 0])) as Record<
+    CostCategory,
+    number
+  >;
   const minutesByTrade: Record<string, number> = {};
   let [touchMinutes, crewMinutes, shopMinutes, siteMinutes] = [0, 0, 0, 0];
   for (const { line, elapsedMinutes, touchMinutes: touch } of priced) {

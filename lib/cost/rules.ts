@@ -123,18 +123,22 @@ class Compiler {
 
   number(node: ReadNode | undefined): Compiled & { kind: "number" } {
     const compiled = this.compile(node);
-    return compiled.kind === "number" ? compiled : this.refuse("a number is needed where it gives something else");
+    return compiled.kind === "number"
+      ? compiled
+      : this.refuse("a number is needed where it gives something else");
   }
 
   private constant({ value }: ReadNode): Compiled {
     if (typeof value === "string") return { kind: "text", of: () => value, constant: true };
-    if (typeof value !== "number" || !Number.isFinite(value)) return this.refuse("only finite numbers and words are allowed");
+    if (typeof value !== "number" || !Number.isFinite(value))
+      return this.refuse("only finite numbers and words are allowed");
     return { kind: "number", of: () => value, constant: true };
   }
 
   private name({ name }: ReadNode): Compiled {
     if (typeof name !== "string") return this.refuse("a name is needed");
-    if (Object.hasOwn(this.world.constants, name)) return this.constant({ type: "ConstantNode", value: this.world.constants[name]?.value });
+    if (Object.hasOwn(this.world.constants, name))
+      return this.constant({ type: "ConstantNode", value: this.world.constants[name]?.value });
     const known = this.world.names.get(name);
     if (known === undefined) return this.refuse(`it does not know the name ${name}`);
     const { kind, slot } = known;
@@ -161,16 +165,23 @@ class Compiler {
   private unary(fn: string, argument: ReadNode | undefined): Compiled {
     if (fn !== "unaryMinus" && fn !== "unaryPlus") return this.refuse(`the operator ${fn} is not allowed`);
     const a = this.number(argument);
-    return fn === "unaryPlus" ? a : this.folded({ kind: "number", of: (scope) => -a.of(scope), constant: a.constant });
+    return fn === "unaryPlus"
+      ? a
+      : this.folded({ kind: "number", of: (scope) => -a.of(scope), constant: a.constant });
   }
 
   private equality(fn: string, first: ReadNode | undefined, second: ReadNode): Compiled {
     const a = this.compile(first);
     const b = this.compile(second);
-    if (a.kind !== b.kind || a.kind === "condition") return this.refuse("a comparison needs two numbers or two words");
+    if (a.kind !== b.kind || a.kind === "condition")
+      return this.refuse("a comparison needs two numbers or two words");
     const [left, right]: [(scope: Scope) => unknown, (scope: Scope) => unknown] = [a.of, b.of];
     const wanted = fn === "equal";
-    return { kind: "condition", of: (scope) => (left(scope) === right(scope)) === wanted, constant: a.constant && b.constant };
+    return {
+      kind: "condition",
+      of: (scope) => (left(scope) === right(scope)) === wanted,
+      constant: a.constant && b.constant,
+    };
   }
 
   private conditional(node: ReadNode): Compiled {
@@ -179,12 +190,19 @@ class Compiler {
     const yes = this.number(node.trueExpr);
     const no = this.number(node.falseExpr);
     const constant = test.constant && yes.constant && no.constant;
-    return this.folded({ kind: "number", of: (scope) => (test.of(scope) ? yes.of(scope) : no.of(scope)), constant });
+    return this.folded({
+      kind: "number",
+      of: (scope) => (test.of(scope) ? yes.of(scope) : no.of(scope)),
+      constant,
+    });
   }
 
   private call(node: ReadNode): Compiled {
     const target = node.fn as ReadNode | undefined;
-    const name = target?.type === "SymbolNode" && typeof target.name === "string" ? target.name : this.refuse("only named functions may be called");
+    const name =
+      target?.type === "SymbolNode" && typeof target.name === "string"
+        ? target.name
+        : this.refuse("only named functions may be called");
     const args = node.args ?? [];
     const one = ONE_ARGUMENT.get(name);
     const extreme = EXTREMES.get(name);
@@ -195,13 +213,19 @@ class Compiler {
     if (extreme) return this.extreme(name, extreme, args);
     const table = Object.hasOwn(this.world.lookUps, name) ? this.world.lookUps[name] : undefined;
     if (!table) return this.refuse(`it does not know the function ${name}`);
-    return args.length === 1 ? this.lookUp(name, table, args[0]) : this.refuse(`the table ${name} takes one value`);
+    return args.length === 1
+      ? this.lookUp(name, table, args[0])
+      : this.refuse(`the table ${name} takes one value`);
   }
 
   private extreme(name: string, of: (a: number, b: number) => number, args: readonly ReadNode[]): Compiled {
     if (args.length < 2) return this.refuse(`${name} takes two numbers or more`);
     const parts = args.map((argument) => this.number(argument));
-    const joined = parts.reduce((a, b) => ({ kind: "number", of: (scope) => of(a.of(scope), b.of(scope)), constant: a.constant && b.constant }));
+    const joined = parts.reduce((a, b) => ({
+      kind: "number",
+      of: (scope) => of(a.of(scope), b.of(scope)),
+      constant: a.constant && b.constant,
+    }));
     return this.folded(joined);
   }
 
@@ -210,7 +234,11 @@ class Compiler {
       const a = this.compile(argument);
       if (a.kind !== "text") return this.refuse(`the table ${name} is read by a word`);
       const entries = new Map(table.entries.map((entry) => [entry.name, entry.value]));
-      return this.folded({ kind: "number", of: (scope) => entries.get(a.of(scope)) ?? missing(name, a.of(scope)), constant: a.constant });
+      return this.folded({
+        kind: "number",
+        of: (scope) => entries.get(a.of(scope)) ?? missing(name, a.of(scope)),
+        constant: a.constant,
+      });
     }
     const a = this.number(argument);
     const read = readByNumber(name, table);
@@ -280,7 +308,10 @@ function missing(table: string, value: number | string): never {
   throw new RuleFailed(table, `the table has no entry for ${value}`);
 }
 
-function readByNumber(name: string, table: LookUpTable & { kind: "steps" | "linear" }): (value: number) => number {
+function readByNumber(
+  name: string,
+  table: LookUpTable & { kind: "steps" | "linear" },
+): (value: number) => number {
   const limits = table.entries.map((entry) => entry.upTo);
   const values = table.entries.map((entry) => entry.value);
   const linear = table.kind === "linear";
@@ -297,11 +328,15 @@ function readByNumber(name: string, table: LookUpTable & { kind: "steps" | "line
 }
 
 function read(expression: string): MathNode {
-  if (expression.length > MAX_CHARACTERS) throw new RuleRefused(expression, `it is longer than ${MAX_CHARACTERS} characters`);
+  if (expression.length > MAX_CHARACTERS)
+    throw new RuleRefused(expression, `it is longer than ${MAX_CHARACTERS} characters`);
   try {
     return parse(expression);
   } catch (error) {
-    throw new RuleRefused(expression, `it cannot be read (${error instanceof Error ? error.message : "unknown"})`);
+    throw new RuleRefused(
+      expression,
+      `it cannot be read (${error instanceof Error ? error.message : "unknown"})`,
+    );
   }
 }
 

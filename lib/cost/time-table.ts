@@ -1,8 +1,23 @@
 /** A time table made ready to run: every expression compiled once, with the names its driver allows. */
-import { DRIVER_NAMES, DRIVERS, type DriverName, type NameKind, type QuantityRecord, SHARED_NAMES } from "./drivers";
+import {
+  DRIVER_NAMES,
+  DRIVERS,
+  type DriverName,
+  type NameKind,
+  type QuantityRecord,
+  SHARED_NAMES,
+} from "./drivers";
 import type { FabricationCase } from "./estimate";
 import type { RuleFormula, TimeRule, TimeTable } from "./prices";
-import { compileExpression, type NameSlot, type NumberOf, RESERVED_NAMES, RuleRefused, type RuleWorld, type Scope } from "./rules";
+import {
+  compileExpression,
+  type NameSlot,
+  type NumberOf,
+  RESERVED_NAMES,
+  RuleRefused,
+  type RuleWorld,
+  type Scope,
+} from "./rules";
 
 export interface CompiledUse {
   readonly itemOf: (scope: Scope) => string;
@@ -36,17 +51,29 @@ export function chosenFormula(rule: TimeRule): RuleFormula | null {
   if (rule.runMinutes === null) return null;
   const { chosen, formulas } = rule.runMinutes;
   const formula = formulas.find(({ key }) => key === chosen);
-  if (formula === undefined) throw new RuleRefused(chosen, `the rule ${rule.key} has no formula of that name`);
+  if (formula === undefined)
+    throw new RuleRefused(chosen, `the rule ${rule.key} has no formula of that name`);
   return formula;
 }
 
-const slotNames = (driver: DriverName): readonly string[] => [...Object.keys(SHARED_NAMES), ...Object.keys(DRIVERS[driver])];
+const slotNames = (driver: DriverName): readonly string[] => [
+  ...Object.keys(SHARED_NAMES),
+  ...Object.keys(DRIVERS[driver]),
+];
 
 const SLOT_NAMES = new Map(DRIVER_NAMES.map((driver) => [driver, Object.keys(DRIVERS[driver])]));
 
 /** A record's values in the slots its driver's rules read them from, the shared names first. */
-export function slotsOf({ driver, values }: QuantityRecord, fabrication: FabricationCase): (number | string)[] {
-  const scope: (number | string)[] = [fabrication.quantity, fabrication.nodesPerLift, fabrication.executionClass, fabrication.coating];
+export function slotsOf(
+  { driver, values }: QuantityRecord,
+  fabrication: FabricationCase,
+): (number | string)[] {
+  const scope: (number | string)[] = [
+    fabrication.quantity,
+    fabrication.nodesPerLift,
+    fabrication.executionClass,
+    fabrication.coating,
+  ];
   const read = values as Readonly<Record<string, number | string>>;
   for (const name of SLOT_NAMES.get(driver) ?? []) scope.push(read[name] ?? Number.NaN);
   return scope;
@@ -59,7 +86,10 @@ function namesOf(driver: DriverName): Map<string, NameSlot> {
 }
 
 /** "threaded-bar-{grade}" with the record's own words, or the table's, put in. */
-function compileItem(pattern: string, { names, constants }: RuleWorld): Pick<CompiledUse, "itemOf" | "fixedItem"> {
+function compileItem(
+  pattern: string,
+  { names, constants }: RuleWorld,
+): Pick<CompiledUse, "itemOf" | "fixedItem"> {
   const item = pattern.replace(/\{(\w+)\}/g, (whole, name: string) => {
     const constant = Object.hasOwn(constants, name) ? constants[name]?.value : undefined;
     return typeof constant === "string" ? constant : whole;
@@ -67,10 +97,12 @@ function compileItem(pattern: string, { names, constants }: RuleWorld): Pick<Com
   const parts = item.split(/\{(\w+)\}/);
   if (parts.length === 1) return { itemOf: () => item, fixedItem: item };
   for (const name of parts.filter((_, index) => index % 2 === 1)) {
-    if (names.get(name)?.kind !== "text") throw new RuleRefused(item, `${name} is no word of this rule's quantities`);
+    if (names.get(name)?.kind !== "text")
+      throw new RuleRefused(item, `${name} is no word of this rule's quantities`);
   }
   const slots = parts.map((part, index) => (index % 2 === 1 ? (names.get(part)?.slot ?? null) : null));
-  const itemOf = (scope: Scope): string => parts.map((part, index) => (slots[index] == null ? part : scope[slots[index]])).join("");
+  const itemOf = (scope: Scope): string =>
+    parts.map((part, index) => (slots[index] == null ? part : scope[slots[index]])).join("");
   return { itemOf, fixedItem: null };
 }
 
@@ -84,7 +116,8 @@ function compileRule(rule: TimeRule, names: Map<string, NameSlot>, table: TimeTa
   const run = chosen && compile(chosen.expression);
   const givesSlot = rule.gives === null ? null : names.size;
   if (rule.gives !== null && givesSlot !== null) {
-    if (names.has(rule.gives) || RESERVED_NAMES.includes(rule.gives)) throw new RuleRefused(rule.gives, "that name is taken already");
+    if (names.has(rule.gives) || RESERVED_NAMES.includes(rule.gives))
+      throw new RuleRefused(rule.gives, "that name is taken already");
     names.set(rule.gives, { kind: "number", slot: givesSlot });
   }
   return {
@@ -93,7 +126,10 @@ function compileRule(rule: TimeRule, names: Map<string, NameSlot>, table: TimeTa
     run,
     setUp: rule.setUpMinutes && compile(rule.setUpMinutes.expression),
     machine: rule.machineMinutes && compile(rule.machineMinutes.expression),
-    uses: rule.uses.map((use) => ({ ...compileItem(use.item, world), quantity: compile(use.quantity.expression) })),
+    uses: rule.uses.map((use) => ({
+      ...compileItem(use.item, world),
+      quantity: compile(use.quantity.expression),
+    })),
     labourItem: `labour:${rule.trade ?? ""}`,
     machineItem: `machine:${rule.workCentre ?? ""}`,
     givesSlot,
@@ -104,7 +140,8 @@ function compileRule(rule: TimeRule, names: Map<string, NameSlot>, table: TimeTa
 function refuseShadows(table: TimeTable, names: ReadonlyMap<string, NameSlot>): void {
   const taken = [...Object.keys(table.constants), ...Object.keys(table.lookUps)];
   for (const name of taken) {
-    if (names.has(name) || RESERVED_NAMES.includes(name)) throw new RuleRefused(name, "a table or constant may not take the name of a quantity or function");
+    if (names.has(name) || RESERVED_NAMES.includes(name))
+      throw new RuleRefused(name, "a table or constant may not take the name of a quantity or function");
   }
 }
 

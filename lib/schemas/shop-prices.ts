@@ -1,5 +1,13 @@
 import { z } from "zod";
-import { COST_CATEGORIES, compileTimeTable, DRIVER_NAMES, PRODUCTS, RATE_UNITS, RuleRefused, type ShopPrices } from "@/lib/cost";
+import {
+  COST_CATEGORIES,
+  compileTimeTable,
+  DRIVER_NAMES,
+  PRODUCTS,
+  RATE_UNITS,
+  RuleRefused,
+  type ShopPrices,
+} from "@/lib/cost";
 
 /** The shop's three tables as files, uploads and the database carry them. Unknown keys and units are errors; every figure names its source. */
 
@@ -17,13 +25,22 @@ const rate = z
   .number()
   .min(0)
   .lt(1e8)
-  .refine((value) => Math.abs(value * 1e6 - Math.round(value * 1e6)) < 1e-3, "A rate has at most six decimals.");
+  .refine(
+    (value) => Math.abs(value * 1e6 - Math.round(value * 1e6)) < 1e-3,
+    "A rate has at most six decimals.",
+  );
 
 const Formula = z.strictObject({ key, label: text, expression, source });
 const Formulas = z
   .strictObject({ chosen: key, formulas: z.array(Formula).min(1).max(20) })
-  .refine(({ chosen, formulas }) => formulas.some((formula) => formula.key === chosen), { path: ["chosen"], message: "The chosen formula is not among them." })
-  .refine(({ formulas }) => new Set(formulas.map((formula) => formula.key)).size === formulas.length, { path: ["formulas"], message: "Give each formula a key of its own." });
+  .refine(({ chosen, formulas }) => formulas.some((formula) => formula.key === chosen), {
+    path: ["chosen"],
+    message: "The chosen formula is not among them.",
+  })
+  .refine(({ formulas }) => new Set(formulas.map((formula) => formula.key)).size === formulas.length, {
+    path: ["formulas"],
+    message: "Give each formula a key of its own.",
+  });
 
 const Use = z.strictObject({
   item: z.string().regex(/^[a-z][a-z0-9.{}:-]*$/i),
@@ -50,26 +67,57 @@ export const TimeRuleSchema = z
     gives: name.nullable(),
     uses: z.array(Use).max(12),
   })
-  .refine((rule) => (rule.runMinutes === null) === (rule.trade === null), { path: ["trade"], message: "Minutes need a trade, and a trade needs minutes." })
-  .refine((rule) => rule.machineMinutes === null || rule.workCentre !== null, { path: ["workCentre"], message: "Machine minutes need a work centre." })
-  .refine((rule) => rule.setUpMinutes === null || rule.runMinutes !== null, { path: ["setUpMinutes"], message: "A set-up needs an operation that takes minutes." });
+  .refine((rule) => (rule.runMinutes === null) === (rule.trade === null), {
+    path: ["trade"],
+    message: "Minutes need a trade, and a trade needs minutes.",
+  })
+  .refine((rule) => rule.machineMinutes === null || rule.workCentre !== null, {
+    path: ["workCentre"],
+    message: "Machine minutes need a work centre.",
+  })
+  .refine((rule) => rule.setUpMinutes === null || rule.runMinutes !== null, {
+    path: ["setUpMinutes"],
+    message: "A set-up needs an operation that takes minutes.",
+  });
 
 const NamedEntry = z.strictObject({ name: text, value: z.number(), source });
 const NumberEntry = z.strictObject({ upTo: z.number(), value: z.number(), source });
 
 export const LookUpTableSchema = z.discriminatedUnion("kind", [
   z
-    .strictObject({ kind: z.literal("named"), label: text, unit: text, entries: z.array(NamedEntry).min(1).max(200) })
-    .refine(({ entries }) => new Set(entries.map((entry) => entry.name)).size === entries.length, { path: ["entries"], message: "Name each entry once." }),
-  z
-    .strictObject({ kind: z.enum(["steps", "linear"]), label: text, unit: text, entries: z.array(NumberEntry).min(1).max(200) })
-    .refine(({ entries }) => entries.every((entry, index) => index === 0 || entry.upTo > (entries[index - 1]?.upTo ?? entry.upTo)), {
+    .strictObject({
+      kind: z.literal("named"),
+      label: text,
+      unit: text,
+      entries: z.array(NamedEntry).min(1).max(200),
+    })
+    .refine(({ entries }) => new Set(entries.map((entry) => entry.name)).size === entries.length, {
       path: ["entries"],
-      message: "List the entries from the lowest limit up.",
+      message: "Name each entry once.",
     }),
+  z
+    .strictObject({
+      kind: z.enum(["steps", "linear"]),
+      label: text,
+      unit: text,
+      entries: z.array(NumberEntry).min(1).max(200),
+    })
+    .refine(
+      ({ entries }) =>
+        entries.every((entry, index) => index === 0 || entry.upTo > (entries[index - 1]?.upTo ?? entry.upTo)),
+      {
+        path: ["entries"],
+        message: "List the entries from the lowest limit up.",
+      },
+    ),
 ]);
 
-export const TimeConstantSchema = z.strictObject({ value: z.union([z.number(), text]), label: text, unit: text, source });
+export const TimeConstantSchema = z.strictObject({
+  value: z.union([z.number(), text]),
+  label: text,
+  unit: text,
+  source,
+});
 
 const TimeTableSchema = z
   .strictObject({
@@ -79,11 +127,17 @@ const TimeTableSchema = z
     lookUps: z.record(name, LookUpTableSchema),
     constants: z.record(name, TimeConstantSchema),
   })
-  .refine(({ rules }) => new Set(rules.map((rule) => rule.key)).size === rules.length, { path: ["rules"], message: "Give each rule a key of its own." });
+  .refine(({ rules }) => new Set(rules.map((rule) => rule.key)).size === rules.length, {
+    path: ["rules"],
+    message: "Give each rule a key of its own.",
+  });
 
 export const RateLineSchema = z
   .strictObject({ low: rate, likely: rate, high: rate, unit: z.enum(RATE_UNITS), source })
-  .refine(({ low, likely, high }) => low <= likely && likely <= high, { path: ["likely"], message: "The likely rate lies between low and high." });
+  .refine(({ low, likely, high }) => low <= likely && likely <= high, {
+    path: ["likely"],
+    message: "The likely rate lies between low and high.",
+  });
 
 const RateBookSchema = z.strictObject({
   id: text,
@@ -97,7 +151,10 @@ const RateBookSchema = z.strictObject({
 const CarbonTableSchema = z.strictObject({
   id: text,
   label: text,
-  factors: z.partialRecord(z.enum(PRODUCTS), z.strictObject({ kgCo2ePerKg: z.number().min(0).max(100), source })),
+  factors: z.partialRecord(
+    z.enum(PRODUCTS),
+    z.strictObject({ kgCo2ePerKg: z.number().min(0).max(100), source }),
+  ),
 });
 
 export const ShopPricesSchema = z
@@ -112,12 +169,17 @@ export const ShopPricesSchema = z
     const refuseUnit = (item: string, unit: string): void => {
       const line = Object.hasOwn(rateBook.lines, item) ? rateBook.lines[item] : undefined;
       if (line !== undefined && line.unit !== unit) {
-        context.addIssue({ code: "custom", path: ["rateBook", "lines", item, "unit"], message: `The time table counts ${item} in ${unit}, the rate book prices it per ${line.unit}.` });
+        context.addIssue({
+          code: "custom",
+          path: ["rateBook", "lines", item, "unit"],
+          message: `The time table counts ${item} in ${unit}, the rate book prices it per ${line.unit}.`,
+        });
       }
     };
     for (const rule of timeTable.rules) {
       if (rule.trade !== null) refuseUnit(`labour:${rule.trade}`, "h");
-      if (rule.machineMinutes !== null && rule.workCentre !== null) refuseUnit(`machine:${rule.workCentre}`, "h");
+      if (rule.machineMinutes !== null && rule.workCentre !== null)
+        refuseUnit(`machine:${rule.workCentre}`, "h");
       for (const use of rule.uses) refuseUnit(use.item, use.unit);
     }
   });

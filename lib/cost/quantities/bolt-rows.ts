@@ -7,7 +7,9 @@ export interface BoltedSide {
 
 /** The joints that have bolts through the column flange. */
 export function boltedSides(joints: readonly JointCase[]): readonly BoltedSide[] {
-  return joints.flatMap((joint) => (joint.connection.kind === "end-plate" ? [{ joint, connection: joint.connection }] : []));
+  return joints.flatMap((joint) =>
+    joint.connection.kind === "end-plate" ? [{ joint, connection: joint.connection }] : [],
+  );
 }
 
 /** Bolt rows of one side that belong to the given beam flange levels: each row to the nearer flange. */

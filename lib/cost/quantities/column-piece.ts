@@ -3,7 +3,8 @@ import type { ISection, JointCase } from "@/lib/calc/node";
 import { steelMassKg } from "../products";
 
 /** Mass of a column section, kg/m, from its own dimensions. */
-export const sectionMassKgPerM = (section: ISection): number => steelMassKg(sectionProperties(section).areaMm2 * 1000);
+export const sectionMassKgPerM = (section: ISection): number =>
+  steelMassKg(sectionProperties(section).areaMm2 * 1000);
 
 /**
  * Surface of an I-section to be painted, mm2 per mm: the outline, each root fillet replacing two
@@ -19,5 +20,8 @@ export const clearDepthMm = (section: ISection): number => section.depthMm - 2 *
 
 /** Distance between the middles of a joint's beam flanges, mm; the deepest beam of the node decides. */
 export function beamFlangeSpacingMm(joints: readonly JointCase[]): number {
-  return joints.reduce((most, { beam }) => Math.max(most, beam.section.depthMm - beam.section.flangeThicknessMm), 0);
+  return joints.reduce(
+    (most, { beam }) => Math.max(most, beam.section.depthMm - beam.section.flangeThicknessMm),
+    0,
+  );
 }

@@ -8,10 +8,18 @@ import { weldEdges } from "./stiffener-welds";
 type Measure = Extract<MeasureCase, { kind: "diagonal-stiffeners" }>;
 
 /** Plates on one side of the web: how many, and how long each is. */
-function platesOnOneSide(arrangement: Measure["arrangement"], clearMm: number, spacingMm: number): readonly (readonly [number, number])[] {
+function platesOnOneSide(
+  arrangement: Measure["arrangement"],
+  clearMm: number,
+  spacingMm: number,
+): readonly (readonly [number, number])[] {
   const whole = Math.hypot(clearMm, spacingMm);
   // Where two diagonals cross, one runs through and the other is cut in two; in a K both meet at mid-height of one flange.
-  if (arrangement === "cross") return [[1, whole], [2, whole / 2]];
+  if (arrangement === "cross")
+    return [
+      [1, whole],
+      [2, whole / 2],
+    ];
   if (arrangement === "k") return [[2, Math.hypot(clearMm, spacingMm / 2)]];
   return [[1, whole]];
 }
@@ -20,7 +28,11 @@ function platesOnOneSide(arrangement: Measure["arrangement"], clearMm: number, s
 export function takeDiagonalStiffeners(take: QuantityTake, context: MeasureContext, measure: Measure): void {
   const { column, joints } = context;
   const clearMm = clearDepthMm(column);
-  for (const [count, lengthMm] of platesOnOneSide(measure.arrangement, clearMm, beamFlangeSpacingMm(joints))) {
+  for (const [count, lengthMm] of platesOnOneSide(
+    measure.arrangement,
+    clearMm,
+    beamFlangeSpacingMm(joints),
+  )) {
     const parts = 2 * count;
     takePlates(take, context.pieceMassKg, {
       partType: "diagonal-stiffener",

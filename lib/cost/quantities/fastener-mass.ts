@@ -14,10 +14,13 @@ export const washerMassKg = (size: FastenerSize): number =>
   steelMassKg((circleMm2(size.washerDiameterMm) - circleMm2(size.diameterMm)) * size.washerThicknessMm);
 
 /** Threaded bar, its thread cut away to the stress area. */
-export const barMassKg = (size: FastenerSize, lengthMm: number): number => steelMassKg(size.stressAreaMm2 * lengthMm);
+export const barMassKg = (size: FastenerSize, lengthMm: number): number =>
+  steelMassKg(size.stressAreaMm2 * lengthMm);
 
 /** Bolt with head and shank through the grip, two washers and its nut, kg without nut and washers. */
 export function boltMassKg(size: FastenerSize, gripMm: number): number {
   const shankMm = gripMm + 2 * size.washerThicknessMm + size.nutHeightMm + threadBeyondNutMm(size);
-  return steelMassKg(circleMm2(size.diameterMm) * shankMm + hexagonMm2(size.acrossFlatsMm) * size.headHeightMm);
+  return steelMassKg(
+    circleMm2(size.diameterMm) * shankMm + hexagonMm2(size.acrossFlatsMm) * size.headHeightMm,
+  );
 }

@@ -13,17 +13,33 @@ function weldRecord(run: WeldRun, flangeRunsUpright: boolean): QuantityRecord {
   const areaMm2 = weldAreaMm2(run);
   const position = run.on === "flange" && flangeRunsUpright ? "PF" : "PB";
   if (run.type === "fillet") {
-    const values = { throatMm: run.sizeMm, lengthM, runs, areaMm2, thickestMm, position, clearGapMm, gunAngle };
+    const values = {
+      throatMm: run.sizeMm,
+      lengthM,
+      runs,
+      areaMm2,
+      thickestMm,
+      position,
+      clearGapMm,
+      gunAngle,
+    };
     return { driver: "fillet-weld", group: "", values };
   }
   const values = { depthMm: run.sizeMm, lengthM, runs, areaMm2, thickestMm, position, clearGapMm, gunAngle };
   return { driver: "butt-weld", group: "", values };
 }
 
-function plan(key: HandlingPlan["key"], turns: number, upright: boolean, { weldRuns, pieceMassKg }: Quantities, nodesPerLift: number): HandlingPlan {
+function plan(
+  key: HandlingPlan["key"],
+  turns: number,
+  upright: boolean,
+  { weldRuns, pieceMassKg }: Quantities,
+  nodesPerLift: number,
+): HandlingPlan {
   const records = weldRuns.map((run) => weldRecord(run, upright));
   // The whole lift is turned once for all nodes on it.
-  if (turns > 0) records.push({ driver: "turn", group: "", values: { turns: turns / nodesPerLift, pieceMassKg } });
+  if (turns > 0)
+    records.push({ driver: "turn", group: "", values: { turns: turns / nodesPerLift, pieceMassKg } });
   return { key, records };
 }
 

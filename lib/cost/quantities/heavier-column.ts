@@ -4,7 +4,12 @@ import { sectionMassKgPerM, sectionPerimeterMm } from "./column-piece";
 import type { QuantityTake } from "./quantities";
 
 /** A column is changed from splice to splice, so each node carries its share of the whole lift. */
-export function takeHeavierColumn(take: QuantityTake, bare: ISection, heavier: ISection, fabrication: FabricationCase): void {
+export function takeHeavierColumn(
+  take: QuantityTake,
+  bare: ISection,
+  heavier: ISection,
+  fabrication: FabricationCase,
+): void {
   const lengthM = fabrication.liftLengthMm / 1000 / fabrication.nodesPerLift;
   const massKg = (sectionMassKgPerM(heavier) - sectionMassKgPerM(bare)) * lengthM;
   if (massKg === 0) return;

@@ -44,7 +44,12 @@ export function takePlates(take: QuantityTake, pieceMassKg: number, plate: Plate
 }
 
 /** Takes bevelled edges of full-penetration welds, prepared to the whole plate thickness. */
-export function takeBevels(take: QuantityTake, edges: number, edgeLengthMm: number, thicknessMm: number): void {
+export function takeBevels(
+  take: QuantityTake,
+  edges: number,
+  edgeLengthMm: number,
+  thicknessMm: number,
+): void {
   take.records.push({
     driver: "bevel-edge",
     group: `${thicknessMm}`,

@@ -31,10 +31,17 @@ function takeMeasure(take: QuantityTake, context: MeasureContext, measure: Measu
  * Everything the measures of an option add to the bare node, from geometry alone, per node.
  * Bolts that bars replace are negative; a heavier column is its share of the lift.
  */
-export function quantitiesOf(node: NodeCase, measures: readonly MeasureCase[], fabrication: FabricationCase): Quantities {
+export function quantitiesOf(
+  node: NodeCase,
+  measures: readonly MeasureCase[],
+  fabrication: FabricationCase,
+): Quantities {
   const take = new QuantityTake();
   const bare = node.column.section;
-  const column = measures.reduce((section, measure) => (measure.kind === "heavier-column" ? measure.section : section), bare);
+  const column = measures.reduce(
+    (section, measure) => (measure.kind === "heavier-column" ? measure.section : section),
+    bare,
+  );
   const pieceMassKg = (sectionMassKgPerM(column) * fabrication.liftLengthMm) / 1000;
   const context: MeasureContext = { column, joints: node.joints, pieceMassKg };
   for (const measure of measures) takeMeasure(take, context, measure);
@@ -42,5 +49,11 @@ export function quantitiesOf(node: NodeCase, measures: readonly MeasureCase[], f
   // A heavier column alone changes a size on a drawing and needs no detail of its own.
   const details = measures.filter((measure) => measure.kind !== "heavier-column").length;
   if (details > 0) take.records.push({ driver: "detail", group: "", values: { details } });
-  return { records: take.records, weldRuns: take.weldRuns, facesWelded: take.facesWelded, masses: take.masses, pieceMassKg };
+  return {
+    records: take.records,
+    weldRuns: take.weldRuns,
+    facesWelded: take.facesWelded,
+    masses: take.masses,
+    pieceMassKg,
+  };
 }

@@ -14,20 +14,41 @@ export function takeThroughBars(take: QuantityTake, context: MeasureContext, mea
   const sides = boltedSides(context.joints);
   const lead = sides[0];
   if (lead === undefined) return;
-  const bars = Math.max(...sides.map((side) => rowsAtLevels(side, measure.levels) * side.connection.bolts.perRow));
+  const bars = Math.max(
+    ...sides.map((side) => rowsAtLevels(side, measure.levels) * side.connection.bolts.perRow),
+  );
   if (bars === 0) return;
-  takeBars(take, context, measure, lead, bars, sides.reduce((sum, side) => sum + side.connection.plate.thicknessMm, 0));
+  takeBars(
+    take,
+    context,
+    measure,
+    lead,
+    bars,
+    sides.reduce((sum, side) => sum + side.connection.plate.thicknessMm, 0),
+  );
   for (const side of sides) takeSavedBolts(take, context, side, measure);
   if (sides.length === 1) {
     take.records.push({
       driver: "hole",
       group: `section ${measure.size.holeMm}`,
-      values: { through: "section", holes: bars, diameterMm: measure.size.holeMm, thicknessMm: context.column.flangeThicknessMm },
+      values: {
+        through: "section",
+        holes: bars,
+        diameterMm: measure.size.holeMm,
+        thicknessMm: context.column.flangeThicknessMm,
+      },
     });
   }
 }
 
-function takeBars(take: QuantityTake, { column }: MeasureContext, measure: Measure, lead: BoltedSide, bars: number, platesMm: number): void {
+function takeBars(
+  take: QuantityTake,
+  { column }: MeasureContext,
+  measure: Measure,
+  lead: BoltedSide,
+  bars: number,
+  platesMm: number,
+): void {
   const { size, grade } = measure;
   const { gaugeMm, preloaded } = lead.connection.bolts;
   const ends = size.washerThicknessMm + size.nutHeightMm + threadBeyondNutMm(size);
@@ -63,7 +84,12 @@ function takeBars(take: QuantityTake, { column }: MeasureContext, measure: Measu
 }
 
 /** Bolts that are not bought and not tightened, with their nuts and two washers: negative. */
-function takeSavedBolts(take: QuantityTake, { column }: MeasureContext, side: BoltedSide, measure: Measure): void {
+function takeSavedBolts(
+  take: QuantityTake,
+  { column }: MeasureContext,
+  side: BoltedSide,
+  measure: Measure,
+): void {
   const { size, grade, perRow, preloaded } = side.connection.bolts;
   const bolts = rowsAtLevels(side, measure.levels) * perRow;
   if (bolts === 0) return;

@@ -11,7 +11,11 @@ type Measure = Extract<MeasureCase, { kind: "transverse-stiffeners" }>;
  * A pair of plates at each level. Full-depth plates reach from flange to flange; partial ones start
  * at the flange of each joint, so a two-sided node has two pairs a level.
  */
-export function takeTransverseStiffeners(take: QuantityTake, context: MeasureContext, measure: Measure): void {
+export function takeTransverseStiffeners(
+  take: QuantityTake,
+  context: MeasureContext,
+  measure: Measure,
+): void {
   const { column, joints } = context;
   const clearMm = clearDepthMm(column);
   const isFull = measure.length === "full" || measure.length >= clearMm;

@@ -41,6 +41,15 @@ export function takeWebPlates(take: QuantityTake, context: MeasureContext, measu
     // Beside the root the flange is in the way of the gun.
     gunAngle: "restricted",
   });
-  take.weld({ type: "fillet", sizeMm: throatMm, lengthM: (runs * widthMm) / 1000, runs, on: "web", thickestMm, clearGapMm, gunAngle: "free" });
+  take.weld({
+    type: "fillet",
+    sizeMm: throatMm,
+    lengthM: (runs * widthMm) / 1000,
+    runs,
+    on: "web",
+    thickestMm,
+    clearGapMm,
+    gunAngle: "free",
+  });
   take.facesWelded = Math.max(take.facesWelded, sides);
 }

@@ -1,0 +1,44 @@
+import {
+  type CreationOptional,
+  DataTypes,
+  type InferAttributes,
+  type InferCreationAttributes,
+  Model,
+  type Sequelize,
+} from "sequelize";
+
+/** A version of the carbon factors by product. Issued ones never change. */
+export class CarbonTable extends Model<InferAttributes<CarbonTable>, InferCreationAttributes<CarbonTable>> {
+  declare id: CreationOptional<string>;
+  /** Without one: what everybody starts with. */
+  declare organisationId: string | null;
+  declare label: string;
+  declare version: CreationOptional<number>;
+  declare state: CreationOptional<"draft" | "issued">;
+  /** ISO date. */
+  declare validFrom: string;
+  declare issuedAt: CreationOptional<Date | null>;
+  declare issuedBy: CreationOptional<string | null>;
+  declare basedOnId: CreationOptional<string | null>;
+  declare createdAt: CreationOptional<Date>;
+  declare updatedAt: CreationOptional<Date>;
+}
+
+export function initCarbonTable(sequelize: Sequelize): void {
+  CarbonTable.init(
+    {
+      id: { type: DataTypes.UUID, primaryKey: true, defaultValue: DataTypes.UUIDV4 },
+      organisationId: DataTypes.UUID,
+      label: DataTypes.TEXT,
+      version: { type: DataTypes.INTEGER, defaultValue: 1 },
+      state: { type: DataTypes.TEXT, defaultValue: "draft" },
+      validFrom: DataTypes.DATEONLY,
+      issuedAt: DataTypes.DATE,
+      issuedBy: DataTypes.UUID,
+      basedOnId: DataTypes.UUID,
+      createdAt: DataTypes.DATE,
+      updatedAt: DataTypes.DATE,
+    },
+    { sequelize, modelName: "CarbonTable", tableName: "carbon_tables", timestamps: true },
+  );
+}
