@@ -6,13 +6,13 @@ import {
   Model,
   type Sequelize,
 } from "sequelize";
-import type { SectionFamily } from "@/lib/catalog/catalog";
 
 /** A rolled I-section of the catalogue. Lengths mm. */
 export class Section extends Model<InferAttributes<Section>, InferCreationAttributes<Section>> {
   declare id: CreationOptional<number>;
   declare designation: string;
-  declare family: SectionFamily;
+  /** One of SECTION_FAMILIES. */
+  declare family: string;
   declare depthMm: number;
   declare widthMm: number;
   declare webThicknessMm: number;

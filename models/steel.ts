@@ -6,14 +6,14 @@ import {
   Model,
   type Sequelize,
 } from "sequelize";
-import type { StrengthTable } from "@/lib/catalog/find-steel";
 
 /** Strengths of a steel grade over a range of thickness. N/mm2 and mm. */
 export class Steel extends Model<InferAttributes<Steel>, InferCreationAttributes<Steel>> {
   declare id: CreationOptional<number>;
   declare standard: string;
   declare grade: string;
-  declare strengthTable: StrengthTable;
+  /** Which table of strengths the line belongs to. */
+  declare strengthTable: string;
   declare overMm: number;
   declare upToMm: number;
   declare yieldMpa: number;
