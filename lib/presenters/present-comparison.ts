@@ -2,6 +2,7 @@ import type { ComparisonRecord } from "@/lib/db/repositories/comparisons";
 import type { Comparison, ComparisonDifference, OptionFigures } from "@/lib/schemas/comparison";
 import type { EstimateDocument, OptionDocument, ResultDocument } from "@/lib/schemas/result-document";
 import { costIndexer, NO_CURRENCY } from "./cost-index";
+import { pricedBy } from "./priced-by";
 
 /** Said of an option that a designer has set aside. */
 export const SET_ASIDE = "Set aside by the designer.";
@@ -53,7 +54,7 @@ export const presentComparison = (comparison: ComparisonRecord, view: Comparison
   nodeId: comparison.nodeId,
   nodeVersion: comparison.nodeVersion,
   engine: comparison.engine,
-  pricedBy: comparison.pricesKey,
+  pricedBy: pricedBy(comparison.pricesKey),
   createdAt: comparison.createdAt.toISOString(),
   createdBy: comparison.createdBy,
   outdated: [...view.outdated],

@@ -8,5 +8,5 @@ import type { Actor } from "@/lib/policies/roles";
 export async function readPrices(actor: Actor, organisationId: string): Promise<ShopPrices> {
   if (!canViewRates(actor, { organisationId }))
     throw new AppError("forbidden", "These rates belong to another organisation.");
-  return loadCurrentPrices(organisationId);
+  return await loadCurrentPrices(organisationId);
 }

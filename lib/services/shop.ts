@@ -3,6 +3,7 @@ import type { Catalog } from "@/lib/catalog/catalog";
 import type { ShopPrices } from "@/lib/cost/prices";
 import { loadCatalog } from "@/lib/db/repositories/catalog";
 import { loadCurrentPrices } from "@/lib/db/repositories/rate-books";
+import { pricesKeyOf } from "@/lib/presenters/priced-by";
 
 /** Everything a calculation reads besides the node, with names to tell later whether it has moved on. */
 export interface Shop {
@@ -15,10 +16,6 @@ export interface Shop {
 /** A fingerprint of the catalogue: equal rows give equal keys. */
 export const catalogKeyOf = (catalog: Catalog): string =>
   createHash("sha256").update(JSON.stringify(catalog)).digest("hex").slice(0, 32);
-
-/** Names the three tables that price a node. Issued versions never change, so their ids say it all. */
-export const pricesKeyOf = ({ rateBook, timeTable, carbon }: ShopPrices): string =>
-  [rateBook.id, timeTable.id, carbon.id].join(" + ");
 
 /** The catalogue and the figures of one organisation as they stand now. */
 export async function loadShop(organisationId: string): Promise<Shop> {
