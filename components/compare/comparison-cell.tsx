@@ -2,7 +2,7 @@ import { joinClasses } from "@/components/ui/join-classes";
 import { formatUtilisation } from "@/components/ui/format-number";
 import type { Cell, Opening } from "./comparison-rows";
 import { stopProps } from "./use-grid-keys";
-import { STANDING_WORDS, standingOf, UtilisationBar, UtilisationFigure } from "./utilisation-bar";
+import { UtilisationBar, UtilisationFigure } from "./utilisation-bar";
 
 export interface CellContentProps {
   readonly cell: Cell;
@@ -22,22 +22,21 @@ const VERDICT_TONES = { pass: "text-pass", fail: "text-fail", plain: "text-soft"
 const restProps = (column: number) => ({ ...stopProps(column), className: "block" });
 
 function UtilisationCell({ cell, rowLabel, optionName, limit, column, onOpen }: CellContentProps & { readonly cell: Extract<Cell, { kind: "utilisation" }> }) {
-  const words = STANDING_WORDS[standingOf(cell.value, limit)];
   return (
     <button
       type="button"
       {...stopProps(column)}
       className={OPENER}
       onClick={() => onOpen(cell.opens)}
-      aria-label={`${rowLabel}, ${optionName}: ${formatUtilisation(cell.value, limit)}, ${words}, ${cell.where}${cell.isGoverning ? ", governs" : ""}. Open the working`}
     >
+      <span className="sr-only">{`${rowLabel}, ${optionName}: `}</span>
       <span className="flex items-center gap-2.5">
         <UtilisationBar value={cell.value} limit={limit} />
         <span className="opens w-[3.4rem] shrink-0 text-right">
-          <UtilisationFigure value={cell.value} limit={limit} />
+          <UtilisationFigure value={cell.value} limit={limit} {...(cell.isGoverning ? { className: "font-bold" } : {})} />
         </span>
       </span>
-      {cell.isGoverning ? <span className="block text-note text-soft">{`governs, ${cell.where}`}</span> : null}
+      <span className="sr-only">{`, ${cell.where}${cell.isGoverning ? ", governs" : ""}. Open the working`}</span>
     </button>
   );
 }
@@ -50,11 +49,12 @@ function VerdictCell({ cell, optionName, limit, column, onOpen }: CellContentPro
       {...stopProps(column)}
       className={OPENER}
       onClick={() => onOpen(cell.opens)}
-      aria-label={`Verdict, ${optionName}: ${[cell.word, figure, cell.note].filter(Boolean).join(", ")}. ${cell.value === null ? "Open the option" : "Open the working"}`}
     >
+      <span className="sr-only">{`${optionName}: `}</span>
       <span className={joinClasses("font-[650]", VERDICT_TONES[cell.tone])}>{cell.word}</span>
       {figure ? <span className="opens">{` ${figure}`}</span> : null}
       <span className="block text-note text-soft">{cell.note}</span>
+      <span className="sr-only">{cell.value === null ? ". Open the option" : ". Open the working"}</span>
     </button>
   );
 }
@@ -75,9 +75,10 @@ function QuantityCell({ cell, rowLabel, optionName, column, onOpen }: CellConten
       {...stopProps(column)}
       className={OPENER}
       onClick={() => onOpen(opens)}
-      aria-label={`${rowLabel}, ${optionName}: ${[`${cell.text} ${cell.unit}`.trim(), cell.note].filter(Boolean).join(", ")}. Open the working`}
     >
+      <span className="sr-only">{`${rowLabel}, ${optionName}: `}</span>
       {content}
+      <span className="sr-only">. Open the working</span>
     </button>
   );
 }

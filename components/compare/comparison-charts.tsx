@@ -1,6 +1,6 @@
 "use client";
 import type { ResultDocument } from "@/lib/schemas/result-document";
-import { formatMinutes, formatMoney } from "@/components/ui/format-number";
+import { formatMinutes, formatWholeMoney, moneyUnit } from "@/components/ui/format-number";
 import { StackedFigure } from "@/components/cost/stacked-figure";
 import { stackedShares, type LetteredOption } from "@/components/cost/stacked-shares";
 import { isEvaluated } from "./comparison-rows";
@@ -17,12 +17,12 @@ export function ComparisonCharts({ result }: { readonly result: ResultDocument }
   );
   const currency = options[0]?.option.estimate.currency ?? "";
   return (
-    <div className="mt-10 grid gap-x-10 gap-y-8 wide:grid-cols-2">
+    <div className="mt-10 grid gap-x-10 gap-y-8 min-[1200px]:grid-cols-2">
       <StackedFigure
         title="Cost by category"
-        note={`${currency} a node, added to the bare node.`}
+        note={`${moneyUnit(currency)} a node, added to the bare node.`}
         shares={stackedShares(options, ({ estimate }) => estimate.costByCategory)}
-        format={formatMoney}
+        format={formatWholeMoney}
         label={categoryLabel}
       />
       <StackedFigure

@@ -1,7 +1,7 @@
 import type { ComponentId } from "@/lib/calc/result";
 import type { ComponentDocument, EvaluatedOptionDocument, JointDocument, OptionDocument, ResultDocument } from "@/lib/schemas/result-document";
-import { formatMinutes, formatMoney, formatNumber } from "@/components/ui/format-number";
-import { COMPONENT_ROWS, componentLabel, sentenceCase, type RowGroupKey } from "./component-labels";
+import { formatMinutes, formatMoney, formatNumber, formatWholeMoney, moneyUnit } from "@/components/ui/format-number";
+import { COMPONENT_ROWS, componentLabel, type RowGroupKey } from "./component-labels";
 
 /** What opens when a cell is pressed. */
 export type Opening =
@@ -37,7 +37,8 @@ export type Cell =
 export interface Row {
   readonly key: string;
   readonly label: string;
-  readonly unit?: string;
+  /** A part of the figure above it: "of which welder". */
+  readonly isPart?: boolean;
   /** In the order of the options. */
   readonly cells: readonly Cell[];
 }
@@ -89,9 +90,9 @@ function utilisationCell(option: EvaluatedOptionDocument, choice: LoadCaseChoice
 }
 
 const GROUP_TITLES: Readonly<Record<RowGroupKey, string>> = {
-  panel: "Utilisation, joint and panel",
-  added: "Utilisation, what is added",
-  connection: "Utilisation, connection",
+  panel: "Utilisation",
+  added: "of added parts",
+  connection: "of the connection",
 };
 const ABSENT: Readonly<Record<RowGroupKey, string>> = { panel: "does not apply", added: "not in this option", connection: "does not apply" };
 
@@ -176,12 +177,12 @@ function resistanceCell(option: EvaluatedOptionDocument, choice: LoadCaseChoice)
 function stiffnessGroup(result: ResultDocument, choice: LoadCaseChoice): RowGroup {
   return {
     key: "stiffness",
-    title: "Stiffness and resistance",
+    title: "Stiffness",
     startsFolded: false,
     folded: across(result, (option) => stiffnessCell(option, choice)),
     rows: [
-      { key: "stiffness", label: "initial stiffness, smaller side", cells: across(result, (option) => stiffnessCell(option, choice)) },
-      { key: "resistance", label: "moment resistance, smaller side", cells: across(result, (option) => resistanceCell(option, choice)) },
+      { key: "stiffness", label: "initial, smaller side", cells: across(result, (option) => stiffnessCell(option, choice)) },
+      { key: "resistance", label: "moment resistance", cells: across(result, (option) => resistanceCell(option, choice)) },
     ],
   };
 }
@@ -198,15 +199,16 @@ function hoursGroup(result: ResultDocument): RowGroup {
   const shop = estimateCells(result, (option) => minutes(option.estimate.shopMinutes, true, { about: "hours" }));
   return {
     key: "hours",
-    title: "Hours added, a node",
+    title: "Hours added",
     startsFolded: false,
     folded: shop,
     rows: [
-      { key: "shop", label: "in the shop", cells: shop },
-      { key: "site", label: "on site", cells: estimateCells(result, (option) => minutes(option.estimate.siteMinutes, false, { about: "hours" })) },
+      { key: "shop", label: "shop, a node", cells: shop },
+      { key: "site", label: "site, a node", cells: estimateCells(result, (option) => minutes(option.estimate.siteMinutes, false, { about: "hours" })) },
       ...trades.map((trade) => ({
         key: `trade-${trade}`,
         label: trade.replaceAll("-", " "),
+        isPart: true,
         cells: estimateCells(result, (option) => minutes(option.estimate.minutesByTrade[trade] ?? 0, false, { about: "hours", trade })),
       })),
     ],
@@ -214,7 +216,7 @@ function hoursGroup(result: ResultDocument): RowGroup {
 }
 
 function costGroup(result: ResultDocument): RowGroup {
-  const money = (value: number, currency: string, isBig: boolean, opens: Opening): Cell => ({ kind: "quantity", text: formatMoney(value), unit: currency, isBig, opens });
+  const money = (value: number, currency: string, isBig: boolean, opens: Opening): Cell => ({ kind: "quantity", text: opens.about === "cost" && opens.category !== undefined ? formatWholeMoney(value) : formatMoney(value), unit: moneyUnit(currency), isBig, opens });
   const categories = [
     ...new Set(
       result.options.filter(isEvaluated).flatMap(({ estimate }) => Object.entries(estimate.costByCategory).flatMap(([key, value]) => (value === 0 ? [] : [key]))),
@@ -236,6 +238,7 @@ function costGroup(result: ResultDocument): RowGroup {
       ...categories.map((category) => ({
         key: `category-${category}`,
         label: category === "column" ? "heavier column" : category,
+        isPart: true,
         cells: estimateCells(result, ({ estimate }) => money(estimate.costByCategory[category] ?? 0, estimate.currency, false, { about: "cost", category })),
       })),
     ],
@@ -247,18 +250,19 @@ function massGroup(result: ResultDocument): RowGroup {
   const mass = estimateCells(result, ({ estimate }) => quantity(estimate.mass, "kg"));
   return {
     key: "mass",
-    title: "Steel and carbon added, a node",
+    title: "Steel added",
     startsFolded: false,
     folded: mass,
     rows: [
-      { key: "mass", label: "steel", cells: mass },
+      { key: "mass", label: "mass, a node", cells: mass },
       { key: "carbon", label: "embodied carbon", cells: estimateCells(result, ({ estimate }) => quantity(estimate.carbon, "kg CO₂e")) },
     ],
   };
 }
 
 function cautionsOf(option: OptionDocument): readonly string[] {
-  if (!isEvaluated(option)) return [option.outsideScope.reason];
+  // Its one caution, why it is outside, already stands in the row of verdicts.
+  if (!isEvaluated(option)) return [];
   return [option.connectionFailure, option.passes ? null : option.sizing, ...option.cautions].filter((words): words is string => Boolean(words));
 }
 
@@ -272,7 +276,7 @@ function cautionGroup(result: ResultDocument): RowGroup {
     title: "Cautions",
     startsFolded: false,
     folded: cells.map((cell): Cell => (cell.kind === "list" ? { kind: "quantity", text: String(cell.items.length), unit: cell.items.length === 1 ? "caution" : "cautions", opens: { about: "option" } } : cell)),
-    rows: [{ key: "cautions", label: sentenceCase("what to mind"), cells }],
+    rows: [{ key: "cautions", label: "what to mind", cells }],
   };
 }
 

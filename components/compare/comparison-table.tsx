@@ -29,7 +29,7 @@ interface Column {
   readonly isOff: boolean;
 }
 
-const HEAD_COLUMN = "sticky left-0 z-10 w-[132px] min-w-[132px] desk:w-[168px] desk:min-w-[168px] border-r border-ink bg-paper px-3 desk:px-3.5 text-left font-[450]";
+const HEAD_COLUMN = "sticky left-0 z-10 w-[132px] min-w-[132px] desk:w-[168px] desk:min-w-[168px] head-rule bg-paper px-3 desk:px-3.5 text-left font-[450]";
 const OPEN_WIDTH = "w-[196px] min-w-[168px] desk:min-w-[176px] px-3 desk:px-3.5";
 const FOLDED_WIDTH = "w-[46px] min-w-[46px] px-1.5";
 
@@ -49,14 +49,15 @@ function HeadRows({ columns, props, onFold }: { readonly columns: readonly Colum
   return (
     <thead>
       <tr className="comparison-head">
-        <th scope="col" className={joinClasses(HEAD_COLUMN, "z-30 py-3 align-bottom text-note text-soft")}>
+        <th scope="col" className={joinClasses(HEAD_COLUMN, "top-0 z-30 border-b border-b-rule pb-9 align-bottom text-note text-soft")}>
           Rank by cost
         </th>
         {columns.map((column) => (
-          <th key={column.option.key} scope="col" className={columnClass(column, "sticky top-0 z-20 h-px pt-3.5 pb-2", column.isBest ? "best-edge" : "")}>
+          <th key={column.option.key} scope="col" className={columnClass(column, "sticky top-0 z-20 h-px border-b border-b-rule pt-3.5 pb-2", column.isBest ? "best-edge" : "")}>
             {column.isFolded ? (
-              <button type="button" {...stopProps(column.index + 1)} onClick={() => onFold(column.option.key)} aria-label={`Unfold option ${column.letter}, ${column.option.name}`} className="mt-1">
+              <button type="button" {...stopProps(column.index + 1)} onClick={() => onFold(column.option.key)} className="mt-1">
                 <Bubble letter={column.letter} isBest={column.isBest} />
+                <span className="sr-only">{` ${column.option.name}, folded. Unfold it`}</span>
               </button>
             ) : (
               <OptionHead
@@ -100,7 +101,7 @@ interface RowProps {
 function BodyRow({ row, columns, limit, onOpen }: RowProps) {
   return (
     <tr>
-      <th scope="row" className={joinClasses(HEAD_COLUMN, "border-t border-t-rule py-[5px] align-top text-soft")}>
+      <th scope="row" className={joinClasses(HEAD_COLUMN, "border-t border-t-rule py-[5px] align-top text-soft", row.isPart ? "pl-6 text-note desk:pl-7" : "")}>
         {row.label}
       </th>
       {columns.map((column) => {

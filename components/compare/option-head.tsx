@@ -20,7 +20,6 @@ export interface OptionHeadProps {
 export function Bubble({ letter, isBest = false }: { readonly letter: string; readonly isBest?: boolean }) {
   return (
     <span
-      aria-hidden="true"
       className={joinClasses(
         "inline-grid size-[27px] flex-none place-items-center rounded-full border-[1.4px] font-[650]",
         isBest ? "border-petrol bg-petrol text-onpetrol" : "border-ink bg-sheet",
@@ -38,12 +37,13 @@ export function OptionHead({ option, result, letter, column, isExcluded, onToggl
   const rank = rankWords(option, result);
   return (
     <div className="flex h-full flex-col">
-      <button type="button" {...stopProps(column)} onClick={onOpen} aria-label={`Option ${letter}, ${option.name}. Open its parts`} className="flex min-h-9 items-center gap-2.5 text-left hover:underline">
+      <button type="button" {...stopProps(column)} onClick={onOpen} className="flex min-h-9 items-center gap-2.5 text-left hover:underline">
         <Bubble letter={letter} isBest={rank.isBest} />
         <span className="text-[0.90625rem] leading-[1.15] font-[650]">{option.name}</span>
+        <span className="sr-only">. Open its parts</span>
       </button>
       <span className="mt-1 block min-h-[1.05rem] text-note font-[450] text-soft">{optionSummary(option.measures)}</span>
-      <span className="mt-1 flex min-h-[1.9rem] items-baseline text-label font-[550] text-soft">
+      <span className="mt-auto flex min-h-[1.9rem] items-baseline pt-1 text-label font-[550] text-soft">
         {rank.figure ? (
           <>
             <b className="mr-1.5 text-rank font-[680] text-ink">
@@ -56,19 +56,19 @@ export function OptionHead({ option, result, letter, column, isExcluded, onToggl
           rank.words
         )}
       </span>
-      <span className="no-print mt-auto flex gap-3 font-normal">
-        <button type="button" {...stopProps(column)} onClick={onFold} aria-label={`Fold option ${letter}`} className={SMALL}>
-          Fold
+      <span className="no-print mt-1.5 flex gap-3 font-normal">
+        <button type="button" {...stopProps(column)} onClick={onFold} className={SMALL}>
+          Fold<span className="sr-only">{` option ${letter}`}</span>
         </button>
         {onToggleExcluded ? (
           <button
             type="button"
             {...stopProps(column)}
-            aria-label={`${isExcluded ? "Rank again" : "Set aside"} option ${letter}`}
             onClick={onToggleExcluded}
             className={SMALL}
           >
             {isExcluded ? "Rank again" : "Set aside"}
+            <span className="sr-only">{`: option ${letter}`}</span>
           </button>
         ) : null}
       </span>

@@ -1,5 +1,5 @@
 import type { OptionDocument, ResultDocument } from "@/lib/schemas/result-document";
-import { formatMoney } from "@/components/ui/format-number";
+import { formatMoney, moneyUnit } from "@/components/ui/format-number";
 import { isEvaluated } from "./comparison-rows";
 
 export interface RankWords {
@@ -23,7 +23,7 @@ export function rankWords(option: OptionDocument, result: ResultDocument): RankW
   }
   if (option.rank === 1) return { figure: "1", words: "cheapest", isBest: true };
   const more = option.estimate.cost - (cheapestCost(result) ?? option.estimate.cost);
-  return { figure: String(option.rank), words: `+${formatMoney(more)} ${option.estimate.currency}`, isBest: false };
+  return { figure: String(option.rank), words: `+${formatMoney(more)} ${moneyUnit(option.estimate.currency)}`, isBest: false };
 }
 
 /** The letter in the bubble: A to Z, then AA. It follows the place in the comparison, not the key. */

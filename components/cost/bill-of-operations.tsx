@@ -1,5 +1,5 @@
 import type { EstimateDocument } from "@/lib/schemas/result-document";
-import { formatFigures, formatMoney, formatNumber } from "@/components/ui/format-number";
+import { formatFigures, formatNumber, moneyUnit } from "@/components/ui/format-number";
 import { Table, Td, Th } from "@/components/ui/table";
 
 export interface BillOfOperationsProps {
@@ -37,7 +37,7 @@ export function BillOfOperations({ estimate, only }: BillOfOperationsProps) {
   }
   return (
     <>
-      <p className="mb-2 text-note text-soft">{`Per node, ${estimate.currency}. A minus sign is what the option saves against the bare node.`}</p>
+      <p className="mb-2 text-note text-soft">{`Per node, ${moneyUnit(estimate.currency)}. A minus sign is what the option saves against the bare node.`}</p>
       <Table label="Bill of operations">
         <thead>
           <tr>
@@ -60,7 +60,7 @@ export function BillOfOperations({ estimate, only }: BillOfOperationsProps) {
             </th>
             <Td className="border-t-ink" />
             <Td className="border-t-ink text-right">{formatNumber(sum(lines, (line) => line.minutes), 1)}</Td>
-            <Td className="border-t-ink text-right">{formatMoney(sum(lines, (line) => line.cost))}</Td>
+            <Td className="border-t-ink text-right">{formatNumber(sum(lines, (line) => line.cost), 2)}</Td>
             <Td className="border-t-ink" />
           </tr>
         </tfoot>

@@ -1,7 +1,7 @@
 import { createElement, type ReactNode } from "react";
 import { formatFigures } from "@/components/ui/format-number";
 import { parseExpression, type Expression } from "./parse-expression";
-import { splitSymbol } from "./symbol-text";
+import { splitSymbol, unitText } from "./symbol-text";
 
 /* MathML: drawn by the browser itself, read aloud by screen readers, and free of style attributes. */
 const tag = (name: string, props: object | null, ...children: readonly ReactNode[]) => createElement(name, props, ...children);
@@ -15,7 +15,7 @@ type NameSetter = (name: string) => ReactNode;
 
 function symbolMath(symbol: string): ReactNode {
   const { base, below } = splitSymbol(symbol);
-  const letter = base.length === 1 ? tag("mi", null, base) : tag("mtext", null, base);
+  const letter = base.length === 1 ? tag("mi", { mathvariant: "normal", className: "italic" }, base) : tag("mtext", null, base);
   return below === null ? letter : tag("msub", null, letter, tag("mtext", null, below));
 }
 
@@ -83,16 +83,19 @@ export interface ExpressionMathProps {
   readonly inputs?: Readonly<Record<string, number>>;
   /** Stands before an equals sign. */
   readonly symbol?: string;
+  /** Stands after a last equals sign: the result with its unit. */
+  readonly result?: { readonly value: number; readonly unit: string };
 }
 
 /** One line of a calculation set as mathematics; the line as it is written where it cannot be. */
-export function ExpressionMath({ expression, symbols, inputs, symbol }: ExpressionMathProps) {
+export function ExpressionMath({ expression, symbols, inputs, symbol, result }: ExpressionMathProps) {
   const parsed = parseExpression(expression);
   if (!parsed) return <code className="break-words">{symbol ? `${symbol} = ${expression}` : expression}</code>;
   const set: NameSetter = (name) => {
     const value = inputs?.[name];
     return value === undefined ? symbolMath(symbols[name]?.[0] ?? name) : numberMath(value);
   };
-  const body = math(parsed, set);
-  return tag("math", { display: "block", className: "working-math" }, symbol ? row(symbolMath(symbol), operator("="), body) : row(operator("="), body));
+  const head = symbol ? row(symbolMath(symbol), operator("=")) : operator("=");
+  const tail = result ? row(operator("="), numberMath(result.value), tag("mtext", null, `\u00a0${unitText(result.unit)}`)) : null;
+  return <div className="py-1">{tag("math", { displaystyle: "true", className: "working-math" }, row(head, math(parsed, set), tail))}</div>;
 }

@@ -51,11 +51,8 @@ function StepBody({ step }: { readonly step: Step }) {
     <>
       <div className="overflow-x-auto py-1">
         <ExpressionMath expression={step.expression} symbols={step.symbols} symbol={step.symbol} />
-        <ExpressionMath expression={step.expression} symbols={step.symbols} inputs={step.inputs} />
+        <ExpressionMath expression={step.expression} symbols={step.symbols} inputs={step.inputs} result={{ value: step.value, unit: step.unit }} />
       </div>
-      <p>
-        <SymbolText symbol={step.symbol} /> = <Value value={step.value} unit={step.unit} />
-      </p>
       <Inputs step={step} />
     </>
   );

@@ -50,3 +50,10 @@ export function formatMinutes(minutes: number): string {
 /** Money: whole units from 20 up, else with hundredths; no currency. */
 export const formatMoney = (amount: number): string =>
   amount === 0 ? "0" : formatNumber(amount, Math.abs(amount) >= 20 ? 0 : 2);
+
+/** Money as a part among parts: whole units, so that a column of them can be compared at a glance. */
+export const formatWholeMoney = (amount: number): string =>
+  amount !== 0 && Math.abs(amount) < 0.5 ? `${amount < 0 ? MINUS : ""}<1` : formatNumber(amount, 0);
+
+/** ISO 4217 "XXX" is no currency: money is shown as an index, the cheapest option that costs anything = 100. */
+export const moneyUnit = (currency: string): string => (currency === "XXX" ? "index" : currency);
