@@ -45,7 +45,8 @@ export interface ComponentCheck {
   readonly resistance: number;
   readonly utilisation: number;
   readonly stiffnessCoefficientMm?: number;
-  readonly step?: Step;
+  /** How the resistance (first) and, where it is worth showing, the demand came about. */
+  readonly steps?: readonly Step[];
 }
 
 export type StiffnessClass = "pinned" | "semi-rigid" | "rigid";

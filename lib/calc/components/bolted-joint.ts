@@ -1,0 +1,188 @@
+import { bendingClass, bendingResistanceNmm, epsilonOf } from "../clauses/en1993-1-1-2005/members";
+import { boltedMomentNmm } from "../clauses/en1993-1-8-2005/assembly";
+import { beamFlangeCompressionN, beamWebTensionN, deepBeamCompressionN } from "../clauses/en1993-1-8-2005/beam";
+import { omegaOf, webTensionN } from "../clauses/en1993-1-8-2005/column-web";
+import { relievedN } from "../mechanics/through-bar-formulas";
+import { sectionProperties } from "../mechanics/section-properties";
+import type { JointCase, NodeCase } from "../node";
+import { OutsideScope } from "../outcome";
+import { traced, type Traced } from "../trace/traced";
+import type { ColumnFlange } from "./column-flange";
+import type { ColumnPanel } from "./column-panel";
+import type { CompressionZone } from "./compression-zone";
+import type { EndPlateView } from "./connection-view";
+import type { EndPlate } from "./end-plate";
+import { assembleRows } from "./row-assembly";
+import type { RowFamily, RowFamilyLimits } from "./row-groups";
+import type { TStubPart } from "./t-stub-part";
+
+/** A bolted joint with its tension flange at one level: all that no load case changes. */
+export interface BoltedJoint {
+  readonly kind: "bolted";
+  readonly view: EndPlateView;
+  readonly flange: ColumnFlange;
+  readonly plate: EndPlate;
+  readonly beamWeb: RowFamilyLimits;
+  readonly compression: CompressionZone;
+  readonly beamFlange: Traced;
+  /** What the connection's own side could carry on a column that never gives way, Nmm. */
+  readonly connectionMomentNmm: number;
+}
+
+const deepBeamMm = 600;
+
+/** Beam flange and web in compression. @throws OutsideScope for a class 4 beam. */
+export function beamCompression(node: NodeCase, joint: JointCase, steps: boolean): Traced {
+  const { section, steel } = joint.beam;
+  const properties = sectionProperties(section);
+  const epsilon = epsilonOf(null, { yieldMpa: steel.yieldMpa });
+  const beamClass = bendingClass({
+    outstandMm: (section.widthMm - section.webThicknessMm) / 2 - section.rootMm,
+    flangeThicknessMm: section.flangeThicknessMm,
+    webDepthMm: properties.webDepthMm,
+    webThicknessMm: section.webThicknessMm,
+    epsilon,
+  });
+  if (beamClass === 4) throw new OutsideScope(`the ${joint.side} beam is a class 4 section (EN 1993-1-1, Table 5.2)`);
+  return traced(steps, (trace) => {
+    const momentNmm = bendingResistanceNmm(trace, {
+      modulusMm3: beamClass === 2 ? properties.plasticModulusMm3 : properties.elasticModulusMm3,
+      yieldMpa: steel.yieldMpa,
+      gammaM0: node.partialFactors.gammaM0,
+    });
+    const given = { momentNmm, depthMm: section.depthMm, flangeThicknessMm: section.flangeThicknessMm };
+    return section.depthMm > deepBeamMm
+      ? deepBeamCompressionN(
+          trace,
+          { ...given, widthMm: section.widthMm, yieldMpa: steel.yieldMpa, gammaM0: node.partialFactors.gammaM0 },
+          0,
+        )
+      : beamFlangeCompressionN(trace, given, 0);
+  });
+}
+
+/** Beam web in tension behind each row inside the flanges and each group of them. */
+function beamWebLimits(node: NodeCase, joint: JointCase, plate: EndPlate, steps: boolean): RowFamilyLimits {
+  const limitOf = (part: TStubPart): Traced =>
+    traced(steps, (trace) =>
+      beamWebTensionN(trace, {
+        breadthMm: part.modeLengthMm,
+        thicknessMm: joint.beam.section.webThicknessMm,
+        yieldMpa: joint.beam.steel.yieldMpa,
+        gammaM0: node.partialFactors.gammaM0,
+      }),
+    );
+  return {
+    alone: plate.family.alone.map((part, index) => (plate.isInside[index] ? limitOf(part) : null)),
+    groupsEndingAt: plate.family.groupsEndingAt.map((groups) =>
+      groups.map(({ first, part }) => ({ first, part, limit: limitOf(part) })),
+    ),
+  };
+}
+
+const resistancesOf = (family: RowFamily): RowFamilyLimits => ({
+  alone: family.alone.map((part) => part.resistance),
+  groupsEndingAt: family.groupsEndingAt.map((groups) =>
+    groups.map(({ first, part }) => ({ first, part, limit: part.resistance })),
+  ),
+});
+
+/** Everything about a bolted joint that does not depend on the load case. */
+export function boltedJointOf(
+  node: NodeCase,
+  view: EndPlateView,
+  parts: { readonly flange: ColumnFlange; readonly plate: EndPlate; readonly compression: CompressionZone },
+  steps: boolean,
+): BoltedJoint {
+  const beamWeb = beamWebLimits(node, view.joint, parts.plate, steps);
+  const beamFlange = beamCompression(node, view.joint, steps);
+  const own = assembleRows(view.tensionRows, [resistancesOf(parts.plate.family), beamWeb], beamFlange.value, false);
+  const connectionMomentNmm = boltedMomentNmm(null, {
+    leverMm: view.tensionRows.map((row) => row.leverMm),
+    forceN: own.forces.map((force) => force.value),
+  });
+  return { kind: "bolted", view, ...parts, beamWeb, beamFlange, connectionMomentNmm };
+}
+
+/** How bars relieve the column in one load case: 0 where they do not. By position among the tension rows. */
+export interface TensionRelief {
+  readonly flange: readonly number[];
+  readonly web: readonly number[];
+}
+
+/** Relief of a group: the mean of its rows, of which the outer two only may count. */
+function groupRelief(relief: readonly number[], first: number, count: number): number {
+  const outer = (relief[first] ?? 0) + (relief[first + count - 1] ?? 0);
+  return outer / count;
+}
+
+/** Column flange and column web on the tension side, in one load case. */
+export interface ColumnTension {
+  readonly flange: RowFamilyLimits;
+  readonly web: RowFamilyLimits;
+}
+
+/** Column-side limits of each row and group for one beta and one set of reliefs. */
+export function columnTension(
+  node: NodeCase,
+  panel: ColumnPanel,
+  joint: BoltedJoint,
+  beta: number,
+  relief: TensionRelief,
+  steps: boolean,
+): ColumnTension {
+  const { family, isWebHeld } = joint.flange;
+  const webOf = (lengthMm: number, share: number): Traced =>
+    traced(steps, (trace) => {
+      const omega = omegaOf(trace, {
+        beta,
+        stripMm2: lengthMm * panel.section.webThicknessMm,
+        shearAreaMm2: panel.shearArea.value,
+      });
+      const plain = webTensionN(
+        trace,
+        {
+          omega,
+          breadthMm: lengthMm,
+          thicknessMm: panel.tensionWebMm,
+          yieldMpa: panel.steel.yieldMpa,
+          gammaM0: node.partialFactors.gammaM0,
+        },
+        0,
+      );
+      return share > 0 ? relievedN(trace, { resistanceN: plain, relief: share }, 0) : plain;
+    });
+  const alone = family.alone.map((part, index) => part.relieved(relief.flange[index] ?? 0));
+  const groups = family.groupsEndingAt.map((ending) =>
+    ending.map(({ first, part }) => ({
+      first,
+      part,
+      relieved: part.relieved(groupRelief(relief.flange, first, part.rows.length)),
+    })),
+  );
+  const isGroupHeld = (first: number, count: number): boolean =>
+    isWebHeld.slice(first, first + count).every((isHeld) => isHeld);
+  return {
+    flange: {
+      alone: alone.map((part) => part.resistance),
+      groupsEndingAt: groups.map((ending) =>
+        ending.map(({ first, part, relieved }) => ({ first, part, limit: relieved.resistance })),
+      ),
+    },
+    web: {
+      alone: alone.map((part, index) =>
+        isWebHeld[index] ? null : webOf(part.modeLengthMm, relief.web[index] ?? 0),
+      ),
+      groupsEndingAt: groups.map((ending) =>
+        ending
+          .filter(({ first, part }) => !isGroupHeld(first, part.rows.length))
+          .map(({ first, part, relieved }) => ({
+            first,
+            part,
+            limit: webOf(relieved.modeLengthMm, groupRelief(relief.web, first, part.rows.length)),
+          })),
+      ),
+    },
+  };
+}
+

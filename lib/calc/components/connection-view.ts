@@ -1,0 +1,174 @@
+import { boltTensionN } from "../clauses/en1993-1-8-2005/fasteners";
+import type { PanelDesign, ThroughBars, TransverseStiffeners } from "../measures/panel-design";
+import type { EndPlateConnection, FastenerGrade, FastenerSize, JointCase, Level, NodeCase, Weld } from "../node";
+import { OutsideScope } from "../outcome";
+import { traced, type Traced } from "../trace/traced";
+
+/**
+ * A joint seen with its tension flange first: a reversed moment turns the same joint upside down,
+ * and every component reads it the same way round.
+ */
+export interface JointView {
+  readonly joint: JointCase;
+  readonly tensionLevel: Level;
+  readonly compressionLevel: Level;
+  readonly tensionWeld: Weld;
+  readonly compressionWeld: Weld;
+  /** From the middle of the tension flange to the column's end beyond it; Infinity where it is continuous. */
+  readonly columnBeyondTensionMm: number;
+  readonly columnBeyondCompressionMm: number;
+  /** The stiffener pair in line with each flange. */
+  readonly tensionStiffener: TransverseStiffeners | null;
+  readonly compressionStiffener: TransverseStiffeners | null;
+}
+
+/** What holds one bolt row together: its bolts, or the threaded bars that replace them. */
+export interface RowFastener {
+  readonly size: FastenerSize;
+  readonly grade: FastenerGrade;
+  /** 0.85 for threads not known to be to EN 1090, 3.6.1(3). */
+  readonly reduction: number;
+  /** What stands at the column flange's inside: a nut; and at the plate: a head, or a second nut on a bar. */
+  readonly headHeightMm: number;
+  readonly tension: Traced;
+  readonly bars: ThroughBars | null;
+}
+
+export interface BoltRow {
+  /** 1 = first in `bolts.rows`. */
+  readonly row: number;
+  /** Below the outer face of the beam's top flange. */
+  readonly belowTopMm: number;
+  /** From the outer face of the tension flange towards the compression flange; negative outside it. */
+  readonly fromFaceMm: number;
+  /** To the centre of compression. */
+  readonly leverMm: number;
+  readonly level: Level;
+  readonly fastener: RowFastener;
+  readonly isTension: boolean;
+}
+
+export interface EndPlateView extends JointView {
+  readonly connection: EndPlateConnection;
+  readonly gaugeMm: number;
+  readonly extensionTensionMm: number;
+  readonly extensionCompressionMm: number;
+  /** Every row, furthest from the centre of compression first. */
+  readonly rows: readonly BoltRow[];
+  /** Those that take tension. */
+  readonly tensionRows: readonly BoltRow[];
+}
+
+/** Cut threads not known to be to EN 1090. EN 1993-1-8:2005, 3.6.1(3). */
+export const CUT_THREAD_REDUCTION = 0.85;
+/** Rows nearer the centre of compression than this share of the beam's depth carry shear. Common practice, no source. */
+const SHEAR_ROW_SHARE = 0.25;
+
+const other = (level: Level): Level => (level === "top" ? "bottom" : "top");
+const flangeWeld = (joint: JointCase, level: Level): Weld => {
+  const { connection } = joint;
+  if (connection.kind === "flange-cleats") throw new OutsideScope("flange-cleat joints are not evaluated yet");
+  return level === "top" ? connection.welds.topFlange : connection.welds.bottomFlange;
+};
+
+/** The joint with its tension flange at `tensionLevel`. */
+export function jointViewOf(node: NodeCase, design: PanelDesign, joint: JointCase, tensionLevel: Level): JointView {
+  const { endDistanceAboveMm, endDistanceBelowMm } = node.column;
+  const half = joint.beam.section.flangeThicknessMm / 2;
+  const beyond = {
+    top: endDistanceAboveMm === null ? Infinity : endDistanceAboveMm + half,
+    bottom: endDistanceBelowMm === null ? Infinity : endDistanceBelowMm + half,
+  };
+  const compressionLevel = other(tensionLevel);
+  return {
+    joint,
+    tensionLevel,
+    compressionLevel,
+    tensionWeld: flangeWeld(joint, tensionLevel),
+    compressionWeld: flangeWeld(joint, compressionLevel),
+    columnBeyondTensionMm: beyond[tensionLevel],
+    columnBeyondCompressionMm: beyond[compressionLevel],
+    tensionStiffener: design.stiffeners[tensionLevel],
+    compressionStiffener: design.stiffeners[compressionLevel],
+  };
+}
+
+/** Level of the flange that a row stands nearer to. */
+export const levelOfRow = (belowTopMm: number, beamDepthMm: number): Level =>
+  belowTopMm < beamDepthMm / 2 ? "top" : "bottom";
+
+function fastenerOf(
+  node: NodeCase,
+  connection: EndPlateConnection,
+  bars: ThroughBars | null,
+  steps: boolean,
+): RowFastener {
+  const { size, grade } = bars ?? connection.bolts;
+  const reduction = bars ? CUT_THREAD_REDUCTION : 1;
+  return {
+    size,
+    grade,
+    reduction,
+    headHeightMm: bars ? size.nutHeightMm : size.headHeightMm,
+    tension: traced(steps, (trace) =>
+      boltTensionN(trace, {
+        ultimateMpa: grade.ultimateMpa,
+        stressAreaMm2: size.stressAreaMm2,
+        reduction,
+        gammaM2: node.partialFactors.gammaM2,
+      }),
+    ),
+    bars,
+  };
+}
+
+/** A bolted end plate with its tension flange at `tensionLevel`. @throws OutsideScope where no row can take tension. */
+export function endPlateViewOf(
+  node: NodeCase,
+  design: PanelDesign,
+  joint: JointCase,
+  connection: EndPlateConnection,
+  tensionLevel: Level,
+  steps: boolean,
+): EndPlateView {
+  const view = jointViewOf(node, design, joint, tensionLevel);
+  const { depthMm, flangeThicknessMm } = joint.beam.section;
+  const fasteners = {
+    bolts: fastenerOf(node, connection, null, steps),
+    top: design.bars.top ? fastenerOf(node, connection, design.bars.top, steps) : null,
+    bottom: design.bars.bottom ? fastenerOf(node, connection, design.bars.bottom, steps) : null,
+  };
+  const rows = connection.bolts.rowsMm
+    .map((belowTopMm, index): BoltRow => {
+      const fromFaceMm = tensionLevel === "top" ? belowTopMm : depthMm - belowTopMm;
+      const leverMm = depthMm - flangeThicknessMm / 2 - fromFaceMm;
+      const level = levelOfRow(belowTopMm, depthMm);
+      return {
+        row: index + 1,
+        belowTopMm,
+        fromFaceMm,
+        leverMm,
+        level,
+        fastener: fasteners[level] ?? fasteners.bolts,
+        isTension: leverMm >= SHEAR_ROW_SHARE * depthMm,
+      };
+    })
+    .sort((a, b) => b.leverMm - a.leverMm);
+  const tensionRows = rows.filter((row) => row.isTension);
+  if (tensionRows.length === 0) {
+    throw new OutsideScope("no bolt row stands far enough from the compression flange to take tension");
+  }
+  if (tensionRows.filter((row) => row.fromFaceMm < 0).length > 1) {
+    throw new OutsideScope("more than one bolt row stands outside the tension flange (Table 6.6 covers one)");
+  }
+  const { extensionTopMm, extensionBottomMm } = connection.plate;
+  return {
+    ...view,
+    connection,
+    gaugeMm: connection.bolts.gaugeMm,
+    extensionTensionMm: tensionLevel === "top" ? extensionTopMm : extensionBottomMm,
+    extensionCompressionMm: tensionLevel === "top" ? extensionBottomMm : extensionTopMm,
+    rows,
+    tensionRows,
+  };
+}

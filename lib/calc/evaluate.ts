@@ -1,0 +1,274 @@
+import { cautionsOf } from "./cautions";
+import { betaOf, panelShearForceN } from "./clauses/en1993-1-8-2005/panel";
+import { checkOf } from "./components/check";
+import { columnPanelOf, type ColumnPanel } from "./components/column-panel";
+import { connectionDetailing, sideChecks } from "./components/joint-checks";
+import { isBolted, jointModelOf, type JointModel } from "./joint-model";
+import { symmetricPart } from "./mechanics/through-bar-formulas";
+import { designOf } from "./measures/apply-measures";
+import { barChecks, barPressN } from "./measures/bar-checks";
+import type { PanelDesign } from "./measures/panel-design";
+import { refuseOutsideBarBounds } from "./measures/through-bars";
+import { stiffenerChecks, stiffenerDetailing } from "./measures/transverse-stiffeners";
+import { refuseShortPlate, webPlateChecks, webPlateDetailing } from "./measures/web-plates";
+import type { BeamActions, JointCase, Level, LoadCase, MeasureCase, NodeCase, Side } from "./node";
+import { OutsideScope } from "./outcome";
+import type { ComponentCheck, JointResult, OptionOutcome } from "./result";
+import { boltedSideCase, jointResultOf, weldedSideCase, type SideCase } from "./side-case";
+import { traced } from "./trace/traced";
+import { connectionFailureOf, governingOf, reachesStiffness } from "./verdict";
+
+export interface EvaluateSettings {
+  /** Record the working of every number. */
+  readonly steps: boolean;
+}
+
+const LEVELS: readonly Level[] = ["top", "bottom"];
+/** Axial force of a beam up to which the joint's moment resistance is not affected. EN 1993-1-8:2005, 6.2.7.1(2). */
+const SMALL_AXIAL_SHARE = 0.05;
+
+const tensionLevelOf = (actions: BeamActions): Level => (actions.momentNmm >= 0 ? "top" : "bottom");
+const actionsOf = (loadCase: LoadCase, side: Side): BeamActions => {
+  const actions = loadCase[side];
+  if (!actions) throw new RangeError(`Load case ${loadCase.name} has no forces for the ${side} beam`);
+  return actions;
+};
+
+function refuseUnequalBeams(node: NodeCase): void {
+  const [first, second] = node.joints;
+  if (!first || !second) return;
+  const a = first.beam.section;
+  const b = second.beam.section;
+  if (a.depthMm !== b.depthMm || a.flangeThicknessMm !== b.flangeThicknessMm || second.levelOffsetMm !== 0) {
+    throw new OutsideScope("beams of unequal depth, flange thickness or level are not evaluated yet");
+  }
+}
+
+function refuseLargeAxialForce(joint: JointCase, loadCase: LoadCase): void {
+  const { axialForceN } = actionsOf(loadCase, joint.side);
+  const { section, steel } = joint.beam;
+  const area =
+    2 * section.widthMm * section.flangeThicknessMm +
+    (section.depthMm - 2 * section.flangeThicknessMm) * section.webThicknessMm;
+  if (Math.abs(axialForceN) > SMALL_AXIAL_SHARE * area * steel.yieldMpa) {
+    throw new OutsideScope(
+      `the ${joint.side} beam's axial force in ${loadCase.name} exceeds 5 % of its plastic resistance (6.2.7.1(2))`,
+    );
+  }
+}
+
+/** Models of each joint with its tension flange at a level, made when a load case first asks. */
+class ModelStore {
+  private readonly models = new Map<string, JointModel>();
+  constructor(
+    private readonly node: NodeCase,
+    private readonly design: PanelDesign,
+    private readonly panel: ColumnPanel,
+    private readonly steps: boolean,
+  ) {}
+
+  of(joint: JointCase, tensionLevel: Level): JointModel {
+    const key = `${joint.side} ${tensionLevel}`;
+    let model = this.models.get(key);
+    if (!model) {
+      model = jointModelOf(this.node, this.design, this.panel, joint, tensionLevel, this.steps);
+      this.models.set(key, model);
+    }
+    return model;
+  }
+
+  all(): readonly JointModel[] {
+    return [...this.models.values()];
+  }
+}
+
+/** beta of one joint: 1 alone, exact with both moments; 2, the most there is, where its own moment is nothing. 5.3(9). */
+function betaOfSide(node: NodeCase, loadCase: LoadCase, side: Side): number {
+  if (node.joints.length === 1) return 1;
+  const ownNmm = actionsOf(loadCase, side).momentNmm;
+  const otherNmm = actionsOf(loadCase, side === "left" ? "right" : "left").momentNmm;
+  return ownNmm === 0 ? 2 : betaOf(null, { ownNmm, otherNmm });
+}
+
+/** Symmetric part of two forces of one sense; `own` and `other` positive in that sense. */
+const symmetricOf = (own: number, other: number): number => {
+  const largerN = Math.max(own, other);
+  return largerN > 0 ? symmetricPart(null, { largerN, otherN: Math.min(own, other) }) : 0;
+};
+
+function sideCasesOf(node: NodeCase, panel: ColumnPanel, store: ModelStore, loadCase: LoadCase, steps: boolean): SideCase[] {
+  const sides = node.joints.map((joint) => {
+    const actions = actionsOf(loadCase, joint.side);
+    return { joint, actions, model: store.of(joint, tensionLevelOf(actions)) };
+  });
+  /** Outward force at the top flange, N. */
+  const topForce = (side: (typeof sides)[number] | undefined): number =>
+    side ? side.actions.momentNmm / side.model.leverMm : 0;
+  return sides.map((own, index) => {
+    const other = sides[1 - index];
+    const sense = tensionLevelOf(own.actions) === "top" ? 1 : -1;
+    // At the tension level outward is positive, at the compression level inward; both are the moment's own sense.
+    const symmetric = symmetricOf(sense * topForce(own), sense * topForce(other));
+    const load = {
+      loadCase,
+      actions: own.actions,
+      beta: betaOfSide(node, loadCase, own.joint.side),
+      symmetric: { tension: symmetric, compression: symmetric },
+    };
+    return isBolted(own.model)
+      ? boltedSideCase(node, panel, own.model, load, steps)
+      : weldedSideCase(node, panel, own.model, load, steps);
+  });
+}
+
+function panelChecks(panel: ColumnPanel, loadCase: LoadCase, sides: readonly SideCase[], steps: boolean): {
+  readonly demandN: number;
+  readonly checks: ComponentCheck[];
+} {
+  const of = (side: Side) => sides.find((candidate) => candidate.model.joint.view.joint.side === side);
+  const left = of("left");
+  const right = of("right");
+  const force = traced(steps, (trace) =>
+    panelShearForceN(trace, {
+      leftNmm: left?.actions.momentNmm ?? 0,
+      leftLeverMm: left?.lever.value ?? right?.lever.value ?? 1,
+      rightNmm: right?.actions.momentNmm ?? 0,
+      rightLeverMm: right?.lever.value ?? left?.lever.value ?? 1,
+      aboveN: loadCase.column.shearAboveN,
+      belowN: loadCase.column.shearBelowN,
+    }),
+  );
+  const demandN = Math.abs(force.value);
+  return {
+    demandN,
+    checks: sides.map((side) =>
+      checkOf(
+        {
+          component: "column-web-shear",
+          side: side.model.joint.view.joint.side,
+          loadCase: loadCase.name,
+          clause: "EN 1993-1-8, 6.2.6.1 and 5.3",
+        },
+        demandN,
+        panel.shear,
+        { stiffnessCoefficientMm: side.panelSpring?.value, demandStep: force.step },
+      ),
+    ),
+  };
+}
+
+/** Bars under moments turning the same way add to the compression they face: the check is repeated with it. */
+function pressedCompression(sides: readonly SideCase[]): ComponentCheck[] {
+  return sides.flatMap((side, index) => {
+    const other = sides[1 - index];
+    const pressN = other ? barPressN(other, side) : 0;
+    if (pressN <= 0) return [];
+    const { view } = side.model.joint;
+    return [
+      checkOf(
+        {
+          component: "column-web-compression",
+          side: view.joint.side,
+          level: view.compressionLevel,
+          loadCase: side.loadCase.name,
+          clause: "EN 1993-1-8, 6.2.6.2",
+          what: "with the bars' push from the other side",
+        },
+        side.compressionDemandN + pressN,
+        side.compression,
+      ),
+    ];
+  });
+}
+
+function caseChecks(node: NodeCase, design: PanelDesign, panel: ColumnPanel, loadCase: LoadCase, sides: readonly SideCase[], steps: boolean): ComponentCheck[] {
+  const shear = panelChecks(panel, loadCase, sides, steps);
+  const checks = [...sides.flatMap(sideChecks), ...shear.checks];
+  for (const level of LEVELS) {
+    const stiffener = design.stiffeners[level];
+    if (stiffener) checks.push(...stiffenerChecks(node, panel, stiffener, level, sides, steps));
+  }
+  const side = node.joints[0]?.side ?? "left";
+  if (design.webPlates) {
+    checks.push(
+      ...webPlateChecks(node, panel, design.webPlates, shear.demandN, { side, loadCase: loadCase.name }, steps),
+    );
+  }
+  if (design.bars.top || design.bars.bottom) {
+    sides.forEach((own, index) => checks.push(...barChecks(node, panel, own, sides[1 - index], steps)));
+    checks.push(...pressedCompression(sides));
+  }
+  return checks;
+}
+
+function detailingChecks(design: PanelDesign, panel: ColumnPanel, models: readonly JointModel[], sides: readonly SideCase[]): ComponentCheck[] {
+  const seen = new Set<JointModel>();
+  const checks = sides.flatMap((side) => {
+    if (seen.has(side.model)) return [];
+    seen.add(side.model);
+    return connectionDetailing(side, panel.section.widthMm);
+  });
+  for (const level of LEVELS) {
+    const stiffener = design.stiffeners[level];
+    if (stiffener) checks.push(...stiffenerDetailing(panel, stiffener, level, models));
+  }
+  const side = models[0]?.joint.view.joint.side ?? "left";
+  if (design.webPlates) checks.push(...webPlateDetailing(panel, design.webPlates, side));
+  return checks;
+}
+
+function evaluate(node: NodeCase, measures: readonly MeasureCase[], steps: boolean): OptionOutcome {
+  refuseUnequalBeams(node);
+  const design = designOf(node, measures);
+  const panel = columnPanelOf(node, design, steps);
+  refuseOutsideBarBounds(node, design, panel);
+  const store = new ModelStore(node, design, panel, steps);
+  const checks: ComponentCheck[] = [];
+  const joints: JointResult[] = [];
+  const everySide: SideCase[] = [];
+  for (const loadCase of node.loadCases) {
+    for (const joint of node.joints) refuseLargeAxialForce(joint, loadCase);
+    const sides = sideCasesOf(node, panel, store, loadCase, steps);
+    everySide.push(...sides);
+    joints.push(...sides.map(jointResultOf));
+    checks.push(...caseChecks(node, design, panel, loadCase, sides, steps));
+  }
+  const models = store.all();
+  if (design.webPlates) refuseShortPlate(design.webPlates, models);
+  checks.push(...detailingChecks(design, panel, models, everySide));
+  const target = node.target.utilisation;
+  const governing = governingOf(checks, node);
+  const isDetailed = checks.every((check) => check.component !== "detailing" || check.utilisation <= 1);
+  const strong = checks.every((check) => check.component === "detailing" || check.utilisation <= target);
+  const stiffnessReached = reachesStiffness(node, joints);
+  return {
+    kind: "evaluated",
+    measures,
+    passes: strong && isDetailed && stiffnessReached,
+    utilisation: governing.utilisation,
+    stiffnessReached,
+    governing,
+    connectionFailure: connectionFailureOf(everySide, checks, target),
+    cautions: cautionsOf(node, design, models),
+    joints,
+    checks,
+  };
+}
+
+/**
+ * One option on one node in every load case: resistance, stiffness and detailing, or "outside scope" with the reason.
+ *
+ * Says nothing about money. Empty `measures` = the bare column.
+ */
+export function evaluateOption(
+  node: NodeCase,
+  measures: readonly MeasureCase[],
+  settings: EvaluateSettings = { steps: false },
+): OptionOutcome {
+  try {
+    return evaluate(node, measures, settings.steps);
+  } catch (error) {
+    if (error instanceof OutsideScope) return { kind: "outside-scope", measures, reason: error.reason };
+    throw error;
+  }
+}

@@ -1,0 +1,56 @@
+import type { MeasureCase, NodeCase } from "../node";
+import { OutsideScope } from "../outcome";
+import { applyHeavierColumn } from "./heavier-column";
+import type { PanelDesign } from "./panel-design";
+import { applyThroughBars } from "./through-bars";
+import { applyTransverseStiffeners } from "./transverse-stiffeners";
+import { applyWebPlates } from "./web-plates";
+
+const notYet = (what: string): never => {
+  throw new OutsideScope(`${what} are not evaluated yet`);
+};
+
+function apply(design: PanelDesign, measure: MeasureCase): PanelDesign {
+  switch (measure.kind) {
+    case "transverse-stiffeners":
+      return applyTransverseStiffeners(design, measure);
+    case "web-plates":
+      return applyWebPlates(design, measure);
+    case "through-bars":
+      return applyThroughBars(design, measure);
+    case "heavier-column":
+      return applyHeavierColumn(design, measure);
+    case "diagonal-stiffeners":
+      return notYet("diagonal stiffeners");
+    case "backing-plates":
+      return notYet("flange backing plates");
+  }
+}
+
+function refuseRepeats(measures: readonly MeasureCase[]): void {
+  const named = new Set<string>();
+  for (const measure of measures) {
+    const levels = "levels" in measure ? measure.levels : ["panel"];
+    for (const level of levels) {
+      const key = `${measure.kind} ${level}`;
+      if (named.has(key)) throw new OutsideScope("the same measure is given twice at one level");
+      named.add(key);
+    }
+  }
+}
+
+/** The column panel as an option leaves it. @throws OutsideScope for a measure or combination not evaluated. */
+export function designOf(node: NodeCase, measures: readonly MeasureCase[]): PanelDesign {
+  refuseRepeats(measures);
+  const bare: PanelDesign = {
+    column: node.column,
+    stiffeners: { top: null, bottom: null },
+    webPlates: null,
+    bars: { top: null, bottom: null },
+  };
+  const design = measures.reduce(apply, bare);
+  if (design.webPlates && (design.stiffeners.top || design.stiffeners.bottom)) {
+    notYet("web plates together with transverse stiffeners");
+  }
+  return design;
+}

@@ -1,0 +1,233 @@
+import { ELASTIC_MODULUS_MPA, curveCReduction, epsilonOf, strutSlenderness } from "../clauses/en1993-1-1-2005/members";
+import { circularMm, patternMm } from "../clauses/en1993-1-8-2005/yield-lines";
+import { flangeSpringMm, webTensionSpringMm } from "../clauses/en1993-1-8-2005/stiffness";
+import type { BoltedJoint } from "../components/bolted-joint";
+import type { ColumnPanel } from "../components/column-panel";
+import { levelOfRow, type BoltRow } from "../components/connection-view";
+import * as bar from "../mechanics/through-bar-formulas";
+import type { EndPlateConnection, JointCase, Level, NodeCase } from "../node";
+import { OutsideScope } from "../outcome";
+import type { Trace } from "../trace/trace";
+import { traced, type Traced } from "../trace/traced";
+import type { ApplyMeasure, PanelDesign, ThroughBars } from "./panel-design";
+
+/** Threaded bars in place of the bolts at the named levels. @throws OutsideScope without inner nuts. */
+export const applyThroughBars: ApplyMeasure<ThroughBars> = (design, measure) => {
+  if (!measure.innerNuts) {
+    throw new OutsideScope(
+      "bars without inner nuts leave the compression zone without help and the joint softer; they are not evaluated",
+    );
+  }
+  const bars = { ...design.bars };
+  for (const level of measure.levels) bars[level] = measure;
+  return { ...design, bars };
+};
+
+const refuse = (bound: string): never => {
+  throw new OutsideScope(`outside the bounds of the through-bar model: ${bound}`);
+};
+
+/** Length between the middles of the inner nuts, mm. */
+const innerLengthMm = (panel: ColumnPanel, bars: ThroughBars): number =>
+  panel.section.depthMm - 2 * panel.section.flangeThicknessMm - bars.size.nutHeightMm;
+
+function refuseOutsideColumnBounds(panel: ColumnPanel, gaugeMm: number, bars: ThroughBars): void {
+  const { section } = panel;
+  if (section.make !== "rolled") refuse("hot-rolled columns only");
+  if (section.depthMm < 200 || section.depthMm > 400) refuse(`column depth 200 to 400 mm (${section.depthMm} mm)`);
+  const ratio = ((gaugeMm - section.webThicknessMm) / 2 - 0.8 * section.rootMm) / section.flangeThicknessMm;
+  if (ratio < 2 || ratio > 4.6) refuse(`m / t_f 2 to 4.6 (${ratio.toFixed(2)})`);
+  if (bars.size.diameterMm < 16 || bars.size.diameterMm > 30) refuse(`bars M16 to M30 (${bars.size.name})`);
+  if (gaugeMm < 100 || gaugeMm > 180) refuse(`gauge 100 to 180 mm (${gaugeMm} mm)`);
+  const room = (gaugeMm - section.webThicknessMm) / 2 - section.rootMm;
+  if (room < bars.size.acrossPointsMm / 2) refuse("the inner nut rides on the root radius");
+}
+
+function endPlateOfJoint(joint: JointCase): EndPlateConnection {
+  const { connection } = joint;
+  return connection.kind === "end-plate" ? connection : refuse("bolted end plates only");
+}
+
+function refuseOutsideRowBounds(node: NodeCase, panel: ColumnPanel, connection: EndPlateConnection, joint: JointCase, level: Level): void {
+  const { thicknessMm } = connection.plate;
+  if (thicknessMm < 12 || thicknessMm > 30) refuse(`end plate 12 to 30 mm (${thicknessMm} mm)`);
+  const beamDepth = joint.beam.section.depthMm;
+  const rows = connection.bolts.rowsMm.filter((row) => levelOfRow(row, beamDepth) === level);
+  if (rows.length === 0) throw new OutsideScope(`there is no bolt row at the ${level} level for bars to replace`);
+  const needed = 1.6 * panel.section.depthMm;
+  for (const row of rows) {
+    const above = node.column.endDistanceAboveMm;
+    const below = node.column.endDistanceBelowMm;
+    if ((above !== null && above + row < needed) || (below !== null && below + beamDepth - row < needed)) {
+      refuse("rows at least 1.6 column depths from the column's end");
+    }
+  }
+}
+
+/** @throws OutsideScope naming the bound that a level of bars breaks. */
+export function refuseOutsideBarBounds(node: NodeCase, design: PanelDesign, panel: ColumnPanel): void {
+  for (const level of ["top", "bottom"] as const) {
+    const bars = design.bars[level];
+    if (!bars) continue;
+    if (design.stiffeners[level]) refuse("no bars at the level of a stiffener");
+    if (design.webPlates) refuse("no web plate beside bars");
+    const connections = node.joints.map(endPlateOfJoint);
+    const first = connections[0];
+    if (!first) continue;
+    refuseOutsideColumnBounds(panel, first.bolts.gaugeMm, bars);
+    node.joints.forEach((joint, index) => {
+      const connection = connections[index] ?? first;
+      refuseOutsideRowBounds(node, panel, connection, joint, level);
+      const sameRows = (other: EndPlateConnection, depth: number): string =>
+        other.bolts.rowsMm.filter((row) => levelOfRow(row, depth) === level).join(" ");
+      if (
+        connection.bolts.gaugeMm !== first.bolts.gaugeMm ||
+        sameRows(connection, joint.beam.section.depthMm) !== sameRows(first, node.joints[0]?.beam.section.depthMm ?? 0)
+      ) {
+        refuse("the same rows and gauge left and right");
+      }
+    });
+  }
+}
+
+/** q of one row: its length in the group of bar rows over its length alone. */
+function groupShare(joint: BoltedJoint, index: number): number {
+  const alone = joint.flange.family.alone[index]?.shortestByRowMm[0];
+  const rows = joint.view.tensionRows;
+  let best: { count: number; length: number } | null = null;
+  for (const ending of joint.flange.family.groupsEndingAt) {
+    for (const { first, part } of ending) {
+      const inside = index >= first && index < first + part.rows.length;
+      const allBars = rows.slice(first, first + part.rows.length).every((row) => row.fastener.bars !== null);
+      const length = part.shortestByRowMm[index - first];
+      if (inside && allBars && length !== undefined && (!best || part.rows.length > best.count)) {
+        best = { count: part.rows.length, length };
+      }
+    }
+  }
+  return best && alone ? Math.min(1, best.length / alone) : 1;
+}
+
+/** Share eta of each tension row that bars hold; null for a row of bolts. */
+export function barTensionShares(panel: ColumnPanel, joint: BoltedJoint, steps: boolean): readonly (Traced | null)[] {
+  const { section, properties } = panel;
+  return joint.view.tensionRows.map((row, index) => {
+    const bars = row.fastener.bars;
+    if (!bars) return null;
+    return traced(steps, (trace) => {
+      const flangeSpring = bar.barFlangeSpringMm(trace, { flangeMm: section.flangeThicknessMm, mMm: joint.flange.mMm });
+      const webSpring = bar.barWebSpringMm(trace, {
+        webMm: section.webThicknessMm,
+        flangeMm: section.flangeThicknessMm,
+        rootMm: section.rootMm,
+        depthMm: section.depthMm,
+        webDepthMm: properties.webDepthMm,
+      });
+      const columnNPerMm = bar.barColumnStiffnessNPerMm(
+        trace,
+        {
+          share: groupShare(joint, index),
+          elasticMpa: ELASTIC_MODULUS_MPA,
+          flangeSpringMm: flangeSpring,
+          webSpringMm: webSpring,
+        },
+        0,
+      );
+      const barNPerMm = barStiffness(trace, panel, bars);
+      return bar.barShareTension(trace, { barNPerMm, columnNPerMm }, 0);
+    });
+  });
+}
+
+const barStiffness = (trace: Trace | null, panel: ColumnPanel, bars: ThroughBars): number =>
+  bar.barStiffnessNPerMm(trace, {
+    count: 2,
+    elasticMpa: ELASTIC_MODULUS_MPA,
+    stressAreaMm2: bars.size.stressAreaMm2,
+    lengthMm: innerLengthMm(panel, bars),
+  });
+
+/** Bars beside the compression flange: what they take and what they withstand. */
+export interface BarCompression {
+  readonly share: Traced;
+  /** x of the further row. */
+  readonly distanceRatio: number;
+  readonly buckling: Traced;
+}
+
+function compressionShare(trace: Trace | null, panel: ColumnPanel, joint: BoltedJoint, bars: ThroughBars, distanceRatio: number): number {
+  const { section, properties } = panel;
+  const { mMm } = joint.flange;
+  const eMm = (section.widthMm - joint.view.gaugeMm) / 2;
+  const mark = trace?.mark();
+  const lengthMm = Math.min(circularMm(null, { mMm }), patternMm(null, { mMm, eMm }));
+  const flangeSpring = flangeSpringMm(trace, { lengthMm, thicknessMm: section.flangeThicknessMm, mMm });
+  const webSpring = webTensionSpringMm(trace, {
+    breadthMm: lengthMm,
+    thicknessMm: section.webThicknessMm,
+    webDepthMm: properties.webDepthMm,
+  });
+  const columnNPerMm = bar.barColumnCompressionNPerMm(
+    trace,
+    { elasticMpa: ELASTIC_MODULUS_MPA, flangeSpringMm: flangeSpring, webSpringMm: webSpring },
+    mark,
+  );
+  trace?.include(joint.compression.spring.step);
+  const barNPerMm = barStiffness(trace, panel, bars);
+  return bar.barShareCompression(
+    trace,
+    {
+      distanceRatio,
+      barNPerMm,
+      elasticMpa: ELASTIC_MODULUS_MPA,
+      compressionSpringMm: joint.compression.spring.value,
+      columnNPerMm,
+    },
+    mark,
+  );
+}
+
+function barBuckling(trace: Trace | null, node: NodeCase, panel: ColumnPanel, bars: ThroughBars): number {
+  const diameterMm = Math.sqrt((4 * bars.size.stressAreaMm2) / Math.PI);
+  const slenderness = strutSlenderness(trace, {
+    bucklingLengthMm: 0.7 * innerLengthMm(panel, bars),
+    gyrationMm: diameterMm / 4,
+    epsilon: epsilonOf(null, { yieldMpa: bars.grade.yieldMpa }),
+  });
+  return bar.barBucklingN(
+    trace,
+    {
+      count: 2,
+      reduction: curveCReduction(trace, { slenderness }),
+      stressAreaMm2: bars.size.stressAreaMm2,
+      yieldMpa: bars.grade.yieldMpa,
+      gammaM1: node.partialFactors.gammaM1,
+    },
+    0,
+  );
+}
+
+/** Bars at the joint's compression level; null where there are none or a stiffener takes the force. */
+export function barCompressionOf(node: NodeCase, panel: ColumnPanel, joint: BoltedJoint, steps: boolean): BarCompression | null {
+  const { view, compression } = joint;
+  const near = view.rows.filter((row) => row.level === view.compressionLevel && row.fastener.bars);
+  const bars = near[0]?.fastener.bars;
+  if (!bars || !Number.isFinite(compression.spring.value)) return null;
+  const { depthMm, flangeThicknessMm } = view.joint.beam.section;
+  const middle = depthMm - flangeThicknessMm / 2;
+  const nearest = (rows: readonly BoltRow[]): number =>
+    Math.min(...rows.map((row) => Math.abs(row.fromFaceMm - middle)), Infinity);
+  const inner = nearest(near.filter((row) => row.fromFaceMm < middle));
+  const outer = nearest(near.filter((row) => row.fromFaceMm >= middle));
+  const half = compression.breadth.value / 2;
+  const isBothSides = Number.isFinite(inner) && Number.isFinite(outer) && Math.max(inner, outer) / half <= 1;
+  const distanceRatio = (isBothSides ? Math.max(inner, outer) : Math.min(inner, outer)) / half;
+  return {
+    share: traced(steps, (trace) => {
+      const one = compressionShare(trace, panel, joint, bars, distanceRatio);
+      return isBothSides ? bar.barShareBothSides(trace, { share: one }, 0) : one;
+    }),
+    distanceRatio,
+    buckling: traced(steps, (trace) => barBuckling(trace, node, panel, bars)),
+  };
+}

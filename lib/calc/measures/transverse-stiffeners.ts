@@ -1,0 +1,284 @@
+import { epsilonOf } from "../clauses/en1993-1-1-2005/members";
+import {
+  outstandLimitMm,
+  stiffenerNetAreaMm2,
+  twoShearPlanesN,
+  yieldForceN,
+} from "../clauses/en1993-1-5-2006/stiffeners";
+import { filletShearStrengthMpa, weldForceN } from "../clauses/en1993-1-8-2005/welds";
+import { checkOf, detailAtLeast, detailAtMost } from "../components/check";
+import { SPREAD_SHARE, rowToStiffenerMm } from "../components/column-flange";
+import type { ColumnPanel } from "../components/column-panel";
+import { isBolted, type JointModel } from "../joint-model";
+import { tensionStiffenerPlainN, tensionStiffenerSharedN } from "../clauses/en1993-1-5-2006/tension-stiffeners";
+import type { Level, NodeCase, Side } from "../node";
+import type { ComponentCheck } from "../result";
+import { isBoltedCase, type BoltedSideCase, type SideCase } from "../side-case";
+import type { Trace } from "../trace/trace";
+import { traced, type Traced } from "../trace/traced";
+import type { ApplyMeasure, TransverseStiffeners } from "./panel-design";
+
+export const applyTransverseStiffeners: ApplyMeasure<TransverseStiffeners> = (design, measure) => {
+  const stiffeners = { ...design.stiffeners };
+  for (const level of measure.levels) stiffeners[level] = measure;
+  return { ...design, stiffeners };
+};
+
+const netAreaMm2 = (trace: Trace | null, stiffener: TransverseStiffeners): number =>
+  stiffenerNetAreaMm2(trace, {
+    widthMm: stiffener.widthMm,
+    clipMm: stiffener.clipMm,
+    thicknessMm: stiffener.thicknessMm,
+  });
+
+/** Length of each plate along the web, mm. */
+const depthOf = (panel: ColumnPanel, stiffener: TransverseStiffeners): number =>
+  stiffener.length === "full" ? panel.section.depthMm - 2 * panel.section.flangeThicknessMm : stiffener.length;
+
+/** Detailing of the pair at one level. Every rule names where it comes from. */
+export function stiffenerDetailing(
+  panel: ColumnPanel,
+  stiffener: TransverseStiffeners,
+  level: Level,
+  models: readonly JointModel[],
+): ComponentCheck[] {
+  const side = models[0]?.joint.view.joint.side ?? "left";
+  const head = { side, level };
+  const { section } = panel;
+  const epsilon = epsilonOf(null, { yieldMpa: stiffener.steel.yieldMpa });
+  const throats = [stiffener.flangeWeld, stiffener.webWeld].flatMap((weld) =>
+    weld.kind === "fillet" ? [weld.throatMm] : [],
+  );
+  const nutRoom = models.flatMap((model) =>
+    isBolted(model)
+      ? model.joint.view.rows.map((row) => {
+          const flangeMiddle =
+            level === "top"
+              ? model.joint.view.joint.beam.section.flangeThicknessMm / 2
+              : model.joint.view.joint.beam.section.depthMm -
+                model.joint.view.joint.beam.section.flangeThicknessMm / 2;
+          return {
+            face: Math.abs(row.belowTopMm - flangeMiddle) - stiffener.thicknessMm / 2,
+            nut: row.fastener.size.acrossPointsMm / 2,
+          };
+        })
+      : [],
+  );
+  const tightest = nutRoom.sort((a, b) => a.face - a.nut - (b.face - b.nut))[0];
+  return [
+    detailAtMost(
+      { ...head, clause: "EN 1993-1-5, 9.2.1(8)", what: "stiffener outstand, at most 14 ε t_s" },
+      stiffener.widthMm,
+      outstandLimitMm(null, { thicknessMm: stiffener.thicknessMm, epsilon }),
+    ),
+    detailAtLeast(
+      { ...head, clause: "geometry", what: "corner clip clears the root radius" },
+      section.rootMm,
+      stiffener.clipMm,
+    ),
+    detailAtMost(
+      { ...head, clause: "geometry", what: "stiffener within the column flange" },
+      stiffener.widthMm,
+      (section.widthMm - section.webThicknessMm) / 2,
+    ),
+    detailAtMost(
+      { ...head, clause: "geometry", what: "stiffener fits between the column flanges" },
+      depthOf(panel, stiffener),
+      section.depthMm - 2 * section.flangeThicknessMm,
+    ),
+    ...(throats.length > 0
+      ? [
+          detailAtLeast(
+            { ...head, clause: "EN 1993-1-8, 4.5.2(2)", what: "throat of the stiffener's welds, 3 mm" },
+            3,
+            Math.min(...throats),
+          ),
+        ]
+      : []),
+    ...(tightest
+      ? [
+          detailAtLeast(
+            { ...head, clause: "geometry", what: "nut beside the stiffener" },
+            tightest.nut,
+            Math.max(tightest.face, 0),
+          ),
+        ]
+      : []),
+  ];
+}
+
+/** Force in the pair at its tension level from the rows beside it, N, and the working. SCI/BCSA P398. */
+function tensionForce(side: BoltedSideCase, panel: ColumnPanel, steps: boolean): Traced {
+  const { view, flange } = side.model.joint;
+  const middle = view.joint.beam.section.flangeThicknessMm / 2;
+  const rows = view.tensionRows;
+  const above = rows.findLastIndex((row) => row.fromFaceMm < middle);
+  const below = rows.findIndex((row) => row.fromFaceMm >= middle);
+  const reach = SPREAD_SHARE * view.gaugeMm;
+  const spreadBetween = (a: number, b: number): number => Math.min(Math.abs(a - b) / 2, reach);
+  const ends = (index: number): number => {
+    const row = rows[index];
+    if (!row) return 0;
+    const before = rows[index - 1];
+    const after = rows[index + 1];
+    const out = before ? spreadBetween(row.fromFaceMm, before.fromFaceMm) : Math.min(reach, view.columnBeyondTensionMm + row.fromFaceMm);
+    return Math.max(out, 0) + (after ? spreadBetween(row.fromFaceMm, after.fromFaceMm) : reach);
+  };
+  const m2 = (index: number): number => {
+    const row = rows[index];
+    return row ? rowToStiffenerMm(view, row) : 1;
+  };
+  const force = (index: number): number => (index < 0 ? 0 : (side.rowDemandsN[index] ?? 0));
+  return traced(steps, (trace) => {
+    const plain = tensionStiffenerPlainN(trace, {
+      firstN: force(above),
+      secondN: force(below),
+      webLengthMm: ends(above) + ends(below),
+      webThicknessMm: panel.section.webThicknessMm,
+      yieldMpa: panel.steel.yieldMpa,
+    });
+    return tensionStiffenerSharedN(
+      trace,
+      {
+        plainN: plain,
+        mMm: flange.mMm,
+        firstN: force(above),
+        firstMm: above < 0 ? 1 : m2(above),
+        secondN: force(below),
+        secondMm: below < 0 ? 1 : m2(below),
+      },
+      0,
+    );
+  });
+}
+
+/** Force that one side brings into the pair's plates, outward positive, N. */
+interface PlateForce {
+  readonly side: Side;
+  readonly isTension: boolean;
+  readonly force: Traced;
+}
+
+function plateForce(sideCase: SideCase, level: Level, panel: ColumnPanel, steps: boolean): PlateForce {
+  const { view, compression } = sideCase.model.joint;
+  const side = view.joint.side;
+  if (view.tensionLevel === level) {
+    const force = isBoltedCase(sideCase)
+      ? tensionForce(sideCase, panel, steps)
+      : { value: Math.max(sideCase.tensionDemandN, 0) * sideCase.model.joint.plateShare, step: undefined };
+    return { side, isTension: true, force };
+  }
+  const share = compression.stiffener?.plateShare ?? 1;
+  return { side, isTension: false, force: { value: Math.max(sideCase.compressionDemandN, 0) * share, step: undefined } };
+}
+
+function weldLimit(node: NodeCase, stiffener: TransverseStiffeners, throatMm: number, lengthMm: number, steps: boolean): Traced {
+  const { ultimateMpa, betaW } = stiffener.steel;
+  return traced(steps, (trace) =>
+    weldForceN(
+      trace,
+      {
+        strengthMpa: filletShearStrengthMpa(trace, { ultimateMpa, betaW, gammaM2: node.partialFactors.gammaM2 }),
+        throatMm,
+        lengthMm,
+      },
+      0,
+    ),
+  );
+}
+
+/** Plates and welds of the pair at one level in one load case, both sides' forces with their signs. */
+export function stiffenerChecks(
+  node: NodeCase,
+  panel: ColumnPanel,
+  stiffener: TransverseStiffeners,
+  level: Level,
+  sides: readonly SideCase[],
+  steps: boolean,
+): ComponentCheck[] {
+  const forces = sides.map((side) => plateForce(side, level, panel, steps));
+  const first = sides[0];
+  if (!first) return [];
+  const head = { level, loadCase: first.loadCase.name };
+  const checks: ComponentCheck[] = [];
+  const straight = stiffener.widthMm - stiffener.clipMm;
+  forces.forEach(({ side, isTension, force }, index) => {
+    const sideCase = sides[index];
+    if (!sideCase) return;
+    checks.push(
+      isTension
+        ? checkOf(
+            { ...head, side, component: "transverse-stiffener", clause: "SCI/BCSA P398, tension stiffeners" },
+            force.value,
+            traced(steps, (trace) =>
+              yieldForceN(
+                trace,
+                {
+                  areaMm2: netAreaMm2(trace, stiffener),
+                  yieldMpa: stiffener.steel.yieldMpa,
+                  gammaM0: node.partialFactors.gammaM0,
+                },
+                0,
+              ),
+            ),
+            { demandStep: force.step },
+          )
+        : checkOf(
+            { ...head, side, component: "transverse-stiffener", clause: "EN 1993-1-5, 9.4 and SCI/BCSA P398" },
+            sideCase.compressionDemandN,
+            sideCase.compression,
+          ),
+    );
+    if (stiffener.flangeWeld.kind === "fillet") {
+      checks.push(
+        checkOf(
+          { ...head, side, component: "stiffener-weld", clause: "EN 1993-1-8, 4.5.3.3", what: "stiffener to flange" },
+          force.value,
+          weldLimit(node, stiffener, stiffener.flangeWeld.throatMm, 4 * straight, steps),
+          { demandStep: force.step },
+        ),
+      );
+    }
+  });
+  // Towards the right is positive: tension on the left pulls left, compression on the left pushes right.
+  const net = Math.abs(
+    forces.reduce(
+      (total, { side, isTension, force }) => total + (side === "left" ? -1 : 1) * (isTension ? 1 : -1) * force.value,
+      0,
+    ),
+  );
+  const side = forces.reduce((larger, other) => (other.force.value > larger.force.value ? other : larger)).side;
+  const along = depthOf(panel, stiffener) - 2 * stiffener.clipMm;
+  if (stiffener.webWeld.kind === "fillet") {
+    checks.push(
+      checkOf(
+        { ...head, side, component: "stiffener-weld", clause: "EN 1993-1-8, 4.5.3.3", what: "stiffener to web" },
+        net,
+        weldLimit(node, stiffener, stiffener.webWeld.throatMm, 4 * along, steps),
+      ),
+    );
+  }
+  if (stiffener.length !== "full") {
+    checks.push(
+      checkOf(
+        {
+          ...head,
+          side,
+          component: "transverse-stiffener",
+          clause: "EN 1993-1-1, 6.2.6",
+          what: "column web in shear along a partial-depth stiffener",
+        },
+        Math.max(net, ...forces.map(({ force }) => force.value)),
+        traced(steps, (trace) =>
+          twoShearPlanesN(trace, {
+            lengthMm: along,
+            thicknessMm: panel.section.webThicknessMm,
+            yieldMpa: panel.steel.yieldMpa,
+            gammaM0: node.partialFactors.gammaM0,
+          }),
+        ),
+      ),
+    );
+  }
+  return checks;
+}
