@@ -44,7 +44,7 @@ export const DRIVERS = {
     corners: "number",
     /** All parts together. */
     massKg: "number",
-    /** Both faces of all parts. */
+    /** Faces of all parts that can be seen and painted. */
     areaM2: "number",
     /** Face of one part that lies closed against the column; 0 where it stands free. */
     overlapCm2: "number",

@@ -82,6 +82,7 @@ interface ReadNode {
   readonly name?: unknown;
   readonly fn?: unknown;
   readonly implicit?: boolean;
+  readonly isPercentage?: boolean;
   readonly content?: ReadNode;
   readonly condition?: ReadNode;
   readonly trueExpr?: ReadNode;
@@ -148,6 +149,7 @@ class Compiler {
 
   private operator(node: ReadNode): Compiled {
     if (node.implicit === true) this.refuse("write every multiplication with *");
+    if (node.isPercentage === true) this.refuse("write a percentage as a fraction");
     const fn = typeof node.fn === "string" ? node.fn : this.refuse("an operator is needed");
     const [first, second, third] = node.args ?? [];
     if (third !== undefined) return this.refuse("an operator takes two sides");

@@ -21,8 +21,8 @@ export function takePlates(take: QuantityTake, pieceMassKg: number, plate: Plate
   if (parts === 0) return;
   const faceMm2 = lengthMm * widthMm - (plate.corners * plate.clipMm ** 2) / 2;
   const massKg = parts * steelMassKg(faceMm2 * thicknessMm);
-  // A plate lying closed against the column hides one of its own faces and as much of the column's.
-  const shownMm2 = Math.max(0, 2 * faceMm2 - 2 * plate.overlapMm2);
+  // The outside of a closed plate is painted in place of the column behind it: its own weld zone is new.
+  const shownMm2 = 2 * faceMm2 - plate.overlapMm2;
   take.records.push({
     driver: "plate",
     group: `${plate.grade} ${thicknessMm}`,
