@@ -1,4 +1,4 @@
-import type { MeasureCase, NodeCase } from "@/lib/calc/node";
+import type { MeasureCase, NodeCase } from "@/lib/calc";
 import type { QuantityRecord } from "./drivers";
 import type { Estimate, FabricationCase } from "./estimate";
 import type { ShopPrices } from "./prices";

@@ -27,6 +27,13 @@ export interface EstimateLine {
   readonly costMinor: number;
   /** Where the minutes and the rate come from. */
   readonly source: string;
+  /** Rule of the time table that the line comes from. */
+  readonly ruleKey: string;
+  /** The money is `rateAmount` of this item of the rate book, at its likely rate. */
+  readonly rateItem: string;
+  readonly rateAmount: number;
+  readonly rateUnit: string;
+  readonly rate: number;
 }
 
 export interface Estimate {

@@ -81,6 +81,27 @@ function sumOf({ compiled, records }: Pricing, of: NumberOf): number {
   return finite(sum, compiled);
 }
 
+type LineMoney = Pick<EstimateLine, "source" | "ruleKey" | "rateItem" | "rateAmount" | "rateUnit" | "rate">;
+
+/** What a line's money is made of, for whoever opens it. */
+function moneyOf(
+  { rule }: CompiledRule,
+  { book }: PreparedRates,
+  source: string,
+  rateItem: string,
+  rateAmount: number,
+): LineMoney {
+  const { likely: rate, unit: rateUnit, source: rateSource } = rateIn(book, rateItem);
+  return {
+    source: `${source}; rate: ${rateSource}`,
+    ruleKey: rule.key,
+    rateItem,
+    rateAmount,
+    rateUnit,
+    rate,
+  };
+}
+
 function priceLabour(pricing: Pricing, { run, setUp }: RuleMinutes): number {
   const { compiled, rates, batch, sink } = pricing;
   const { rule, labourItem } = compiled;
@@ -99,7 +120,7 @@ function priceLabour(pricing: Pricing, { run, setUp }: RuleMinutes): number {
     quantityUnit: rule.quantity.unit,
     minutes,
     costMinor: cost,
-    source: `${compiled.source}; rate: ${rateIn(rates.book, labourItem).source}`,
+    ...moneyOf(compiled, rates, compiled.source, labourItem, minutes / 60),
   };
   sink.push({ line, elapsedMinutes, touchMinutes: run * rule.crew });
   return cost;
@@ -120,7 +141,7 @@ function priceMachine({ compiled, rates, sink }: Pricing, { machine }: RuleMinut
     quantityUnit: "machine min",
     minutes: 0,
     costMinor: cost,
-    source: `${rule.machineMinutes.source}; rate: ${rateIn(rates.book, machineItem).source}`,
+    ...moneyOf(compiled, rates, rule.machineMinutes.source, machineItem, machine / 60),
   };
   sink.push({ line, elapsedMinutes: 0, touchMinutes: 0 });
   return cost;
@@ -140,7 +161,7 @@ function priceItem({ compiled, rates, sink }: Pricing, use: RuleUse, item: strin
     quantityUnit: use.unit,
     minutes: 0,
     costMinor: cost,
-    source: `${use.quantity.source}; rate: ${rateIn(rates.book, item).source}`,
+    ...moneyOf(compiled, rates, use.quantity.source, item, amount),
   };
   sink.push({ line, elapsedMinutes: 0, touchMinutes: 0 });
   return cost;

@@ -352,5 +352,5 @@ function read(expression: string): MathNode {
  */
 export function compileExpression(expression: string, world: RuleWorld): NumberOf {
   const compiler = new Compiler(expression, world);
-  return compiler.number(read(expression) as unknown as ReadNode).of;
+  return compiler.number(read(expression)).of;
 }

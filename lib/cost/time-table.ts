@@ -100,9 +100,11 @@ function compileItem(
     if (names.get(name)?.kind !== "text")
       throw new RuleRefused(item, `${name} is no word of this rule's quantities`);
   }
-  const slots = parts.map((part, index) => (index % 2 === 1 ? (names.get(part)?.slot ?? null) : null));
-  const itemOf = (scope: Scope): string =>
-    parts.map((part, index) => (slots[index] == null ? part : scope[slots[index]])).join("");
+  const readers = parts.map((part, index) => {
+    const slot = index % 2 === 1 ? names.get(part)?.slot : undefined;
+    return slot === undefined ? () => part : (scope: Scope) => String(scope[slot]);
+  });
+  const itemOf = (scope: Scope): string => readers.map((read) => read(scope)).join("");
   return { itemOf, fixedItem: null };
 }
 

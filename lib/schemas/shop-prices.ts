@@ -157,6 +157,10 @@ const CarbonTableSchema = z.strictObject({
   ),
 });
 
+/** The items of a rate book that a rule's item may stand for, with its braces filled. */
+const itemsOf = (pattern: string): RegExp =>
+  new RegExp(`^${pattern.replace(/[.]/g, "\\.").replace(/\{\w+\}/g, ".+")}$`);
+
 export const ShopPricesSchema = z
   .strictObject({ timeTable: TimeTableSchema, rateBook: RateBookSchema, carbon: CarbonTableSchema })
   .superRefine(({ timeTable, rateBook }, context) => {
@@ -166,14 +170,11 @@ export const ShopPricesSchema = z
       if (!(error instanceof RuleRefused)) throw error;
       context.addIssue({ code: "custom", path: ["timeTable", "rules"], message: error.message });
     }
-    const refuseUnit = (item: string, unit: string): void => {
-      const line = Object.hasOwn(rateBook.lines, item) ? rateBook.lines[item] : undefined;
-      if (line !== undefined && line.unit !== unit) {
-        context.addIssue({
-          code: "custom",
-          path: ["rateBook", "lines", item, "unit"],
-          message: `The time table counts ${item} in ${unit}, the rate book prices it per ${line.unit}.`,
-        });
+    const refuseUnit = (pattern: string, unit: string): void => {
+      for (const [item, line] of Object.entries(rateBook.lines)) {
+        if (line.unit === unit || !itemsOf(pattern).test(item)) continue;
+        const message = `The time table counts ${item} in ${unit}, the rate book prices it per ${line.unit}.`;
+        context.addIssue({ code: "custom", path: ["rateBook", "lines", item, "unit"], message });
       }
     };
     for (const rule of timeTable.rules) {

@@ -1,4 +1,4 @@
-import type { MeasureCase } from "@/lib/calc/node";
+import type { MeasureCase } from "@/lib/calc";
 import { boltedSides, rowsAtLevels } from "./bolt-rows";
 import type { MeasureContext } from "./measure-context";
 import { takePlates } from "./plate-parts";

@@ -1,4 +1,4 @@
-import type { EndPlateConnection, JointCase, Level } from "@/lib/calc/node";
+import type { EndPlateConnection, JointCase, Level } from "@/lib/calc";
 
 export interface BoltedSide {
   readonly joint: JointCase;

@@ -1,5 +1,4 @@
-import { sectionProperties } from "@/lib/calc/mechanics/section-properties";
-import type { ISection, JointCase } from "@/lib/calc/node";
+import { type ISection, type JointCase, sectionProperties } from "@/lib/calc";
 import { steelMassKg } from "../products";
 
 /** Mass of a column section, kg/m, from its own dimensions. */

@@ -1,4 +1,4 @@
-import type { FastenerSize } from "@/lib/calc/node";
+import type { FastenerSize } from "@/lib/calc";
 import { steelMassKg } from "../products";
 
 const circleMm2 = (diameterMm: number): number => (Math.PI * diameterMm * diameterMm) / 4;

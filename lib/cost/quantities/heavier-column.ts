@@ -1,4 +1,4 @@
-import type { ISection } from "@/lib/calc/node";
+import type { ISection } from "@/lib/calc";
 import type { FabricationCase } from "../estimate";
 import { sectionMassKgPerM, sectionPerimeterMm } from "./column-piece";
 import type { QuantityTake } from "./quantities";

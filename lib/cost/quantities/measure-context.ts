@@ -1,4 +1,4 @@
-import type { ISection, JointCase } from "@/lib/calc/node";
+import type { ISection, JointCase } from "@/lib/calc";
 
 /** What every measure's quantities are taken from; `column` is the heavier one where the option has it. */
 export interface MeasureContext {

@@ -1,4 +1,4 @@
-import type { MeasureCase, NodeCase } from "@/lib/calc/node";
+import type { MeasureCase, NodeCase } from "@/lib/calc";
 import type { FabricationCase } from "../estimate";
 import { takeBackingPlates } from "./backing-plates";
 import { sectionMassKgPerM } from "./column-piece";

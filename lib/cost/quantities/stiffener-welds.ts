@@ -1,4 +1,4 @@
-import type { Weld } from "@/lib/calc/node";
+import type { Weld } from "@/lib/calc";
 import { takeBevels } from "./plate-parts";
 import type { QuantityTake, RunOn } from "./quantities";
 

@@ -1,4 +1,4 @@
-import type { MeasureCase } from "@/lib/calc/node";
+import type { MeasureCase } from "@/lib/calc";
 import { type BoltedSide, boltedSides, rowsAtLevels } from "./bolt-rows";
 import { barMassKg, boltMassKg, nutMassKg, threadBeyondNutMm, washerMassKg } from "./fastener-mass";
 import type { MeasureContext } from "./measure-context";

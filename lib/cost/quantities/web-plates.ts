@@ -1,4 +1,4 @@
-import type { MeasureCase } from "@/lib/calc/node";
+import type { MeasureCase } from "@/lib/calc";
 import { clearDepthMm } from "./column-piece";
 import type { MeasureContext } from "./measure-context";
 import { takeBevels, takePlates } from "./plate-parts";

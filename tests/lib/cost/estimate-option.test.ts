@@ -15,7 +15,6 @@ import { loadSeedPrices } from "@/seeders/data/load-prices";
 import {
   backingPlates,
   buildFabrication,
-  buildJoint,
   buildNode,
   diagonals,
   EVERY_MEASURE,
@@ -169,6 +168,24 @@ describe("money", () => {
         expect(priceOfOption(any)).toBe(costMinor);
       }),
       { numRuns: 400 },
+    );
+  });
+
+  it("of each line is its amount at its rate, to the half cent", () => {
+    const rules = new Set(prices.timeTable.rules.map((rule) => rule.key));
+    fc.assert(
+      fc.property(request, (any) => {
+        for (const { costMinor, rateItem, rateAmount, rateUnit, rate, ruleKey } of estimateOption(any)
+          .lines) {
+          expect(Math.abs(costMinor - rateAmount * rate * 100)).toBeLessThanOrEqual(0.501);
+          expect([rateUnit, rate]).toEqual([
+            prices.rateBook.lines[rateItem]?.unit,
+            prices.rateBook.lines[rateItem]?.likely,
+          ]);
+          expect(rules.has(ruleKey)).toBe(true);
+        }
+      }),
+      { numRuns: 100 },
     );
   });
 
