@@ -39,7 +39,10 @@ export function DimensionEditor({ dimension, extent, onCommit, onCancel }: Dimen
   const keep = (refocus: boolean) => settle(() => (unchanged ? onCancel() : onCommit(path, text, refocus)));
 
   return (
-    <div ref={boxRef} className="absolute z-10 flex -translate-x-1/2 -translate-y-2/3 items-center gap-1 border border-petrol bg-sheet px-1">
+    <div
+      ref={boxRef}
+      className="absolute z-10 flex -translate-x-1/2 -translate-y-2/3 items-center gap-1 border border-petrol bg-sheet px-1"
+    >
       <input
         ref={inputRef}
         aria-label={`${dimension.name} (mm)`}

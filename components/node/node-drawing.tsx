@@ -110,7 +110,10 @@ export function NodeDrawing(props: NodeDrawingProps) {
   const extent = props.extent ?? view.extent;
   const [open, setOpen] = useState<number | null>(null);
   const svgRef = useRef<SVGSVGElement>(null);
-  const options = useMemo<SvgOptions>(() => ({ idPrefix: `d${id}`, mmPerPixel: drawing.mmPerPixel }), [id, drawing.mmPerPixel]);
+  const options = useMemo<SvgOptions>(
+    () => ({ idPrefix: `d${id}`, mmPerPixel: drawing.mmPerPixel }),
+    [id, drawing.mmPerPixel],
+  );
   const opened = open === null ? undefined : view.dimensions[open];
 
   const close = (path: string | null) => {

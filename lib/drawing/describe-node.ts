@@ -2,7 +2,8 @@ import type { JointCase, MeasureCase, NodeCase } from "@/lib/calc/node";
 import { columnInForce } from "./frame";
 
 const round = (value: number): string => String(Math.round(value * 10) / 10);
-const levelWords = (levels: readonly string[]): string => (levels.length === 2 ? "top and bottom" : (levels[0] ?? ""));
+const levelWords = (levels: readonly string[]): string =>
+  levels.length === 2 ? "top and bottom" : (levels[0] ?? "");
 
 function connectionWords({ connection }: JointCase): string {
   if (connection.kind === "welded") return "welded";
@@ -32,7 +33,12 @@ export function measureWords(measure: MeasureCase): string {
 /** The drawing in words: column, beams, connections, what is added. Lengths in mm. */
 export function describeNode(node: NodeCase, measures: readonly MeasureCase[]): string {
   const column = columnInForce(node, measures);
-  const beams = node.joints.map((joint) => `on the ${joint.side} ${joint.beam.section.designation}, ${connectionWords(joint)}`);
-  const added = measures.length === 0 ? "Nothing is added to the column." : `Added: ${measures.map(measureWords).join("; ")}.`;
+  const beams = node.joints.map(
+    (joint) => `on the ${joint.side} ${joint.beam.section.designation}, ${connectionWords(joint)}`,
+  );
+  const added =
+    measures.length === 0
+      ? "Nothing is added to the column."
+      : `Added: ${measures.map(measureWords).join("; ")}.`;
   return `Elevation of the column ${column.designation}, ${round(column.depthMm)} mm deep; ${beams.join("; ")}. ${added}`;
 }

@@ -52,21 +52,45 @@ export function acrossDimension(measured: Measured, options: AcrossOptions, pixe
   const beyond = text === "middle" ? over : 10 * pixel;
   const past = atY < extendFromY ? -over : over;
   const lines = [
-    [{ x: fromX - beyond, y: atY }, { x: toX + beyond, y: atY }],
-    [{ x: fromX, y: extendFromY }, { x: fromX, y: atY + past }],
-    [{ x: toX, y: extendFromY }, { x: toX, y: atY + past }],
+    [
+      { x: fromX - beyond, y: atY },
+      { x: toX + beyond, y: atY },
+    ],
+    [
+      { x: fromX, y: extendFromY },
+      { x: fromX, y: atY + past },
+    ],
+    [
+      { x: toX, y: extendFromY },
+      { x: toX, y: atY + past },
+    ],
     tick({ x: fromX, y: atY }, pixel),
     tick({ x: toX, y: atY }, pixel),
   ];
   const gap = TEXT_GAP_PX * pixel;
   const drop = 0.36 * TEXT_PX * pixel;
   if (text === "beyond-left") {
-    return dimension(measured, { lines, textAt: { x: fromX - beyond - gap, y: atY + drop }, anchor: "end", rotation: 0 });
+    return dimension(measured, {
+      lines,
+      textAt: { x: fromX - beyond - gap, y: atY + drop },
+      anchor: "end",
+      rotation: 0,
+    });
   }
   if (text === "beyond-right") {
-    return dimension(measured, { lines, textAt: { x: toX + beyond + gap, y: atY + drop }, anchor: "start", rotation: 0 });
+    return dimension(measured, {
+      lines,
+      textAt: { x: toX + beyond + gap, y: atY + drop },
+      anchor: "start",
+      rotation: 0,
+    });
   }
-  return dimension(measured, { lines, textAt: { x: (fromX + toX) / 2, y: atY - 3.5 * pixel }, anchor: "middle", rotation: 0 });
+  return dimension(measured, {
+    lines,
+    textAt: { x: (fromX + toX) / 2, y: atY - 3.5 * pixel },
+    anchor: "middle",
+    rotation: 0,
+  });
 }
 
 export interface UpOptions {
@@ -84,9 +108,18 @@ export function upDimension(measured: Measured, options: UpOptions, pixel: numbe
   const over = OVERRUN_PX * pixel;
   const away = atX < extendFromX ? -1 : 1;
   const lines = [
-    [{ x: atX, y: fromY - over }, { x: atX, y: toY + over }],
-    [{ x: extendFromX, y: fromY }, { x: atX + away * over, y: fromY }],
-    [{ x: extendFromX, y: toY }, { x: atX + away * over, y: toY }],
+    [
+      { x: atX, y: fromY - over },
+      { x: atX, y: toY + over },
+    ],
+    [
+      { x: extendFromX, y: fromY },
+      { x: atX + away * over, y: fromY },
+    ],
+    [
+      { x: extendFromX, y: toY },
+      { x: atX + away * over, y: toY },
+    ],
     tick({ x: atX, y: fromY }, pixel),
     tick({ x: atX, y: toY }, pixel),
   ];
@@ -94,11 +127,26 @@ export function upDimension(measured: Measured, options: UpOptions, pixel: numbe
   const size = TEXT_PX * pixel;
   switch (text) {
     case "along":
-      return dimension(measured, { lines, textAt: { x: atX - 3.5 * pixel, y: middle }, anchor: "middle", rotation: -90 });
+      return dimension(measured, {
+        lines,
+        textAt: { x: atX - 3.5 * pixel, y: middle },
+        anchor: "middle",
+        rotation: -90,
+      });
     case "above":
-      return dimension(measured, { lines, textAt: { x: atX, y: fromY - over - 3 * pixel }, anchor: "middle", rotation: 0 });
+      return dimension(measured, {
+        lines,
+        textAt: { x: atX, y: fromY - over - 3 * pixel },
+        anchor: "middle",
+        rotation: 0,
+      });
     case "below":
-      return dimension(measured, { lines, textAt: { x: atX, y: toY + over + size }, anchor: "middle", rotation: 0 });
+      return dimension(measured, {
+        lines,
+        textAt: { x: atX, y: toY + over + size },
+        anchor: "middle",
+        rotation: 0,
+      });
     case "outside":
       return dimension(measured, {
         lines,

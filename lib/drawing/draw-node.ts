@@ -33,7 +33,10 @@ function textCorners({ text, textAt, anchor, rotation }: Dimension, heightMm: nu
 function extentOfView(shapes: readonly Shape[], dimensions: readonly Dimension[], pixel: number): Extent {
   const points = [
     ...shapes.flatMap(cornersOf),
-    ...dimensions.flatMap((dimension) => [...dimension.lines.flat(), ...textCorners(dimension, TEXT_PX * pixel)]),
+    ...dimensions.flatMap((dimension) => [
+      ...dimension.lines.flat(),
+      ...textCorners(dimension, TEXT_PX * pixel),
+    ]),
   ];
   const { minX, minY, maxX, maxY } = extentOf(points);
   const margin = 3 * pixel;
@@ -46,12 +49,21 @@ function extentOfView(shapes: readonly Shape[], dimensions: readonly Dimension[]
  * Several drawings share a scale when they are made with the same `mmPerPixel` and shown in the
  * common extent of all of them (`commonExtent`).
  */
-export function drawNode(node: NodeCase, measures: readonly MeasureCase[], options: DrawingOptions = {}): NodeDrawing {
+export function drawNode(
+  node: NodeCase,
+  measures: readonly MeasureCase[],
+  options: DrawingOptions = {},
+): NodeDrawing {
   const pixel = options.mmPerPixel ?? DEFAULT_MM_PER_PIXEL;
   const zigzagMm = ZIGZAG_PX * pixel;
   const frame = frameOf(node, measures);
   const level = options.sectionLevel ?? "top";
-  const view = (name: DrawingView["name"], title: string, shapes: Shape[], dimensions: Dimension[]): DrawingView => ({
+  const view = (
+    name: DrawingView["name"],
+    title: string,
+    shapes: Shape[],
+    dimensions: Dimension[],
+  ): DrawingView => ({
     name,
     title,
     shapes,

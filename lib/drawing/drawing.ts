@@ -70,7 +70,13 @@ interface ShapeHead {
 }
 
 export type Shape =
-  | (ShapeHead & { readonly shape: "rect"; readonly x: number; readonly y: number; readonly width: number; readonly height: number })
+  | (ShapeHead & {
+      readonly shape: "rect";
+      readonly x: number;
+      readonly y: number;
+      readonly width: number;
+      readonly height: number;
+    })
   | (ShapeHead & { readonly shape: "polygon"; readonly points: readonly Point[] })
   | (ShapeHead & { readonly shape: "line"; readonly points: readonly Point[] });
 

@@ -24,7 +24,13 @@ function columnDepth(frame: Frame, options: DrawingOptions, pixel: number): Dime
 }
 
 /** Depth of a beam, outside the piece of it that is shown. */
-function beamDepth(frame: Frame, placed: PlacedJoint, options: DrawingOptions, outMm: number, pixel: number): Dimension {
+function beamDepth(
+  frame: Frame,
+  placed: PlacedJoint,
+  options: DrawingOptions,
+  outMm: number,
+  pixel: number,
+): Dimension {
   const edge = placed.sign < 0 ? frame.leftMm : frame.rightMm;
   return upDimension(
     {
@@ -33,7 +39,13 @@ function beamDepth(frame: Frame, placed: PlacedJoint, options: DrawingOptions, o
       name: `${placed.side} beam depth`,
       valueMm: placed.joint.beam.section.depthMm,
     },
-    { fromY: placed.topMm, toY: placed.bottomMm, atX: edge + placed.sign * outMm, extendFromX: edge + placed.sign * 6 * pixel, text: "along" },
+    {
+      fromY: placed.topMm,
+      toY: placed.bottomMm,
+      atX: edge + placed.sign * outMm,
+      extendFromX: edge + placed.sign * 6 * pixel,
+      text: "along",
+    },
     pixel,
   );
 }
@@ -78,13 +90,19 @@ function plateDimensions(placed: PlacedJoint, pixel: number): Dimension[] {
   const { joint, plate, sign, side } = placed;
   if (joint.connection.kind !== "end-plate" || plate === null) return [];
   const path = `${side}.connection.plate`;
-  const [fromX, toX] = sign < 0 ? [placed.beamStartMm, placed.columnFaceMm] : [placed.columnFaceMm, placed.beamStartMm];
+  const [fromX, toX] =
+    sign < 0 ? [placed.beamStartMm, placed.columnFaceMm] : [placed.columnFaceMm, placed.beamStartMm];
   const atX = placed.beamStartMm + sign * 26 * pixel;
   const extendFromX = placed.beamStartMm + sign * 2 * pixel;
   const { thicknessMm, extensionTopMm, extensionBottomMm } = joint.connection.plate;
   return [
     acrossDimension(
-      { id: `${side}.plate.thickness`, edits: `${path}.thickness`, name: `${side} end plate thickness`, valueMm: thicknessMm },
+      {
+        id: `${side}.plate.thickness`,
+        edits: `${path}.thickness`,
+        name: `${side} end plate thickness`,
+        valueMm: thicknessMm,
+      },
       {
         fromX,
         toX,
@@ -131,7 +149,12 @@ function endDistances(node: NodeCase, frame: Frame, pixel: number): Dimension[] 
       ? []
       : [
           upDimension(
-            { id: "column.endAbove", edits: "column.endDistanceAbove", name: "from the beam's top to the column's upper end", valueMm: above },
+            {
+              id: "column.endAbove",
+              edits: "column.endDistanceAbove",
+              name: "from the beam's top to the column's upper end",
+              valueMm: above,
+            },
             laid(frame.topMm, highest),
             pixel,
           ),
@@ -140,7 +163,12 @@ function endDistances(node: NodeCase, frame: Frame, pixel: number): Dimension[] 
       ? []
       : [
           upDimension(
-            { id: "column.endBelow", edits: "column.endDistanceBelow", name: "from the beam's bottom to the column's lower end", valueMm: below },
+            {
+              id: "column.endBelow",
+              edits: "column.endDistanceBelow",
+              name: "from the beam's bottom to the column's lower end",
+              valueMm: below,
+            },
             laid(lowest, frame.bottomMm),
             pixel,
           ),
@@ -155,20 +183,39 @@ function levelOffset(frame: Frame, pixel: number): Dimension[] {
   const [fromY, toY] = [Math.min(0, right.topMm), Math.max(0, right.topMm)];
   return [
     upDimension(
-      { id: "right.levelOffset", edits: "right.levelOffset", name: "right beam below the left beam", valueMm: right.topMm },
-      { fromY, toY, atX: frame.halfDepthMm + 112 * pixel, extendFromX: frame.halfDepthMm + 40 * pixel, text: "outside" },
+      {
+        id: "right.levelOffset",
+        edits: "right.levelOffset",
+        name: "right beam below the left beam",
+        valueMm: right.topMm,
+      },
+      {
+        fromY,
+        toY,
+        atX: frame.halfDepthMm + 112 * pixel,
+        extendFromX: frame.halfDepthMm + 40 * pixel,
+        text: "outside",
+      },
       pixel,
     ),
   ];
 }
 
 /** All dimensions of the elevation. Those of a compact drawing are the two depths only. */
-export function elevationDimensions(node: NodeCase, frame: Frame, options: DrawingOptions, pixel: number): Dimension[] {
+export function elevationDimensions(
+  node: NodeCase,
+  frame: Frame,
+  options: DrawingOptions,
+  pixel: number,
+): Dimension[] {
   const wanted = options.dimensions ?? "full";
   if (wanted === "none") return [];
   if (wanted === "overall") {
     const first = frame.joints[0];
-    return [columnDepth(frame, options, pixel), ...(first ? [beamDepth(frame, first, options, 12 * pixel, pixel)] : [])];
+    return [
+      columnDepth(frame, options, pixel),
+      ...(first ? [beamDepth(frame, first, options, 12 * pixel, pixel)] : []),
+    ];
   }
   return [
     ...endDistances(node, frame, pixel),

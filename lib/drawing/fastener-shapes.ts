@@ -10,15 +10,27 @@ type BackingPlates = Extract<MeasureCase, { kind: "backing-plates" }>;
 const BAR_END = 0.4;
 
 const barsAt = (measures: readonly MeasureCase[], level: Level): ThroughBars | undefined =>
-  measures.find((measure): measure is ThroughBars => measure.kind === "through-bars" && measure.levels.includes(level));
+  measures.find(
+    (measure): measure is ThroughBars => measure.kind === "through-bars" && measure.levels.includes(level),
+  );
 
 /** Thickness of a backing plate behind the flange at a level, mm; 0 without one. */
 export const backingMm = (measures: readonly MeasureCase[], level: Level): number =>
-  measures.find((measure): measure is BackingPlates => measure.kind === "backing-plates" && measure.levels.includes(level))
-    ?.thicknessMm ?? 0;
+  measures.find(
+    (measure): measure is BackingPlates =>
+      measure.kind === "backing-plates" && measure.levels.includes(level),
+  )?.thicknessMm ?? 0;
 
 /** One nut or head lying against a face: a rectangle `heightMm` thick along x and the hexagon's width across. */
-const hexagon = (size: FastenerSize, faceMm: number, away: number, thickMm: number, yMm: number, isBar: boolean, row: number): Shape =>
+const hexagon = (
+  size: FastenerSize,
+  faceMm: number,
+  away: number,
+  thickMm: number,
+  yMm: number,
+  isBar: boolean,
+  row: number,
+): Shape =>
   rectBetween(
     isBar ? "nut" : "bolt",
     isBar ? "bar-nut" : "fastener",
@@ -27,7 +39,14 @@ const hexagon = (size: FastenerSize, faceMm: number, away: number, thickMm: numb
     { side: faceMm < 0 ? "left" : "right", row },
   );
 
-const washer = (size: FastenerSize, faceMm: number, away: number, yMm: number, isBar: boolean, row: number): Shape =>
+const washer = (
+  size: FastenerSize,
+  faceMm: number,
+  away: number,
+  yMm: number,
+  isBar: boolean,
+  row: number,
+): Shape =>
   rectBetween(
     isBar ? "nut" : "bolt",
     isBar ? "bar-nut" : "fastener",
@@ -56,7 +75,15 @@ export function boltShapes(size: FastenerSize, { sign, outerMm, innerMm, yMm, ro
     hexagon(size, outerMm, sign, size.headHeightMm, yMm, false, row),
     washer(size, innerMm, -sign, yMm, false, row),
     hexagon(size, nutFaceMm, -sign, size.nutHeightMm, yMm, false, row),
-    line("bolt", "centre", [{ x: outerMm + sign * size.headHeightMm * 1.8, y: yMm }, { x: endMm - sign * size.headHeightMm * 0.8, y: yMm }], { side, row }),
+    line(
+      "bolt",
+      "centre",
+      [
+        { x: outerMm + sign * size.headHeightMm * 1.8, y: yMm },
+        { x: endMm - sign * size.headHeightMm * 0.8, y: yMm },
+      ],
+      { side, row },
+    ),
   ];
 }
 
@@ -91,7 +118,9 @@ export function barShapes(
 /** Rows of the whole node by height: a bar goes through both sides, so equal heights are one row. */
 function barRows(frame: Frame, level: Level): { yMm: number; row: number }[] {
   const rows = frame.joints.flatMap((placed) =>
-    placed.rowsMm.flatMap((yMm, index) => (levelOfRow(placed, yMm) === level ? [{ yMm, row: index + 1 }] : [])),
+    placed.rowsMm.flatMap((yMm, index) =>
+      levelOfRow(placed, yMm) === level ? [{ yMm, row: index + 1 }] : [],
+    ),
   );
   return rows.filter(({ yMm }, index) => rows.findIndex((other) => Math.abs(other.yMm - yMm) < 1) === index);
 }
@@ -103,7 +132,13 @@ const boltsOfJoint = (frame: Frame, placed: PlacedJoint, measures: readonly Meas
     const level = levelOfRow(placed, yMm);
     if (barsAt(measures, level)) return [];
     const innerMm = placed.sign * (frame.innerFaceMm - backingMm(measures, level));
-    return boltShapes(connection.bolts.size, { sign: placed.sign, outerMm: placed.beamStartMm, innerMm, yMm, row: index + 1 });
+    return boltShapes(connection.bolts.size, {
+      sign: placed.sign,
+      outerMm: placed.beamStartMm,
+      innerMm,
+      yMm,
+      row: index + 1,
+    });
   });
 };
 
@@ -114,7 +149,12 @@ export function fastenerShapes(frame: Frame, measures: readonly MeasureCase[]): 
     if (!measure) return [];
     const innerMm = frame.innerFaceMm - backingMm(measures, level);
     return barRows(frame, level).flatMap(({ yMm, row }) =>
-      barShapes(measure, { leftOuterMm: outerFaceMm(frame, -1, yMm), rightOuterMm: outerFaceMm(frame, 1, yMm), innerMm }, yMm, row),
+      barShapes(
+        measure,
+        { leftOuterMm: outerFaceMm(frame, -1, yMm), rightOuterMm: outerFaceMm(frame, 1, yMm), innerMm },
+        yMm,
+        row,
+      ),
     );
   });
   return [...frame.joints.flatMap((placed) => boltsOfJoint(frame, placed, measures)), ...bars];

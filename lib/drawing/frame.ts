@@ -40,7 +40,10 @@ const COLUMN_SHOWN_MM = 190;
 
 /** The column after the measures: a heavier one takes the place of the node's own. */
 export const columnInForce = (node: NodeCase, measures: readonly MeasureCase[]): ISection =>
-  measures.reduce((section, measure) => (measure.kind === "heavier-column" ? measure.section : section), node.column.section);
+  measures.reduce(
+    (section, measure) => (measure.kind === "heavier-column" ? measure.section : section),
+    node.column.section,
+  );
 
 function placeJoint(joint: JointCase, halfDepthMm: number): PlacedJoint {
   const sign = joint.side === "left" ? -1 : 1;
@@ -49,7 +52,8 @@ function placeJoint(joint: JointCase, halfDepthMm: number): PlacedJoint {
   const columnFaceMm = sign * halfDepthMm;
   const connection = joint.connection;
   const common = { joint, side: joint.side, sign, topMm, bottomMm, columnFaceMm } as const;
-  if (connection.kind !== "end-plate") return { ...common, beamStartMm: columnFaceMm, plate: null, rowsMm: [] };
+  if (connection.kind !== "end-plate")
+    return { ...common, beamStartMm: columnFaceMm, plate: null, rowsMm: [] };
   const { plate, bolts } = connection;
   return {
     ...common,
@@ -61,7 +65,8 @@ function placeJoint(joint: JointCase, halfDepthMm: number): PlacedJoint {
 
 /** How far the column must be shown beyond the beams so that every plate and web plate is seen whole. */
 function columnShownMm(joints: readonly PlacedJoint[], measures: readonly MeasureCase[]): number {
-  const beamsMm = Math.max(...joints.map((joint) => joint.bottomMm)) - Math.min(...joints.map((joint) => joint.topMm));
+  const beamsMm =
+    Math.max(...joints.map((joint) => joint.bottomMm)) - Math.min(...joints.map((joint) => joint.topMm));
   const extensions = joints.flatMap(({ plate, topMm, bottomMm }) =>
     plate ? [topMm - plate.topMm + 90, plate.bottomMm - bottomMm + 90] : [],
   );
@@ -101,9 +106,13 @@ export function frameOf(node: NodeCase, measures: readonly MeasureCase[]): Frame
 /** Middle of the beam flange at a level, for each joint; equal heights once. */
 export function flangeHeightsMm(frame: Frame, level: Level): number[] {
   const heights = frame.joints.map(({ joint, topMm, bottomMm }) =>
-    level === "top" ? topMm + joint.beam.section.flangeThicknessMm / 2 : bottomMm - joint.beam.section.flangeThicknessMm / 2,
+    level === "top"
+      ? topMm + joint.beam.section.flangeThicknessMm / 2
+      : bottomMm - joint.beam.section.flangeThicknessMm / 2,
   );
-  return heights.filter((height, index) => heights.findIndex((other) => Math.abs(other - height) < 1) === index);
+  return heights.filter(
+    (height, index) => heights.findIndex((other) => Math.abs(other - height) < 1) === index,
+  );
 }
 
 /** The level a bolt row belongs to: that of the nearer beam flange. */

@@ -13,15 +13,31 @@ function endFillets(weld: Weld, faceMm: number, yMm: number, thicknessMm: number
   const inward = -Math.sign(faceMm);
   return [-1, 1].map((down) => {
     const y = yMm + (down * thicknessMm) / 2;
-    return polygon("weld", "added-weld", [{ x: faceMm, y }, { x: faceMm + inward * leg, y }, { x: faceMm, y: y + down * leg }], { level });
+    return polygon(
+      "weld",
+      "added-weld",
+      [
+        { x: faceMm, y },
+        { x: faceMm + inward * leg, y },
+        { x: faceMm, y: y + down * leg },
+      ],
+      { level },
+    );
   });
 }
 
 /** Spans between the column flanges: the whole width, or a length from each flange that a beam is on. */
-function stiffenerSpans(frame: Frame, length: "full" | number): { from: number; to: number; welded: number[] }[] {
+function stiffenerSpans(
+  frame: Frame,
+  length: "full" | number,
+): { from: number; to: number; welded: number[] }[] {
   const inner = frame.innerFaceMm;
   if (length === "full") return [{ from: -inner, to: inner, welded: [-inner, inner] }];
-  return frame.joints.map(({ sign }) => ({ from: sign * inner, to: sign * (inner - length), welded: [sign * inner] }));
+  return frame.joints.map(({ sign }) => ({
+    from: sign * inner,
+    to: sign * (inner - length),
+    welded: [sign * inner],
+  }));
 }
 
 function transverse(frame: Frame, measure: Of<"transverse-stiffeners">): Shape[] {
@@ -29,8 +45,16 @@ function transverse(frame: Frame, measure: Of<"transverse-stiffeners">): Shape[]
   return measure.levels.flatMap((level) =>
     flangeHeightsMm(frame, level).flatMap((yMm) =>
       stiffenerSpans(frame, measure.length).flatMap(({ from, to, welded }) => [
-        rectBetween("stiffener", "stiffener", { x: from, y: yMm - half }, { x: to, y: yMm + half }, { level }),
-        ...welded.flatMap((faceMm) => endFillets(measure.flangeWeld, faceMm, yMm, measure.thicknessMm, level)),
+        rectBetween(
+          "stiffener",
+          "stiffener",
+          { x: from, y: yMm - half },
+          { x: to, y: yMm + half },
+          { level },
+        ),
+        ...welded.flatMap((faceMm) =>
+          endFillets(measure.flangeWeld, faceMm, yMm, measure.thicknessMm, level),
+        ),
       ]),
     ),
   );
@@ -53,7 +77,10 @@ function diagonals(frame: Frame, measure: Of<"diagonal-stiffeners">): Shape[] {
   const [bottom = 0] = flangeHeightsMm(frame, "bottom");
   const ends = (towards: Side): [Point, Point] => {
     const sign = towards === "left" ? -1 : 1;
-    return [{ x: sign * inner, y: top }, { x: -sign * inner, y: bottom }];
+    return [
+      { x: sign * inner, y: top },
+      { x: -sign * inner, y: bottom },
+    ];
   };
   const other: Side = measure.towards === "left" ? "right" : "left";
   if (measure.arrangement === "single") return [strip(...ends(measure.towards), measure.thicknessMm)];
@@ -70,7 +97,9 @@ function diagonals(frame: Frame, measure: Of<"diagonal-stiffeners">): Shape[] {
 
 function webPlate(frame: Frame, measure: Of<"web-plates">): Shape[] {
   const middle =
-    (Math.min(...frame.joints.map((joint) => joint.topMm)) + Math.max(...frame.joints.map((joint) => joint.bottomMm))) / 2;
+    (Math.min(...frame.joints.map((joint) => joint.topMm)) +
+      Math.max(...frame.joints.map((joint) => joint.bottomMm))) /
+    2;
   const from = { x: -measure.widthMm / 2, y: middle - measure.heightMm / 2 };
   const to = { x: measure.widthMm / 2, y: middle + measure.heightMm / 2 };
   const leg = measure.weld.kind === "fillet" ? legMm(measure.weld.throatMm) : 0;

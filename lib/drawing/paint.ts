@@ -1,7 +1,19 @@
 import type { Hatch, ShapeKind } from "./drawing";
 
 /** Names of the sheet's colours: CSS variables on the screen, looked up in a table elsewhere. */
-export type Ink = "paper" | "sheet" | "ink" | "soft" | "faint" | "added" | "steel" | "steel2" | "web" | "beam" | "plate" | "petrol";
+export type Ink =
+  | "paper"
+  | "sheet"
+  | "ink"
+  | "soft"
+  | "faint"
+  | "added"
+  | "steel"
+  | "steel2"
+  | "web"
+  | "beam"
+  | "plate"
+  | "petrol";
 
 export interface Paint {
   readonly fill: Ink | null;
@@ -13,7 +25,12 @@ export interface Paint {
   readonly dash: readonly number[] | null;
 }
 
-const paint = (fill: Ink | null, stroke: Ink | null, strokeWidth = 0.6, more: Partial<Paint> = {}): Paint => ({
+const paint = (
+  fill: Ink | null,
+  stroke: Ink | null,
+  strokeWidth = 0.6,
+  more: Partial<Paint> = {},
+): Paint => ({
   fill,
   hatch: null,
   stroke,

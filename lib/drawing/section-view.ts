@@ -23,11 +23,19 @@ function columnCut(frame: Frame): Shape[] {
   return [
     rectBetween("column", "cut", { x: -inner, y: -halfWeb }, { x: inner, y: halfWeb }),
     ...([-1, 1] as const).map((sign) =>
-      rectBetween("column", "cut", { x: sign * half, y: -halfWidth }, { x: sign * inner, y: halfWidth }, { side: sign < 0 ? "left" : "right" }),
+      rectBetween(
+        "column",
+        "cut",
+        { x: sign * half, y: -halfWidth },
+        { x: sign * inner, y: halfWidth },
+        { side: sign < 0 ? "left" : "right" },
+      ),
     ),
     ...(column.make === "rolled" && column.rootMm > 0
       ? [-1, 1].flatMap((signX) =>
-          [-1, 1].map((signY) => polygon("column", "cut", rootFillet(inner, halfWeb, column.rootMm, signX, signY))),
+          [-1, 1].map((signY) =>
+            polygon("column", "cut", rootFillet(inner, halfWeb, column.rootMm, signX, signY)),
+          ),
         )
       : []),
   ];
@@ -40,8 +48,18 @@ function beamCut(frame: Frame, placed: PlacedJoint, zigzagMm: number): Shape[] {
   const { connection } = joint;
   return [
     rectBetween(`beam-${side}`, "beam", { x: start, y: -widthMm / 2 }, { x: end, y: widthMm / 2 }, { side }),
-    rectBetween(`beam-${side}`, "beam-flange", { x: start, y: -webThicknessMm / 2 }, { x: end, y: webThicknessMm / 2 }, { side }),
-    breakLine({ x: end, y: -widthMm / 2 - 2.4 * zigzagMm }, { x: end, y: widthMm / 2 + 2.4 * zigzagMm }, zigzagMm),
+    rectBetween(
+      `beam-${side}`,
+      "beam-flange",
+      { x: start, y: -webThicknessMm / 2 },
+      { x: end, y: webThicknessMm / 2 },
+      { side },
+    ),
+    breakLine(
+      { x: end, y: -widthMm / 2 - 2.4 * zigzagMm },
+      { x: end, y: widthMm / 2 + 2.4 * zigzagMm },
+      zigzagMm,
+    ),
     ...(connection.kind === "end-plate"
       ? [
           rectBetween(
@@ -57,13 +75,21 @@ function beamCut(frame: Frame, placed: PlacedJoint, zigzagMm: number): Shape[] {
 }
 
 /** A stiffener seen from above: a plate beside the web with its inner corners clipped past the roots. */
-function stiffenerPlan(frame: Frame, measure: Extract<MeasureCase, { kind: "transverse-stiffeners" }>, level: Level): Shape[] {
+function stiffenerPlan(
+  frame: Frame,
+  measure: Extract<MeasureCase, { kind: "transverse-stiffeners" }>,
+  level: Level,
+): Shape[] {
   const inner = frame.innerFaceMm;
   const near = frame.column.webThicknessMm / 2;
   const spans =
     measure.length === "full"
       ? [{ from: -inner, to: inner, clipTo: true }]
-      : frame.joints.map(({ sign }) => ({ from: sign * inner, to: sign * (inner - Number(measure.length)), clipTo: false }));
+      : frame.joints.map(({ sign }) => ({
+          from: sign * inner,
+          to: sign * (inner - Number(measure.length)),
+          clipTo: false,
+        }));
   return spans.flatMap(({ from, to, clipTo }) => {
     const inward = Math.sign(to - from);
     const clip = Math.min(measure.clipMm, measure.widthMm);
@@ -89,7 +115,8 @@ function stiffenerPlan(frame: Frame, measure: Extract<MeasureCase, { kind: "tran
 function addedPlan(frame: Frame, measures: readonly MeasureCase[], level: Level): Shape[] {
   const near = frame.column.webThicknessMm / 2;
   return measures.flatMap((measure) => {
-    if (measure.kind === "transverse-stiffeners" && measure.levels.includes(level)) return stiffenerPlan(frame, measure, level);
+    if (measure.kind === "transverse-stiffeners" && measure.levels.includes(level))
+      return stiffenerPlan(frame, measure, level);
     if (measure.kind === "web-plates") {
       const leg = measure.weld.kind === "fillet" ? legMm(measure.weld.throatMm) : 0;
       return (measure.sides === 2 ? [-1, 1] : [-1]).flatMap((signY) => [
@@ -134,10 +161,13 @@ const endPlateOf = (placed: PlacedJoint): EndPlateConnection | null =>
 function fastenersPlan(frame: Frame, measures: readonly MeasureCase[], level: Level): Shape[] {
   const innerMm = frame.innerFaceMm - backingMm(measures, level);
   const bars = measures.find((measure) => measure.kind === "through-bars" && measure.levels.includes(level));
-  const withRows = frame.joints.filter((placed) => placed.rowsMm.some((rowMm) => levelOfRow(placed, rowMm) === level));
+  const withRows = frame.joints.filter((placed) =>
+    placed.rowsMm.some((rowMm) => levelOfRow(placed, rowMm) === level),
+  );
   const gauge = withRows.map((placed) => endPlateOf(placed)?.bolts.gaugeMm ?? 0)[0];
   if (bars?.kind === "through-bars" && gauge !== undefined) {
-    const face = (sign: -1 | 1): number => frame.joints.find((placed) => placed.sign === sign)?.beamStartMm ?? sign * frame.halfDepthMm;
+    const face = (sign: -1 | 1): number =>
+      frame.joints.find((placed) => placed.sign === sign)?.beamStartMm ?? sign * frame.halfDepthMm;
     return [-1, 1].flatMap((signY) =>
       barShapes(bars, { leftOuterMm: face(-1), rightOuterMm: face(1), innerMm }, (signY * gauge) / 2, 1),
     );
@@ -158,7 +188,12 @@ function fastenersPlan(frame: Frame, measures: readonly MeasureCase[], level: Le
 }
 
 /** The plan through the column at a beam flange level, x as in the elevation, y across the column. */
-export function sectionShapes(frame: Frame, measures: readonly MeasureCase[], level: Level, zigzagMm: number): Shape[] {
+export function sectionShapes(
+  frame: Frame,
+  measures: readonly MeasureCase[],
+  level: Level,
+  zigzagMm: number,
+): Shape[] {
   return [
     ...frame.joints.flatMap((placed) => beamCut(frame, placed, zigzagMm)),
     ...addedPlan(frame, measures, level),
@@ -183,13 +218,33 @@ export function sectionDimensions(frame: Frame, options: DrawingOptions, pixel: 
     const { gaugeMm, size } = connection.bolts;
     return [
       upDimension(
-        { id: `${side}.gauge`, edits: `${side}.connection.bolts.gauge`, name: `${side} bolt gauge`, valueMm: gaugeMm },
-        { ...half(gaugeMm), atX: edge + sign * 16 * pixel, extendFromX: placed.beamStartMm + sign * (size.headHeightMm * 1.8 + 2 * pixel), text: "along" },
+        {
+          id: `${side}.gauge`,
+          edits: `${side}.connection.bolts.gauge`,
+          name: `${side} bolt gauge`,
+          valueMm: gaugeMm,
+        },
+        {
+          ...half(gaugeMm),
+          atX: edge + sign * 16 * pixel,
+          extendFromX: placed.beamStartMm + sign * (size.headHeightMm * 1.8 + 2 * pixel),
+          text: "along",
+        },
         pixel,
       ),
       upDimension(
-        { id: `${side}.plate.width`, edits: `${side}.connection.plate.width`, name: `${side} end plate width`, valueMm: connection.plate.widthMm },
-        { ...half(connection.plate.widthMm), atX: edge + sign * 38 * pixel, extendFromX: placed.beamStartMm + sign * 2 * pixel, text: "along" },
+        {
+          id: `${side}.plate.width`,
+          edits: `${side}.connection.plate.width`,
+          name: `${side} end plate width`,
+          valueMm: connection.plate.widthMm,
+        },
+        {
+          ...half(connection.plate.widthMm),
+          atX: edge + sign * 38 * pixel,
+          extendFromX: placed.beamStartMm + sign * 2 * pixel,
+          text: "along",
+        },
         pixel,
       ),
     ];

@@ -8,7 +8,13 @@ interface Marks {
 }
 
 /** A rectangle between two corners given in any order, mm. */
-export const rectBetween = (part: Part, kind: ShapeKind, from: Point, to: Point, marks: Marks = {}): Shape => ({
+export const rectBetween = (
+  part: Part,
+  kind: ShapeKind,
+  from: Point,
+  to: Point,
+  marks: Marks = {},
+): Shape => ({
   shape: "rect",
   part,
   kind,

@@ -47,7 +47,9 @@ function strokeAttributes(paint: Paint, options: SvgOptions): Record<string, str
   return {
     stroke: colour(paint.stroke),
     "stroke-width": coordinate(paint.strokeWidth * options.mmPerPixel),
-    ...(paint.dash ? { "stroke-dasharray": paint.dash.map((length) => coordinate(length * options.mmPerPixel)).join(" ") } : {}),
+    ...(paint.dash
+      ? { "stroke-dasharray": paint.dash.map((length) => coordinate(length * options.mmPerPixel)).join(" ") }
+      : {}),
   };
 }
 
@@ -102,7 +104,13 @@ export function hatchElements(options: SvgOptions): SvgElement {
     );
   return element("defs", {}, [
     pattern("diagonal", 5, true, `M${size(1.3)} 0V${size(5)}`, 2.2),
-    pattern("dashes", 7, false, `M${size(1)} ${size(1.5)}h${size(2.6)}M${size(4.5)} ${size(5)}h${size(2.4)}`, 1.2),
+    pattern(
+      "dashes",
+      7,
+      false,
+      `M${size(1)} ${size(1.5)}h${size(2.6)}M${size(4.5)} ${size(5)}h${size(2.4)}`,
+      1.2,
+    ),
   ]);
 }
 
@@ -113,11 +121,19 @@ export const layered = (shapes: readonly Shape[]): Shape[] =>
 /** The lines of one dimension. */
 export const dimensionLines = (view: DrawingView, index: number, options: SvgOptions): SvgElement[] =>
   (view.dimensions[index]?.lines ?? []).map((points) =>
-    element("polyline", { fill: "none", points: pointList(points), ...strokeAttributes(DIMENSION_PAINT, options) }),
+    element("polyline", {
+      fill: "none",
+      points: pointList(points),
+      ...strokeAttributes(DIMENSION_PAINT, options),
+    }),
   );
 
 /** The text of one dimension. */
-export function dimensionTextElement(view: DrawingView, index: number, options: SvgOptions): SvgElement | null {
+export function dimensionTextElement(
+  view: DrawingView,
+  index: number,
+  options: SvgOptions,
+): SvgElement | null {
   const dimension = view.dimensions[index];
   if (!dimension) return null;
   const { x, y } = { x: coordinate(dimension.textAt.x), y: coordinate(dimension.textAt.y) };

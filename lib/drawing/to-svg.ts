@@ -37,7 +37,8 @@ export const DAY_COLOURS: Readonly<Record<Ink, string>> = {
 };
 
 const ESCAPES: Readonly<Record<string, string>> = { "&": "&amp;", "<": "&lt;", ">": "&gt;", '"': "&quot;" };
-const escaped = (text: string): string => text.replace(/[&<>"]/g, (character) => ESCAPES[character] ?? character);
+const escaped = (text: string): string =>
+  text.replace(/[&<>"]/g, (character) => ESCAPES[character] ?? character);
 
 function written(element: SvgElement | string): string {
   if (typeof element === "string") return escaped(element);
@@ -45,7 +46,9 @@ function written(element: SvgElement | string): string {
     .map(([name, value]) => ` ${name}="${escaped(String(value))}"`)
     .join("");
   const inside = element.children.map(written).join("");
-  return inside === "" ? `<${element.tag}${attributes}/>` : `<${element.tag}${attributes}>${inside}</${element.tag}>`;
+  return inside === ""
+    ? `<${element.tag}${attributes}/>`
+    : `<${element.tag}${attributes}>${inside}</${element.tag}>`;
 }
 
 /** Writes one view as a complete SVG file, `viewBox` in mm, with title and description. */
@@ -53,7 +56,11 @@ export function toSvg(drawing: NodeDrawing, options: SvgFileOptions = {}): strin
   const view = drawing[options.view ?? "elevation"];
   const extent = options.extent ?? view.extent;
   const colours = options.colours ?? DAY_COLOURS;
-  const svg = { idPrefix: options.idPrefix ?? "node", mmPerPixel: drawing.mmPerPixel, colour: (ink: Ink) => colours[ink] };
+  const svg = {
+    idPrefix: options.idPrefix ?? "node",
+    mmPerPixel: drawing.mmPerPixel,
+    colour: (ink: Ink) => colours[ink],
+  };
   const body = [
     hatchElements(svg),
     ...layered(view.shapes).map((shape) => shapeElement(shape, svg)),

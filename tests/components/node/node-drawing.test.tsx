@@ -21,7 +21,11 @@ describe("NodeDrawing", () => {
     const file = new DOMParser().parseFromString(toSvg(drawing), "application/xml");
     expect(file.querySelector("parsererror")).toBeNull();
     const shapes = (root: ParentNode) =>
-      [...root.querySelectorAll("[data-part]")].map((node) => ["data-part", "data-kind", "x", "y", "width", "height", "points"].map((name) => node.getAttribute(name)));
+      [...root.querySelectorAll("[data-part]")].map((node) =>
+        ["data-part", "data-kind", "x", "y", "width", "height", "points"].map((name) =>
+          node.getAttribute(name),
+        ),
+      );
     expect(shapes(container)).toEqual(shapes(file));
     expect(container.querySelector("[style]")).toBeNull();
   });

@@ -5,10 +5,20 @@ const measured = { id: "a", edits: "left.connection.plate.thickness", name: "thi
 
 describe("dimension lines", () => {
   it("writes whole millimetres, one decimal at most, and a true minus sign", () => {
-    expect([20, 14.6, -45, 12.345, -0.04].map(dimensionText)).toEqual(["20", "14.6", "\u221245", "12.3", "0"]);
+    expect([20, 14.6, -45, 12.345, -0.04].map(dimensionText)).toEqual([
+      "20",
+      "14.6",
+      "\u221245",
+      "12.3",
+      "0",
+    ]);
   });
   it("measures across between its two extension lines", () => {
-    const { lines } = acrossDimension(measured, { fromX: 10, toX: 30, atY: 50, extendFromY: 40, text: "middle" }, 1);
+    const { lines } = acrossDimension(
+      measured,
+      { fromX: 10, toX: 30, atY: 50, extendFromY: 40, text: "middle" },
+      1,
+    );
     expect(lines[1]?.every(({ x }) => x === 10)).toBe(true);
     expect(lines[2]?.every(({ x }) => x === 30)).toBe(true);
     expect(lines[0]?.every(({ y }) => y === 50)).toBe(true);

@@ -1,4 +1,13 @@
-import type { EndPlateConnection, FastenerSize, ISection, JointCase, MeasureCase, NodeCase, Side, Steel } from "@/lib/calc/node";
+import type {
+  EndPlateConnection,
+  FastenerSize,
+  ISection,
+  JointCase,
+  MeasureCase,
+  NodeCase,
+  Side,
+  Steel,
+} from "@/lib/calc/node";
 
 /**
  * A node to draw: HE 300 A with IPE 450 both sides, end plate 20, M24 in three rows. Dimensions of the
@@ -16,7 +25,13 @@ export const HE_300_A: ISection = {
   flangeThicknessMm: 14,
   rootMm: 27,
 };
-export const HE_300_B: ISection = { ...HE_300_A, designation: "HE 300 B", depthMm: 300, webThicknessMm: 11, flangeThicknessMm: 19 };
+export const HE_300_B: ISection = {
+  ...HE_300_A,
+  designation: "HE 300 B",
+  depthMm: 300,
+  webThicknessMm: 11,
+  flangeThicknessMm: 19,
+};
 export const IPE_450: ISection = {
   designation: "IPE 450",
   make: "rolled",
@@ -43,7 +58,14 @@ const fillet = (throatMm: number) => ({ kind: "fillet", throatMm }) as const;
 
 export const END_PLATE: EndPlateConnection = {
   kind: "end-plate",
-  plate: { thicknessMm: 20, widthMm: 200, extensionTopMm: 90, extensionBottomMm: 30, steel: STEEL, hasStiffenedExtension: false },
+  plate: {
+    thicknessMm: 20,
+    widthMm: 200,
+    extensionTopMm: 90,
+    extensionBottomMm: 30,
+    steel: STEEL,
+    hasStiffenedExtension: false,
+  },
   bolts: { size: M24, grade: GRADE, gaugeMm: 120, rowsMm: [-45, 65, 385], perRow: 2, preloaded: false },
   welds: { topFlange: fillet(8), bottomFlange: fillet(6), web: fillet(5) },
 };
@@ -59,7 +81,13 @@ export const buildJoint = (side: Side, more: Partial<JointCase> = {}): JointCase
 /** A node with no load cases: the drawing asks for none. */
 export const buildDrawingCase = (more: Partial<NodeCase> = {}): NodeCase => ({
   partialFactors: { gammaM0: 1, gammaM1: 1, gammaM2: 1.25 },
-  column: { section: HE_300_A, steel: STEEL, endDistanceAboveMm: null, endDistanceBelowMm: null, storeyHeightMm: 3600 },
+  column: {
+    section: HE_300_A,
+    steel: STEEL,
+    endDistanceAboveMm: null,
+    endDistanceBelowMm: null,
+    storeyHeightMm: 3600,
+  },
   joints: [buildJoint("left"), buildJoint("right")],
   loadCases: [],
   bracing: "unbraced",
@@ -79,7 +107,13 @@ export const STIFFENERS: MeasureCase = {
   flangeWeld: fillet(5),
   webWeld: fillet(4),
 };
-export const BARS: MeasureCase = { kind: "through-bars", levels: ["top"], size: M24, grade: GRADE, innerNuts: true };
+export const BARS: MeasureCase = {
+  kind: "through-bars",
+  levels: ["top"],
+  size: M24,
+  grade: GRADE,
+  innerNuts: true,
+};
 export const WEB_PLATE: MeasureCase = {
   kind: "web-plates",
   sides: 1,

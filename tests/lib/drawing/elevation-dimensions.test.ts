@@ -3,7 +3,8 @@ import { drawNode } from "@/lib/drawing/draw-node";
 import type { DrawingOptions } from "@/lib/drawing/drawing";
 import { buildDrawingCase, buildJoint } from "./drawing-case";
 
-const dimensionsOf = (node = buildDrawingCase(), options: DrawingOptions = {}) => drawNode(node, [], options).elevation.dimensions;
+const dimensionsOf = (node = buildDrawingCase(), options: DrawingOptions = {}) =>
+  drawNode(node, [], options).elevation.dimensions;
 
 describe("dimensions of the elevation", () => {
   it("names the field of the node document behind each value", () => {
@@ -20,7 +21,9 @@ describe("dimensions of the elevation", () => {
     ]);
   });
   it("edits depths only of sections given by their dimensions", () => {
-    const edits = dimensionsOf(buildDrawingCase(), { customSections: { column: true, right: true } }).map((dimension) => dimension.edits);
+    const edits = dimensionsOf(buildDrawingCase(), { customSections: { column: true, right: true } }).map(
+      (dimension) => dimension.edits,
+    );
     expect(edits).toContain("column.section.h");
     expect(edits).toContain("right.beam.section.h");
     expect(edits).not.toContain("left.beam.section.h");
@@ -32,12 +35,15 @@ describe("dimensions of the elevation", () => {
     expect(edits(buildDrawingCase({ column, joints }))).toEqual(
       expect.arrayContaining(["column.endDistanceAbove", "column.endDistanceBelow", "right.levelOffset"]),
     );
-    for (const path of ["column.endDistanceAbove", "column.endDistanceBelow", "right.levelOffset"]) expect(edits()).not.toContain(path);
+    for (const path of ["column.endDistanceAbove", "column.endDistanceBelow", "right.levelOffset"])
+      expect(edits()).not.toContain(path);
   });
   it("gives every dimension an id of its own, and the overall drawing two only", () => {
     const ids = dimensionsOf().map((dimension) => dimension.id);
     expect(new Set(ids).size).toBe(ids.length);
-    expect(dimensionsOf(buildDrawingCase(), { dimensions: "overall" }).map((dimension) => dimension.valueMm)).toEqual([290, 450]);
+    expect(
+      dimensionsOf(buildDrawingCase(), { dimensions: "overall" }).map((dimension) => dimension.valueMm),
+    ).toEqual([290, 450]);
     expect(dimensionsOf(buildDrawingCase(), { dimensions: "none" })).toEqual([]);
   });
   it("keeps the level texts of close rows apart", () => {

@@ -5,7 +5,9 @@ import type { MeasureCase } from "@/lib/calc/node";
 import { BACKING, BARS, buildDrawingCase, buildJoint, M24 } from "./drawing-case";
 
 const shapesOf = (measures: readonly MeasureCase[], node = buildDrawingCase()) =>
-  fastenerShapes(frameOf(node, measures), measures).flatMap((shape) => (shape.shape === "rect" ? [shape] : []));
+  fastenerShapes(frameOf(node, measures), measures).flatMap((shape) =>
+    shape.shape === "rect" ? [shape] : [],
+  );
 const middle = ({ y, height }: { y: number; height: number }) => y + height / 2;
 
 describe("bolts and bars in elevation", () => {
@@ -44,7 +46,9 @@ describe("bolts and bars in elevation", () => {
     expect(Math.min(...right.map(({ x }) => x))).toBe(145);
   });
   it("lays the nut on a backing plate where there is one", () => {
-    const left = shapesOf([BACKING]).filter((shape) => shape.side === "left" && shape.row === 1 && shape.kind === "fastener");
+    const left = shapesOf([BACKING]).filter(
+      (shape) => shape.side === "left" && shape.row === 1 && shape.kind === "fastener",
+    );
     const insideFaces = left.filter(({ x }) => x > -131).map(({ x }) => x);
     expect(Math.min(...insideFaces)).toBe(-131 + 15);
   });

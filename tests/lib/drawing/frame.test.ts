@@ -16,7 +16,10 @@ describe("the frame places the node in millimetres", () => {
     expect(frame.innerFaceMm).toBe(145 - 14);
   });
   it("lowers the right beam by its offset", () => {
-    const frame = frameOf(buildDrawingCase({ joints: [buildJoint("left"), buildJoint("right", { levelOffsetMm: 120 })] }), []);
+    const frame = frameOf(
+      buildDrawingCase({ joints: [buildJoint("left"), buildJoint("right", { levelOffsetMm: 120 })] }),
+      [],
+    );
     expect(frame.joints[1]).toMatchObject({ topMm: 120, bottomMm: 570, rowsMm: [75, 185, 505] });
     expect(flangeHeightsMm(frame, "top")).toEqual([7.3, 127.3]);
   });

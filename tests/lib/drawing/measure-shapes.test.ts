@@ -4,9 +4,19 @@ import { drawNode } from "@/lib/drawing/draw-node";
 import { frameOf } from "@/lib/drawing/frame";
 import { measureShapes } from "@/lib/drawing/measure-shapes";
 import { PAINTS } from "@/lib/drawing/paint";
-import { BACKING, BARS, buildDrawingCase, buildJoint, DIAGONAL, HEAVIER, STIFFENERS, WEB_PLATE } from "./drawing-case";
+import {
+  BACKING,
+  BARS,
+  buildDrawingCase,
+  buildJoint,
+  DIAGONAL,
+  HEAVIER,
+  STIFFENERS,
+  WEB_PLATE,
+} from "./drawing-case";
 
-const shapesOf = (measure: MeasureCase, node = buildDrawingCase()) => measureShapes(frameOf(node, [measure]), [measure]);
+const shapesOf = (measure: MeasureCase, node = buildDrawingCase()) =>
+  measureShapes(frameOf(node, [measure]), [measure]);
 
 describe("what an option adds", () => {
   it("draws each measure as a part of its own, told apart by hatch", () => {
@@ -16,7 +26,13 @@ describe("what an option adds", () => {
       const added = shapes.filter((shape) => !bare.has(shape.part) && shape.part !== "nut");
       return [...new Set(added.map((shape) => `${shape.part}: ${PAINTS[shape.kind].hatch ?? "solid"}`))];
     });
-    expect(seen).toEqual([["stiffener: diagonal"], ["diagonal: diagonal"], ["web-plate: dashes"], ["backing-plate: dashes"], ["bar: solid"]]);
+    expect(seen).toEqual([
+      ["stiffener: diagonal"],
+      ["diagonal: diagonal"],
+      ["web-plate: dashes"],
+      ["backing-plate: dashes"],
+      ["bar: solid"],
+    ]);
   });
   it("puts full-depth stiffeners between the flanges, on the middle of the beam flanges", () => {
     const plates = shapesOf(STIFFENERS).flatMap((shape) => (shape.shape === "rect" ? [shape] : []));
@@ -28,7 +44,9 @@ describe("what an option adds", () => {
   it("starts a partial stiffener at each loaded flange only", () => {
     const partial = { ...STIFFENERS, levels: ["top"], length: 120 } as MeasureCase;
     const spans = (node = buildDrawingCase()) =>
-      shapesOf(partial, node).flatMap((shape) => (shape.shape === "rect" ? [[shape.x, shape.x + shape.width]] : []));
+      shapesOf(partial, node).flatMap((shape) =>
+        shape.shape === "rect" ? [[shape.x, shape.x + shape.width]] : [],
+      );
     expect(spans()).toEqual([
       [-131, -11],
       [11, 131],
@@ -41,7 +59,9 @@ describe("what an option adds", () => {
   });
   it("leans the diagonal from corner to corner of the panel, and crosses or splits it", () => {
     const points = (arrangement: "single" | "cross" | "k") =>
-      shapesOf({ ...DIAGONAL, arrangement } as MeasureCase).flatMap((shape) => (shape.shape === "polygon" ? [shape.points] : []));
+      shapesOf({ ...DIAGONAL, arrangement } as MeasureCase).flatMap((shape) =>
+        shape.shape === "polygon" ? [shape.points] : [],
+      );
     const [single] = points("single");
     const ends = single?.map(({ x, y }) => [x, y]) ?? [];
     expect(ends.map(([x]) => x)).toEqual([-131, 131, 131, -131]);
@@ -59,7 +79,9 @@ describe("what an option adds", () => {
   });
   it("adds no piece for a heavier column: the column itself is drawn heavier", () => {
     expect(shapesOf(HEAVIER)).toEqual([]);
-    const flange = drawNode(buildDrawingCase(), [HEAVIER]).elevation.shapes.find((shape) => shape.kind === "cut");
+    const flange = drawNode(buildDrawingCase(), [HEAVIER]).elevation.shapes.find(
+      (shape) => shape.kind === "cut",
+    );
     expect(flange).toMatchObject({ x: -150, width: 19 });
   });
 });

@@ -3,11 +3,14 @@ import { frameOf } from "@/lib/drawing/frame";
 import { beamShapes, columnShapes, legMm } from "@/lib/drawing/member-shapes";
 import { buildDrawingCase, buildJoint, END_PLATE } from "./drawing-case";
 
-const rects = (shapes: ReturnType<typeof columnShapes>) => shapes.flatMap((shape) => (shape.shape === "rect" ? [shape] : []));
+const rects = (shapes: ReturnType<typeof columnShapes>) =>
+  shapes.flatMap((shape) => (shape.shape === "rect" ? [shape] : []));
 
 describe("members in elevation", () => {
   it("draws both column flanges at their thickness, outside the web", () => {
-    const flanges = rects(columnShapes(frameOf(buildDrawingCase(), []), 4)).filter((shape) => shape.kind === "cut");
+    const flanges = rects(columnShapes(frameOf(buildDrawingCase(), []), 4)).filter(
+      (shape) => shape.kind === "cut",
+    );
     expect(flanges.map(({ x, width }) => [x, width])).toEqual([
       [-145, 14],
       [131, 14],
@@ -21,7 +24,9 @@ describe("members in elevation", () => {
   });
   it("draws the end plate from the column face, past the beam by both extensions", () => {
     const frame = frameOf(buildDrawingCase(), []);
-    const plates = frame.joints.flatMap((joint) => rects(beamShapes(frame, joint, 4)).filter((shape) => shape.kind === "plate"));
+    const plates = frame.joints.flatMap((joint) =>
+      rects(beamShapes(frame, joint, 4)).filter((shape) => shape.kind === "plate"),
+    );
     expect(plates.map(({ part, x, y, width, height }) => [part, x, y, width, height])).toEqual([
       ["plate-left", -165, -90, 20, 570],
       ["plate-right", 145, -90, 20, 570],
@@ -42,12 +47,21 @@ describe("members in elevation", () => {
     expect(legMm(5)).toBeCloseTo(5 * Math.SQRT2, 12);
   });
   it("draws a butt weld inside the flange, and a welded beam up to the column without a plate", () => {
-    const welds = { topFlange: { kind: "butt" }, bottomFlange: { kind: "butt" }, web: END_PLATE.welds.web } as const;
-    const frame = frameOf(buildDrawingCase({ joints: [buildJoint("right", { connection: { kind: "welded", welds } })] }), []);
+    const welds = {
+      topFlange: { kind: "butt" },
+      bottomFlange: { kind: "butt" },
+      web: END_PLATE.welds.web,
+    } as const;
+    const frame = frameOf(
+      buildDrawingCase({ joints: [buildJoint("right", { connection: { kind: "welded", welds } })] }),
+      [],
+    );
     const [right] = frame.joints;
     const shapes = right ? beamShapes(frame, right, 4) : [];
     expect(shapes.filter((shape) => shape.kind === "plate")).toHaveLength(0);
-    const bevels = shapes.flatMap((shape) => (shape.shape === "polygon" ? [shape.points.map(({ y }) => y)] : []));
+    const bevels = shapes.flatMap((shape) =>
+      shape.shape === "polygon" ? [shape.points.map(({ y }) => y)] : [],
+    );
     expect(bevels).toHaveLength(2);
     for (const ys of bevels) expect(Math.max(...ys) - Math.min(...ys)).toBeCloseTo(14.6, 9);
     expect(right?.beamStartMm).toBe(145);

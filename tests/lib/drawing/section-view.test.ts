@@ -4,7 +4,9 @@ import { drawNode } from "@/lib/drawing/draw-node";
 import { BACKING, BARS, buildDrawingCase, STIFFENERS, WEB_PLATE } from "./drawing-case";
 
 const rects = (measures: readonly MeasureCase[], sectionLevel: "top" | "bottom" = "top") =>
-  drawNode(buildDrawingCase(), measures, { sectionLevel }).section.shapes.flatMap((shape) => (shape.shape === "rect" ? [shape] : []));
+  drawNode(buildDrawingCase(), measures, { sectionLevel }).section.shapes.flatMap((shape) =>
+    shape.shape === "rect" ? [shape] : [],
+  );
 
 describe("the section through the column", () => {
   it("cuts both flanges at their width and the web at its thickness", () => {
@@ -17,7 +19,11 @@ describe("the section through the column", () => {
   });
   it("puts bolts and bars at half the gauge on either side of the web", () => {
     const middles = (part: string, measures: readonly MeasureCase[]) => [
-      ...new Set(rects(measures).filter((shape) => shape.part === part && shape.kind !== "bar-nut").map(({ y, height }) => y + height / 2)),
+      ...new Set(
+        rects(measures)
+          .filter((shape) => shape.part === part && shape.kind !== "bar-nut")
+          .map(({ y, height }) => y + height / 2),
+      ),
     ];
     expect(middles("bolt", [])).toEqual([-60, 60]);
     expect(middles("bar", [BARS])).toEqual([-60, 60]);
@@ -25,7 +31,9 @@ describe("the section through the column", () => {
   });
   it("clips the inner corners of a stiffener and keeps its width from the web", () => {
     const { shapes } = drawNode(buildDrawingCase(), [STIFFENERS]).section;
-    const plates = shapes.flatMap((shape) => (shape.part === "stiffener" && shape.shape === "polygon" ? [shape.points] : []));
+    const plates = shapes.flatMap((shape) =>
+      shape.part === "stiffener" && shape.shape === "polygon" ? [shape.points] : [],
+    );
     expect(plates).toHaveLength(2);
     const upper = plates[1] ?? [];
     expect(Math.max(...upper.map(({ y }) => y))).toBeCloseTo(4.25 + 120, 9);
@@ -33,7 +41,10 @@ describe("the section through the column", () => {
   });
   it("shows only what stands at the level of the cut", () => {
     const bottomOnly = { ...STIFFENERS, levels: ["bottom"] } as MeasureCase;
-    const parts = (level: "top" | "bottom") => drawNode(buildDrawingCase(), [bottomOnly], { sectionLevel: level }).section.shapes.map((shape) => shape.part);
+    const parts = (level: "top" | "bottom") =>
+      drawNode(buildDrawingCase(), [bottomOnly], { sectionLevel: level }).section.shapes.map(
+        (shape) => shape.part,
+      );
     expect(parts("top")).not.toContain("stiffener");
     expect(parts("bottom")).toContain("stiffener");
   });

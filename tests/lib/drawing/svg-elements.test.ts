@@ -1,7 +1,14 @@
 import { describe, expect, it } from "vitest";
 import { drawNode } from "@/lib/drawing/draw-node";
 import { LAYERS, PAINTS } from "@/lib/drawing/paint";
-import { coordinate, dimensionTextElement, hatchElements, layered, shapeElement, viewBoxOf } from "@/lib/drawing/svg-elements";
+import {
+  coordinate,
+  dimensionTextElement,
+  hatchElements,
+  layered,
+  shapeElement,
+  viewBoxOf,
+} from "@/lib/drawing/svg-elements";
 import { BARS, buildDrawingCase, STIFFENERS, WEB_PLATE } from "./drawing-case";
 
 const options = { idPrefix: "p", mmPerPixel: 2 };
@@ -15,7 +22,9 @@ describe("elements of the drawing", () => {
   it("fills hatched kinds from patterns with the drawing's own ids", () => {
     const { shapes } = drawNode(buildDrawingCase(), [STIFFENERS, WEB_PLATE]).elevation;
     const fills = new Set(shapes.map((shape) => shapeElement(shape, options).attributes.fill));
-    const ids = hatchElements(options).children.map((child) => (typeof child === "string" ? "" : String(child.attributes.id)));
+    const ids = hatchElements(options).children.map((child) =>
+      typeof child === "string" ? "" : String(child.attributes.id),
+    );
     expect(ids).toEqual(["p-diagonal", "p-dashes"]);
     for (const id of ids) expect(fills).toContain(`url(#${id})`);
   });

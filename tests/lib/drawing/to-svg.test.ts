@@ -6,7 +6,9 @@ import { BARS, buildDrawingCase, STIFFENERS, WEB_PLATE } from "./drawing-case";
 /** Reads tags and checks that each is closed in its turn, attributes quoted, text escaped. */
 function openTags(svg: string): string[] {
   const open: string[] = [];
-  for (const [, closing, name, attributes, selfClosing] of svg.matchAll(/<(\/?)([a-zA-Z]+)((?:\s+[\w:-]+="[^"<]*")*)\s*(\/?)>/g)) {
+  for (const [, closing, name, attributes, selfClosing] of svg.matchAll(
+    /<(\/?)([a-zA-Z]+)((?:\s+[\w:-]+="[^"<]*")*)\s*(\/?)>/g,
+  )) {
     if (closing) expect(open.pop()).toBe(name);
     else if (!selfClosing) open.push(name ?? "");
     expect(attributes ?? "").not.toMatch(/&(?!amp;|lt;|gt;|quot;)/);
@@ -18,7 +20,8 @@ function openTags(svg: string): string[] {
 describe("the SVG file", () => {
   it("is well formed in both views, whatever is added and whatever the node is called", () => {
     const drawing = drawNode(buildDrawingCase(), [BARS, STIFFENERS, WEB_PLATE], { reference: `A<1> & "2"` });
-    for (const view of ["elevation", "section"] as const) expect(openTags(toSvg(drawing, { view }))).toEqual([]);
+    for (const view of ["elevation", "section"] as const)
+      expect(openTags(toSvg(drawing, { view }))).toEqual([]);
     expect(toSvg(drawing)).toContain("<title>Node A&lt;1&gt; &amp; &quot;2&quot;, to scale</title>");
   });
   it("is in millimetres and as large on paper as its scale says", () => {
@@ -31,9 +34,24 @@ describe("the SVG file", () => {
     const drawing = drawNode(buildDrawingCase(), [BARS]);
     expect(toSvg(drawing)).not.toContain("var(");
     const black = Object.fromEntries(
-      ["paper", "sheet", "ink", "soft", "faint", "added", "steel", "steel2", "web", "beam", "plate", "petrol"].map((ink) => [ink, "#000"]),
+      [
+        "paper",
+        "sheet",
+        "ink",
+        "soft",
+        "faint",
+        "added",
+        "steel",
+        "steel2",
+        "web",
+        "beam",
+        "plate",
+        "petrol",
+      ].map((ink) => [ink, "#000"]),
     ) as never;
-    expect(new Set(toSvg(drawing, { colours: black }).match(/#[0-9a-f]{3,6}(?=")/g))).toEqual(new Set(["#000"]));
+    expect(new Set(toSvg(drawing, { colours: black }).match(/#[0-9a-f]{3,6}(?=")/g))).toEqual(
+      new Set(["#000"]),
+    );
   });
   it("shows the window it is given, so that drawings stand side by side at one scale", () => {
     const extent = { minX: -500, minY: -300, maxX: 500, maxY: 900 };

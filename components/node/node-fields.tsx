@@ -1,0 +1,229 @@
+"use client";
+
+import { FormRow, FormSection } from "@/components/forms/form-grid";
+import { DraftChoice, DraftQuantity, DraftSection, DraftSteel, DraftText, useDraftForm } from "./draft-form";
+import { isDraftObject, valueAt } from "./node-draft";
+
+/** Name and number of the node. */
+export function NodeFacts() {
+  return (
+    <FormSection title="Node">
+      <FormRow label="Reference" isWide hint="Grid line, level or mark on the drawings.">
+        {(hintId) => <DraftText path="reference" label="Reference" hintId={hintId} />}
+      </FormRow>
+      <FormRow
+        label="Number of nodes"
+        hint="Alike in the project: set-ups and drawing are shared among them."
+      >
+        {(hintId) => <DraftQuantity path="quantity" label="Number of nodes" unit="" hintId={hintId} />}
+      </FormRow>
+    </FormSection>
+  );
+}
+
+/** The column and where it ends. */
+export function ColumnFields() {
+  return (
+    <FormSection title="Column">
+      <FormRow label="Section" isWide>
+        {() => <DraftSection path="column.section" label="Column section" />}
+      </FormRow>
+      <FormRow label="Steel" hint="Strength follows the thickness of each part.">
+        {(hintId) => <DraftSteel path="column.steel" label="Column steel" hintId={hintId} />}
+      </FormRow>
+      <FormRow
+        label="End above"
+        unit="mm"
+        hint="From the upper beam's top face to the column's end. Empty: the column goes on."
+      >
+        {(hintId) => (
+          <DraftQuantity
+            path="column.endDistanceAbove"
+            label="Column end above"
+            unit="mm"
+            placeholder="goes on"
+            hintId={hintId}
+          />
+        )}
+      </FormRow>
+      <FormRow
+        label="End below"
+        unit="mm"
+        hint="From the lower beam's bottom face. Empty: the column goes on."
+      >
+        {(hintId) => (
+          <DraftQuantity
+            path="column.endDistanceBelow"
+            label="Column end below"
+            unit="mm"
+            placeholder="goes on"
+            hintId={hintId}
+          />
+        )}
+      </FormRow>
+      <FormRow label="Storey height" unit="mm">
+        {() => <DraftQuantity path="column.storeyHeight" label="Storey height" unit="mm" />}
+      </FormRow>
+    </FormSection>
+  );
+}
+
+const BRACING = [
+  { value: "unbraced", label: "unbraced" },
+  { value: "braced", label: "braced" },
+];
+
+function StiffnessTarget() {
+  const { draft, readOnly, set } = useDraftForm();
+  const stiffness = valueAt(draft, "target.stiffness");
+  const isWord = stiffness === "any" || stiffness === "rigid";
+  return (
+    <div className="grid gap-1">
+      <DraftTargetKind
+        kind={isWord ? stiffness : "given"}
+        onChange={(kind) => set("target.stiffness", kind === "given" ? "50000" : kind)}
+        readOnly={readOnly}
+      />
+      {isWord ? null : <DraftQuantity path="target.stiffness" label="Stiffness to reach" unit="kNm/rad" />}
+    </div>
+  );
+}
+
+const TARGETS = [
+  { value: "any", label: "any stiffness" },
+  { value: "rigid", label: "every joint rigid" },
+  { value: "given", label: "at least, kNm/rad" },
+];
+
+function DraftTargetKind({
+  kind,
+  onChange,
+  readOnly,
+}: {
+  readonly kind: string;
+  readonly onChange: (kind: string) => void;
+  readonly readOnly: boolean;
+}) {
+  if (readOnly) return <p className="py-1">{TARGETS.find((target) => target.value === kind)?.label}</p>;
+  return (
+    <select
+      aria-label="Stiffness target"
+      value={kind}
+      onChange={(event) => onChange(event.target.value)}
+      className="control min-h-8 w-full min-w-0 py-0.5"
+    >
+      {TARGETS.map((target) => (
+        <option key={target.value} value={target.value}>
+          {target.label}
+        </option>
+      ))}
+    </select>
+  );
+}
+
+/** The frame around the node, what is to be reached, and the factors of the design. */
+export function TargetFields() {
+  return (
+    <FormSection title="Frame and target">
+      <FormRow
+        label="Frame"
+        hint="Sway cut by at least 80 % counts as braced; decides from which stiffness a joint is rigid."
+      >
+        {(hintId) => (
+          <DraftChoice path="frame.bracing" label="Frame bracing" choices={BRACING} hintId={hintId} />
+        )}
+      </FormRow>
+      <FormRow label="Utilisation, at most">
+        {() => <DraftQuantity path="target.utilisation" label="Utilisation, at most" unit="" />}
+      </FormRow>
+      <FormRow label="Initial stiffness">{() => <StiffnessTarget />}</FormRow>
+    </FormSection>
+  );
+}
+
+/** Partial factors of the national annex. */
+export function FactorFields() {
+  return (
+    <FormSection title="Partial factors">
+      {(["gammaM0", "gammaM1", "gammaM2"] as const).map((name) => (
+        <FormRow
+          key={name}
+          label={
+            <>
+              γ<sub>M{name.slice(-1)}</sub>
+            </>
+          }
+        >
+          {() => (
+            <DraftQuantity
+              path={`partialFactors.${name}`}
+              label={`Partial factor gamma M${name.slice(-1)}`}
+              unit=""
+            />
+          )}
+        </FormRow>
+      ))}
+    </FormSection>
+  );
+}
+
+const CLASSES = ["1", "2", "3", "4"].map((value) => ({ value, label: `EXC${value}` }));
+const COATINGS = [
+  { value: "none", label: "none" },
+  { value: "paint", label: "paint" },
+  { value: "galvanised", label: "galvanised" },
+];
+const FIRST_FABRICATION = { liftLength: "7200", nodesPerLift: "2", executionClass: "2", coating: "paint" };
+
+/** How the column is made and lifted; may be left out. */
+export function FabricationFields() {
+  const { draft, readOnly, set } = useDraftForm();
+  const isGiven = isDraftObject(draft.fabrication);
+  return (
+    <FormSection
+      title="Fabrication"
+      note={isGiven ? undefined : "Left out: the shop's usual values are taken."}
+    >
+      {isGiven ? (
+        <>
+          <FormRow
+            label="Column lift"
+            unit="mm"
+            hint="From splice to splice: a heavier column changes all of it."
+          >
+            {(hintId) => (
+              <DraftQuantity
+                path="fabrication.liftLength"
+                label="Column lift length"
+                unit="mm"
+                hintId={hintId}
+              />
+            )}
+          </FormRow>
+          <FormRow label="Nodes a lift" hint="They share the cost of a heavier column.">
+            {(hintId) => (
+              <DraftQuantity path="fabrication.nodesPerLift" label="Nodes a lift" unit="" hintId={hintId} />
+            )}
+          </FormRow>
+          <FormRow label="Execution class">
+            {() => (
+              <DraftChoice path="fabrication.executionClass" label="Execution class" choices={CLASSES} />
+            )}
+          </FormRow>
+          <FormRow label="Coating">
+            {() => <DraftChoice path="fabrication.coating" label="Coating" choices={COATINGS} />}
+          </FormRow>
+        </>
+      ) : null}
+      {readOnly ? null : (
+        <button
+          type="button"
+          onClick={() => set("fabrication", isGiven ? undefined : FIRST_FABRICATION)}
+          className="py-1 text-note text-petrol hover:underline"
+        >
+          {isGiven ? "Leave fabrication out" : "+ state lift, class and coating"}
+        </button>
+      )}
+    </FormSection>
+  );
+}
