@@ -6,7 +6,7 @@ import {
   Model,
   type Sequelize,
 } from "sequelize";
-import type { ProductName } from "@/lib/cost/products";
+import type { ProductName } from "@/lib/schemas/shop-prices";
 
 /** Embodied carbon of one product, kg CO2e per kg. */
 export class CarbonFactor extends Model<

@@ -6,7 +6,7 @@ import {
   Model,
   type Sequelize,
 } from "sequelize";
-import type { LookUpTable as Table } from "@/lib/cost/prices";
+import type { LookUpTable as Table } from "@/lib/schemas/shop-prices";
 
 /** A table that the rules of a time table call by name; each entry says its source. */
 export class LookUpTable extends Model<InferAttributes<LookUpTable>, InferCreationAttributes<LookUpTable>> {

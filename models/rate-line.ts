@@ -6,7 +6,7 @@ import {
   Model,
   type Sequelize,
 } from "sequelize";
-import type { RateUnit } from "@/lib/cost/prices";
+import type { RateUnit } from "@/lib/schemas/shop-prices";
 
 /** One rate of a rate book. PostgreSQL's numeric(14,6) arrives as text, so that no digit is lost. */
 export class RateLine extends Model<InferAttributes<RateLine>, InferCreationAttributes<RateLine>> {

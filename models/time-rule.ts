@@ -6,7 +6,7 @@ import {
   Model,
   type Sequelize,
 } from "sequelize";
-import type { RuleFormula, RuleFormulas, RuleUse, TimeRule as Rule } from "@/lib/cost/prices";
+import type { RuleFormula, RuleFormulas, RuleUse, TimeRule as Rule } from "@/lib/schemas/shop-prices";
 
 /** One operation of a time table: when it applies, who does it, and its minutes as expressions. */
 export class TimeRule extends Model<InferAttributes<TimeRule>, InferCreationAttributes<TimeRule>> {

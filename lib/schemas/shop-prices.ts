@@ -9,6 +9,17 @@ import {
   type ShopPrices,
 } from "@/lib/cost";
 
+// The shapes of the rows, for the models that keep them.
+export type {
+  LookUpTable,
+  ProductName,
+  RateUnit,
+  RuleFormula,
+  RuleFormulas,
+  RuleUse,
+  TimeRule,
+} from "@/lib/cost";
+
 /** The shop's three tables as files, uploads and the database carry them. Unknown keys and units are errors; every figure names its source. */
 
 z.config({ jitless: true });
