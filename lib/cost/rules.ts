@@ -2,9 +2,12 @@
  * Time rules are data that the shop edits, so their expressions are never run as code: mathjs only
  * parses them, and the walk below turns a closed list of node types into closures.
  */
-import { parse, type MathNode } from "mathjs";
+import { create, type MathNode, parseDependencies } from "mathjs";
 import type { NameKind } from "./drivers";
 import type { LookUpTable, TimeConstant } from "./prices";
+
+/** The parser alone: nothing of mathjs that evaluates is even loaded. */
+const { parse } = create(parseDependencies ?? {});
 
 /** The expression uses something outside the closed list, or does not parse. */
 export class RuleRefused extends Error {
