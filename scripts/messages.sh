@@ -66,3 +66,23 @@ stop_running_child() {
   wait "$child" 2>/dev/null || true
   running_child=""
 }
+
+# npm hands a SIGTERM to the shell between it and this script, which dies without a word. So a script that
+# npm started watches that shell, and ends itself in good order when it is gone.
+parent_watch=""
+end_with_npm() {
+  [[ -n ${npm_lifecycle_event:-} ]] || return 0
+  local script=$$ parent=$PPID
+  (
+    trap - EXIT INT TERM HUP
+    exec 9>&-
+    while is_alive "$parent"; do sleep 1; done
+    kill -TERM "$script" 2>/dev/null
+  ) </dev/null >/dev/null 2>&1 &
+  parent_watch=$!
+}
+
+stop_watching_npm() {
+  if [[ -n $parent_watch ]]; then kill "$parent_watch" 2>/dev/null || true; fi
+  parent_watch=""
+}

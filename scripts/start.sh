@@ -24,6 +24,7 @@ stop_everything() {
   local status=$?
   trap '' INT TERM HUP
   trap - EXIT
+  stop_watching_npm
   stop_running_child
   stop_own_cluster
   if [[ $is_serving == yes && $status -ge 129 ]]; then
@@ -36,6 +37,7 @@ trap stop_everything EXIT
 trap 'exit 130' INT
 trap 'exit 143' TERM
 trap 'exit 129' HUP
+end_with_npm
 
 require_web_port() {
   web_port=${PORT:-3000}

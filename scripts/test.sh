@@ -27,6 +27,7 @@ stop_everything() {
   local status=$?
   trap '' INT TERM HUP
   trap - EXIT
+  stop_watching_npm
   stop_running_child
   if [[ -n ${data_folder:-} && -f $data_folder/throw-away ]]; then throw_cluster_away; fi
   exit "$status"
@@ -35,6 +36,7 @@ trap stop_everything EXIT
 trap 'exit 130' INT
 trap 'exit 143' TERM
 trap 'exit 129' HUP
+end_with_npm
 
 # step NAME COMMAND...: a failure is remembered and the other steps still run, so that one run tells all.
 step() {
