@@ -32,7 +32,11 @@ export function AppHeader({ person, theme }: AppHeaderProps) {
         <>
           <span className="text-soft">{`${person.name}, ${person.role}`}</span>
           <ThemeSwitch initial={theme} />
-          <button type="button" className="text-soft underline-offset-2 hover:text-ink hover:underline" onClick={() => void signOut({ callbackUrl: "/sign-in" })}>
+          <button
+            type="button"
+            className="text-soft underline-offset-2 hover:text-ink hover:underline"
+            onClick={() => void signOut({ callbackUrl: "/sign-in" })}
+          >
             Sign out
           </button>
         </>
@@ -42,6 +46,9 @@ export function AppHeader({ person, theme }: AppHeaderProps) {
         Projects
       </HeaderLink>
       {projectId ? <CurrentProject projectId={projectId} /> : null}
+      <HeaderLink href="/catalog" isHere={pathname === "/catalog"}>
+        Catalogue
+      </HeaderLink>
       <HeaderLink href="/method" isHere={pathname === "/method"}>
         Method
       </HeaderLink>

@@ -1,4 +1,6 @@
 import { readFileSync } from "node:fs";
+import path from "node:path";
+import { fileURLToPath } from "node:url";
 import type { Catalog, SectionFamily } from "@/lib/catalog/catalog";
 import { checkCatalog } from "@/lib/catalog/check-catalog";
 import { rowsOfTable, type Cell } from "@/lib/catalog/compact-table";
@@ -21,10 +23,10 @@ const STEEL_FILES = [
   "steels-en1993-1-1-table-3-1.json",
 ] as const;
 
-const FOLDER = new URL("./catalog/", import.meta.url);
+const FOLDER = path.join(path.dirname(fileURLToPath(import.meta.url)), "catalog");
 
 const readTable = (file: string): readonly Readonly<Record<string, Cell>>[] =>
-  rowsOfTable(file, JSON.parse(readFileSync(new URL(file, FOLDER), "utf8")) as unknown);
+  rowsOfTable(file, JSON.parse(readFileSync(path.join(FOLDER, file), "utf8")) as unknown);
 
 /** The preloaded assembly's figures stand in columns of their own; a size without one leaves them empty. */
 function fastenerOf(row: Readonly<Record<string, Cell>>): unknown {
