@@ -41,7 +41,7 @@ function FigureTable({ label, heads, rows }: FigureTableProps) {
                 {figure ?? <span aria-label="none">–</span>}
               </Td>
             ))}
-            <Td className="text-note text-soft">{row.source}</Td>
+            <Td className="min-w-64 text-note whitespace-normal text-soft">{row.source}</Td>
           </tr>
         ))}
       </tbody>

@@ -60,7 +60,7 @@ function Rows({ sections }: { readonly sections: readonly SectionRow[] }) {
                 {figure}
               </Td>
             ))}
-            <Td className="text-note text-soft">{row.source}</Td>
+            <Td className="min-w-64 text-note whitespace-normal text-soft">{row.source}</Td>
           </tr>
         ))}
       </tbody>
