@@ -29,7 +29,8 @@ const archivoExtended = localFont({
 export const metadata: Metadata = {
   title: { default: "Panelwright", template: "%s · Panelwright" },
   icons: { icon: "/icon.svg" },
-  description: "Compare ways to stiffen the column panel at a beam-to-column moment node: strength, stiffness, hours and cost side by side.",
+  description:
+    "Compare ways to stiffen the column panel at a beam-to-column moment node: strength, stiffness, hours and cost side by side.",
 };
 
 export const viewport: Viewport = {

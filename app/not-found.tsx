@@ -10,7 +10,9 @@ export default function NotFound() {
       <main id="main">
         <PageBody>
           <PageHead title="There is nothing here">
-            <p>The address is wrong, the thing was deleted, or it belongs to a project you are not a member of.</p>
+            <p>
+              The address is wrong, the thing was deleted, or it belongs to a project you are not a member of.
+            </p>
           </PageHead>
           <ButtonLink href="/projects">Projects</ButtonLink>
         </PageBody>

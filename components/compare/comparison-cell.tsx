@@ -15,25 +15,32 @@ export interface CellContentProps {
   readonly onOpen: (opening: Opening) => void;
 }
 
-const OPENER = "block w-full text-left hover:[&_.opens]:underline decoration-petrol decoration-2 underline-offset-3";
+const OPENER =
+  "block w-full text-left hover:[&_.opens]:underline decoration-petrol decoration-2 underline-offset-3";
 const VERDICT_TONES = { pass: "text-pass", fail: "text-fail", plain: "text-soft" } as const;
 
 /** A cell that holds no button is a stop for the arrow keys by itself. */
 const restProps = (column: number) => ({ ...stopProps(column), className: "block" });
 
-function UtilisationCell({ cell, rowLabel, optionName, limit, column, onOpen }: CellContentProps & { readonly cell: Extract<Cell, { kind: "utilisation" }> }) {
+function UtilisationCell({
+  cell,
+  rowLabel,
+  optionName,
+  limit,
+  column,
+  onOpen,
+}: CellContentProps & { readonly cell: Extract<Cell, { kind: "utilisation" }> }) {
   return (
-    <button
-      type="button"
-      {...stopProps(column)}
-      className={OPENER}
-      onClick={() => onOpen(cell.opens)}
-    >
-      <span className="sr-only">{`${rowLabel}, ${optionName}: `}</span>
+    <button type="button" {...stopProps(column)} className={OPENER} onClick={() => onOpen(cell.opens)}>
+      <span className="sr-only">{`${rowLabel}, ${optionName}:`}</span>{" "}
       <span className="flex items-center gap-2.5">
         <UtilisationBar value={cell.value} limit={limit} />
         <span className="opens w-[3.4rem] shrink-0 text-right">
-          <UtilisationFigure value={cell.value} limit={limit} {...(cell.isGoverning ? { className: "font-bold" } : {})} />
+          <UtilisationFigure
+            value={cell.value}
+            limit={limit}
+            {...(cell.isGoverning ? { className: "font-bold" } : {})}
+          />
         </span>
       </span>
       <span className="sr-only">{`, ${cell.where}${cell.isGoverning ? ", governs" : ""}. Open the working`}</span>
@@ -41,44 +48,45 @@ function UtilisationCell({ cell, rowLabel, optionName, limit, column, onOpen }: 
   );
 }
 
-function VerdictCell({ cell, optionName, limit, column, onOpen }: CellContentProps & { readonly cell: Extract<Cell, { kind: "verdict" }> }) {
+function VerdictCell({
+  cell,
+  optionName,
+  limit,
+  column,
+  onOpen,
+}: CellContentProps & { readonly cell: Extract<Cell, { kind: "verdict" }> }) {
   const figure = cell.value === null ? "" : formatUtilisation(cell.value, limit);
   return (
-    <button
-      type="button"
-      {...stopProps(column)}
-      className={OPENER}
-      onClick={() => onOpen(cell.opens)}
-    >
-      <span className="sr-only">{`${optionName}: `}</span>
-      <span className={joinClasses("font-[650]", VERDICT_TONES[cell.tone])}>{cell.word}</span>
-      {figure ? <span className="opens">{` ${figure}`}</span> : null}
-      <span className="block text-note text-soft">{cell.note}</span>
-      <span className="sr-only">{cell.value === null ? ". Open the option" : ". Open the working"}</span>
+    <button type="button" {...stopProps(column)} className={OPENER} onClick={() => onOpen(cell.opens)}>
+      <span className="sr-only">{`${optionName}:`}</span>{" "}
+      <span className={joinClasses("font-[650]", VERDICT_TONES[cell.tone])}>{cell.word}</span>{" "}
+      {figure ? <span className="opens">{figure}</span> : null}{" "}
+      <span className="block text-note text-soft">{cell.note}</span>{" "}
+      <span className="sr-only">{cell.value === null ? "Open the option" : "Open the working"}</span>
     </button>
   );
 }
 
-function QuantityCell({ cell, rowLabel, optionName, column, onOpen }: CellContentProps & { readonly cell: Extract<Cell, { kind: "quantity" }> }) {
+function QuantityCell({
+  cell,
+  rowLabel,
+  optionName,
+  column,
+  onOpen,
+}: CellContentProps & { readonly cell: Extract<Cell, { kind: "quantity" }> }) {
   const content = (
     <>
-      <span className={joinClasses("opens", cell.isBig && "figure")}>{cell.text}</span>
-      {cell.unit ? <span className="text-note text-soft">{` ${cell.unit}`}</span> : null}
+      <span className={joinClasses("opens", cell.isBig && "figure")}>{cell.text}</span>{" "}
+      {cell.unit ? <span className="text-note text-soft">{cell.unit}</span> : null}{" "}
       {cell.note ? <span className="block text-note text-soft">{cell.note}</span> : null}
     </>
   );
   const { opens } = cell;
   if (!opens) return <span {...restProps(column)}>{content}</span>;
   return (
-    <button
-      type="button"
-      {...stopProps(column)}
-      className={OPENER}
-      onClick={() => onOpen(opens)}
-    >
-      <span className="sr-only">{`${rowLabel}, ${optionName}: `}</span>
-      {content}
-      <span className="sr-only">. Open the working</span>
+    <button type="button" {...stopProps(column)} className={OPENER} onClick={() => onOpen(opens)}>
+      <span className="sr-only">{`${rowLabel}, ${optionName}:`}</span> {content}{" "}
+      <span className="sr-only">Open the working</span>
     </button>
   );
 }

@@ -7,7 +7,8 @@ import { isEvaluated } from "./comparison-rows";
 import { sentenceCase } from "./component-labels";
 import { columnLetter } from "./rank-words";
 
-const categoryLabel = (category: string): string => (category === "column" ? "Heavier column" : sentenceCase(category));
+const categoryLabel = (category: string): string =>
+  category === "column" ? "Heavier column" : sentenceCase(category);
 const tradeLabel = (trade: string): string => sentenceCase(trade.replaceAll("-", " "));
 
 /** Cost by category and hours by trade of every option that adds something and is inside the method. */

@@ -1,6 +1,18 @@
 import type { ComponentId } from "@/lib/calc/result";
-import type { ComponentDocument, EvaluatedOptionDocument, JointDocument, OptionDocument, ResultDocument } from "@/lib/schemas/result-document";
-import { formatMinutes, formatMoney, formatNumber, formatWholeMoney, moneyUnit } from "@/components/ui/format-number";
+import type {
+  ComponentDocument,
+  EvaluatedOptionDocument,
+  JointDocument,
+  OptionDocument,
+  ResultDocument,
+} from "@/lib/schemas/result-document";
+import {
+  formatMinutes,
+  formatMoney,
+  formatNumber,
+  formatWholeMoney,
+  moneyUnit,
+} from "@/components/ui/format-number";
 import { COMPONENT_ROWS, componentLabel, type RowGroupKey } from "./component-labels";
 
 /** What opens when a cell is pressed. */
@@ -31,7 +43,14 @@ export type Cell =
       readonly isBig?: boolean;
       readonly opens: Opening | null;
     }
-  | { readonly kind: "verdict"; readonly word: string; readonly tone: "pass" | "fail" | "plain"; readonly value: number | null; readonly note: string; readonly opens: Opening }
+  | {
+      readonly kind: "verdict";
+      readonly word: string;
+      readonly tone: "pass" | "fail" | "plain";
+      readonly value: number | null;
+      readonly note: string;
+      readonly opens: Opening;
+    }
   | { readonly kind: "list"; readonly items: readonly string[] };
 
 export interface Row {
@@ -56,27 +75,48 @@ export interface RowGroup {
 /** All load cases together, or one of them by name. */
 export type LoadCaseChoice = { readonly kind: "envelope" } | { readonly kind: "one"; readonly name: string };
 
-export const isEvaluated = (option: OptionDocument): option is EvaluatedOptionDocument => !("outsideScope" in option);
+export const isEvaluated = (option: OptionDocument): option is EvaluatedOptionDocument =>
+  !("outsideScope" in option);
 const OUTSIDE: Cell = { kind: "none", words: "outside scope" };
 
 /** The checks of an option in the chosen load case, worst first. */
-export function checksOf(option: EvaluatedOptionDocument, choice: LoadCaseChoice, component?: ComponentId): readonly ComponentDocument[] {
+export function checksOf(
+  option: EvaluatedOptionDocument,
+  choice: LoadCaseChoice,
+  component?: ComponentId,
+): readonly ComponentDocument[] {
   return option.components
-    .filter((check) => (choice.kind === "envelope" || check.loadCase === choice.name) && (component === undefined || check.component === component))
+    .filter(
+      (check) =>
+        (choice.kind === "envelope" || check.loadCase === choice.name) &&
+        (component === undefined || check.component === component),
+    )
     .sort((a, b) => b.utilisation - a.utilisation);
 }
 
 /** Which bolt row, level or rule a check is of, its side and its load case, in one phrase. */
 export function whereWords(check: ComponentDocument, choice: LoadCaseChoice): string {
-  const rows = check.rows && check.rows.length > 0 ? `rows ${check.rows.join(" + ")}` : check.row !== undefined ? `row ${check.row}` : null;
-  return [check.side, check.level, rows, check.what, choice.kind === "envelope" ? check.loadCase : null].filter(Boolean).join(", ");
+  const rows =
+    check.rows && check.rows.length > 0
+      ? `rows ${check.rows.join(" + ")}`
+      : check.row !== undefined
+        ? `row ${check.row}`
+        : null;
+  return [check.side, check.level, rows, check.what, choice.kind === "envelope" ? check.loadCase : null]
+    .filter(Boolean)
+    .join(", ");
 }
 
 /** One cell an option; an option outside the method never shows a number. */
 const across = (result: ResultDocument, cell: (option: EvaluatedOptionDocument) => Cell): readonly Cell[] =>
   result.options.map((option) => (isEvaluated(option) ? cell(option) : OUTSIDE));
 
-function utilisationCell(option: EvaluatedOptionDocument, choice: LoadCaseChoice, components: readonly ComponentId[], absent: string): Cell {
+function utilisationCell(
+  option: EvaluatedOptionDocument,
+  choice: LoadCaseChoice,
+  components: readonly ComponentId[],
+  absent: string,
+): Cell {
   const worst = checksOf(option, choice).find((check) => components.includes(check.component));
   if (!worst) return { kind: "none", words: absent };
   return {
@@ -94,10 +134,18 @@ const GROUP_TITLES: Readonly<Record<RowGroupKey, string>> = {
   added: "of added parts",
   connection: "of the connection",
 };
-const ABSENT: Readonly<Record<RowGroupKey, string>> = { panel: "does not apply", added: "not in this option", connection: "does not apply" };
+const ABSENT: Readonly<Record<RowGroupKey, string>> = {
+  panel: "does not apply",
+  added: "not in this option",
+  connection: "does not apply",
+};
 
 function utilisationGroup(result: ResultDocument, choice: LoadCaseChoice, key: RowGroupKey): RowGroup | null {
-  const present = new Set(result.options.filter(isEvaluated).flatMap((option) => checksOf(option, choice).map((check) => check.component)));
+  const present = new Set(
+    result.options
+      .filter(isEvaluated)
+      .flatMap((option) => checksOf(option, choice).map((check) => check.component)),
+  );
   const components = COMPONENT_ROWS[key].filter((component) => present.has(component));
   if (components.length === 0) return null;
   return {
@@ -136,17 +184,31 @@ function verdictGroup(result: ResultDocument, choice: LoadCaseChoice): RowGroup 
   const cells = result.options.map((option): Cell =>
     isEvaluated(option)
       ? verdictCell(option, choice)
-      : { kind: "verdict", word: "outside scope", tone: "plain", value: null, note: option.outsideScope.reason, opens: { about: "option" } },
+      : {
+          kind: "verdict",
+          word: "outside scope",
+          tone: "plain",
+          value: null,
+          note: option.outsideScope.reason,
+          opens: { about: "option" },
+        },
   );
-  return { key: "verdict", title: null, startsFolded: false, rows: [{ key: "verdict", label: "Verdict", cells }] };
+  return {
+    key: "verdict",
+    title: null,
+    startsFolded: false,
+    rows: [{ key: "verdict", label: "Verdict", cells }],
+  };
 }
 
 function jointsOf(option: EvaluatedOptionDocument, choice: LoadCaseChoice): readonly JointDocument[] {
   return option.joints.filter((joint) => choice.kind === "envelope" || joint.loadCase === choice.name);
 }
 
-const least = (joints: readonly JointDocument[], value: (joint: JointDocument) => number): JointDocument | undefined =>
-  [...joints].sort((a, b) => value(a) - value(b))[0];
+const least = (
+  joints: readonly JointDocument[],
+  value: (joint: JointDocument) => number,
+): JointDocument | undefined => [...joints].sort((a, b) => value(a) - value(b))[0];
 
 function stiffnessCell(option: EvaluatedOptionDocument, choice: LoadCaseChoice): Cell {
   const softest = least(jointsOf(option, choice), (joint) => joint.initialStiffness);
@@ -160,7 +222,8 @@ function stiffnessCell(option: EvaluatedOptionDocument, choice: LoadCaseChoice):
   };
 }
 
-const roundTo = (value: number, step: number): number => (value >= 10 * step ? Math.round(value / step) * step : value);
+const roundTo = (value: number, step: number): number =>
+  value >= 10 * step ? Math.round(value / step) * step : value;
 
 function resistanceCell(option: EvaluatedOptionDocument, choice: LoadCaseChoice): Cell {
   const weakest = least(jointsOf(option, choice), (joint) => joint.momentResistance);
@@ -181,22 +244,45 @@ function stiffnessGroup(result: ResultDocument, choice: LoadCaseChoice): RowGrou
     startsFolded: false,
     folded: across(result, (option) => stiffnessCell(option, choice)),
     rows: [
-      { key: "stiffness", label: "initial, smaller side", cells: across(result, (option) => stiffnessCell(option, choice)) },
-      { key: "resistance", label: "moment resistance", cells: across(result, (option) => resistanceCell(option, choice)) },
+      {
+        key: "stiffness",
+        label: "initial, smaller side",
+        cells: across(result, (option) => stiffnessCell(option, choice)),
+      },
+      {
+        key: "resistance",
+        label: "moment resistance",
+        cells: across(result, (option) => resistanceCell(option, choice)),
+      },
     ],
   };
 }
 
 const nothingAdded: Cell = { kind: "none", words: "nothing added" };
 
-function estimateCells(result: ResultDocument, cell: (option: EvaluatedOptionDocument) => Cell): readonly Cell[] {
+function estimateCells(
+  result: ResultDocument,
+  cell: (option: EvaluatedOptionDocument) => Cell,
+): readonly Cell[] {
   return across(result, (option) => (option.measures.length === 0 ? nothingAdded : cell(option)));
 }
 
 function hoursGroup(result: ResultDocument): RowGroup {
-  const minutes = (value: number, isBig: boolean, opens: Opening): Cell => ({ kind: "quantity", text: formatMinutes(value), unit: "", isBig, opens });
-  const trades = [...new Set(result.options.filter(isEvaluated).flatMap((option) => Object.keys(option.estimate.minutesByTrade)))].sort();
-  const shop = estimateCells(result, (option) => minutes(option.estimate.shopMinutes, true, { about: "hours" }));
+  const minutes = (value: number, isBig: boolean, opens: Opening): Cell => ({
+    kind: "quantity",
+    text: formatMinutes(value),
+    unit: "",
+    isBig,
+    opens,
+  });
+  const trades = [
+    ...new Set(
+      result.options.filter(isEvaluated).flatMap((option) => Object.keys(option.estimate.minutesByTrade)),
+    ),
+  ].sort();
+  const shop = estimateCells(result, (option) =>
+    minutes(option.estimate.shopMinutes, true, { about: "hours" }),
+  );
   return {
     key: "hours",
     title: "Hours added",
@@ -204,25 +290,46 @@ function hoursGroup(result: ResultDocument): RowGroup {
     folded: shop,
     rows: [
       { key: "shop", label: "shop, a node", cells: shop },
-      { key: "site", label: "site, a node", cells: estimateCells(result, (option) => minutes(option.estimate.siteMinutes, false, { about: "hours" })) },
+      {
+        key: "site",
+        label: "site, a node",
+        cells: estimateCells(result, (option) =>
+          minutes(option.estimate.siteMinutes, false, { about: "hours" }),
+        ),
+      },
       ...trades.map((trade) => ({
         key: `trade-${trade}`,
         label: trade.replaceAll("-", " "),
         isPart: true,
-        cells: estimateCells(result, (option) => minutes(option.estimate.minutesByTrade[trade] ?? 0, false, { about: "hours", trade })),
+        cells: estimateCells(result, (option) =>
+          minutes(option.estimate.minutesByTrade[trade] ?? 0, false, { about: "hours", trade }),
+        ),
       })),
     ],
   };
 }
 
 function costGroup(result: ResultDocument): RowGroup {
-  const money = (value: number, currency: string, isBig: boolean, opens: Opening): Cell => ({ kind: "quantity", text: opens.about === "cost" && opens.category !== undefined ? formatWholeMoney(value) : formatMoney(value), unit: moneyUnit(currency), isBig, opens });
+  const money = (value: number, currency: string, isBig: boolean, opens: Opening): Cell => ({
+    kind: "quantity",
+    text:
+      opens.about === "cost" && opens.category !== undefined ? formatWholeMoney(value) : formatMoney(value),
+    unit: moneyUnit(currency),
+    isBig,
+    opens,
+  });
   const categories = [
     ...new Set(
-      result.options.filter(isEvaluated).flatMap(({ estimate }) => Object.entries(estimate.costByCategory).flatMap(([key, value]) => (value === 0 ? [] : [key]))),
+      result.options
+        .filter(isEvaluated)
+        .flatMap(({ estimate }) =>
+          Object.entries(estimate.costByCategory).flatMap(([key, value]) => (value === 0 ? [] : [key])),
+        ),
     ),
   ];
-  const perNode = estimateCells(result, ({ estimate }) => money(estimate.cost, estimate.currency, true, { about: "cost" }));
+  const perNode = estimateCells(result, ({ estimate }) =>
+    money(estimate.cost, estimate.currency, true, { about: "cost" }),
+  );
   return {
     key: "cost",
     title: "Cost added",
@@ -233,20 +340,32 @@ function costGroup(result: ResultDocument): RowGroup {
       {
         key: "cost-quantity",
         label: `all ${result.node.quantity} nodes`,
-        cells: estimateCells(result, ({ estimate }) => money(estimate.costForQuantity, estimate.currency, false, { about: "cost" })),
+        cells: estimateCells(result, ({ estimate }) =>
+          money(estimate.costForQuantity, estimate.currency, false, { about: "cost" }),
+        ),
       },
       ...categories.map((category) => ({
         key: `category-${category}`,
         label: category === "column" ? "heavier column" : category,
         isPart: true,
-        cells: estimateCells(result, ({ estimate }) => money(estimate.costByCategory[category] ?? 0, estimate.currency, false, { about: "cost", category })),
+        cells: estimateCells(result, ({ estimate }) =>
+          money(estimate.costByCategory[category] ?? 0, estimate.currency, false, {
+            about: "cost",
+            category,
+          }),
+        ),
       })),
     ],
   };
 }
 
 function massGroup(result: ResultDocument): RowGroup {
-  const quantity = (value: number, unit: string): Cell => ({ kind: "quantity", text: formatNumber(value, value < 100 ? 1 : 0), unit, opens: { about: "cost" } });
+  const quantity = (value: number, unit: string): Cell => ({
+    kind: "quantity",
+    text: formatNumber(value, value < 100 ? 1 : 0),
+    unit,
+    opens: { about: "cost" },
+  });
   const mass = estimateCells(result, ({ estimate }) => quantity(estimate.mass, "kg"));
   return {
     key: "mass",
@@ -255,7 +374,11 @@ function massGroup(result: ResultDocument): RowGroup {
     folded: mass,
     rows: [
       { key: "mass", label: "mass, a node", cells: mass },
-      { key: "carbon", label: "embodied carbon", cells: estimateCells(result, ({ estimate }) => quantity(estimate.carbon, "kg CO₂e")) },
+      {
+        key: "carbon",
+        label: "embodied carbon",
+        cells: estimateCells(result, ({ estimate }) => quantity(estimate.carbon, "kg CO₂e")),
+      },
     ],
   };
 }
@@ -263,7 +386,9 @@ function massGroup(result: ResultDocument): RowGroup {
 function cautionsOf(option: OptionDocument): readonly string[] {
   // Its one caution, why it is outside, already stands in the row of verdicts.
   if (!isEvaluated(option)) return [];
-  return [option.connectionFailure, option.passes ? null : option.sizing, ...option.cautions].filter((words): words is string => Boolean(words));
+  return [option.connectionFailure, option.passes ? null : option.sizing, ...option.cautions].filter(
+    (words): words is string => Boolean(words),
+  );
 }
 
 function cautionGroup(result: ResultDocument): RowGroup {
@@ -275,7 +400,16 @@ function cautionGroup(result: ResultDocument): RowGroup {
     key: "cautions",
     title: "Cautions",
     startsFolded: false,
-    folded: cells.map((cell): Cell => (cell.kind === "list" ? { kind: "quantity", text: String(cell.items.length), unit: cell.items.length === 1 ? "caution" : "cautions", opens: { about: "option" } } : cell)),
+    folded: cells.map((cell): Cell =>
+      cell.kind === "list"
+        ? {
+            kind: "quantity",
+            text: String(cell.items.length),
+            unit: cell.items.length === 1 ? "caution" : "cautions",
+            opens: { about: "option" },
+          }
+        : cell,
+    ),
     rows: [{ key: "cautions", label: "what to mind", cells }],
   };
 }
@@ -285,7 +419,9 @@ function cautionGroup(result: ResultDocument): RowGroup {
  * cost, steel, cautions. Pure: the table only draws it.
  */
 export function comparisonGroups(result: ResultDocument, choice: LoadCaseChoice): readonly RowGroup[] {
-  const utilisation = (["panel", "added", "connection"] as const).map((key) => utilisationGroup(result, choice, key));
+  const utilisation = (["panel", "added", "connection"] as const).map((key) =>
+    utilisationGroup(result, choice, key),
+  );
   return [
     verdictGroup(result, choice),
     ...utilisation.filter((group): group is RowGroup => group !== null),

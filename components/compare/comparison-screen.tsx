@@ -29,8 +29,19 @@ function nodeFacts(document: NodeDocument, version: number): string {
   const steel = typeof document.column.steel === "string" ? ` ${document.column.steel}` : "";
   const left = document.left ? sectionWords(document.left.beam.section) : null;
   const right = document.right ? sectionWords(document.right.beam.section) : null;
-  const beams = left && right ? (left === right ? `${left} both sides` : `${left} left, ${right} right`) : `${left ?? right ?? ""} ${left ? "left" : "right"}`;
-  return [document.reference, `revision ${version}`, `${document.quantity} alike`, `${sectionWords(document.column.section)}${steel}`, beams].join(" · ");
+  const beams =
+    left && right
+      ? left === right
+        ? `${left} both sides`
+        : `${left} left, ${right} right`
+      : `${left ?? right ?? ""} ${left ? "left" : "right"}`;
+  return [
+    document.reference,
+    `revision ${version}`,
+    `${document.quantity} alike`,
+    `${sectionWords(document.column.section)}${steel}`,
+    beams,
+  ].join(" · ");
 }
 
 interface LoadCaseSelectProps {
@@ -46,7 +57,9 @@ function LoadCaseSelect({ document, choice, onChoose }: LoadCaseSelectProps) {
       aria-label="Load case"
       className="control border-rule2"
       value={choice.kind === "one" ? choice.name : ""}
-      onChange={(event) => onChoose(event.target.value === "" ? { kind: "envelope" } : { kind: "one", name: event.target.value })}
+      onChange={(event) =>
+        onChoose(event.target.value === "" ? { kind: "envelope" } : { kind: "one", name: event.target.value })
+      }
     >
       <option value="">{count === 1 ? "The one load case" : `Envelope of ${count} load cases`}</option>
       {count === 1 ? null : document.loadCases.map(({ name }) => <option key={name}>{name}</option>)}
@@ -64,7 +77,14 @@ interface OutdatedProps {
 }
 
 /** Says when the stored figures no longer match what they were made from, and what a recalculation changed. */
-function OutdatedNotice({ comparison, canRecalculate, differences, isBusy, error, onRecalculate }: OutdatedProps) {
+function OutdatedNotice({
+  comparison,
+  canRecalculate,
+  differences,
+  isBusy,
+  error,
+  onRecalculate,
+}: OutdatedProps) {
   if (comparison.outdated.length > 0) {
     return (
       <Notice
@@ -84,13 +104,22 @@ function OutdatedNotice({ comparison, canRecalculate, differences, isBusy, error
             <li key={reason}>{reason}</li>
           ))}
         </ul>
-        {error ? <p role="alert" className="mt-1 font-semibold text-fail">{error instanceof Error ? error.message : "The recalculation failed."}</p> : null}
+        {error ? (
+          <p role="alert" className="mt-1 font-semibold text-fail">
+            {error instanceof Error ? error.message : "The recalculation failed."}
+          </p>
+        ) : null}
       </Notice>
     );
   }
   if (differences === null) return null;
   return (
-    <Notice tone="pass" role="status" title={differences.length === 0 ? "Recalculated: nothing changed" : "Recalculated"} className="mb-4">
+    <Notice
+      tone="pass"
+      role="status"
+      title={differences.length === 0 ? "Recalculated: nothing changed" : "Recalculated"}
+      className="mb-4"
+    >
       <ul className="list-disc pl-4">
         {differences.map((difference) => (
           <li key={difference.key}>{differenceWords(difference)}</li>
@@ -101,9 +130,22 @@ function OutdatedNotice({ comparison, canRecalculate, differences, isBusy, error
 }
 
 /** The option that is open, with its working read when the number needs one. */
-function OpenPanel({ comparison, open, choice, onClose }: { readonly comparison: Comparison; readonly open: OpenNumber; readonly choice: LoadCaseChoice; readonly onClose: () => void }) {
+function OpenPanel({
+  comparison,
+  open,
+  choice,
+  onClose,
+}: {
+  readonly comparison: Comparison;
+  readonly open: OpenNumber;
+  readonly choice: LoadCaseChoice;
+  readonly onClose: () => void;
+}) {
   const needsSteps = open.opening.about === "component" || open.opening.about === "joint";
-  const query = useQuery({ ...workingOptions(comparison.nodeId, comparison.id, open.optionKey), enabled: needsSteps });
+  const query = useQuery({
+    ...workingOptions(comparison.nodeId, comparison.id, open.optionKey),
+    enabled: needsSteps,
+  });
   const index = comparison.result.options.findIndex((option) => option.key === open.optionKey);
   const option = comparison.result.options[index];
   if (!option) return null;
@@ -132,11 +174,19 @@ interface OpenNumber {
 
 function useDrawings(comparison: Comparison) {
   const catalog = useQuery(catalogOptions());
-  const drawings = useMemo(() => (catalog.data ? drawOptions(comparison.result, catalog.data) : null), [catalog.data, comparison.result]);
+  const drawings = useMemo(
+    () => (catalog.data ? drawOptions(comparison.result, catalog.data) : null),
+    [catalog.data, comparison.result],
+  );
   return function drawing(option: OptionDocument) {
     const drawn = drawings?.byKey.get(option.key);
-    if (drawn && drawings) return <NodeDrawing drawing={drawn} extent={drawings.extent} className="mx-auto max-w-[190px]" />;
-    return <span className="block min-h-[190px] text-note text-soft">{catalog.isPending ? "Drawing…" : "Not drawn: a part is not in the catalogue."}</span>;
+    if (drawn && drawings)
+      return <NodeDrawing drawing={drawn} extent={drawings.extent} className="mx-auto max-w-[190px]" />;
+    return (
+      <span className="block min-h-[190px] text-note text-soft">
+        {catalog.isPending ? "Drawing…" : "Not drawn: a part is not in the catalogue."}
+      </span>
+    );
   };
 }
 
@@ -188,7 +238,9 @@ function Ready({ comparison, projectId }: { readonly comparison: Comparison; rea
         <Foot comparison={comparison} />
         <ComparisonCharts result={result} />
       </div>
-      {open ? <OpenPanel comparison={comparison} open={open} choice={choice} onClose={() => setOpen(null)} /> : null}
+      {open ? (
+        <OpenPanel comparison={comparison} open={open} choice={choice} onClose={() => setOpen(null)} />
+      ) : null}
     </>
   );
 }
@@ -198,14 +250,18 @@ function Foot({ comparison }: { readonly comparison: Comparison }) {
   return (
     <div className="flex flex-wrap justify-between gap-x-10 gap-y-2 pt-3.5 text-note text-soft">
       <p className="max-w-[88ch]">
-        {comparison.result.basis}. Threaded bars with inner nuts are outside its clauses: a mechanics model stands in, its bounds are in the working, and results outside them are refused.
-        Fatigue, seismic detailing and fire are not covered. The national annex, the project specification and the licensed engineer’s decision come first.{" "}
+        {comparison.result.basis}. Threaded bars with inner nuts are outside its clauses: a mechanics model
+        stands in, its bounds are in the working, and results outside them are refused. Fatigue, seismic
+        detailing and fire are not covered. The national annex, the project specification and the licensed
+        engineer’s decision come first.{" "}
         <Link href="/method" className="prose-link">
           Every formula used
         </Link>
       </p>
       <p>
-        {comparison.money === "index" ? "Money as an index: the cheapest option that costs anything is 100. " : `${comparison.pricedBy}. `}
+        {comparison.money === "index"
+          ? "Money as an index: the cheapest option that costs anything is 100. "
+          : `${comparison.pricedBy}. `}
         {`Engine ${comparison.engine}, ${new Date(comparison.createdAt).toLocaleString("en-GB", { dateStyle: "medium", timeStyle: "short" })}, ${comparison.createdBy.name}`}
       </p>
     </div>
@@ -213,7 +269,13 @@ function Foot({ comparison }: { readonly comparison: Comparison }) {
 }
 
 /** The comparison of one node: reads it, and draws loading, failure, or the sheet. */
-export function ComparisonScreen({ projectId, nodeId }: { readonly projectId: string; readonly nodeId: string }) {
+export function ComparisonScreen({
+  projectId,
+  nodeId,
+}: {
+  readonly projectId: string;
+  readonly nodeId: string;
+}) {
   const comparison = useQuery(comparisonOptions(nodeId));
   useViewportWidth();
   return (
@@ -224,7 +286,11 @@ export function ComparisonScreen({ projectId, nodeId }: { readonly projectId: st
         </div>
       ) : comparison.isError ? (
         <div className="pt-6">
-          <Failed title="The comparison could not be read." error={comparison.error} onRetry={() => void comparison.refetch()} />
+          <Failed
+            title="The comparison could not be read."
+            error={comparison.error}
+            onRetry={() => void comparison.refetch()}
+          />
         </div>
       ) : comparison.data.result.options.length === 0 ? (
         <p className="pt-6">There is no option to compare.</p>

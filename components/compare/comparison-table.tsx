@@ -3,7 +3,14 @@ import { useMemo, useRef, useState, type ReactNode } from "react";
 import type { OptionDocument, ResultDocument } from "@/lib/schemas/result-document";
 import { joinClasses } from "@/components/ui/join-classes";
 import { CellContent } from "./comparison-cell";
-import { comparisonGroups, isEvaluated, type LoadCaseChoice, type Opening, type Row, type RowGroup } from "./comparison-rows";
+import {
+  comparisonGroups,
+  isEvaluated,
+  type LoadCaseChoice,
+  type Opening,
+  type Row,
+  type RowGroup,
+} from "./comparison-rows";
 import { Bubble, OptionHead } from "./option-head";
 import { columnLetter } from "./rank-words";
 import { stopProps, useGridKeys } from "./use-grid-keys";
@@ -29,7 +36,8 @@ interface Column {
   readonly isOff: boolean;
 }
 
-const HEAD_COLUMN = "sticky left-0 z-10 w-[132px] min-w-[132px] desk:w-[168px] desk:min-w-[168px] head-rule bg-paper px-3 desk:px-3.5 text-left font-[450]";
+const HEAD_COLUMN =
+  "sticky left-0 z-10 w-[132px] min-w-[132px] desk:w-[168px] desk:min-w-[168px] head-rule bg-paper px-3 desk:px-3.5 text-left font-[450]";
 const OPEN_WIDTH = "w-[196px] min-w-[168px] desk:min-w-[176px] px-3 desk:px-3.5";
 const FOLDED_WIDTH = "w-[46px] min-w-[46px] px-1.5";
 
@@ -43,21 +51,49 @@ const columnClass = (column: Column, ...more: readonly string[]) =>
     ...more,
   );
 
-function HeadRows({ columns, props, onFold }: { readonly columns: readonly Column[]; readonly props: ComparisonTableProps; readonly onFold: (key: string) => void }) {
+function HeadRows({
+  columns,
+  props,
+  onFold,
+}: {
+  readonly columns: readonly Column[];
+  readonly props: ComparisonTableProps;
+  readonly onFold: (key: string) => void;
+}) {
   const { result, excluded, onSetExcluded, onOpen, drawing } = props;
-  const toggle = (key: string) => onSetExcluded?.(excluded.includes(key) ? excluded.filter((other) => other !== key) : [...excluded, key]);
+  const toggle = (key: string) =>
+    onSetExcluded?.(excluded.includes(key) ? excluded.filter((other) => other !== key) : [...excluded, key]);
   return (
     <thead>
       <tr className="comparison-head">
-        <th scope="col" className={joinClasses(HEAD_COLUMN, "top-0 z-30 border-b border-b-rule pb-9 align-bottom text-note text-soft")}>
+        <th
+          scope="col"
+          className={joinClasses(
+            HEAD_COLUMN,
+            "top-0 z-30 border-b border-b-rule pb-9 align-bottom text-note text-soft",
+          )}
+        >
           Rank by cost
         </th>
         {columns.map((column) => (
-          <th key={column.option.key} scope="col" className={columnClass(column, "sticky top-0 z-20 h-px border-b border-b-rule pt-3.5 pb-2", column.isBest ? "best-edge" : "")}>
+          <th
+            key={column.option.key}
+            scope="col"
+            className={columnClass(
+              column,
+              "sticky top-0 z-20 h-px border-b border-b-rule pt-3.5 pb-2",
+              column.isBest ? "best-edge" : "",
+            )}
+          >
             {column.isFolded ? (
-              <button type="button" {...stopProps(column.index + 1)} onClick={() => onFold(column.option.key)} className="mt-1">
-                <Bubble letter={column.letter} isBest={column.isBest} />
-                <span className="sr-only">{` ${column.option.name}, folded. Unfold it`}</span>
+              <button
+                type="button"
+                {...stopProps(column.index + 1)}
+                onClick={() => onFold(column.option.key)}
+                className="mt-1"
+              >
+                <Bubble letter={column.letter} isBest={column.isBest} />{" "}
+                <span className="sr-only">{`${column.option.name}, folded. Unfold it`}</span>
               </button>
             ) : (
               <OptionHead
@@ -75,14 +111,21 @@ function HeadRows({ columns, props, onFold }: { readonly columns: readonly Colum
         ))}
       </tr>
       <tr>
-        <th scope="row" className={joinClasses(HEAD_COLUMN, "border-b border-ink pb-2.5 align-bottom text-note text-soft")}>
+        <th
+          scope="row"
+          className={joinClasses(HEAD_COLUMN, "border-b border-ink pb-2.5 align-bottom text-note text-soft")}
+        >
           All to one scale, mm.
           <br />
           Solid: bar. Hatched: stiffener. Dashed: plate.
           <br />◆ tight, ▲ over
         </th>
         {columns.map((column) => (
-          <td key={column.option.key} className={columnClass(column, "border-b border-b-ink pb-2.5")}>
+          <td
+            role="gridcell"
+            key={column.option.key}
+            className={columnClass(column, "border-b border-b-ink pb-2.5")}
+          >
             {column.isFolded ? null : <div {...stopProps(column.index + 1)}>{drawing(column.option)}</div>}
           </td>
         ))}
@@ -101,15 +144,33 @@ interface RowProps {
 function BodyRow({ row, columns, limit, onOpen }: RowProps) {
   return (
     <tr>
-      <th scope="row" className={joinClasses(HEAD_COLUMN, "border-t border-t-rule py-[5px] align-top text-soft", row.isPart ? "pl-6 text-note desk:pl-7" : "")}>
+      <th
+        scope="row"
+        className={joinClasses(
+          HEAD_COLUMN,
+          "border-t border-t-rule py-[5px] align-top text-soft",
+          row.isPart ? "pl-6 text-note desk:pl-7" : "",
+        )}
+      >
         {row.label}
       </th>
       {columns.map((column) => {
         const cell = row.cells[column.index];
         return (
-          <td key={column.option.key} className={columnClass(column, "border-t border-t-rule py-[5px]")}>
+          <td
+            role="gridcell"
+            key={column.option.key}
+            className={columnClass(column, "border-t border-t-rule py-[5px]")}
+          >
             {column.isFolded || !cell ? null : (
-              <CellContent cell={cell} rowLabel={row.label} optionName={column.option.name} limit={limit} column={column.index + 1} onOpen={(opening) => onOpen(column.option.key, opening)} />
+              <CellContent
+                cell={cell}
+                rowLabel={row.label}
+                optionName={column.option.name}
+                limit={limit}
+                column={column.index + 1}
+                onOpen={(opening) => onOpen(column.option.key, opening)}
+              />
             )}
           </td>
         );
@@ -131,7 +192,13 @@ function BodyGroup({ group, columns, limit, onOpen, isFolded, onToggle }: GroupP
       {title === null ? null : (
         <tr>
           <th scope="row" className={joinClasses(HEAD_COLUMN, "border-t border-t-ink pt-2 pb-1 align-top")}>
-            <button type="button" {...stopProps(0)} aria-expanded={!isFolded} onClick={onToggle} className="flex items-baseline gap-1.5 text-left text-note font-[650] hover:underline">
+            <button
+              type="button"
+              {...stopProps(0)}
+              aria-expanded={!isFolded}
+              onClick={onToggle}
+              className="flex items-baseline gap-1.5 text-left text-note font-[650] hover:underline"
+            >
               <span aria-hidden="true" className="w-2 text-petrol">
                 {isFolded ? "+" : "−"}
               </span>
@@ -141,16 +208,31 @@ function BodyGroup({ group, columns, limit, onOpen, isFolded, onToggle }: GroupP
           {columns.map((column) => {
             const cell = folded?.[column.index];
             return (
-              <td key={column.option.key} className={columnClass(column, "border-t border-t-ink pt-2 pb-1")}>
+              <td
+                role="gridcell"
+                key={column.option.key}
+                className={columnClass(column, "border-t border-t-ink pt-2 pb-1")}
+              >
                 {isFolded && cell && !column.isFolded ? (
-                  <CellContent cell={cell} rowLabel={title} optionName={column.option.name} limit={limit} column={column.index + 1} onOpen={(opening) => onOpen(column.option.key, opening)} />
+                  <CellContent
+                    cell={cell}
+                    rowLabel={title}
+                    optionName={column.option.name}
+                    limit={limit}
+                    column={column.index + 1}
+                    onOpen={(opening) => onOpen(column.option.key, opening)}
+                  />
                 ) : null}
               </td>
             );
           })}
         </tr>
       )}
-      {title !== null && isFolded ? null : group.rows.map((row) => <BodyRow key={row.key} row={row} columns={columns} limit={limit} onOpen={onOpen} />)}
+      {title !== null && isFolded
+        ? null
+        : group.rows.map((row) => (
+            <BodyRow key={row.key} row={row} columns={columns} limit={limit} onOpen={onOpen} />
+          ))}
     </tbody>
   );
 }
@@ -168,20 +250,30 @@ export function ComparisonTable(props: ComparisonTableProps) {
   const keys = useGridKeys(table);
   const groups = useMemo(() => comparisonGroups(result, choice), [result, choice]);
   const [foldedColumns, setFoldedColumns] = useState<ReadonlySet<string>>(new Set());
-  const [foldedGroups, setFoldedGroups] = useState<ReadonlySet<string>>(() => new Set(groups.filter((group) => group.startsFolded).map((group) => group.key)));
-  const columns = result.options.map(
-    (option, index): Column => ({
-      option,
-      letter: columnLetter(index),
-      index,
-      isFolded: foldedColumns.has(option.key),
-      isBest: option.rank === 1,
-      isOff: !isEvaluated(option) || excluded.includes(option.key),
-    }),
+  const [foldedGroups, setFoldedGroups] = useState<ReadonlySet<string>>(
+    () => new Set(groups.filter((group) => group.startsFolded).map((group) => group.key)),
   );
+  const columns = result.options.map((option, index): Column => ({
+    option,
+    letter: columnLetter(index),
+    index,
+    isFolded: foldedColumns.has(option.key),
+    isBest: option.rank === 1,
+    isOff: !isEvaluated(option) || excluded.includes(option.key),
+  }));
   return (
-    <table ref={table} {...keys} role="grid" aria-label={`Options for ${result.node.reference}`} className="comparison-table border border-ink bg-sheet">
-      <HeadRows columns={columns} props={props} onFold={(key) => setFoldedColumns((set) => toggled(set, key))} />
+    <table
+      ref={table}
+      {...keys}
+      role="grid"
+      aria-label={`Options for ${result.node.reference}`}
+      className="comparison-table border border-ink bg-sheet"
+    >
+      <HeadRows
+        columns={columns}
+        props={props}
+        onFold={(key) => setFoldedColumns((set) => toggled(set, key))}
+      />
       {groups.map((group) => (
         <BodyGroup
           key={group.key}

@@ -5,9 +5,14 @@ function figureChanges(before: OptionFigures, after: OptionFigures): readonly st
   const changes: string[] = [];
   if (before.passes !== after.passes) changes.push(after.passes ? "passes now" : "fails now");
   if (before.utilisation !== after.utilisation) {
-    changes.push(`utilisation ${before.utilisation?.toFixed(2) ?? "outside scope"} to ${after.utilisation?.toFixed(2) ?? "outside scope"}`);
+    changes.push(
+      `utilisation ${before.utilisation?.toFixed(2) ?? "outside scope"} to ${after.utilisation?.toFixed(2) ?? "outside scope"}`,
+    );
   }
-  if (before.cost !== after.cost) changes.push(`cost ${before.cost === null ? "none" : formatMoney(before.cost)} to ${after.cost === null ? "none" : formatMoney(after.cost)}`);
+  if (before.cost !== after.cost)
+    changes.push(
+      `cost ${before.cost === null ? "none" : formatMoney(before.cost)} to ${after.cost === null ? "none" : formatMoney(after.cost)}`,
+    );
   if (before.rank !== after.rank) changes.push(`rank ${before.rank ?? "none"} to ${after.rank ?? "none"}`);
   return changes;
 }

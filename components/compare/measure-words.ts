@@ -1,12 +1,15 @@
 import type { MeasureInput, SectionInput, SteelInput, WeldInput } from "@/lib/schemas/node-document";
 
-const levelsWords = (levels: readonly string[]): string => (levels.length === 2 ? "top and bottom" : `at ${levels[0] ?? ""}`);
+const levelsWords = (levels: readonly string[]): string =>
+  levels.length === 2 ? "top and bottom" : `at ${levels[0] ?? ""}`;
 const weldWords = (weld: WeldInput): string => (weld === "butt" ? "butt weld" : `throat ${weld} mm`);
 const steelWords = (steel: SteelInput): string => (typeof steel === "string" ? steel : `f_y ${steel.fy}`);
 
 /** A section by its name, or by its dimensions where it has none. */
 export const sectionWords = (section: SectionInput): string =>
-  typeof section === "string" ? section : `${"weld" in section ? "welded" : "rolled"} ${section.h} × ${section.b} × ${section.tw}/${section.tf}`;
+  typeof section === "string"
+    ? section
+    : `${"weld" in section ? "welded" : "rolled"} ${section.h} × ${section.b} × ${section.tw}/${section.tf}`;
 
 /** One measure in a few words, for the head of a column: what it is made of and its sizes in mm. */
 export function measureSummary(measure: MeasureInput): string {
@@ -51,13 +54,19 @@ export function measureFacts(measure: MeasureInput): readonly (readonly [label: 
     case "web-plates":
       return [
         ["Sides of the web", String(measure.sides)],
-        ["Plate", `${measure.width} × ${measure.height} × ${measure.thickness} mm, ${steelWords(measure.steel)}`],
+        [
+          "Plate",
+          `${measure.width} × ${measure.height} × ${measure.thickness} mm, ${steelWords(measure.steel)}`,
+        ],
         ["Weld all round", weldWords(measure.weld)],
       ];
     case "backing-plates":
       return [
         ["Levels", levelsWords(measure.levels)],
-        ["Plate", `${measure.width} × ${measure.length} × ${measure.thickness} mm, ${steelWords(measure.steel)}`],
+        [
+          "Plate",
+          `${measure.width} × ${measure.length} × ${measure.thickness} mm, ${steelWords(measure.steel)}`,
+        ],
       ];
     case "through-bars":
       return [

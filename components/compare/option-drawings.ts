@@ -26,11 +26,30 @@ export function drawOptions(result: ResultDocument, catalog: Catalog): OptionDra
   if (!resolved.ok) return null;
   const drawn = result.options.flatMap((option, index): [string, NodeDrawing][] => {
     const measures = resolveMeasures(option.measures, result.node, catalog, `options.${index}.measures`);
-    return measures.ok ? [[option.key, draw(resolved.node, measures.measures, index === 0, `${result.node.reference}, ${option.name}`)]] : [];
+    return measures.ok
+      ? [
+          [
+            option.key,
+            draw(resolved.node, measures.measures, index === 0, `${result.node.reference}, ${option.name}`),
+          ],
+        ]
+      : [];
   });
   if (drawn.length === 0) return null;
-  return { byKey: new Map(drawn), extent: commonExtent(drawn.map(([, drawing]) => drawing.elevation.extent)) };
+  return {
+    byKey: new Map(drawn),
+    extent: commonExtent(drawn.map(([, drawing]) => drawing.elevation.extent)),
+  };
 }
 
-const draw = (node: NodeCase, measures: readonly MeasureCase[], isDimensioned: boolean, reference: string): NodeDrawing =>
-  drawNode(node, measures, { mmPerPixel: HEAD_MM_PER_PIXEL, dimensions: isDimensioned ? "overall" : "none", reference });
+const draw = (
+  node: NodeCase,
+  measures: readonly MeasureCase[],
+  isDimensioned: boolean,
+  reference: string,
+): NodeDrawing =>
+  drawNode(node, measures, {
+    mmPerPixel: HEAD_MM_PER_PIXEL,
+    dimensions: isDimensioned ? "overall" : "none",
+    reference,
+  });

@@ -12,7 +12,9 @@ export interface RankWords {
 
 /** The cost of the cheapest option that is ranked. */
 function cheapestCost(result: ResultDocument): number | null {
-  const costs = result.options.flatMap((option) => (isEvaluated(option) && option.rank === 1 ? [option.estimate.cost] : []));
+  const costs = result.options.flatMap((option) =>
+    isEvaluated(option) && option.rank === 1 ? [option.estimate.cost] : [],
+  );
   return costs[0] ?? null;
 }
 
@@ -23,7 +25,11 @@ export function rankWords(option: OptionDocument, result: ResultDocument): RankW
   }
   if (option.rank === 1) return { figure: "1", words: "cheapest", isBest: true };
   const more = option.estimate.cost - (cheapestCost(result) ?? option.estimate.cost);
-  return { figure: String(option.rank), words: `+${formatMoney(more)} ${moneyUnit(option.estimate.currency)}`, isBest: false };
+  return {
+    figure: String(option.rank),
+    words: `+${formatMoney(more)} ${moneyUnit(option.estimate.currency)}`,
+    isBest: false,
+  };
 }
 
 /** The letter in the bubble: A to Z, then AA. It follows the place in the comparison, not the key. */

@@ -7,10 +7,16 @@ export const stopProps = (column: number) => ({ "data-stop": column, tabIndex: -
 const stopsIn = (row: Element): HTMLElement[] => [...row.querySelectorAll<HTMLElement>("[data-stop]")];
 
 function nearestStop(row: readonly HTMLElement[], column: number): HTMLElement | undefined {
-  return [...row].sort((a, b) => Math.abs(Number(a.dataset.stop) - column) - Math.abs(Number(b.dataset.stop) - column))[0];
+  return [...row].sort(
+    (a, b) => Math.abs(Number(a.dataset.stop) - column) - Math.abs(Number(b.dataset.stop) - column),
+  )[0];
 }
 
-function targetOf(rows: readonly (readonly HTMLElement[])[], from: HTMLElement, event: KeyboardEvent): HTMLElement | undefined {
+function targetOf(
+  rows: readonly (readonly HTMLElement[])[],
+  from: HTMLElement,
+  event: KeyboardEvent,
+): HTMLElement | undefined {
   const rowAt = rows.findIndex((row) => row.includes(from));
   const row = rows[rowAt] ?? [];
   const at = row.indexOf(from);
@@ -47,7 +53,8 @@ export function useGridKeys(table: RefObject<HTMLTableElement | null>) {
   const onFocus = (event: FocusEvent<HTMLTableElement>) => {
     const stop = (event.target as HTMLElement).closest<HTMLElement>("[data-stop]");
     if (!stop) return;
-    for (const other of stopsIn(event.currentTarget)) other.setAttribute("tabindex", other === stop ? "0" : "-1");
+    for (const other of stopsIn(event.currentTarget))
+      other.setAttribute("tabindex", other === stop ? "0" : "-1");
   };
   const onKeyDown = (event: KeyboardEvent<HTMLTableElement>) => {
     const from = (event.target as HTMLElement).closest<HTMLElement>("[data-stop]");

@@ -6,13 +6,15 @@ const TONES = { fail: "font-[650] text-fail", pass: "font-[650] text-pass", stro
 export function VerdictLine({ verdict }: { readonly verdict: Verdict }) {
   return (
     <p data-testid="verdict">
-      {verdict.parts.map((part, index) => (part.tone ? (
-        <b key={index} className={TONES[part.tone]}>
-          {part.text}
-        </b>
-      ) : (
-        <span key={index}>{part.text}</span>
-      )))}
+      {verdict.parts.map((part, index) =>
+        part.tone ? (
+          <b key={index} className={TONES[part.tone]}>
+            {part.text}
+          </b>
+        ) : (
+          <span key={index}>{part.text}</span>
+        ),
+      )}
     </p>
   );
 }

@@ -1,5 +1,10 @@
 "use client";
-import type { ComponentDocument, EvaluatedOptionDocument, JointDocument, OptionDocument } from "@/lib/schemas/result-document";
+import type {
+  ComponentDocument,
+  EvaluatedOptionDocument,
+  JointDocument,
+  OptionDocument,
+} from "@/lib/schemas/result-document";
 import { BillOfOperations } from "@/components/cost/bill-of-operations";
 import { StepTree } from "@/components/trace/step-tree";
 import { Dialog } from "@/components/ui/dialog";
@@ -29,7 +34,15 @@ export interface WorkingPanelProps {
 const UNIT_DECIMALS: Readonly<Record<ComponentDocument["unit"], number>> = { kN: 1, kNm: 1, mm: 1, ratio: 3 };
 
 /** One check, worst first; its working opens below it. */
-function CheckItem({ check, limit, isOpen }: { readonly check: ComponentDocument; readonly limit: number; readonly isOpen: boolean }) {
+function CheckItem({
+  check,
+  limit,
+  isOpen,
+}: {
+  readonly check: ComponentDocument;
+  readonly limit: number;
+  readonly isOpen: boolean;
+}) {
   const decimals = UNIT_DECIMALS[check.unit];
   const unit = check.unit === "ratio" ? "" : ` ${check.unit}`;
   return (
@@ -47,7 +60,9 @@ function CheckItem({ check, limit, isOpen }: { readonly check: ComponentDocument
         </summary>
         <p className="mt-1 mb-2 text-note text-soft">
           {`${check.clause}. Demand ${formatNumber(check.demand, decimals)}${unit}, resistance ${formatNumber(check.resistance, decimals)}${unit}.`}
-          {check.stiffnessCoefficient === undefined ? "" : ` Stiffness coefficient ${formatNumber(check.stiffnessCoefficient, 2)} mm.`}
+          {check.stiffnessCoefficient === undefined
+            ? ""
+            : ` Stiffness coefficient ${formatNumber(check.stiffnessCoefficient, 2)} mm.`}
         </p>
         {check.steps && check.steps.length > 0 ? <StepTree steps={check.steps} openDepth={2} /> : null}
       </details>
@@ -68,8 +83,13 @@ function JointItem({ joint, isOpen }: { readonly joint: JointDocument; readonly 
         </summary>
         <p className="mt-1 mb-2 text-note text-soft">
           {`${joint.stiffnessClass}, ${joint.strengthClass.replace("-", " ")}; lever arm ${formatNumber(joint.leverArm, 1)} mm; `}
-          {joint.secantStiffness === null ? "no secant stiffness, the moment is above the resistance" : `secant stiffness ${formatNumber(joint.secantStiffness)} kNm/rad`}
-          {joint.rows.length > 0 ? `; rows ${joint.rows.map(({ row, force }) => `${row}: ${formatNumber(force, 1)} kN`).join(", ")}` : ""}.
+          {joint.secantStiffness === null
+            ? "no secant stiffness, the moment is above the resistance"
+            : `secant stiffness ${formatNumber(joint.secantStiffness)} kNm/rad`}
+          {joint.rows.length > 0
+            ? `; rows ${joint.rows.map(({ row, force }) => `${row}: ${formatNumber(force, 1)} kN`).join(", ")}`
+            : ""}
+          .
         </p>
         {joint.steps && joint.steps.length > 0 ? <StepTree steps={joint.steps} openDepth={2} /> : null}
       </details>
@@ -77,9 +97,15 @@ function JointItem({ joint, isOpen }: { readonly joint: JointDocument; readonly 
   );
 }
 
-function StepsSection({ opening, choice, limit, working }: Pick<WorkingPanelProps, "opening" | "choice" | "limit" | "working">) {
+function StepsSection({
+  opening,
+  choice,
+  limit,
+  working,
+}: Pick<WorkingPanelProps, "opening" | "choice" | "limit" | "working">) {
   if (working.state === "loading") return <Loading what="the working" />;
-  if (working.state === "failed") return <Failed title="The working could not be read." error={working.error} onRetry={working.retry} />;
+  if (working.state === "failed")
+    return <Failed title="The working could not be read." error={working.error} onRetry={working.retry} />;
   if (!isEvaluated(working.option)) return <p>{working.option.outsideScope.reason}</p>;
   const { option } = working;
   return (
@@ -105,7 +131,13 @@ function StepsSection({ opening, choice, limit, working }: Pick<WorkingPanelProp
   );
 }
 
-function HoursSection({ option, trade }: { readonly option: EvaluatedOptionDocument; readonly trade?: string | undefined }) {
+function HoursSection({
+  option,
+  trade,
+}: {
+  readonly option: EvaluatedOptionDocument;
+  readonly trade?: string | undefined;
+}) {
   const { estimate } = option;
   return (
     <>
@@ -116,7 +148,9 @@ function HoursSection({ option, trade }: { readonly option: EvaluatedOptionDocum
 }
 
 function OptionSection({ option }: { readonly option: OptionDocument }) {
-  const cautions = isEvaluated(option) ? [option.connectionFailure, option.sizing, ...option.cautions].filter((words) => words !== null) : [option.outsideScope.reason];
+  const cautions = isEvaluated(option)
+    ? [option.connectionFailure, option.sizing, ...option.cautions].filter((words) => words !== null)
+    : [option.outsideScope.reason];
   return (
     <div className="grid gap-5">
       {option.measures.length === 0 ? <p>Nothing is added to the column.</p> : null}
@@ -154,7 +188,9 @@ function titleOf(opening: Opening): string {
     case "joint":
       return "Stiffness and resistance";
     case "hours":
-      return opening.trade === undefined ? "Hours added" : `Hours added, ${opening.trade.replaceAll("-", " ")}`;
+      return opening.trade === undefined
+        ? "Hours added"
+        : `Hours added, ${opening.trade.replaceAll("-", " ")}`;
     case "cost":
       return opening.category === undefined ? "Cost added" : `Cost added, ${opening.category}`;
     case "option":
@@ -166,7 +202,12 @@ function PanelBody(props: WorkingPanelProps) {
   const { option, opening } = props;
   if (opening.about === "option" || !isEvaluated(option)) return <OptionSection option={option} />;
   if (opening.about === "cost") {
-    return <BillOfOperations estimate={option.estimate} {...(opening.category === undefined ? {} : { only: { category: opening.category } })} />;
+    return (
+      <BillOfOperations
+        estimate={option.estimate}
+        {...(opening.category === undefined ? {} : { only: { category: opening.category } })}
+      />
+    );
   }
   if (opening.about === "hours") return <HoursSection option={option} trade={opening.trade} />;
   return <StepsSection {...props} />;
@@ -180,7 +221,7 @@ export function WorkingPanel(props: WorkingPanelProps) {
       onClose={props.onClose}
       title={
         <>
-          <span className="mb-1 block text-label font-[450] tracking-normal text-soft">{`${props.letter}  ${props.option.name}`}</span>
+          <span className="mb-1 block text-label font-[450] tracking-normal text-soft">{`${props.letter} ${props.option.name}`}</span>{" "}
           {titleOf(props.opening)}
         </>
       }

@@ -10,17 +10,22 @@ export interface BillOfOperationsProps {
 
 type Line = EstimateDocument["lines"][number];
 
-const sum = (lines: readonly Line[], value: (line: Line) => number): number => lines.reduce((total, line) => total + value(line), 0);
+const sum = (lines: readonly Line[], value: (line: Line) => number): number =>
+  lines.reduce((total, line) => total + value(line), 0);
 
 function BillRow({ line }: { readonly line: Line }) {
   return (
     <tr>
       <th scope="row" className="border-t border-rule px-3 py-1.5 text-left align-top font-[550]">
         {line.operation}
-        <span className="block text-note font-normal text-soft">{[line.category, line.trade?.replaceAll("-", " ")].filter(Boolean).join(", ")}</span>
+        <span className="block text-note font-normal text-soft">
+          {[line.category, line.trade?.replaceAll("-", " ")].filter(Boolean).join(", ")}
+        </span>
       </th>
       <Td className="text-right whitespace-nowrap">{`${formatFigures(line.quantity, 3)} ${line.quantityUnit}`}</Td>
-      <Td className="text-right">{line.minutes === 0 ? <span className="text-soft">–</span> : formatNumber(line.minutes, 1)}</Td>
+      <Td className="text-right">
+        {line.minutes === 0 ? <span className="text-soft">–</span> : formatNumber(line.minutes, 1)}
+      </Td>
       <Td className="text-right">{formatNumber(line.cost, 2)}</Td>
       <Td className="text-note text-soft">{line.source}</Td>
     </tr>
@@ -30,10 +35,18 @@ function BillRow({ line }: { readonly line: Line }) {
 /** The bill of operations of one option, per node: what is done, how much of it, how long, what it costs, and where each figure comes from. */
 export function BillOfOperations({ estimate, only }: BillOfOperationsProps) {
   const lines = estimate.lines.filter(
-    (line) => (only?.category === undefined || line.category === only.category) && (only?.trade === undefined || line.trade === only.trade),
+    (line) =>
+      (only?.category === undefined || line.category === only.category) &&
+      (only?.trade === undefined || line.trade === only.trade),
   );
   if (lines.length === 0) {
-    return <p className="text-soft">{estimate.lines.length === 0 ? "The rates behind this comparison are not shown to you." : "No operation of this kind."}</p>;
+    return (
+      <p className="text-soft">
+        {estimate.lines.length === 0
+          ? "The rates behind this comparison are not shown to you."
+          : "No operation of this kind."}
+      </p>
+    );
   }
   return (
     <>
@@ -59,8 +72,18 @@ export function BillOfOperations({ estimate, only }: BillOfOperationsProps) {
               Sum
             </th>
             <Td className="border-t-ink" />
-            <Td className="border-t-ink text-right">{formatNumber(sum(lines, (line) => line.minutes), 1)}</Td>
-            <Td className="border-t-ink text-right">{formatNumber(sum(lines, (line) => line.cost), 2)}</Td>
+            <Td className="border-t-ink text-right">
+              {formatNumber(
+                sum(lines, (line) => line.minutes),
+                1,
+              )}
+            </Td>
+            <Td className="border-t-ink text-right">
+              {formatNumber(
+                sum(lines, (line) => line.cost),
+                2,
+              )}
+            </Td>
             <Td className="border-t-ink" />
           </tr>
         </tfoot>

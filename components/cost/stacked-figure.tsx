@@ -6,7 +6,10 @@ import { Loading } from "@/components/ui/states";
 import type { StackedShares } from "./stacked-shares";
 
 /* Loaded when a figure is first drawn, and only in the browser: the chart library is large and sets its sizes there. */
-const Chart = dynamic(() => import("./stacked-chart"), { ssr: false, loading: () => <Loading what="the chart" /> });
+const Chart = dynamic(() => import("./stacked-chart"), {
+  ssr: false,
+  loading: () => <Loading what="the chart" />,
+});
 const Swatch = dynamic(() => import("./stacked-chart").then((module) => module.Swatch), { ssr: false });
 
 export interface StackedFigureProps {
@@ -43,7 +46,10 @@ export function StackedFigure({ title, note, shares, format, label }: StackedFig
           <tbody>
             {shares.parts.map((part, index) => (
               <tr key={part}>
-                <th scope="row" className="border-t border-rule px-3 py-1 text-left font-normal whitespace-nowrap">
+                <th
+                  scope="row"
+                  className="border-t border-rule px-3 py-1 text-left font-normal whitespace-nowrap"
+                >
                   <Swatch index={index} id={id} />
                   {label(part)}
                 </th>

@@ -24,15 +24,27 @@ export interface LetteredOption {
  *
  * @param partsOf - the parts of one option, all in one unit.
  */
-export function stackedShares(options: readonly LetteredOption[], partsOf: (option: EvaluatedOptionDocument) => Readonly<Record<string, number>>): StackedShares {
+export function stackedShares(
+  options: readonly LetteredOption[],
+  partsOf: (option: EvaluatedOptionDocument) => Readonly<Record<string, number>>,
+): StackedShares {
   const bars = options.map(({ letter, option }) => {
     const parts = partsOf(option);
-    return { letter, name: option.name, parts, total: Object.values(parts).reduce((sum, value) => sum + value, 0) };
+    return {
+      letter,
+      name: option.name,
+      parts,
+      total: Object.values(parts).reduce((sum, value) => sum + value, 0),
+    };
   });
   const size = new Map<string, number>();
   for (const bar of bars) {
-    for (const [part, value] of Object.entries(bar.parts)) size.set(part, (size.get(part) ?? 0) + Math.abs(value));
+    for (const [part, value] of Object.entries(bar.parts))
+      size.set(part, (size.get(part) ?? 0) + Math.abs(value));
   }
-  const parts = [...size].filter(([, total]) => total > 0).sort((a, b) => b[1] - a[1]).map(([part]) => part);
+  const parts = [...size]
+    .filter(([, total]) => total > 0)
+    .sort((a, b) => b[1] - a[1])
+    .map(([part]) => part);
   return { parts, bars };
 }

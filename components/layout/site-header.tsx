@@ -12,7 +12,10 @@ export interface SiteHeaderProps {
 export function SiteHeader({ children, end }: SiteHeaderProps) {
   return (
     <header className="no-print flex flex-wrap items-baseline gap-x-7 gap-y-2 border-b-2 border-ink px-5 pt-3.5 pb-[11px] desk:px-9">
-      <Link href="/" className="text-[1.0625rem] font-[750] tracking-[-0.01em] text-ink no-underline [font-stretch:112%]">
+      <Link
+        href="/"
+        className="text-[1.0625rem] font-[750] tracking-[-0.01em] text-ink no-underline [font-stretch:112%]"
+      >
         Panelwright
       </Link>
       {children ? (
@@ -37,7 +40,11 @@ export function HeaderLink({ href, isHere = false, children }: HeaderLinkProps) 
     <Link
       href={href}
       aria-current={isHere ? "page" : undefined}
-      className={isHere ? "border-b-2 border-petrol pb-0.5 font-semibold text-ink" : "text-soft hover:text-ink hover:underline"}
+      className={
+        isHere
+          ? "border-b-2 border-petrol pb-0.5 font-semibold text-ink"
+          : "text-soft hover:text-ink hover:underline"
+      }
     >
       {children}
     </Link>

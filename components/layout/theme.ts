@@ -6,4 +6,5 @@ export type Theme = (typeof THEMES)[number];
 export const THEME_COOKIE = "panelwright-theme";
 
 /** Reads a stored value; anything unknown means "system". */
-export const themeFrom = (stored: string | undefined): Theme => THEMES.find((theme) => theme === stored) ?? "system";
+export const themeFrom = (stored: string | undefined): Theme =>
+  THEMES.find((theme) => theme === stored) ?? "system";

@@ -4,40 +4,61 @@ import { parseExpression, type Expression } from "./parse-expression";
 import { splitSymbol, unitText } from "./symbol-text";
 
 /* MathML: drawn by the browser itself, read aloud by screen readers, and free of style attributes. */
-const tag = (name: string, props: object | null, ...children: readonly ReactNode[]) => createElement(name, props, ...children);
+const tag = (name: string, props: object | null, ...children: readonly ReactNode[]) =>
+  createElement(name, props, ...children);
 const operator = (text: string, props: object = {}) => tag("mo", props, text);
 const row = (...children: readonly ReactNode[]) => tag("mrow", null, ...children);
 
-const OPERATORS: Readonly<Record<string, string>> = { "*": "·", "-": "−", "<=": "≤", ">=": "≥", "==": "=", "!=": "≠", "+": "+", "<": "<", ">": ">" };
+const OPERATORS: Readonly<Record<string, string>> = {
+  "*": "·",
+  "-": "−",
+  "<=": "≤",
+  ">=": "≥",
+  "==": "=",
+  "!=": "≠",
+  "+": "+",
+  "<": "<",
+  ">": ">",
+};
 
 /** How a name of the formula is set: by its symbol, or by the number put in for it. */
 type NameSetter = (name: string) => ReactNode;
 
 function symbolMath(symbol: string): ReactNode {
   const { base, below } = splitSymbol(symbol);
-  const letter = base.length === 1 ? tag("mi", { mathvariant: "normal", className: "italic" }, base) : tag("mtext", null, base);
+  const letter =
+    base.length === 1
+      ? tag("mi", { mathvariant: "normal", className: "italic" }, base)
+      : tag("mtext", null, base);
   return below === null ? letter : tag("msub", null, letter, tag("mtext", null, below));
 }
 
 function numberMath(value: number): ReactNode {
   const [mantissa = "", exponent] = formatFigures(value, 5).split(" × 10^");
   const plain = tag("mn", null, mantissa);
-  const number = exponent === undefined ? plain : row(plain, operator("×"), tag("msup", null, tag("mn", null, "10"), tag("mn", null, exponent)));
+  const number =
+    exponent === undefined
+      ? plain
+      : row(plain, operator("×"), tag("msup", null, tag("mn", null, "10"), tag("mn", null, exponent)));
   return value < 0 ? row(operator("("), number, operator(")")) : number;
 }
 
-const withoutGroup = (expression: Expression): Expression => (expression.kind === "group" ? withoutGroup(expression.of) : expression);
+const withoutGroup = (expression: Expression): Expression =>
+  expression.kind === "group" ? withoutGroup(expression.of) : expression;
 
 function callMath(name: string, given: readonly Expression[], set: NameSetter): ReactNode {
   const [first] = given;
   if (name === "sqrt" && first) return tag("msqrt", null, math(withoutGroup(first), set));
   if (name === "abs" && first) return row(operator("|"), math(first, set), operator("|"));
-  const list = given.flatMap((item, index) => (index === 0 ? [math(item, set)] : [operator(";"), math(item, set)]));
+  const list = given.flatMap((item, index) =>
+    index === 0 ? [math(item, set)] : [operator(";"), math(item, set)],
+  );
   return row(tag("mi", { mathvariant: "normal" }, name), operator("("), ...list, operator(")"));
 }
 
 function choiceMath(expression: Extract<Expression, { kind: "choice" }>, set: NameSetter): ReactNode {
-  const line = (value: Expression, words: ReactNode) => tag("mtr", null, tag("mtd", null, math(value, set)), tag("mtd", null, words));
+  const line = (value: Expression, words: ReactNode) =>
+    tag("mtr", null, tag("mtd", null, math(value, set)), tag("mtd", null, words));
   return row(
     operator("{"),
     tag(
@@ -50,9 +71,14 @@ function choiceMath(expression: Extract<Expression, { kind: "choice" }>, set: Na
 }
 
 /** A product of fractions reads as one fraction: `a * b / c` arrives as (a * b) / c. */
-function operationMath({ operator: sign, left, right }: Extract<Expression, { kind: "operation" }>, set: NameSetter): ReactNode {
+function operationMath(
+  { operator: sign, left, right }: Extract<Expression, { kind: "operation" }>,
+  set: NameSetter,
+): ReactNode {
   if (sign === "/") return tag("mfrac", null, math(withoutGroup(left), set), math(withoutGroup(right), set));
   if (sign === "^") return tag("msup", null, math(left, set), math(withoutGroup(right), set));
+  if (sign === "or" || sign === "and")
+    return row(math(left, set), tag("mtext", null, `\u00a0${sign}\u00a0`), math(right, set));
   return row(math(left, set), operator(OPERATORS[sign] ?? sign), math(right, set));
 }
 
@@ -90,12 +116,19 @@ export interface ExpressionMathProps {
 /** One line of a calculation set as mathematics; the line as it is written where it cannot be. */
 export function ExpressionMath({ expression, symbols, inputs, symbol, result }: ExpressionMathProps) {
   const parsed = parseExpression(expression);
-  if (!parsed) return <code className="break-words">{symbol ? `${symbol} = ${expression}` : expression}</code>;
+  if (!parsed)
+    return <code className="break-words">{symbol ? `${symbol} = ${expression}` : expression}</code>;
   const set: NameSetter = (name) => {
     const value = inputs?.[name];
     return value === undefined ? symbolMath(symbols[name]?.[0] ?? name) : numberMath(value);
   };
   const head = symbol ? row(symbolMath(symbol), operator("=")) : operator("=");
-  const tail = result ? row(operator("="), numberMath(result.value), tag("mtext", null, `\u00a0${unitText(result.unit)}`)) : null;
-  return <div className="py-1">{tag("math", { displaystyle: "true", className: "working-math" }, row(head, math(parsed, set), tail))}</div>;
+  const tail = result
+    ? row(operator("="), numberMath(result.value), tag("mtext", null, `\u00a0${unitText(result.unit)}`))
+    : null;
+  return (
+    <div className="py-1">
+      {tag("math", { displaystyle: "true", className: "working-math" }, row(head, math(parsed, set), tail))}
+    </div>
+  );
 }

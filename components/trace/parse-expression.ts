@@ -8,9 +8,19 @@ export type Expression =
   | { readonly kind: "name"; readonly name: string }
   | { readonly kind: "negative"; readonly of: Expression }
   | { readonly kind: "group"; readonly of: Expression }
-  | { readonly kind: "operation"; readonly operator: string; readonly left: Expression; readonly right: Expression }
+  | {
+      readonly kind: "operation";
+      readonly operator: string;
+      readonly left: Expression;
+      readonly right: Expression;
+    }
   | { readonly kind: "call"; readonly name: string; readonly given: readonly Expression[] }
-  | { readonly kind: "choice"; readonly condition: Expression; readonly then: Expression; readonly otherwise: Expression };
+  | {
+      readonly kind: "choice";
+      readonly condition: Expression;
+      readonly then: Expression;
+      readonly otherwise: Expression;
+    };
 
 class NotUnderstood extends Error {}
 
@@ -31,12 +41,21 @@ function tokens(text: string): readonly string[] {
 
 /** How tightly an operator binds; a power binds from the right. */
 const BINDING: Readonly<Record<string, number>> = {
-  "<": 1, ">": 1, "<=": 1, ">=": 1, "==": 1, "!=": 1,
-  "+": 2, "-": 2,
-  "*": 3, "/": 3,
-  "^": 5,
+  or: 1,
+  and: 2,
+  "<": 3,
+  ">": 3,
+  "<=": 3,
+  ">=": 3,
+  "==": 3,
+  "!=": 3,
+  "+": 4,
+  "-": 4,
+  "*": 5,
+  "/": 5,
+  "^": 7,
 };
-const NEGATIVE_BINDING = 4;
+const NEGATIVE_BINDING = 6;
 
 class Reader {
   private at = 0;
@@ -85,7 +104,7 @@ class Reader {
       return { kind: "group", of };
     }
     if (/^\d/.test(token)) return { kind: "number", text: token };
-    if (!/^[A-Za-z_]/.test(token)) throw new NotUnderstood();
+    if (!/^[A-Za-z_]/.test(token) || token in BINDING) throw new NotUnderstood();
     return this.list[this.at] === "(" ? this.call(token) : { kind: "name", name: token };
   }
 

@@ -51,7 +51,12 @@ function StepBody({ step }: { readonly step: Step }) {
     <>
       <div className="overflow-x-auto py-1">
         <ExpressionMath expression={step.expression} symbols={step.symbols} symbol={step.symbol} />
-        <ExpressionMath expression={step.expression} symbols={step.symbols} inputs={step.inputs} result={{ value: step.value, unit: step.unit }} />
+        <ExpressionMath
+          expression={step.expression}
+          symbols={step.symbols}
+          inputs={step.inputs}
+          result={{ value: step.value, unit: step.unit }}
+        />
       </div>
       <Inputs step={step} />
     </>
@@ -81,7 +86,11 @@ export function StepTree({ steps, openDepth = 1 }: StepTreeProps) {
             <StepBody step={step} />
             {step.children && step.children.length > 0 ? (
               <div className="mt-2">
-                <p className="mb-1 text-note font-semibold text-soft">{step.children.length === 1 ? "From one step before" : `From ${step.children.length} steps before`}</p>
+                <p className="mb-1 text-note font-semibold text-soft">
+                  {step.children.length === 1
+                    ? "From one step before"
+                    : `From ${step.children.length} steps before`}
+                </p>
                 <StepTree steps={step.children} openDepth={openDepth - 1} />
               </div>
             ) : null}

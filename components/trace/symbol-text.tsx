@@ -1,5 +1,20 @@
 const GREEK: Readonly<Record<string, string>> = {
-  alpha: "α", beta: "β", gamma: "γ", epsilon: "ε", lambda: "λ", mu: "μ", eta: "η", rho: "ρ", chi: "χ", omega: "ω", psi: "ψ", sigma: "σ", tau: "τ", pi: "π", delta: "δ", phi: "φ",
+  alpha: "α",
+  beta: "β",
+  gamma: "γ",
+  epsilon: "ε",
+  lambda: "λ",
+  mu: "μ",
+  eta: "η",
+  rho: "ρ",
+  chi: "χ",
+  omega: "ω",
+  psi: "ψ",
+  sigma: "σ",
+  tau: "τ",
+  pi: "π",
+  delta: "δ",
+  phi: "φ",
 };
 
 /** A symbol of the standard split into its letter and what stands below the line: "M_j,Rd" is M and j,Rd. */

@@ -5,7 +5,8 @@ import { joinClasses } from "./join-classes";
 export type ButtonKind = "primary" | "plain" | "quiet" | "danger";
 
 const KINDS: Record<ButtonKind, string> = {
-  primary: "bg-petrol text-onpetrol border-petrol font-semibold hover:bg-ink hover:border-ink hover:text-paper",
+  primary:
+    "bg-petrol text-onpetrol border-petrol font-semibold hover:bg-ink hover:border-ink hover:text-paper",
   plain: "bg-sheet text-ink border-rule2 hover:border-ink",
   quiet: "bg-transparent text-petrol border-transparent hover:border-rule2",
   danger: "bg-sheet text-fail border-fail font-semibold hover:bg-failwash",
@@ -21,7 +22,16 @@ export interface ButtonProps extends ComponentProps<"button"> {
 }
 
 /** A button. The default type is "button", so that one inside a form does not send it by accident. */
-export function Button({ kind = "plain", isBusy = false, busyLabel, className, children, type = "button", onClick, ...rest }: ButtonProps) {
+export function Button({
+  kind = "plain",
+  isBusy = false,
+  busyLabel,
+  className,
+  children,
+  type = "button",
+  onClick,
+  ...rest
+}: ButtonProps) {
   return (
     <button
       {...rest}
@@ -58,7 +68,11 @@ export function ButtonLink({ href, kind = "plain", className, children }: Button
 /** Buttons, links and selects that belong together, joined into one ruled strip. */
 export function ToolStrip({ label, children }: { readonly label: string; readonly children: ReactNode }) {
   return (
-    <div role="group" aria-label={label} className="no-print flex flex-wrap *:-ml-px *:focus-visible:z-10 [&>*]:relative pl-px">
+    <div
+      role="group"
+      aria-label={label}
+      className="no-print flex flex-wrap *:-ml-px *:focus-visible:z-10 [&>*]:relative pl-px"
+    >
       {children}
     </div>
   );

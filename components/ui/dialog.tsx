@@ -59,7 +59,13 @@ export function Dialog({ title, onClose, shape = "box", children, actions }: Dia
     <dialog
       ref={ref}
       aria-labelledby={titleId}
-      onKeyDown={keepTabInside}
+      onKeyDown={(event) => {
+        keepTabInside(event);
+        if (event.key !== "Escape") return;
+        event.preventDefault();
+        event.stopPropagation();
+        onClose();
+      }}
       onCancel={(event) => {
         event.preventDefault();
         onClose();
@@ -86,7 +92,9 @@ export function Dialog({ title, onClose, shape = "box", children, actions }: Dia
         <div className="min-h-0 flex-1 overflow-y-auto px-6 py-4" tabIndex={-1}>
           {children}
         </div>
-        {actions ? <div className="flex flex-wrap justify-end gap-2 border-t border-rule px-6 py-4">{actions}</div> : null}
+        {actions ? (
+          <div className="flex flex-wrap justify-end gap-2 border-t border-rule px-6 py-4">{actions}</div>
+        ) : null}
       </div>
     </dialog>
   );
@@ -103,7 +111,15 @@ export interface ConfirmDialogProps {
 }
 
 /** Asks before something that cannot be taken back. */
-export function ConfirmDialog({ title, children, confirmLabel, isBusy = false, error, onConfirm, onClose }: ConfirmDialogProps) {
+export function ConfirmDialog({
+  title,
+  children,
+  confirmLabel,
+  isBusy = false,
+  error,
+  onConfirm,
+  onClose,
+}: ConfirmDialogProps) {
   return (
     <Dialog
       title={title}

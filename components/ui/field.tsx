@@ -50,7 +50,14 @@ interface OwnFieldProps {
 }
 
 /** Label, one-line text input, hint and error. */
-export function TextField({ label, hint, error, fieldClassName, className, ...input }: OwnFieldProps & ComponentProps<"input">) {
+export function TextField({
+  label,
+  hint,
+  error,
+  fieldClassName,
+  className,
+  ...input
+}: OwnFieldProps & ComponentProps<"input">) {
   return (
     <Field label={label} hint={hint} error={error} {...(fieldClassName ? { className: fieldClassName } : {})}>
       {(binding) => <input {...input} {...binding} className={joinClasses("control w-full", className)} />}
@@ -59,7 +66,15 @@ export function TextField({ label, hint, error, fieldClassName, className, ...in
 }
 
 /** Label and a native select. */
-export function SelectField({ label, hint, error, fieldClassName, className, children, ...select }: OwnFieldProps & ComponentProps<"select">) {
+export function SelectField({
+  label,
+  hint,
+  error,
+  fieldClassName,
+  className,
+  children,
+  ...select
+}: OwnFieldProps & ComponentProps<"select">) {
   return (
     <Field label={label} hint={hint} error={error} {...(fieldClassName ? { className: fieldClassName } : {})}>
       {(binding) => (
@@ -72,7 +87,11 @@ export function SelectField({ label, hint, error, fieldClassName, className, chi
 }
 
 /** A checkbox with its words to the right. */
-export function CheckField({ label, className, ...input }: { readonly label: ReactNode } & Omit<ComponentProps<"input">, "type">) {
+export function CheckField({
+  label,
+  className,
+  ...input
+}: { readonly label: ReactNode } & Omit<ComponentProps<"input">, "type">) {
   return (
     <label className={joinClasses("inline-flex min-h-6 items-center gap-2", className)}>
       <input {...input} type="checkbox" className="size-4 accent-petrol" />

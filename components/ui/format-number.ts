@@ -21,7 +21,9 @@ export function formatFigures(value: number, figures = 4): string {
   if (value === 0) return "0";
   const size = Math.floor(Math.log10(Math.abs(value)));
   if (size >= 7 || size < -5) {
-    const [mantissa = "0", exponent = "0"] = Math.abs(value).toExponential(figures - 1).split("e");
+    const [mantissa = "0", exponent = "0"] = Math.abs(value)
+      .toExponential(figures - 1)
+      .split("e");
     const power = Number(exponent);
     return `${value < 0 ? MINUS : ""}${mantissa} × 10^${power < 0 ? MINUS : ""}${Math.abs(power)}`;
   }

@@ -23,7 +23,14 @@ export interface NoticeProps {
 export function Notice({ tone = "plain", title, role, actions, children, className }: NoticeProps) {
   const look = TONES[tone];
   return (
-    <div role={role} className={joinClasses("flex flex-wrap items-start justify-between gap-x-6 gap-y-2 border-l-4 bg-sheet px-4 py-2.5", look.edge, className)}>
+    <div
+      role={role}
+      className={joinClasses(
+        "flex flex-wrap items-start justify-between gap-x-6 gap-y-2 border-l-4 bg-sheet px-4 py-2.5",
+        look.edge,
+        className,
+      )}
+    >
       <div className="max-w-[75ch]">
         {title ? (
           <p className={joinClasses("font-semibold", look.text)}>

@@ -12,7 +12,15 @@ export function Loading({ what }: { readonly what: string }) {
 }
 
 /** Nothing there yet, why, and what to do about it. */
-export function Empty({ title, children, actions }: { readonly title: string; readonly children?: ReactNode; readonly actions?: ReactNode }) {
+export function Empty({
+  title,
+  children,
+  actions,
+}: {
+  readonly title: string;
+  readonly children?: ReactNode;
+  readonly actions?: ReactNode;
+}) {
   return (
     <div className="border border-dashed border-rule2 bg-sheet px-6 py-8">
       <h2>{title}</h2>
@@ -32,7 +40,12 @@ export interface FailedProps {
 /** Failed: what, why, and a way to try again. */
 export function Failed({ title, error, onRetry }: FailedProps) {
   return (
-    <Notice tone="fail" role="alert" title={title} actions={onRetry ? <Button onClick={onRetry}>Try again</Button> : null}>
+    <Notice
+      tone="fail"
+      role="alert"
+      title={title}
+      actions={onRetry ? <Button onClick={onRetry}>Try again</Button> : null}
+    >
       <p>{error instanceof Error && error.message ? error.message : "No reason was given."}</p>
     </Notice>
   );

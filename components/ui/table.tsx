@@ -2,7 +2,12 @@ import type { ComponentProps, ReactNode } from "react";
 import { joinClasses } from "./join-classes";
 
 /** A ruled table that scrolls sideways inside its own frame; the frame takes focus so that keys can scroll it. */
-export function Table({ label, className, children, ...rest }: { readonly label: string } & ComponentProps<"table">) {
+export function Table({
+  label,
+  className,
+  children,
+  ...rest
+}: { readonly label: string } & ComponentProps<"table">) {
   return (
     <div role="region" aria-label={label} tabIndex={0} className="overflow-x-auto border border-ink bg-sheet">
       <table {...rest} aria-label={label} className={joinClasses("w-full border-collapse", className)}>
@@ -15,7 +20,14 @@ export function Table({ label, className, children, ...rest }: { readonly label:
 /** A column head. */
 export function Th({ className, scope = "col", ...rest }: ComponentProps<"th">) {
   return (
-    <th {...rest} scope={scope} className={joinClasses("border-b border-ink bg-paper px-3 py-2 text-left align-bottom text-label font-semibold", className)} />
+    <th
+      {...rest}
+      scope={scope}
+      className={joinClasses(
+        "border-b border-ink bg-paper px-3 py-2 text-left align-bottom text-label font-semibold",
+        className,
+      )}
+    />
   );
 }
 
@@ -37,7 +49,11 @@ export interface SortableThProps {
 export function SortableTh({ direction, onSort, className, children }: SortableThProps) {
   return (
     <Th aria-sort={direction ?? "none"} {...(className ? { className } : {})}>
-      <button type="button" onClick={onSort} className="inline-flex items-baseline gap-1 text-left font-semibold hover:underline">
+      <button
+        type="button"
+        onClick={onSort}
+        className="inline-flex items-baseline gap-1 text-left font-semibold hover:underline"
+      >
         {children}
         <span aria-hidden="true" className={direction ? "text-petrol" : "text-faint"}>
           {direction === "descending" ? "▾" : "▴"}

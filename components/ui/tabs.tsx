@@ -25,7 +25,13 @@ export function Tabs<K extends string>({ label, items, selected, onSelect, child
     const at = items.findIndex((item) => item.key === selected);
     const move = MOVES[event.key];
     const next =
-      move !== undefined ? (at + move + items.length) % items.length : event.key === "Home" ? 0 : event.key === "End" ? items.length - 1 : null;
+      move !== undefined
+        ? (at + move + items.length) % items.length
+        : event.key === "Home"
+          ? 0
+          : event.key === "End"
+            ? items.length - 1
+            : null;
     const target = next === null ? undefined : items[next];
     if (!target) return;
     event.preventDefault();
@@ -34,7 +40,13 @@ export function Tabs<K extends string>({ label, items, selected, onSelect, child
   };
   return (
     <div>
-      <div ref={list} role="tablist" aria-label={label} onKeyDown={onKeyDown} className="flex flex-wrap gap-6 border-b border-ink">
+      <div
+        ref={list}
+        role="tablist"
+        aria-label={label}
+        onKeyDown={onKeyDown}
+        className="flex flex-wrap gap-6 border-b border-ink"
+      >
         {items.map((item) => (
           <button
             key={item.key}
@@ -48,7 +60,9 @@ export function Tabs<K extends string>({ label, items, selected, onSelect, child
             onClick={() => onSelect(item.key)}
             className={joinClasses(
               "-mb-px border-b-[3px] px-0.5 py-2",
-              item.key === selected ? "border-petrol font-semibold text-ink" : "border-transparent text-soft hover:text-ink",
+              item.key === selected
+                ? "border-petrol font-semibold text-ink"
+                : "border-transparent text-soft hover:text-ink",
             )}
           >
             {item.label}

@@ -53,7 +53,11 @@ export const buildStep = (changes: Partial<Step> = {}): Step => ({
 });
 
 /** A check of one component: utilisation as given, resistance 500 kN. */
-export const buildCheck = (component: ComponentId, utilisation: number, changes: Partial<ComponentDocument> = {}): ComponentDocument => ({
+export const buildCheck = (
+  component: ComponentId,
+  utilisation: number,
+  changes: Partial<ComponentDocument> = {},
+): ComponentDocument => ({
   component,
   side: "right",
   loadCase: "ULS 3",
@@ -90,13 +94,40 @@ export const buildEstimate = (cost: number, changes: Partial<EstimateDocument> =
   mass: cost / 24,
   carbon: cost / 7,
   costForQuantity: cost * 12,
-  costByCategory: { labour: cost * 0.6, machine: cost * 0.1, material: cost * 0.25, consumables: cost * 0.05, column: 0, inspection: 0, site: 0, drawing: 0 },
+  costByCategory: {
+    labour: cost * 0.6,
+    machine: cost * 0.1,
+    material: cost * 0.25,
+    consumables: cost * 0.05,
+    column: 0,
+    inspection: 0,
+    site: 0,
+    drawing: 0,
+  },
   lines:
     cost === 0
       ? []
       : [
-          { operation: "weld stiffeners", category: "labour", trade: "welder", quantity: 1.84, quantityUnit: "m", minutes: cost / 6, cost: cost * 0.6, source: "time table 2026-11, shop to confirm" },
-          { operation: "stiffener plates", category: "material", trade: null, quantity: 11.2, quantityUnit: "kg", minutes: 0, cost: cost * 0.4, source: "rate book 2026-11" },
+          {
+            operation: "weld stiffeners",
+            category: "labour",
+            trade: "welder",
+            quantity: 1.84,
+            quantityUnit: "m",
+            minutes: cost / 6,
+            cost: cost * 0.6,
+            source: "time table 2026-11, shop to confirm",
+          },
+          {
+            operation: "stiffener plates",
+            category: "material",
+            trade: null,
+            quantity: 11.2,
+            quantityUnit: "kg",
+            minutes: 0,
+            cost: cost * 0.4,
+            source: "rate book 2026-11",
+          },
         ],
   ...changes,
 });
@@ -112,7 +143,10 @@ interface OptionFigures {
 }
 
 /** An option that passes exactly when its worst check does. */
-export function buildOption(figures: OptionFigures, changes: Partial<EvaluatedOptionDocument> = {}): EvaluatedOptionDocument {
+export function buildOption(
+  figures: OptionFigures,
+  changes: Partial<EvaluatedOptionDocument> = {},
+): EvaluatedOptionDocument {
   const worst = [...figures.checks].sort((a, b) => b.utilisation - a.utilisation)[0];
   if (!worst) throw new Error("Give the option at least one check.");
   return {
@@ -120,7 +154,12 @@ export function buildOption(figures: OptionFigures, changes: Partial<EvaluatedOp
     name: figures.name,
     measures: [...(figures.measures ?? [])],
     passes: worst.utilisation <= 1,
-    governing: { component: worst.component, side: worst.side, loadCase: worst.loadCase, utilisation: worst.utilisation },
+    governing: {
+      component: worst.component,
+      side: worst.side,
+      loadCase: worst.loadCase,
+      utilisation: worst.utilisation,
+    },
     stiffnessReached: true,
     connectionFailure: null,
     sizing: null,
@@ -129,15 +168,19 @@ export function buildOption(figures: OptionFigures, changes: Partial<EvaluatedOp
     components: [...figures.checks],
     estimate: buildEstimate(figures.cost ?? 0),
     rank: figures.rank ?? null,
-    notRanked: figures.notRanked ?? (figures.rank == null ? "fails" : null),
+    notRanked: figures.notRanked ?? ((figures.rank ?? null) === null ? "fails" : null),
     ...changes,
   };
 }
 
-export const buildOutsideScopeOption = (changes: Partial<OutsideScopeOptionDocument> = {}): OutsideScopeOptionDocument => ({
+export const buildOutsideScopeOption = (
+  changes: Partial<OutsideScopeOptionDocument> = {},
+): OutsideScopeOptionDocument => ({
   key: "web-plate",
   name: "Web plate, one side",
-  measures: [{ kind: "web-plates", sides: 1, thickness: 12, width: 208, height: 590, steel: "S355", weld: 6 }],
+  measures: [
+    { kind: "web-plates", sides: 1, thickness: 12, width: 208, height: 590, steel: "S355", weld: 6 },
+  ],
   outsideScope: { reason: "d_c / t_wc is above 69 ε, so the panel would buckle in shear before it yields." },
   rank: null,
   notRanked: "outside scope",
@@ -155,7 +198,13 @@ export const stiffeners: Extract<MeasureInput, { kind: "transverse-stiffeners" }
   flangeWeld: 6,
   webWeld: 5,
 };
-export const bars: MeasureInput = { kind: "through-bars", levels: ["top"], size: "M24", grade: "10.9", innerNuts: true };
+export const bars: MeasureInput = {
+  kind: "through-bars",
+  levels: ["top"],
+  size: "M24",
+  grade: "10.9",
+  innerNuts: true,
+};
 
 const panel = (shear: number, compression: number, tension: number, bending: number): ComponentDocument[] => [
   buildCheck("column-web-shear", shear, { loadCase: "ULS 2" }),
@@ -175,18 +224,49 @@ export function buildResultDocument(changes: Partial<ResultDocument> = {}): Resu
     engine: "0.1.0",
     options: [
       buildOption({ key: "bare", name: "Bare column", checks: panel(0.91, 1.31, 1.07, 1.12) }),
-      buildOption({ key: "bars-top", name: "Bars at top", measures: [bars], checks: [...panel(0.91, 1.24, 0.68, 0.71), buildCheck("bar-tension", 0.62)], cost: 196 }),
       buildOption({
-        key: "bars-stiffeners",
-        name: "Bars at top, stiffeners at bottom",
-        measures: [bars, { ...stiffeners, levels: ["bottom"] }],
-        checks: [...panel(0.91, 0.62, 0.68, 0.71), buildCheck("bar-tension", 0.62), buildCheck("transverse-stiffener", 0.44)],
-        cost: 318,
-        rank: 1,
-      }, { cautions: ["Threaded bars with inner nuts are outside the clauses of EN 1993-1-8: a mechanics model stands in."] }),
-      buildOption({ key: "stiffeners", name: "Stiffeners top and bottom", measures: [stiffeners], checks: [...panel(0.87, 0.98, 0.57, 0.74), buildCheck("transverse-stiffener", 0.71)], cost: 402, rank: 2 }),
+        key: "bars-top",
+        name: "Bars at top",
+        measures: [bars],
+        checks: [...panel(0.91, 1.24, 0.68, 0.71), buildCheck("bar-tension", 0.62)],
+        cost: 196,
+      }),
+      buildOption(
+        {
+          key: "bars-stiffeners",
+          name: "Bars at top, stiffeners at bottom",
+          measures: [bars, { ...stiffeners, levels: ["bottom"] }],
+          checks: [
+            ...panel(0.91, 0.62, 0.68, 0.71),
+            buildCheck("bar-tension", 0.62),
+            buildCheck("transverse-stiffener", 0.44),
+          ],
+          cost: 318,
+          rank: 1,
+        },
+        {
+          cautions: [
+            "Threaded bars with inner nuts are outside the clauses of EN 1993-1-8: a mechanics model stands in.",
+          ],
+        },
+      ),
+      buildOption({
+        key: "stiffeners",
+        name: "Stiffeners top and bottom",
+        measures: [stiffeners],
+        checks: [...panel(0.87, 0.98, 0.57, 0.74), buildCheck("transverse-stiffener", 0.71)],
+        cost: 402,
+        rank: 2,
+      }),
       buildOutsideScopeOption(),
-      buildOption({ key: "heavier", name: "Heavier column", measures: [{ kind: "heavier-column", section: "HE 300 B" }], checks: panel(0.6, 0.86, 0.64, 0.61), cost: 618, rank: 3 }),
+      buildOption({
+        key: "heavier",
+        name: "Heavier column",
+        measures: [{ kind: "heavier-column", section: "HE 300 B" }],
+        checks: panel(0.6, 0.86, 0.64, 0.61),
+        cost: 618,
+        rank: 3,
+      }),
     ],
     ...changes,
   };

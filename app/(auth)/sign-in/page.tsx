@@ -17,13 +17,18 @@ export default async function SignInPage({ searchParams }: { readonly searchPara
           <h1 id="sign-in-title">Sign in</h1>
           <SignInForm callbackPath={safeCallbackPath(typeof callbackUrl === "string" ? callbackUrl : null)} />
         </section>
-        <section className="border-t-2 border-ink pt-4 desk:border-t-0 desk:border-l-2 desk:pt-0 desk:pl-8" aria-label="What this is">
+        <section
+          className="border-t-2 border-ink pt-4 desk:border-t-0 desk:border-l-2 desk:pt-0 desk:pl-8"
+          aria-label="What this is"
+        >
           <p className="text-lead">
-            <b className="font-[650]">How is this column panel to be stiffened?</b> Give the node and its load cases. Panelwright works out every sensible way, checks each against EN 1993-1-8, prices and
-            times it at the shop’s own rates, and ranks them side by side. Each number opens into its working.
+            <b className="font-[650]">How is this column panel to be stiffened?</b> Give the node and its load
+            cases. Panelwright works out every sensible way, checks each against EN 1993-1-8, prices and times
+            it at the shop’s own rates, and ranks them side by side. Each number opens into its working.
           </p>
           <p className="mt-4 text-note text-soft">
-            It supports a competent engineer’s judgement and does not replace it. Accounts are made by your organisation’s admin. On a new installation the first passwords are printed once, where the
+            It supports a competent engineer’s judgement and does not replace it. Accounts are made by your
+            organisation’s admin. On a new installation the first passwords are printed once, where the
             program was started.
           </p>
         </section>

@@ -28,7 +28,9 @@ export function SignInForm({ callbackPath }: { readonly callbackPath: string }) 
   const [wasSent, setWasSent] = useState(false);
   const [isBusy, setIsBusy] = useState(false);
   const [refusal, setRefusal] = useState<string | null>(null);
-  const errors: ReturnType<typeof missing> = wasSent ? missing(entries) : { email: undefined, password: undefined };
+  const errors: ReturnType<typeof missing> = wasSent
+    ? missing(entries)
+    : { email: undefined, password: undefined };
 
   const submit = async (event: FormEvent) => {
     event.preventDefault();
@@ -37,7 +39,11 @@ export function SignInForm({ callbackPath }: { readonly callbackPath: string }) 
     if (isBusy || faults.email || faults.password) return;
     setIsBusy(true);
     setRefusal(null);
-    const answer = await signIn("credentials", { ...entries, email: entries.email.trim(), redirect: false }).catch(() => undefined);
+    const answer = await signIn("credentials", {
+      ...entries,
+      email: entries.email.trim(),
+      redirect: false,
+    }).catch(() => undefined);
     if (answer?.ok && !answer.error) {
       // A full load: nothing that was cached before signing in may show afterwards.
       window.location.assign(callbackPath);

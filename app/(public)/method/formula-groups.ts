@@ -17,7 +17,9 @@ const byNumbers = new Intl.Collator("en", { numeric: true });
 
 /** Formulas by document and edition, each group in the order of its clauses. */
 export function formulaGroups(formulas: readonly ListedFormula[]): readonly FormulaGroup[] {
-  const titles = [...new Set(formulas.map(({ source }) => `${source.document}:${source.edition}`))].sort(byNumbers.compare);
+  const titles = [...new Set(formulas.map(({ source }) => `${source.document}:${source.edition}`))].sort(
+    byNumbers.compare,
+  );
   return titles.map((title) => ({
     title,
     anchor: title.toLowerCase().replace(/[^a-z0-9]+/g, "-"),

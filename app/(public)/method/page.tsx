@@ -50,9 +50,11 @@ export default function MethodPage() {
       <section aria-labelledby="limits" className="max-w-[80ch] border-l-4 border-tight bg-sheet px-4 py-3">
         <h2 id="limits">Limits</h2>
         <p className="mt-1">
-          The program supports a competent engineer’s judgement and does not replace it: national annexes, the project specification and the licensed engineer’s decision come first. Threaded bars with
-          inner nuts are outside the clauses of EN 1993-1-8; their model is mechanics, its bounds are printed, and results outside the bounds are refused, not extrapolated. Fatigue, seismic detailing and
-          fire are not covered.
+          The program supports a competent engineer’s judgement and does not replace it: national annexes, the
+          project specification and the licensed engineer’s decision come first. Threaded bars with inner nuts
+          are outside the clauses of EN 1993-1-8; their model is mechanics, its bounds are printed, and
+          results outside the bounds are refused, not extrapolated. Fatigue, seismic detailing and fire are
+          not covered.
         </p>
       </section>
       <nav aria-label="Documents" className="mt-6 flex flex-wrap gap-x-6 gap-y-1">

@@ -17,12 +17,15 @@ export function NewProjectDialog({ onClose }: { readonly onClose: () => void }) 
   const [description, setDescription] = useState("");
   const problem = create.error instanceof ApiProblem ? create.error : null;
   const messageFor = (path: string) => problem?.messageFor(path) ?? undefined;
-  const hasOwnField = problem?.fields.some((field) => field.path === "name" || field.path === "description") ?? false;
+  const hasOwnField =
+    problem?.fields.some((field) => field.path === "name" || field.path === "description") ?? false;
 
   const submit = (event: FormEvent) => {
     event.preventDefault();
     if (create.isPending) return;
-    create.mutate(description.trim() === "" ? { name } : { name, description }, { onSuccess: (project) => router.push(`/projects/${project.id}`) });
+    create.mutate(description.trim() === "" ? { name } : { name, description }, {
+      onSuccess: (project) => router.push(`/projects/${project.id}`),
+    });
   };
   return (
     <Dialog
@@ -38,9 +41,28 @@ export function NewProjectDialog({ onClose }: { readonly onClose: () => void }) 
       }
     >
       <form id={formId} onSubmit={submit} noValidate className="grid gap-4">
-        <TextField label="Name" value={name} onChange={(event) => setName(event.target.value)} error={messageFor("name")} autoFocus maxLength={200} />
-        <Field label="Description" hint="What it is and where; may stay empty." error={messageFor("description")}>
-          {(binding) => <textarea {...binding} rows={3} className="control w-full" value={description} onChange={(event) => setDescription(event.target.value)} />}
+        <TextField
+          label="Name"
+          value={name}
+          onChange={(event) => setName(event.target.value)}
+          error={messageFor("name")}
+          autoFocus
+          maxLength={200}
+        />
+        <Field
+          label="Description"
+          hint="What it is and where; may stay empty."
+          error={messageFor("description")}
+        >
+          {(binding) => (
+            <textarea
+              {...binding}
+              rows={3}
+              className="control w-full"
+              value={description}
+              onChange={(event) => setDescription(event.target.value)}
+            />
+          )}
         </Field>
         {create.error && !hasOwnField ? (
           <p role="alert" className="font-semibold text-fail">

@@ -27,7 +27,10 @@ function ProjectTable({ projects }: { readonly projects: readonly Project[] }) {
         {projects.map((project) => (
           <tr key={project.id} className="hover:bg-petrolwash">
             <th scope="row" className="border-t border-rule px-3 py-2 text-left font-normal">
-              <Link href={`/projects/${project.id}`} className="text-[0.9375rem] font-[650] text-ink underline decoration-rule2 underline-offset-4 hover:decoration-petrol">
+              <Link
+                href={`/projects/${project.id}`}
+                className="text-[0.9375rem] font-[650] text-ink underline decoration-rule2 underline-offset-4 hover:decoration-petrol"
+              >
                 {project.name}
               </Link>
               {project.isLocked ? (
@@ -35,7 +38,9 @@ function ProjectTable({ projects }: { readonly projects: readonly Project[] }) {
                   <Chip>locked</Chip>
                 </span>
               ) : null}
-              {project.description ? <span className="mt-0.5 block max-w-[70ch] text-note text-soft">{project.description}</span> : null}
+              {project.description ? (
+                <span className="mt-0.5 block max-w-[70ch] text-note text-soft">{project.description}</span>
+              ) : null}
             </th>
             <Td className="py-2 text-right">{project.nodeCount}</Td>
             <Td className="py-2">{project.organisation.name}</Td>
@@ -59,16 +64,27 @@ export function ProjectList() {
   ) : null;
   return (
     <PageBody>
-      <PageHead title="Projects" tools={newProject ? <ToolStrip label="Projects">{newProject}</ToolStrip> : null}>
+      <PageHead
+        title="Projects"
+        tools={newProject ? <ToolStrip label="Projects">{newProject}</ToolStrip> : null}
+      >
         <p>Open a project to see its register of nodes.</p>
       </PageHead>
       {projects.isPending ? (
         <Loading what="the projects" />
       ) : projects.isError ? (
-        <Failed title="The projects could not be read." error={projects.error} onRetry={() => void projects.refetch()} />
+        <Failed
+          title="The projects could not be read."
+          error={projects.error}
+          onRetry={() => void projects.refetch()}
+        />
       ) : projects.data.length === 0 ? (
         <Empty title="No projects yet" actions={newProject}>
-          <p>{canCreate ? "Make one, and enter its first node." : "You see a project here as soon as its people add you to it."}</p>
+          <p>
+            {canCreate
+              ? "Make one, and enter its first node."
+              : "You see a project here as soon as its people add you to it."}
+          </p>
         </Empty>
       ) : (
         <ProjectTable projects={projects.data} />

@@ -31,14 +31,38 @@ function DeleteNode({ row, onClose }: { readonly row: NodeRow; readonly onClose:
 
 const NO_FILTER: RegisterFilter = { words: "", state: "all" };
 
-function FilterLine({ filter, onChange, shown, total }: { readonly filter: RegisterFilter; readonly onChange: (filter: RegisterFilter) => void; readonly shown: number; readonly total: number }) {
+function FilterLine({
+  filter,
+  onChange,
+  shown,
+  total,
+}: {
+  readonly filter: RegisterFilter;
+  readonly onChange: (filter: RegisterFilter) => void;
+  readonly shown: number;
+  readonly total: number;
+}) {
   return (
-    <form role="search" aria-label="Filter the register" className="no-print mb-3 flex flex-wrap items-end gap-3" onSubmit={(event) => event.preventDefault()}>
-      <TextField label="Find" type="search" placeholder="Mark, section or option" value={filter.words} onChange={(event) => onChange({ ...filter, words: event.target.value })} fieldClassName="w-64" />
+    <form
+      role="search"
+      aria-label="Filter the register"
+      className="no-print mb-3 flex flex-wrap items-end gap-3"
+      onSubmit={(event) => event.preventDefault()}
+    >
+      <TextField
+        label="Find"
+        type="search"
+        placeholder="Mark, section or option"
+        value={filter.words}
+        onChange={(event) => onChange({ ...filter, words: event.target.value })}
+        fieldClassName="w-64"
+      />
       <SelectField
         label="State"
         value={filter.state}
-        onChange={(event) => onChange({ ...filter, state: NODE_STATES.find((state) => state === event.target.value) ?? "all" })}
+        onChange={(event) =>
+          onChange({ ...filter, state: NODE_STATES.find((state) => state === event.target.value) ?? "all" })
+        }
       >
         <option value="all">All</option>
         {NODE_STATES.map((state) => (
@@ -54,20 +78,41 @@ function FilterLine({ filter, onChange, shown, total }: { readonly filter: Regis
   );
 }
 
-function Ready({ project, rows, moneyUnit }: { readonly project: Project; readonly rows: readonly NodeRow[]; readonly moneyUnit: string }) {
+function Ready({
+  project,
+  rows,
+  moneyUnit,
+}: {
+  readonly project: Project;
+  readonly rows: readonly NodeRow[];
+  readonly moneyUnit: string;
+}) {
   const [filter, setFilter] = useState(NO_FILTER);
   const [sorting, setSorting] = useState<Sorting>({ key: "mark", direction: "ascending" });
   const [doomed, setDoomed] = useState<NodeRow | null>(null);
   const shown = registerRows(rows, filter, sorting);
   const sort = (key: SortKey) =>
-    setSorting((now) => ({ key, direction: now.key === key && now.direction === "ascending" ? "descending" : "ascending" }));
+    setSorting((now) => ({
+      key,
+      direction: now.key === key && now.direction === "ascending" ? "descending" : "ascending",
+    }));
   return (
     <>
       <FilterLine filter={filter} onChange={setFilter} shown={shown.length} total={rows.length} />
       {shown.length === 0 ? (
-        <Empty title="No node matches" actions={<Button onClick={() => setFilter(NO_FILTER)}>Show all</Button>} />
+        <Empty
+          title="No node matches"
+          actions={<Button onClick={() => setFilter(NO_FILTER)}>Show all</Button>}
+        />
       ) : (
-        <RegisterTable projectId={project.id} rows={shown} sorting={sorting} onSort={sort} moneyUnit={moneyUnit} onDelete={project.abilities.editNodes ? setDoomed : null} />
+        <RegisterTable
+          projectId={project.id}
+          rows={shown}
+          sorting={sorting}
+          onSort={sort}
+          moneyUnit={moneyUnit}
+          onDelete={project.abilities.editNodes ? setDoomed : null}
+        />
       )}
       {doomed ? <DeleteNode row={doomed} onClose={() => setDoomed(null)} /> : null}
     </>
@@ -115,20 +160,36 @@ export function NodeRegister({ projectId }: { readonly projectId: string }) {
     );
   }
   const { editNodes } = project.data.abilities;
-  const newNode = editNodes ? <ButtonLink kind="primary" href={`/projects/${projectId}/nodes/new`}>New node</ButtonLink> : null;
+  const newNode = editNodes ? (
+    <ButtonLink kind="primary" href={`/projects/${projectId}/nodes/new`}>
+      New node
+    </ButtonLink>
+  ) : null;
   const rows = nodes.data.nodes;
   const currency = rows.find((row) => row.leading)?.leading?.currency ?? "";
   return (
     <PageBody>
-      <PageHead above={`${project.data.organisation.name} · register of nodes`} title={project.data.name} tools={newNode ? <ToolStrip label="Register">{newNode}</ToolStrip> : null}>
+      <PageHead
+        above={`${project.data.organisation.name} · register of nodes`}
+        title={project.data.name}
+        tools={newNode ? <ToolStrip label="Register">{newNode}</ToolStrip> : null}
+      >
         <p>{rows.length === 0 ? project.data.description : `${summary(rows)}.`}</p>
       </PageHead>
       {rows.length === 0 ? (
         <Empty title="No nodes yet" actions={newNode}>
-          <p>{editNodes ? "Enter the first: a column, its beams, the connection and the load cases." : "The designers of this project have not entered a node."}</p>
+          <p>
+            {editNodes
+              ? "Enter the first: a column, its beams, the connection and the load cases."
+              : "The designers of this project have not entered a node."}
+          </p>
         </Empty>
       ) : (
-        <Ready project={project.data} rows={rows} moneyUnit={nodes.data.money === "index" ? "index" : currency} />
+        <Ready
+          project={project.data}
+          rows={rows}
+          moneyUnit={nodes.data.money === "index" ? "index" : currency}
+        />
       )}
     </PageBody>
   );

@@ -8,7 +8,16 @@ export const STATE_WORDS: Readonly<Record<NodeState, string>> = {
   "not-compared": "not compared yet",
 };
 
-export const SORT_KEYS = ["mark", "column", "bare", "leading", "hours", "cost", "quantity", "updated"] as const;
+export const SORT_KEYS = [
+  "mark",
+  "column",
+  "bare",
+  "leading",
+  "hours",
+  "cost",
+  "quantity",
+  "updated",
+] as const;
 export type SortKey = (typeof SORT_KEYS)[number];
 export interface Sorting {
   readonly key: SortKey;
@@ -22,11 +31,13 @@ export interface RegisterFilter {
 }
 
 /** The bare column's utilisation, or null where there is none. */
-export const bareUtilisation = (row: NodeRow): number | null => (row.bare && "utilisation" in row.bare ? row.bare.utilisation : null);
+export const bareUtilisation = (row: NodeRow): number | null =>
+  row.bare && "utilisation" in row.bare ? row.bare.utilisation : null;
 
 /** Beams in words: one where both are alike. */
 export function beamWords({ beams }: NodeRow): string {
-  if (beams.left && beams.right) return beams.left === beams.right ? `${beams.left} both sides` : `${beams.left} / ${beams.right}`;
+  if (beams.left && beams.right)
+    return beams.left === beams.right ? `${beams.left} both sides` : `${beams.left} / ${beams.right}`;
   return beams.left ? `${beams.left} left` : `${beams.right ?? ""} right`;
 }
 
@@ -48,19 +59,26 @@ function compareValues(a: string | number, b: string | number): number {
 }
 
 /** Rows that match the filter, sorted; what has no value stands last either way, ties by mark. */
-export function registerRows(rows: readonly NodeRow[], filter: RegisterFilter, sorting: Sorting): readonly NodeRow[] {
+export function registerRows(
+  rows: readonly NodeRow[],
+  filter: RegisterFilter,
+  sorting: Sorting,
+): readonly NodeRow[] {
   const words = filter.words.toLowerCase().split(/\s+/).filter(Boolean);
   const value = VALUES[sorting.key];
   const turn = sorting.direction === "ascending" ? 1 : -1;
   return rows
     .filter((row) => filter.state === "all" || row.state === filter.state)
     .filter((row) => {
-      const text = [row.reference, row.column, beamWords(row), row.leading?.name ?? ""].join(" ").toLowerCase();
+      const text = [row.reference, row.column, beamWords(row), row.leading?.name ?? ""]
+        .join(" ")
+        .toLowerCase();
       return words.every((word) => text.includes(word));
     })
     .sort((a, b) => {
       const [left, right] = [value(a), value(b)];
-      if (left === null || right === null) return Number(left === null) - Number(right === null) || inOrder.compare(a.reference, b.reference);
+      if (left === null || right === null)
+        return Number(left === null) - Number(right === null) || inOrder.compare(a.reference, b.reference);
       return turn * compareValues(left, right) || inOrder.compare(a.reference, b.reference);
     });
 }

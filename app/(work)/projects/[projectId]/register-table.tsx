@@ -42,18 +42,28 @@ function BareCell({ row }: { readonly row: NodeRow }) {
   const { passes, utilisation, component, side } = row.bare;
   return (
     <Td>
-      <span className={passes ? "font-[650] text-pass" : "font-[650] text-fail"}>{passes ? "passes" : "fails"}</span> <UtilisationFigure value={utilisation} limit={passes ? Math.max(1, utilisation) : 1} />
+      <span className={passes ? "font-[650] text-pass" : "font-[650] text-fail"}>
+        {passes ? "passes" : "fails"}
+      </span>{" "}
+      <UtilisationFigure value={utilisation} limit={passes ? Math.max(1, utilisation) : 1} />
       <span className="block text-note text-soft">{`${componentLabel(component)}, ${side}`}</span>
     </Td>
   );
 }
 
-function NodeLine({ row, projectId, onDelete }: Pick<RegisterTableProps, "projectId" | "onDelete"> & { readonly row: NodeRow }) {
+function NodeLine({
+  row,
+  projectId,
+  onDelete,
+}: Pick<RegisterTableProps, "projectId" | "onDelete"> & { readonly row: NodeRow }) {
   const href = `/projects/${projectId}/nodes/${row.id}`;
   return (
     <tr className="hover:bg-petrolwash">
       <th scope="row" className="border-t border-rule px-3 py-1.5 text-left align-top font-normal">
-        <Link href={href} className="font-[650] text-ink underline decoration-rule2 underline-offset-4 hover:decoration-petrol">
+        <Link
+          href={href}
+          className="font-[650] text-ink underline decoration-rule2 underline-offset-4 hover:decoration-petrol"
+        >
           {row.reference}
         </Link>
         <span className="block text-note text-soft">{`revision ${row.version}`}</span>
@@ -65,7 +75,9 @@ function NodeLine({ row, projectId, onDelete }: Pick<RegisterTableProps, "projec
         {row.leading ? (
           <span className="font-[550]">{row.leading.name}</span>
         ) : (
-          <span className={row.state === "nothing-passes" ? "font-[650] text-fail" : "text-soft"}>{STATE_WORDS[row.state]}</span>
+          <span className={row.state === "nothing-passes" ? "font-[650] text-fail" : "text-soft"}>
+            {STATE_WORDS[row.state]}
+          </span>
         )}
         {row.outdated.length > 0 ? (
           <span className="block text-note text-tight">
@@ -73,19 +85,32 @@ function NodeLine({ row, projectId, onDelete }: Pick<RegisterTableProps, "projec
           </span>
         ) : null}
       </Td>
-      <Td className="text-right whitespace-nowrap">{row.leading ? formatMinutes(row.leading.shopMinutes) : none("none")}</Td>
-      <Td className="text-right whitespace-nowrap">{row.leading ? formatMoney(row.leading.cost) : none("none")}</Td>
+      <Td className="text-right whitespace-nowrap">
+        {row.leading ? formatMinutes(row.leading.shopMinutes) : none("none")}
+      </Td>
+      <Td className="text-right whitespace-nowrap">
+        {row.leading ? formatMoney(row.leading.cost) : none("none")}
+      </Td>
       <Td className="text-right">{row.quantity}</Td>
       <Td className="text-note whitespace-nowrap text-soft">
         {shortDate(row.updatedAt)}
         <span className="block">{row.updatedBy.name}</span>
       </Td>
       <Td className="no-print text-right whitespace-nowrap">
-        <Link href={`${href}/comparison`} className="prose-link" aria-label={`Comparison of ${row.reference}`}>
+        <Link
+          href={`${href}/comparison`}
+          className="prose-link"
+          aria-label={`Comparison of ${row.reference}`}
+        >
           Compare
         </Link>
         {onDelete ? (
-          <button type="button" onClick={() => onDelete(row)} aria-label={`Delete ${row.reference}`} className="ml-3 text-soft underline-offset-2 hover:text-fail hover:underline">
+          <button
+            type="button"
+            onClick={() => onDelete(row)}
+            aria-label={`Delete ${row.reference}`}
+            className="ml-3 text-soft underline-offset-2 hover:text-fail hover:underline"
+          >
             Delete
           </button>
         ) : null}
@@ -98,7 +123,11 @@ function NodeLine({ row, projectId, onDelete }: Pick<RegisterTableProps, "projec
 export function RegisterTable(props: RegisterTableProps) {
   const { rows, sorting, onSort, moneyUnit } = props;
   const head = (key: SortKey, label: string, className?: string) => (
-    <SortableTh direction={sorting.key === key ? sorting.direction : null} onSort={() => onSort(key)} {...(className ? { className } : {})}>
+    <SortableTh
+      direction={sorting.key === key ? sorting.direction : null}
+      onSort={() => onSort(key)}
+      {...(className ? { className } : {})}
+    >
       {label}
     </SortableTh>
   );
