@@ -46,7 +46,7 @@ export function GradePicker({
       <ChoiceField
         label={label}
         path={path}
-        value={own ? BY_STRENGTH : String(value)}
+        value={typeof value === "string" ? value : BY_STRENGTH}
         choices={[...grades, { value: BY_STRENGTH, label: BY_STRENGTH }]}
         onChange={(chosen) => onChange(chosen === BY_STRENGTH ? { fy: "355", fu: "490" } : chosen)}
         error={errorAt(path)}

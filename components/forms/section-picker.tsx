@@ -106,7 +106,7 @@ export function SectionPicker({
             {...shared}
             label={label}
             path={path}
-            value={row?.designation ?? String(value)}
+            value={row?.designation ?? (typeof value === "string" ? value : "")}
             choices={members.map(({ designation }) => ({ value: designation, label: designation }))}
             onChange={onChange}
             error={errorAt(path)}

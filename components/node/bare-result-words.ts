@@ -3,6 +3,7 @@ import type {
   ComponentCheck,
   ComponentId,
   EvaluatedOption,
+  Governing,
   JointResult,
   OptionOutcome,
 } from "@/lib/calc/result";
@@ -15,36 +16,66 @@ export interface SentencePart {
   readonly tone?: "pass" | "fail" | "strong";
 }
 
+/** What the calculation names as the load case of a check that no load case changes. */
+export const EVERY_CASE = "all";
+
+/** "in ULS 3"; a rule of detailing holds in every load case alike. */
+export const inCase = (loadCase: string): string =>
+  loadCase === EVERY_CASE ? "in every load case" : `in ${loadCase}`;
+
+/**
+ * The check a sentence names: the governing one. Where all is in order a rule of detailing says less than
+ * strength does, so the highest utilisation of strength stands for it.
+ */
+export function namedCheck({ passes, governing, checks }: EvaluatedOption): Governing {
+  if (!passes || governing.component !== "detailing") return governing;
+  const strength = checks.filter((check) => check.component !== "detailing");
+  return strength.reduce<Governing>(
+    (highest, check) =>
+      highest.component === "detailing" || check.utilisation > highest.utilisation ? check : highest,
+    governing,
+  );
+}
+
 /** The bare column in one plain sentence: verdict, governing component, side, load case. */
 export function bareSentence(outcome: OptionOutcome, limit: number): readonly SentencePart[] {
   if (outcome.kind === "outside-scope") {
     return [
       { text: "The bare column is " },
-      { text: "outside scope", tone: "strong" },
+      { text: "outside the method", tone: "strong" },
       { text: `: ${outcome.reason}` },
     ];
   }
-  const { governing } = outcome;
-  const reach = `${componentOnSide(governing.component, governing.side)} reaches ${formatUtilisation(governing.utilisation, limit)} in ${governing.loadCase}.`;
-  const parts: SentencePart[] = [
+  const { component, side, loadCase, utilisation } = namedCheck(outcome);
+  const what = componentOnSide(component, side);
+  const figure = formatUtilisation(utilisation, limit);
+  if (outcome.passes) {
+    return [
+      { text: "The bare column is " },
+      { text: "good enough", tone: "pass" },
+      { text: `: ${what} is highest at ${figure} ${inCase(loadCase)}.` },
+    ];
+  }
+  const above = limit === 1 || utilisation <= limit ? "" : `, above the target of ${limit.toFixed(2)}`;
+  return [
     { text: "The bare column " },
-    outcome.passes ? { text: "passes", tone: "pass" } : { text: "fails", tone: "fail" },
-    { text: `: ${reach}` },
+    { text: "fails", tone: "fail" },
+    { text: `: ${what} reaches ${figure} ${inCase(loadCase)}${above}.` },
+    ...(outcome.stiffnessReached ? [] : [{ text: " The stiffness asked for is not reached." }]),
   ];
-  if (!outcome.stiffnessReached) parts.push({ text: " The stiffness asked for is not reached." });
-  return parts;
 }
 
 /** The same in a few words, for the line that stays in sight. */
 export function bareSummary(outcome: OptionOutcome, limit: number): readonly SentencePart[] {
-  if (outcome.kind === "outside-scope")
-    return [{ text: "Bare column " }, { text: "outside scope", tone: "strong" }];
-  const { governing, passes } = outcome;
+  if (outcome.kind === "outside-scope") {
+    return [{ text: "Bare column " }, { text: "outside the method", tone: "strong" }];
+  }
+  const { component, side, loadCase, utilisation } = namedCheck(outcome);
   return [
     { text: "Bare column " },
-    passes ? { text: "passes", tone: "pass" } : { text: "fails", tone: "fail" },
+    outcome.passes ? { text: "good enough", tone: "pass" } : { text: "fails", tone: "fail" },
     {
-      text: ` ${formatUtilisation(governing.utilisation, limit)}, ${componentOnSide(governing.component, governing.side)}, ${governing.loadCase}`,
+      text: ` ${formatUtilisation(utilisation, limit)}, ${componentOnSide(component, side)} ${inCase(loadCase)}`,
     },
   ];
 }
@@ -58,6 +89,7 @@ export interface ComponentLine {
 
 /** One line a component, worst check of each, in the order given. */
 export function componentLines(outcome: EvaluatedOption, order: readonly ComponentId[]): ComponentLine[] {
+  const named = namedCheck(outcome);
   return order.flatMap((component) => {
     const checks = outcome.checks.filter((check) => check.component === component);
     const [first, ...rest] = checks;
@@ -66,7 +98,7 @@ export function componentLines(outcome: EvaluatedOption, order: readonly Compone
       (worst, other) => (other.utilisation > worst.utilisation ? other : worst),
       first,
     );
-    return [{ component, check, isGoverning: outcome.governing.component === component }];
+    return [{ component, check, isGoverning: named.component === component }];
   });
 }
 

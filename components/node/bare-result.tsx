@@ -4,7 +4,7 @@ import type { EvaluatedOption } from "@/lib/calc/result";
 import { COMPONENT_ROWS, componentLabel, sentenceCase } from "@/components/compare/component-labels";
 import { UtilisationBar, UtilisationFigure } from "@/components/compare/utilisation-bar";
 import { formatNumber } from "@/components/ui/format-number";
-import { bareSentence, componentLines, jointLines, type SentencePart } from "./bare-result-words";
+import { EVERY_CASE, bareSentence, componentLines, jointLines, type SentencePart } from "./bare-result-words";
 import type { BareOutcome } from "./use-bare-outcome";
 
 const TONES = { pass: "font-[650] text-pass", fail: "font-[650] text-fail", strong: "font-[650]" } as const;
@@ -26,7 +26,7 @@ const stiffnessText = (value: number): string =>
   formatNumber(value >= 10 * STIFFNESS_STEP ? Math.round(value / STIFFNESS_STEP) * STIFFNESS_STEP : value);
 
 function Utilisations({ outcome, limit }: { readonly outcome: EvaluatedOption; readonly limit: number }) {
-  const lines = componentLines(outcome, [...COMPONENT_ROWS.panel, ...COMPONENT_ROWS.connection]);
+  const lines = componentLines(outcome, [...COMPONENT_ROWS.panel, ...COMPONENT_ROWS.connection, "detailing"]);
   return (
     <table className="w-full border-collapse">
       <caption className="sr-only">Utilisation of each component, the worst of all load cases</caption>
@@ -51,7 +51,7 @@ function Utilisations({ outcome, limit }: { readonly outcome: EvaluatedOption; r
             <td className="py-1 pl-2 text-right">
               <UtilisationFigure value={check.utilisation} limit={limit} />
             </td>
-            <td className="py-1 pl-3 text-note whitespace-nowrap text-soft">{`${check.side}, ${check.loadCase}`}</td>
+            <td className="py-1 pl-3 text-note whitespace-nowrap text-soft">{`${check.side}, ${check.loadCase === EVERY_CASE ? "every case" : check.loadCase}`}</td>
           </tr>
         ))}
       </tbody>

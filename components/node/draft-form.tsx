@@ -9,7 +9,14 @@ import { QuantityField } from "@/components/forms/quantity-field";
 import { RowsField } from "@/components/forms/rows-field";
 import { SectionPicker, type TypedSection } from "@/components/forms/section-picker";
 import { WeldField } from "@/components/forms/weld-field";
-import { isDraftList, isDraftObject, valueAt, type DraftObject, type DraftValue } from "./node-draft";
+import {
+  isDraftList,
+  isDraftObject,
+  shownText,
+  valueAt,
+  type DraftObject,
+  type DraftValue,
+} from "./node-draft";
 
 /** What every field of the node form shares. */
 export interface DraftForm {
@@ -39,9 +46,6 @@ interface FieldProps {
   readonly hintId?: string | undefined;
 }
 
-const textOf = (value: DraftValue | undefined): string =>
-  typeof value === "string" || typeof value === "number" || typeof value === "boolean" ? String(value) : "";
-
 /** What is the same for every bound field. */
 function useField({ path, label, hintId }: FieldProps) {
   const form = useDraftForm();
@@ -60,7 +64,7 @@ export function DraftQuantity({
     <QuantityField
       {...shared}
       unit={unit}
-      value={textOf(value)}
+      value={shownText(value)}
       onChange={(text) => form.set(field.path, text)}
       error={form.errorAt(field.path)}
       {...(placeholder === undefined ? {} : { placeholder })}
@@ -74,7 +78,7 @@ export function DraftChoice({ choices, ...field }: FieldProps & { readonly choic
   return (
     <ChoiceField
       {...shared}
-      value={textOf(value)}
+      value={shownText(value)}
       choices={choices}
       onChange={(chosen) => form.set(field.path, chosen)}
       error={form.errorAt(field.path)}
@@ -87,7 +91,7 @@ export function DraftWeld(field: FieldProps) {
   return (
     <WeldField
       {...shared}
-      value={textOf(value)}
+      value={shownText(value)}
       onChange={(typed) => form.set(field.path, typed)}
       error={form.errorAt(field.path)}
     />
@@ -96,8 +100,8 @@ export function DraftWeld(field: FieldProps) {
 
 const typedGroup = (value: DraftValue | undefined): string | Record<string, string> =>
   isDraftObject(value)
-    ? Object.fromEntries(Object.entries(value).map(([key, inner]) => [key, textOf(inner)]))
-    : textOf(value);
+    ? Object.fromEntries(Object.entries(value).map(([key, inner]) => [key, shownText(inner)]))
+    : shownText(value);
 
 export function DraftSteel(field: FieldProps) {
   const { form, value, shared } = useField(field);
@@ -131,7 +135,7 @@ export function DraftRows(field: FieldProps) {
   return (
     <RowsField
       {...shared}
-      rows={isDraftList(value) ? value.map(textOf) : []}
+      rows={isDraftList(value) ? value.map(shownText) : []}
       errorAt={form.errorAt}
       onFocus={form.onFocus}
       onChange={(rows) => form.set(field.path, rows)}
@@ -165,7 +169,7 @@ export function DraftText(field: FieldProps) {
   if (form.readOnly) {
     return (
       <ReadValue label={field.label} path={field.path}>
-        {textOf(value)}
+        {shownText(value)}
       </ReadValue>
     );
   }
@@ -176,7 +180,7 @@ export function DraftText(field: FieldProps) {
           {...binding}
           type="text"
           autoComplete="off"
-          value={textOf(value)}
+          value={shownText(value)}
           onFocus={shared.onFocus}
           onChange={(event) => form.set(field.path, event.target.value)}
           className="control min-h-8 w-full py-0.5"

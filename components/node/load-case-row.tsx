@@ -1,7 +1,7 @@
 "use client";
 
 import { memo } from "react";
-import { isDraftObject, valueAt, type DraftObject, type DraftValue } from "./node-draft";
+import { textAt, type DraftValue } from "./node-draft";
 
 export interface LoadCaseRowProps {
   readonly index: number;
@@ -37,13 +37,10 @@ export function cellName(column: string): string {
   return `${where} ${NAMES[what] ?? what} (${UNITS[what] ?? "kN"})`;
 }
 
-const shown = (value: DraftValue | undefined): string =>
-  typeof value === "string" || typeof value === "number" ? String(value) : "";
-
 /** One load case: a row of inputs. Memoised: two hundred of them stand still while one is typed in. */
 export const LoadCaseRow = memo(function LoadCaseRow(props: LoadCaseRowProps) {
   const { index, loadCase, readOnly, isOnly } = props;
-  const name = isDraftObject(loadCase) ? shown(loadCase.name) : "";
+  const name = textAt(loadCase, "name");
   const errors = new Map(
     props.errors === ""
       ? []
@@ -53,7 +50,7 @@ export const LoadCaseRow = memo(function LoadCaseRow(props: LoadCaseRowProps) {
   );
   const rowId = `load-case-${index}`;
   const cell = (column: string) => {
-    const text = shown(valueAt(loadCase as DraftObject, column));
+    const text = textAt(loadCase, column);
     const path = `loadCases.${index}.${column}`;
     const error = errors.get(column);
     if (readOnly) return text;

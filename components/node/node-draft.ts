@@ -15,7 +15,7 @@ export const isDraftList = (value: DraftValue | undefined): value is readonly Dr
   Array.isArray(value);
 
 /** A saved document as the form takes it up. */
-export const draftOf = (document: NodeDocument): DraftObject => document as DraftObject;
+export const draftOf = (document: NodeDocument): DraftObject => document;
 
 /** The value at a dotted path, or undefined. */
 export function valueAt(draft: DraftValue | undefined, path: string): DraftValue | undefined {
@@ -27,6 +27,14 @@ export function valueAt(draft: DraftValue | undefined, path: string): DraftValue
   }
   return value;
 }
+
+/** What a field shows of a value: the words or the number as typed; nothing of a group. */
+export const shownText = (value: DraftValue | undefined): string =>
+  typeof value === "string" || typeof value === "number" || typeof value === "boolean" ? String(value) : "";
+
+/** The text at a dotted path. */
+export const textAt = (draft: DraftValue | undefined, path: string): string =>
+  shownText(valueAt(draft, path));
 
 function withKey(holder: DraftValue | undefined, key: string, value: DraftValue | undefined): DraftValue {
   if (isDraftList(holder)) {

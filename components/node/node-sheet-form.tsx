@@ -9,7 +9,7 @@ import { DraftFormProvider, type DraftForm } from "./draft-form";
 import { FaultsList, focusField } from "./faults-list";
 import { JsonDialog } from "./json-dialog";
 import { LoadCaseGrid } from "./load-case-grid";
-import { documentTyped, valueAt } from "./node-draft";
+import { documentTyped, numberTyped, textAt } from "./node-draft";
 import { ColumnFields, FabricationFields, FactorFields, NodeFacts, TargetFields } from "./node-fields";
 import { SheetBar } from "./sheet-bar";
 import { SheetElevation, SheetSection } from "./sheet-drawing";
@@ -62,8 +62,8 @@ export function NodeSheetForm(props: NodeSheetFormProps) {
   }, [reading, onSave, isSaving]);
   useSaveKey(canEdit ? save : null);
 
-  const limit = Number(valueAt(documentTyped(draft) as typeof draft, "target.utilisation")) || 1;
-  const reference = String(draft.reference ?? "").trim();
+  const limit = numberTyped(textAt(draft, "target.utilisation")) || 1;
+  const reference = textAt(draft, "reference").trim();
   return (
     <DraftFormProvider value={form}>
       <PageBody>

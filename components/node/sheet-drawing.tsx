@@ -3,7 +3,7 @@
 import { useMemo, useState } from "react";
 import type { Level, NodeCase } from "@/lib/calc/node";
 import { drawNode } from "@/lib/drawing/draw-node";
-import { isDraftObject, valueAt, type DraftObject } from "./node-draft";
+import { isDraftObject, textAt, valueAt, type DraftObject } from "./node-draft";
 import { NodeDrawing } from "./node-drawing";
 
 export interface SheetDrawingProps {
@@ -21,7 +21,7 @@ const WIDTH = "mx-auto max-w-[33rem] wide:max-w-[46rem]";
 
 /** The drawing follows the node alone, and the flags of sections that have no name. */
 function useDrawing(node: NodeCase | null, draft: DraftObject, sectionLevel: Level) {
-  const reference = String(draft.reference ?? "");
+  const reference = textAt(draft, "reference");
   const isCustom = (path: string): boolean => isDraftObject(valueAt(draft, path));
   const [column, left, right] = [
     isCustom("column.section"),

@@ -1,24 +1,13 @@
 "use client";
 
-import type { ReactNode } from "react";
 import { FormRow, FormSection, RowGroup } from "@/components/forms/form-grid";
 import { findSection } from "@/lib/catalog/find-section";
-import {
-  DraftCheck,
-  DraftChoice,
-  DraftQuantity,
-  DraftRows,
-  DraftSection,
-  DraftSteel,
-  DraftWeld,
-  useDraftForm,
-} from "./draft-form";
-import { isDraftObject, valueAt, type DraftObject } from "./node-draft";
+import { DraftQuantity, DraftSection, DraftSteel, DraftWeld, useDraftForm } from "./draft-form";
+import { isDraftObject, valueAt } from "./node-draft";
+import { anySide, Both, hasWelds, isEndPlate, kindOf, SIDE_WORDS, type SideName } from "./side-cells";
+import { BoltRows } from "./bolt-fields";
 import { withConnectionKind, withoutSide, withSideCopied } from "./side-edits";
 
-type SideName = "left" | "right";
-const SIDES = ["left", "right"] as const;
-const Words: Readonly<Record<SideName, string>> = { left: "Left", right: "Right" };
 const SMALL = "text-note font-normal text-petrol hover:underline";
 
 /** Head of one side's column: its name, and what may be done with the whole side. */
@@ -29,7 +18,7 @@ function SideHead({ side }: { readonly side: SideName }) {
   const otherIsThere = isDraftObject(draft[other]);
   return (
     <div>
-      <p className="font-[650]">{Words[side]}</p>
+      <p className="font-[650]">{SIDE_WORDS[side]}</p>
       {readOnly ? null : (
         <p className="flex flex-wrap gap-x-3">
           {otherIsThere ? (
@@ -53,31 +42,6 @@ function SideHead({ side }: { readonly side: SideName }) {
   );
 }
 
-interface BothProps {
-  /** Whether a side has this field; a side without it leaves its cell empty. */
-  readonly when?: (side: SideName, draft: DraftObject) => boolean;
-  readonly children: (side: SideName) => ReactNode;
-}
-
-/** The cells of a row, one a side. */
-function Both({ when, children }: BothProps) {
-  const { draft } = useDraftForm();
-  return SIDES.map((side) =>
-    isDraftObject(draft[side]) && (when?.(side, draft) ?? true) ? (
-      <div key={side}>{children(side)}</div>
-    ) : (
-      <span key={side} aria-hidden="true" />
-    ),
-  );
-}
-
-const kindOf = (side: SideName, draft: DraftObject): string =>
-  String(valueAt(draft, `${side}.connection.kind`) ?? "");
-const isEndPlate = (side: SideName, draft: DraftObject): boolean => kindOf(side, draft) === "end-plate";
-const hasWelds = (side: SideName, draft: DraftObject): boolean => kindOf(side, draft) !== "flange-cleats";
-const anySide = (draft: DraftObject, test: (side: SideName, draft: DraftObject) => boolean): boolean =>
-  SIDES.some((side) => isDraftObject(draft[side]) && test(side, draft));
-
 const KINDS = [
   { value: "end-plate", label: "bolted end plate" },
   { value: "welded", label: "welded" },
@@ -93,7 +57,7 @@ function ConnectionKind({ side }: { readonly side: SideName }) {
   const sizeOf = (key: string, catalogued: number | undefined): number =>
     catalogued ?? (Number(valueAt(section, key)) || 300);
   const choices = kind === "flange-cleats" ? [...KINDS, CLEATS] : KINDS;
-  const label = `${Words[side]} connection`;
+  const label = `${SIDE_WORDS[side]} connection`;
   if (readOnly)
     return <p className="py-1">{choices.find((choice) => choice.value === kind)?.label ?? kind}</p>;
   return (
@@ -135,14 +99,16 @@ function BeamRows() {
       <FormRow label="Section">
         {() => (
           <Both>
-            {(side) => <DraftSection path={`${side}.beam.section`} label={`${Words[side]} beam section`} />}
+            {(side) => (
+              <DraftSection path={`${side}.beam.section`} label={`${SIDE_WORDS[side]} beam section`} />
+            )}
           </Both>
         )}
       </FormRow>
       <FormRow label="Steel">
         {() => (
           <Both>
-            {(side) => <DraftSteel path={`${side}.beam.steel`} label={`${Words[side]} beam steel`} />}
+            {(side) => <DraftSteel path={`${side}.beam.steel`} label={`${SIDE_WORDS[side]} beam steel`} />}
           </Both>
         )}
       </FormRow>
@@ -152,7 +118,7 @@ function BeamRows() {
             {(side) => (
               <DraftQuantity
                 path={`${side}.beam.span`}
-                label={`${Words[side]} beam span`}
+                label={`${SIDE_WORDS[side]} beam span`}
                 unit="mm"
                 hintId={hintId}
               />
@@ -195,7 +161,10 @@ function PlateRows() {
         {() => (
           <Both when={isEndPlate}>
             {(side) => (
-              <DraftSteel path={`${side}.connection.plate.steel`} label={`${Words[side]} end plate steel`} />
+              <DraftSteel
+                path={`${side}.connection.plate.steel`}
+                label={`${SIDE_WORDS[side]} end plate steel`}
+              />
             )}
           </Both>
         )}
@@ -207,7 +176,7 @@ function PlateRows() {
               {(side) => (
                 <DraftQuantity
                   path={`${side}.connection.plate.${key}`}
-                  label={`${Words[side]} ${words}`}
+                  label={`${SIDE_WORDS[side]} ${words}`}
                   unit="mm"
                 />
               )}
@@ -215,141 +184,6 @@ function PlateRows() {
           )}
         </FormRow>
       ))}
-    </RowGroup>
-  );
-}
-
-const PER_ROW = [
-  { value: "2", label: "2" },
-  { value: "4", label: "4" },
-];
-const ASSEMBLIES = [
-  { value: "", label: "not stated" },
-  { value: "plain", label: "plain" },
-  { value: "HR", label: "HR" },
-  { value: "HV", label: "HV" },
-];
-
-/** Two bolts a row where nothing is said. */
-function PerRow({ side }: { readonly side: SideName }) {
-  const { draft, set, readOnly } = useDraftForm();
-  const path = `${side}.connection.bolts.perRow`;
-  if (valueAt(draft, path) !== undefined)
-    return <DraftChoice path={path} label={`${Words[side]} bolts a row`} choices={PER_ROW} />;
-  if (readOnly) return <p className="py-1">2</p>;
-  return (
-    <select
-      aria-label={`${Words[side]} bolts a row`}
-      data-path={path}
-      value="2"
-      onChange={(event) => set(path, event.target.value)}
-      className="control min-h-8 w-full min-w-0 py-0.5"
-    >
-      <option value="2">2</option>
-      <option value="4">4</option>
-    </select>
-  );
-}
-
-function BoltRows() {
-  const { catalog, draft } = useDraftForm();
-  const sizes = catalog.fasteners.map(({ size }) => ({ value: size, label: size }));
-  const grades = catalog.fastenerGrades.map(({ name }) => ({ value: name, label: name }));
-  const hasFour = (side: SideName, now: DraftObject): boolean =>
-    isEndPlate(side, now) && String(valueAt(now, `${side}.connection.bolts.perRow`)) === "4";
-  const cell = (side: SideName, key: string): { path: string } => ({
-    path: `${side}.connection.bolts.${key}`,
-  });
-  return (
-    <RowGroup title="Bolts">
-      <FormRow label="Size">
-        {() => (
-          <Both when={isEndPlate}>
-            {(side) => (
-              <DraftChoice {...cell(side, "size")} label={`${Words[side]} bolt size`} choices={sizes} />
-            )}
-          </Both>
-        )}
-      </FormRow>
-      <FormRow label="Class">
-        {() => (
-          <Both when={isEndPlate}>
-            {(side) => (
-              <DraftChoice {...cell(side, "grade")} label={`${Words[side]} bolt class`} choices={grades} />
-            )}
-          </Both>
-        )}
-      </FormRow>
-      <FormRow
-        label="Rows"
-        unit="mm"
-        hint="Each row's distance below the top face of the beam, negative above it, from the top down."
-      >
-        {(hintId) => (
-          <Both when={isEndPlate}>
-            {(side) => <DraftRows {...cell(side, "rows")} label={`${Words[side]} bolts`} hintId={hintId} />}
-          </Both>
-        )}
-      </FormRow>
-      <FormRow label="Gauge" unit="mm" hint="Between the two inner bolts of a row.">
-        {(hintId) => (
-          <Both when={isEndPlate}>
-            {(side) => (
-              <DraftQuantity
-                {...cell(side, "gauge")}
-                label={`${Words[side]} bolt gauge`}
-                unit="mm"
-                hintId={hintId}
-              />
-            )}
-          </Both>
-        )}
-      </FormRow>
-      <FormRow label="Bolts a row">
-        {() => <Both when={isEndPlate}>{(side) => <PerRow side={side} />}</Both>}
-      </FormRow>
-      {anySide(draft, hasFour) ? (
-        <FormRow label="Outer gauge" unit="mm">
-          {() => (
-            <Both when={hasFour}>
-              {(side) => (
-                <DraftQuantity
-                  {...cell(side, "outerGauge")}
-                  label={`${Words[side]} outer bolt gauge`}
-                  unit="mm"
-                />
-              )}
-            </Both>
-          )}
-        </FormRow>
-      ) : null}
-      <FormRow label="Tightening">
-        {() => (
-          <Both when={isEndPlate}>
-            {(side) => (
-              <DraftCheck
-                {...cell(side, "preloaded")}
-                label={`${Words[side]} bolts preloaded`}
-                words="preloaded"
-              />
-            )}
-          </Both>
-        )}
-      </FormRow>
-      <FormRow label="Assembly" hint="EN 14399 assembly of preloaded bolts.">
-        {(hintId) => (
-          <Both when={isEndPlate}>
-            {(side) => (
-              <DraftChoice
-                {...cell(side, "assembly")}
-                label={`${Words[side]} bolt assembly`}
-                choices={ASSEMBLIES}
-                hintId={hintId}
-              />
-            )}
-          </Both>
-        )}
-      </FormRow>
     </RowGroup>
   );
 }
@@ -374,7 +208,7 @@ function WeldRows() {
               {(side) => (
                 <DraftWeld
                   path={`${side}.connection.welds.${key}`}
-                  label={`${Words[side]} ${words}`}
+                  label={`${SIDE_WORDS[side]} ${words}`}
                   hintId={hintId}
                 />
               )}
