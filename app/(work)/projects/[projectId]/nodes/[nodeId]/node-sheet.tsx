@@ -39,16 +39,28 @@ function Notices({ node, isRestored, setAside, error, onDrop, onBringBack }: Not
     <>
       {node.abilities.editNodes ? null : (
         <Notice title="You may look at this node, not change it.">
-          <p>Nodes are changed by the designers of the project. You can read every field, the drawing and the result, and open the comparison.</p>
+          <p>
+            Nodes are changed by the designers of the project. You can read every field, the drawing and the
+            result, and open the comparison.
+          </p>
         </Notice>
       )}
       {isRestored ? (
-        <Notice tone="tight" role="status" title="What you typed before is back." actions={<Button onClick={onDrop}>Drop it</Button>}>
+        <Notice
+          tone="tight"
+          role="status"
+          title="What you typed before is back."
+          actions={<Button onClick={onDrop}>Drop it</Button>}
+        >
           <p>It was not saved. Save it, or drop it for the node as it is on record.</p>
         </Notice>
       ) : null}
       {setAside ? (
-        <Notice role="status" title="Your own version is set aside, not lost." actions={<Button onClick={onBringBack}>Bring it back</Button>} />
+        <Notice
+          role="status"
+          title="Your own version is set aside, not lost."
+          actions={<Button onClick={onBringBack}>Bring it back</Button>}
+        />
       ) : null}
       {error ? (
         <Notice tone="fail" role="alert" title="The node was not saved.">
@@ -61,7 +73,12 @@ function Notices({ node, isRestored, setAside, error, onDrop, onBringBack }: Not
 
 function Ready({ node, catalog }: { readonly node: Node; readonly catalog: Catalog }) {
   const canEdit = node.abilities.editNodes;
-  const nodeDraft = useNodeDraft(node.id, { version: node.version, draft: draftOf(node.document) }, catalog, canEdit);
+  const nodeDraft = useNodeDraft(
+    node.id,
+    { version: node.version, draft: draftOf(node.document) },
+    catalog,
+    canEdit,
+  );
   const save = useMutation(saveNodeMutation(useQueryClient(), node.id));
   const [conflict, setConflict] = useState<Conflict | null>(null);
   const [setAside, putAside] = useState<DraftObject | null>(null);
@@ -86,7 +103,10 @@ function Ready({ node, catalog }: { readonly node: Node; readonly catalog: Catal
       },
     );
   const takeUp = (theirs: SavedDocument, mine?: DraftObject) => {
-    nodeDraft.open({ version: theirs.version, draft: draftOf(theirs.document) }, mine ? () => mine : undefined);
+    nodeDraft.open(
+      { version: theirs.version, draft: draftOf(theirs.document) },
+      mine ? () => mine : undefined,
+    );
     setConflict(null);
   };
   const merged = (theirs: SavedDocument): DraftObject => {
@@ -144,12 +164,26 @@ function Ready({ node, catalog }: { readonly node: Node; readonly catalog: Catal
 export function NodeSheet({ projectId, nodeId }: { readonly projectId: string; readonly nodeId: string }) {
   const node = useQuery(nodeOptions(nodeId));
   const catalog = useQuery(catalogOptions());
-  if (node.data && catalog.data && node.data.projectId === projectId) return <Ready node={node.data} catalog={catalog.data} />;
-  const error = node.error ?? catalog.error ?? (node.data && node.data.projectId !== projectId ? new Error("This node belongs to another project.") : null);
+  if (node.data && catalog.data && node.data.projectId === projectId)
+    return <Ready node={node.data} catalog={catalog.data} />;
+  const error =
+    node.error ??
+    catalog.error ??
+    (node.data && node.data.projectId !== projectId
+      ? new Error("This node belongs to another project.")
+      : null);
   return (
     <PageBody>
       <div className="pt-6">
-        {error ? <Failed title="The node could not be read." error={error} onRetry={() => void Promise.all([node.refetch(), catalog.refetch()])} /> : <Loading what="the node" />}
+        {error ? (
+          <Failed
+            title="The node could not be read."
+            error={error}
+            onRetry={() => void Promise.all([node.refetch(), catalog.refetch()])}
+          />
+        ) : (
+          <Loading what="the node" />
+        )}
       </div>
     </PageBody>
   );
