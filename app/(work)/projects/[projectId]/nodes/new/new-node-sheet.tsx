@@ -47,8 +47,12 @@ function Ready({ project, catalog }: { readonly project: Project; readonly catal
       }
       notices={
         <>
-          {project.abilities.editNodes ? null : <Notice title="You may look at this project, not add nodes to it." />}
-          {nodeDraft.isRestored ? <Notice tone="tight" role="status" title="What you typed before is back. It was not saved." /> : null}
+          {project.abilities.editNodes ? null : (
+            <Notice title="You may look at this project, not add nodes to it." />
+          )}
+          {nodeDraft.isRestored ? (
+            <Notice tone="tight" role="status" title="What you typed before is back. It was not saved." />
+          ) : null}
           {create.error ? (
             <Notice tone="fail" role="alert" title="The node was not saved.">
               <p>{create.error.message}</p>
@@ -74,7 +78,11 @@ export function NewNodeSheet({ projectId }: { readonly projectId: string }) {
     <PageBody>
       <div className="pt-6">
         {error ? (
-          <Failed title="The project could not be read." error={error} onRetry={() => void Promise.all([project.refetch(), catalog.refetch()])} />
+          <Failed
+            title="The project could not be read."
+            error={error}
+            onRetry={() => void Promise.all([project.refetch(), catalog.refetch()])}
+          />
         ) : (
           <Loading what="the project" />
         )}
