@@ -9,8 +9,15 @@ export interface Shape {
   readonly build: (steps: readonly number[]) => readonly MeasureCase[];
 }
 
-/** Everything an option may be made of; shapes stand in no order of strength. */
-export type DesignSpace = readonly Shape[];
+/**
+ * Everything an option may be made of. Shapes stand in no order of strength, but the first and the last of a
+ * list are its extremes. A product is each shape of one list together with each of another.
+ */
+export type DesignSpace =
+  | { readonly kind: "list"; readonly shapes: readonly Shape[] }
+  | { readonly kind: "product"; readonly first: readonly Shape[]; readonly second: readonly Shape[] };
+
+export const listSpace = (shapes: readonly Shape[]): DesignSpace => ({ kind: "list", shapes });
 
 /** A complete list of measures as a shape. */
 export const fixedShape = (measures: readonly MeasureCase[]): Shape => ({
@@ -18,15 +25,22 @@ export const fixedShape = (measures: readonly MeasureCase[]): Shape => ({
   build: () => measures,
 });
 
-/** Each shape of one space together with each of another: an option made of both. */
-export function combineSpaces(first: DesignSpace, second: DesignSpace): DesignSpace {
-  return first.flatMap((a) =>
-    second.map((b) => ({
-      ladders: [...a.ladders, ...b.ladders],
-      build: (steps: readonly number[]) => [
-        ...a.build(steps.slice(0, a.ladders.length)),
-        ...b.build(steps.slice(a.ladders.length)),
-      ],
-    })),
-  );
-}
+/** Two shapes made into one option; each keeps its own ladders. */
+export const joinShapes = (a: Shape, b: Shape): Shape => ({
+  ladders: [...a.ladders, ...b.ladders],
+  build: (steps) => [...a.build(steps.slice(0, a.ladders.length)), ...b.build(steps.slice(a.ladders.length))],
+});
+
+/** Every shape of a space, products written out. */
+export const shapesOf = (space: DesignSpace): readonly Shape[] =>
+  space.kind === "list"
+    ? space.shapes
+    : space.first.flatMap((a) => space.second.map((b) => joinShapes(a, b)));
+
+export const lowestSteps = (shape: Shape): readonly number[] => shape.ladders.map(() => 0);
+export const highestSteps = (shape: Shape): readonly number[] => shape.ladders.map((length) => length - 1);
+
+/** With the strongest welds. */
+export const buildStrongest = (shape: Shape): readonly MeasureCase[] => shape.build(highestSteps(shape));
+/** With the lightest welds, below whose price the shape cannot go. */
+export const buildLightest = (shape: Shape): readonly MeasureCase[] => shape.build(lowestSteps(shape));

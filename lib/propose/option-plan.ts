@@ -1,5 +1,5 @@
 import type { Level, NodeCase } from "@/lib/calc/node";
-import { combineSpaces, fixedShape, type DesignSpace } from "./design-space";
+import { fixedShape, listSpace, type DesignSpace, type Shape } from "./design-space";
 import { forceLevels } from "./force-levels";
 import { partialLengthsMm, stiffenerSpace } from "./stiffener-space";
 import type { Stock } from "./stock";
@@ -32,7 +32,8 @@ function singleLevels(node: NodeCase): readonly { readonly key: string; readonly
 }
 
 function stiffenerOptions(node: NodeCase, stock: Stock): readonly PlannedOption[] {
-  const space = (levels: readonly Level[]): DesignSpace => stiffenerSpace(node, stock, levels, ["full"]);
+  const space = (levels: readonly Level[]): DesignSpace =>
+    listSpace(stiffenerSpace(node, stock, levels, ["full"]));
   const single = singleLevels(node);
   const full = single.map(({ key, level }) => ({
     key: `stiffeners-${key}`,
@@ -47,25 +48,34 @@ function stiffenerOptions(node: NodeCase, stock: Stock): readonly PlannedOption[
     : single.map(({ key, level }) => ({
         key: `stiffeners-${key}-partial`,
         name: `Partial-depth stiffeners ${levelWords([level])}`,
-        space: stiffenerSpace(node, stock, [level], partialLengthsMm(node)),
+        space: listSpace(stiffenerSpace(node, stock, [level], partialLengthsMm(node))),
       }));
   return [...full, both, ...partial];
 }
 
 function webPlateOptions(node: NodeCase, stock: Stock): readonly PlannedOption[] {
   return [
-    { key: "web-plate-one-side", name: "Web plate, one side", space: webPlateSpace(node, stock, 1) },
-    { key: "web-plate-both-sides", name: "Web plates, both sides", space: webPlateSpace(node, stock, 2) },
+    {
+      key: "web-plate-one-side",
+      name: "Web plate, one side",
+      space: listSpace(webPlateSpace(node, stock, 1)),
+    },
+    {
+      key: "web-plate-both-sides",
+      name: "Web plates, both sides",
+      space: listSpace(webPlateSpace(node, stock, 2)),
+    },
   ];
 }
 
-/** Sizes within the bounds of the bar model; the others would all be outside scope. */
-const BAR_DIAMETERS_MM = { least: 16, most: 30 };
+/**
+ * Sizes within the bounds of the bar model that are commonly kept; M18, M22 are rarely (common practice, no
+ * source), and all others would be outside scope.
+ */
+const BAR_SIZES: ReadonlySet<string> = new Set(["M16", "M20", "M24", "M27", "M30"]);
 
-function barSpace(stock: Stock, levels: readonly Level[]): DesignSpace {
-  const bars = stock.bars.filter(
-    ({ size }) => size.diameterMm >= BAR_DIAMETERS_MM.least && size.diameterMm <= BAR_DIAMETERS_MM.most,
-  );
+function barSpace(stock: Stock, levels: readonly Level[]): readonly Shape[] {
+  const bars = stock.bars.filter(({ size }) => BAR_SIZES.has(size.name));
   return bars.map(({ size, grade }) =>
     fixedShape([{ kind: "through-bars", levels, size, grade, innerNuts: true }]),
   );
@@ -77,14 +87,18 @@ function barOptions(node: NodeCase, stock: Stock): readonly PlannedOption[] {
   const bars = alone.map((levels) => ({
     key: levels.length === 2 ? "bars-both" : `bars-${levels[0]}`,
     name: `Bars ${levelWords(levels)}`,
-    space: barSpace(stock, levels),
+    space: listSpace(barSpace(stock, levels)),
   }));
   const mixed = BOTH.map((level) => {
     const other: Level = level === "top" ? "bottom" : "top";
     return {
       key: `bars-${level}-stiffeners-${other}`,
       name: `Bars at ${level}, stiffeners at ${other}`,
-      space: combineSpaces(barSpace(stock, [level]), stiffenerSpace(node, stock, [other], ["full"])),
+      space: {
+        kind: "product" as const,
+        first: barSpace(stock, [level]),
+        second: stiffenerSpace(node, stock, [other], ["full"]),
+      },
     };
   });
   return [...bars, ...mixed];
@@ -96,10 +110,13 @@ export function planOptions(node: NodeCase, stock: Stock): readonly PlannedOptio
     fixedShape([{ kind: "heavier-column", section, steel }]),
   );
   return [
-    { key: "bare", name: "Bare column", space: [fixedShape([])] },
+    { key: "bare", name: "Bare column", space: listSpace([fixedShape([])]) },
     ...stiffenerOptions(node, stock),
     ...webPlateOptions(node, stock),
     ...barOptions(node, stock),
-    { key: "heavier-column", name: "Heavier column", space: heavier },
-  ].filter(({ space }) => space.length > 0);
+    { key: "heavier-column", name: "Heavier column", space: listSpace(heavier) },
+  ].filter(
+    ({ space }) =>
+      (space.kind === "list" ? space.shapes.length : space.first.length * space.second.length) > 0,
+  );
 }

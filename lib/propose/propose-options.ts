@@ -3,7 +3,7 @@ import type { MeasureCase, NodeCase } from "@/lib/calc/node";
 import type { OptionOutcome } from "@/lib/calc/result";
 import { Judge, type PriceOf } from "./judge";
 import { planOptions } from "./option-plan";
-import { cheapestIn } from "./search";
+import { Search } from "./search";
 import { sizingWords } from "./sizing-words";
 import type { Stock } from "./stock";
 
@@ -26,8 +26,9 @@ export interface ProposedOption {
  */
 export function proposeOptions(node: NodeCase, stock: Stock, priceOf: PriceOf): readonly ProposedOption[] {
   const judge = new Judge(node, priceOf, evaluateOption);
+  const search = new Search(judge);
   return planOptions(node, stock).flatMap(({ key, name, space }) => {
-    const found = cheapestIn(space, judge);
+    const found = search.cheapestIn(space);
     if (found === null) return [];
     const outcome = judge.outcomeOf(found.measures);
     return [{ key, name, measures: found.measures, outcome, sizing: sizingWords(node, outcome) }];

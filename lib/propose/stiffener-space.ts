@@ -1,5 +1,5 @@
 import type { Level, MeasureCase, NodeCase } from "@/lib/calc/node";
-import type { DesignSpace } from "./design-space";
+import type { Shape } from "./design-space";
 import type { Stock, StockPlate } from "./stock";
 
 /** Flats are cut to whole steps of 5 mm (common practice, no source). */
@@ -55,7 +55,7 @@ export function stiffenerSpace(
   stock: Stock,
   levels: readonly Level[],
   lengths: readonly ("full" | number)[],
-): DesignSpace {
+): readonly Shape[] {
   const throats = stock.throatsMm.filter((throat) => throat >= LEAST_THROAT_MM);
   if (throats.length === 0) return [];
   const clipMm = roundUp(node.column.section.rootMm);

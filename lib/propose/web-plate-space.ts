@@ -1,5 +1,5 @@
 import type { JointCase, MeasureCase, NodeCase, Weld } from "@/lib/calc/node";
-import type { DesignSpace } from "./design-space";
+import type { Shape } from "./design-space";
 import type { Stock } from "./stock";
 
 /** Plates are cut to whole steps of 10 mm in height (common practice, no source). */
@@ -42,7 +42,7 @@ export function webPlateHeightMm(node: NodeCase): number {
 }
 
 /** Every stock shape of a supplementary web plate on one or both sides, between the root toes. */
-export function webPlateSpace(node: NodeCase, stock: Stock, sides: 1 | 2): DesignSpace {
+export function webPlateSpace(node: NodeCase, stock: Stock, sides: 1 | 2): readonly Shape[] {
   const { depthMm, flangeThicknessMm, rootMm, webThicknessMm } = node.column.section;
   const widthMm = Math.floor(depthMm - 2 * flangeThicknessMm - 2 * rootMm);
   const heightMm = webPlateHeightMm(node);

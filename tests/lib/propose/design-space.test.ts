@@ -1,6 +1,6 @@
 import { expect, it } from "vitest";
 import type { MeasureCase } from "@/lib/calc/node";
-import { combineSpaces, fixedShape } from "@/lib/propose/design-space";
+import { fixedShape, shapesOf } from "@/lib/propose/design-space";
 import { HE_300_A, S355 } from "./sample-node";
 
 const column = (designation: string): MeasureCase => ({
@@ -22,7 +22,11 @@ it("combines every shape with every other and hands each its own steps", () => {
     ladders: [2, 3],
     build: (steps: readonly number[]) => [column(`${name}${steps.join("")}`)],
   });
-  const both = combineSpaces([fixedShape([column("A")]), open("B")], [open("C")]);
+  const both = shapesOf({
+    kind: "product",
+    first: [fixedShape([column("A")]), open("B")],
+    second: [open("C")],
+  });
   expect(both.map(({ ladders }) => ladders)).toEqual([
     [2, 3],
     [2, 3, 2, 3],

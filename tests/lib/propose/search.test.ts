@@ -2,9 +2,9 @@ import fc from "fast-check";
 import { describe, expect, it } from "vitest";
 import type { LoadCase, MeasureCase, NodeCase } from "@/lib/calc/node";
 import type { EvaluatedOption, OptionOutcome } from "@/lib/calc/result";
-import type { DesignSpace, Shape } from "@/lib/propose/design-space";
+import { buildStrongest, fixedShape, listSpace, type Shape } from "@/lib/propose/design-space";
 import { Judge } from "@/lib/propose/judge";
-import { cheapestIn } from "@/lib/propose/search";
+import { Search } from "@/lib/propose/search";
 
 /**
  * The search is tried on made-up spaces: a shape and its weld steps are carried in a backing plate's
@@ -43,7 +43,7 @@ function read(measures: readonly MeasureCase[]): {
   return { shape: measure.thicknessMm, steps: [measure.widthMm, measure.lengthMm] };
 }
 
-const spaceOf = (world: World): DesignSpace =>
+const shapesIn = (world: World): readonly Shape[] =>
   world.shapes.map(({ ladders }, index): Shape => ({ ladders, build: (steps) => marker(index, steps) }));
 
 function utilisationIn(world: World, measures: readonly MeasureCase[], loadCase: number): number {
@@ -88,7 +88,7 @@ function evaluateIn(world: World, counter: { calls: number }) {
 }
 
 function everyCandidate(world: World): readonly (readonly MeasureCase[])[] {
-  return spaceOf(world).flatMap((shape) => {
+  return shapesIn(world).flatMap((shape) => {
     const [first = 1, second = 1] = shape.ladders;
     return Array.from({ length: first }, (_, i) =>
       Array.from({ length: second }, (__, j) => shape.build([i, j])),
@@ -116,7 +116,7 @@ const anyWorld: fc.Arbitrary<World> = fc.record({
   together: fc.constantFrom("sum", "worst"),
 });
 
-describe("cheapestIn", () => {
+describe("Search", () => {
   it("finds what trying every candidate finds: the cheapest that passes, else the best and cheapest of those", () => {
     fc.assert(
       fc.property(anyWorld, (world) => {
@@ -126,7 +126,7 @@ describe("cheapestIn", () => {
           (measures) => priceIn(world, measures),
           evaluateIn(world, { calls: 0 }),
         );
-        const found = cheapestIn(spaceOf(world), judge)!;
+        const found = new Search(judge).cheapestIn(listSpace(shapesIn(world)))!;
         const all = everyCandidate(world).map((measures) => ({
           price: priceIn(world, measures),
           utilisation: Math.max(...world.need.map((_, index) => utilisationIn(world, measures, index))),
@@ -141,6 +141,69 @@ describe("cheapestIn", () => {
         expect(priceIn(world, found.measures)).toBe(Math.min(...rivals.map(({ price }) => price)));
       }),
       { numRuns: 500 },
+    );
+  });
+
+  it("settles two parts of an option that bear on different things as trying every pair would", () => {
+    fc.assert(
+      fc.property(anyWorld, anyWorld, (one, other) => {
+        // Both worlds see the same load cases, each through its own part.
+        const need = one.need.slice(0, Math.min(one.need.length, other.need.length));
+        const worlds = [
+          { ...one, need },
+          { ...other, need: other.need.slice(0, need.length) },
+        ] as const;
+        const [a, b] = worlds;
+        const worstOf = (measures: readonly MeasureCase[], loadCases: readonly number[]): number =>
+          Math.max(
+            ...measures.flatMap((measure, part) =>
+              loadCases.map((loadCase) => utilisationIn(worlds[part]!, [measure], loadCase)),
+            ),
+          );
+        const price = (measures: readonly MeasureCase[]): number =>
+          priceIn(a, measures.slice(0, 1)) + priceIn(b, measures.slice(1));
+        const evaluate = (node: NodeCase, measures: readonly MeasureCase[]): OptionOutcome => {
+          const utilisation = worstOf(
+            measures,
+            node.loadCases.map(({ name }) => Number(name)),
+          );
+          const loadCase = node.loadCases.find(
+            ({ name }) => worstOf(measures, [Number(name)]) === utilisation,
+          )?.name;
+          const governing = { component: "detailing", side: "left", loadCase, utilisation };
+          return {
+            kind: "evaluated",
+            passes: utilisation <= 1,
+            utilisation,
+            stiffnessReached: true,
+            governing,
+          } as unknown as EvaluatedOption;
+        };
+        const ofOne = (shape: Shape): Shape => fixedShape(buildStrongest(shape));
+        const cases = need.map((_, index) => index);
+        // As bars by size and plates by thickness, each part lists its strongest last.
+        const byStrength = (
+          shapes: readonly Shape[],
+          asPart: (measures: readonly MeasureCase[]) => readonly MeasureCase[],
+        ) =>
+          shapes.toSorted(
+            (x, y) => worstOf(asPart(buildStrongest(y)), cases) - worstOf(asPart(buildStrongest(x)), cases),
+          );
+        const first = byStrength(shapesIn(a).map(ofOne), (measures) => measures);
+        const second = byStrength(shapesIn(b), (measures) => [...first.at(-1)!.build([]), ...measures]);
+        const pairs = first.flatMap((shape) =>
+          everyCandidate(b).map((measures) => [...shape.build([]), ...measures]),
+        );
+        const passing = pairs.filter((measures) => worstOf(measures, cases) <= 1);
+        const found = new Search(new Judge(nodeOf(a), price, evaluate)).cheapestIn({
+          kind: "product",
+          first,
+          second,
+        })!;
+        expect(found.meetsTarget).toBe(passing.length > 0);
+        if (passing.length > 0) expect(price(found.measures)).toBe(Math.min(...passing.map(price)));
+      }),
+      { numRuns: 300 },
     );
   });
 
@@ -165,12 +228,16 @@ describe("cheapestIn", () => {
       (measures) => priceIn(world, measures),
       evaluateIn(world, counter),
     );
-    cheapestIn(spaceOf(world), judge);
+    new Search(judge).cheapestIn(listSpace(shapesIn(world)));
     expect(counter.calls).toBeLessThan(everyCandidate(world).length / 4);
   });
 
   it("has no answer for an empty space", () => {
     const world: World = { shapes: [], need: [[0, 0, 0]], stepPrice: [0, 0], together: "sum" };
-    expect(cheapestIn([], new Judge(nodeOf(world), () => 0, evaluateIn(world, { calls: 0 })))).toBeNull();
+    expect(
+      new Search(new Judge(nodeOf(world), () => 0, evaluateIn(world, { calls: 0 }))).cheapestIn(
+        listSpace([]),
+      ),
+    ).toBeNull();
   });
 });
