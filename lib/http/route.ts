@@ -19,7 +19,7 @@ import { checkOrigin } from "./same-origin";
 export type Access = "signed-in" | "project" | "node";
 
 interface PathContext {
-  readonly params: Promise<Record<string, string | string[] | undefined>>;
+  readonly params: Promise<Record<string, string | string[] | undefined> | undefined>;
 }
 
 interface Asked<Params, Query, Body> {
@@ -76,7 +76,8 @@ async function pathParams<P extends z.ZodType>(
   shape: P | undefined,
   context: PathContext,
 ): Promise<z.output<P>> {
-  const parsed = (shape ?? z.object({})).safeParse(await context.params);
+  // Next hands a route without a changing part no params at all.
+  const parsed = (shape ?? z.object({})).safeParse((await context.params) ?? {});
   if (!parsed.success) throw notFound("page");
   return parsed.data as z.output<P>;
 }
