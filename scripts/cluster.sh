@@ -80,9 +80,10 @@ cluster_is_running() {
   as_database_user "$postgres_programs/pg_ctl" status -D "$cluster_folder" >/dev/null 2>&1
 }
 
-# "PID TICKS": a process told apart from a later one with the same number.
+# "PID TICKS": a process told apart from a later one with the same number by when it began. The name of the
+# process, second in the file, may hold spaces and brackets; what is wanted comes after its last bracket.
 process_mark() {
-  printf '%s %s' "$1" "$(awk '{ print $22 }' "/proc/$1/stat" 2>/dev/null)"
+  printf '%s %s' "$1" "$(sed 's/.*) //' "/proc/$1/stat" 2>/dev/null | awk '{ print $20 }')"
 }
 
 # A cluster left over by a run that was killed has no owner any more; this run takes it over and stops it

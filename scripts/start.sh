@@ -26,6 +26,7 @@ stop_everything() {
   trap - EXIT
   stop_watching_npm
   stop_running_child
+  if [[ $is_serving == yes ]]; then rm -f "$data_folder/web-server"; fi
   stop_own_cluster
   if [[ $is_serving == yes && $status -ge 129 ]]; then
     say "Panelwright has stopped. Your data stay where they are."
@@ -53,6 +54,20 @@ require_web_port() {
     "Stop that one, or choose another port: PORT=$next npm start"
 }
 
+# A run that was killed outright leaves its web server behind. With the lock in our hands nobody watches
+# over it any more, and its mark proves that it is that server and not a later process of the same number.
+end_left_over_server() {
+  local mark="" pid
+  if [[ -f $data_folder/web-server ]]; then mark=$(cat "$data_folder/web-server"); fi
+  pid=${mark%% *}
+  if [[ -n $pid && $(process_mark "$pid") == "$mark" && $mark == *" "?* ]]; then
+    say "Stopping the web server that an interrupted run left behind."
+    running_child=$pid
+    stop_running_child
+  fi
+  rm -f "$data_folder/web-server"
+}
+
 reach_database() {
   if [[ -n ${DATABASE_URL:-} ]]; then
     say "Using the database that DATABASE_URL names."
@@ -77,6 +92,7 @@ serve() {
     node "$next" "$mode" --hostname 127.0.0.1 --port "$web_port" </dev/null 9>&- &
   running_child=$!
   set +m
+  process_mark "$running_child" >"$data_folder/web-server"
   node "$root/scripts/wait-for-health.mjs" "http://127.0.0.1:$web_port/api/health" "$running_child" 9>&- &
   wait $! || fail "the web server did not come up (its own words are above)."
   is_serving=yes
@@ -94,10 +110,11 @@ show_demo_people() {
 
 require_node
 read_settings_file
-require_web_port
 prepare_data_folder
 lock_data_folder "Panelwright already runs with the data in $data_folder." \
   "Stop that one first, or start another with PANELWRIGHT_DATA_DIR=/another/folder PORT=3001 npm start."
+end_left_over_server
+require_web_port
 ensure_npm_packages
 reach_database
 ensure_secret session-secret
