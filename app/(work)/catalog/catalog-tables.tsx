@@ -1,10 +1,11 @@
 import type { ReactNode } from "react";
 import type { AngleRow, FastenerGradeRow, FastenerRow, SteelRow } from "@/lib/catalog/catalog";
 import { Table, Td, Th } from "@/components/ui/table";
+import { SourceNotes, sourcesOf } from "./source-notes";
 
 interface FigureTableProps {
   readonly label: string;
-  /** Name and unit of each column of figures; the name of a row stands before them, its source behind. */
+  /** Name and unit of each column of figures; the name of a row stands before them, the number of its source behind. */
   readonly heads: readonly (readonly [name: string, unit: string])[];
   readonly rows: readonly {
     readonly key: string;
@@ -16,36 +17,40 @@ interface FigureTableProps {
 
 /** Rows of figures, each with its name and its source. */
 function FigureTable({ label, heads, rows }: FigureTableProps) {
+  const sources = sourcesOf(rows);
   return (
-    <Table label={label} className="whitespace-nowrap">
-      <thead>
-        <tr>
-          <Th>{label}</Th>
-          {heads.map(([name, unit]) => (
-            <Th key={name} className="text-right">
-              {name}
-              <span className="block font-normal text-soft">{unit}</span>
-            </Th>
-          ))}
-          <Th>Source</Th>
-        </tr>
-      </thead>
-      <tbody>
-        {rows.map((row) => (
-          <tr key={row.key} className="hover:bg-petrolwash">
-            <th scope="row" className="border-t border-rule px-3 py-1.5 text-left font-semibold">
-              {row.name}
-            </th>
-            {row.figures.map((figure, index) => (
-              <Td key={heads[index]?.[0]} className="text-right">
-                {figure ?? <span aria-label="none">–</span>}
-              </Td>
+    <div>
+      <Table label={label} className="whitespace-nowrap">
+        <thead>
+          <tr>
+            <Th>{label}</Th>
+            {heads.map(([name, unit]) => (
+              <Th key={name} className="text-right">
+                {name}
+                <span className="block font-normal text-soft">{unit}</span>
+              </Th>
             ))}
-            <Td className="min-w-64 text-note whitespace-normal text-soft">{row.source}</Td>
+            <Th className="text-right">Source</Th>
           </tr>
-        ))}
-      </tbody>
-    </Table>
+        </thead>
+        <tbody>
+          {rows.map((row) => (
+            <tr key={row.key} className="hover:bg-petrolwash">
+              <th scope="row" className="border-t border-rule px-3 py-1.5 text-left align-top font-semibold">
+                {row.name}
+              </th>
+              {row.figures.map((figure, index) => (
+                <Td key={heads[index]?.[0]} className="text-right">
+                  {figure ?? <span aria-label="none">–</span>}
+                </Td>
+              ))}
+              <Td className="text-right text-soft">{sources.indexOf(row.source) + 1}</Td>
+            </tr>
+          ))}
+        </tbody>
+      </Table>
+      <SourceNotes sources={sources} />
+    </div>
   );
 }
 

@@ -8,6 +8,7 @@ import { SelectField, TextField } from "@/components/ui/field";
 import { formatFigures } from "@/components/ui/format-number";
 import { Empty } from "@/components/ui/states";
 import { Table, Td, Th } from "@/components/ui/table";
+import { SourceNotes, sourcesOf } from "./source-notes";
 
 const HEADS = [
   ["h", "mm"],
@@ -29,42 +30,46 @@ function figuresOf(row: SectionRow): readonly string[] {
     ...[row.depthMm, row.widthMm, row.webThicknessMm, row.flangeThicknessMm, row.rootRadiusMm].map(String),
     row.massKgPerM.toFixed(1),
     ...[areaMm2 / 1e2, inertiaMm4 / 1e4, elasticModulusMm3 / 1e3, plasticModulusMm3 / 1e3].map((value) =>
-      formatFigures(value, 4),
+      formatFigures(Number(value.toPrecision(4)), 4),
     ),
   ];
 }
 
 function Rows({ sections }: { readonly sections: readonly SectionRow[] }) {
+  const sources = sourcesOf(sections);
   return (
-    <Table label="Sections" className="whitespace-nowrap">
-      <thead>
-        <tr>
-          <Th>Section</Th>
-          {HEADS.map(([symbol, unit]) => (
-            <Th key={symbol} className="text-right">
-              {symbol}
-              <span className="block font-normal text-soft">{unit}</span>
-            </Th>
-          ))}
-          <Th>Source</Th>
-        </tr>
-      </thead>
-      <tbody>
-        {sections.map((row) => (
-          <tr key={row.designation} className="hover:bg-petrolwash">
-            <th scope="row" className="border-t border-rule px-3 py-1.5 text-left font-semibold">
-              {row.designation}
-            </th>
-            {figuresOf(row).map((figure, index) => (
-              <Td key={HEADS[index]?.[0]} className="text-right">
-                {figure}
-              </Td>
+    <div>
+      <Table label="Sections" className="whitespace-nowrap">
+        <thead>
+          <tr>
+            <Th>Section</Th>
+            {HEADS.map(([symbol, unit]) => (
+              <Th key={symbol} className="text-right">
+                {symbol}
+                <span className="block font-normal text-soft">{unit}</span>
+              </Th>
             ))}
-            <Td className="min-w-64 text-note whitespace-normal text-soft">{row.source}</Td>
+            <Th className="text-right">Source</Th>
           </tr>
-        ))}
-      </tbody>
-    </Table>
+        </thead>
+        <tbody>
+          {sections.map((row) => (
+            <tr key={row.designation} className="hover:bg-petrolwash">
+              <th scope="row" className="border-t border-rule px-3 py-1.5 text-left align-top font-semibold">
+                {row.designation}
+              </th>
+              {figuresOf(row).map((figure, index) => (
+                <Td key={HEADS[index]?.[0]} className="text-right">
+                  {figure}
+                </Td>
+              ))}
+              <Td className="text-right text-soft">{sources.indexOf(row.source) + 1}</Td>
+            </tr>
+          ))}
+        </tbody>
+      </Table>
+      <SourceNotes sources={sources} />
+    </div>
   );
 }
 

@@ -39,10 +39,10 @@ function PlateList({ plates, onRemove }: PlateListProps) {
       <tbody>
         {plates.map(({ thicknessMm, source }) => (
           <tr key={thicknessMm} className="hover:bg-petrolwash">
-            <th scope="row" className="border-t border-rule px-3 py-1.5 text-right font-semibold">
+            <th scope="row" className="border-t border-rule px-3 py-2 text-right align-middle font-semibold">
               {thicknessMm}
             </th>
-            <Td className="text-note text-soft">{source}</Td>
+            <Td className="align-middle text-note text-soft">{source}</Td>
             {onRemove ? (
               <Td className="py-0.5">
                 <Button
@@ -103,11 +103,11 @@ export function StockPlates({ plates }: { readonly plates: readonly StockPlateRo
   return (
     <div className="grid max-w-3xl gap-4">
       <p className="text-soft">
-        Options are sized from these thicknesses. A change counts from the next comparison; saved comparisons
-        stay as they are.
+        Options are sized from these thicknesses. A change counts from the next calculation; comparisons
+        already made stay as they are.
       </p>
       {canEdit ? (
-        <form onSubmit={add} noValidate className="flex flex-wrap items-end gap-3">
+        <form onSubmit={add} noValidate className="flex flex-wrap items-start gap-3">
           <TextField
             ref={field}
             label="Add a thickness, mm"
@@ -117,7 +117,13 @@ export function StockPlates({ plates }: { readonly plates: readonly StockPlateRo
             error={fault ?? undefined}
             fieldClassName="w-56"
           />
-          <Button type="submit" kind="primary" isBusy={save.isPending} busyLabel="Saving">
+          <Button
+            type="submit"
+            kind="primary"
+            className="mt-[1.4rem]"
+            isBusy={save.isPending}
+            busyLabel="Saving"
+          >
             Add
           </Button>
         </form>
