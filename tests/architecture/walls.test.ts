@@ -27,7 +27,6 @@ const COST_FRONT = ["lib/cost/index", "lib/cost", "lib/cost/estimate", "lib/cost
 const FRONT_DOORS = new Set([...CALC_FRONT, ...COST_FRONT]);
 
 const WALLS: Readonly<Record<string, Wall>> = {
-  "lib/units": { folders: ["lib/units"], packages: [] },
   "lib/calc": { folders: ["lib/calc/", "lib/units"], packages: [] },
   "lib/catalog": { folders: ["lib/catalog", "lib/units"], packages: ["zod"] },
   "lib/policies": { folders: ["lib/policies"], packages: [] },
@@ -174,6 +173,7 @@ const WALLS: Readonly<Record<string, Wall>> = {
     packages: [
       "react",
       "react-dom",
+      "next/dynamic",
       "next/link",
       "next/navigation",
       "next-auth/react",
