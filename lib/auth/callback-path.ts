@@ -9,12 +9,10 @@ export function safeCallbackPath(wish: string | null | undefined, ownOrigin?: st
   if (wish === null || wish === undefined || wish === "") return HOME_PATH;
   const path =
     ownOrigin !== undefined && wish.startsWith(`${ownOrigin}/`) ? wish.slice(ownOrigin.length) : wish;
-  // eslint-disable-next-line no-control-regex
-  const canLeadElsewhere =
-    !path.startsWith("/") || /^\/[/\\]/.test(path) || /[\\\u0000-\u001f\u007f]/.test(path);
+  const canLeadElsewhere = !path.startsWith("/") || path.startsWith("//") || /\\|\p{Cc}/u.test(path);
   if (canLeadElsewhere) return HOME_PATH;
   const landed = new URL(path, "http://own.invalid");
-  return landed.origin === "http://own.invalid"
-    ? `${landed.pathname}${landed.search}${landed.hash}`
-    : HOME_PATH;
+  // Taking out `/..` may leave two slashes at the front: `/..//host`.
+  const isHere = landed.origin === "http://own.invalid" && !landed.pathname.startsWith("//");
+  return isHere ? `${landed.pathname}${landed.search}${landed.hash}` : HOME_PATH;
 }

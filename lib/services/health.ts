@@ -2,10 +2,9 @@ import { database } from "@/lib/db/transaction";
 import { ENGINE } from "@/lib/evaluation/engine";
 import { logger } from "@/lib/log/logger";
 import type { Health } from "@/lib/schemas/health";
-import packageFacts from "@/package.json";
 
 /** Whether the program can work. Why it cannot stays in the log. */
-export async function checkHealth(): Promise<Health> {
+export async function checkHealth(version: string): Promise<Health> {
   const reachable = await database()
     .query("SELECT 1 FROM organisations LIMIT 1")
     .then(
@@ -18,7 +17,7 @@ export async function checkHealth(): Promise<Health> {
   return {
     ok: reachable,
     database: reachable ? "reachable" : "unreachable",
-    version: packageFacts.version,
+    version,
     engine: ENGINE,
   };
 }

@@ -10,7 +10,12 @@ import { Person } from "@/models/person";
 import { Project } from "@/models/project";
 import { ProjectMember } from "@/models/project-member";
 import { Session } from "@/models/session";
-import { buildNode, buildOrganisation, type BuiltOrganisation, buildProject } from "@/tests/factories/build-organisation";
+import {
+  buildNode,
+  buildOrganisation,
+  type BuiltOrganisation,
+  buildProject,
+} from "@/tests/factories/build-organisation";
 import { buildNodeDocument } from "@/tests/factories/build-node-document";
 
 let organisation: BuiltOrganisation;
@@ -25,7 +30,13 @@ describe("unique keys", () => {
   it("take an e-mail once, in every organisation", async () => {
     const other = await buildOrganisation();
     const { email } = organisation.people.designer;
-    const twin = { organisationId: other.id, email, name: "Twin", role: "designer", passwordHash: "$argon2id$" } as const;
+    const twin = {
+      organisationId: other.id,
+      email,
+      name: "Twin",
+      role: "designer",
+      passwordHash: "$argon2id$",
+    } as const;
     await expect(Person.create(twin)).rejects.toMatchObject({ name: "SequelizeUniqueConstraintError" });
   });
 
@@ -37,7 +48,11 @@ describe("unique keys", () => {
       name: "SequelizeUniqueConstraintError",
     });
     const other = await buildOrganisation();
-    const again = await Project.create({ organisationId: other.id, name, createdBy: other.people.designer.personId });
+    const again = await Project.create({
+      organisationId: other.id,
+      name,
+      createdBy: other.people.designer.personId,
+    });
     expect(again.name).toBe(name);
   });
 
@@ -65,7 +80,12 @@ describe("foreign keys", () => {
 
   it("refuse a person without an organisation, a node without a project, a session without a person", async () => {
     const breach = { name: "SequelizeForeignKeyConstraintError" };
-    const person = { email: `${missing}@test.example`, name: "Nobody", role: "checker", passwordHash: "$argon2id$" } as const;
+    const person = {
+      email: `${missing}@test.example`,
+      name: "Nobody",
+      role: "checker",
+      passwordHash: "$argon2id$",
+    } as const;
     await expect(Person.create({ ...person, organisationId: missing })).rejects.toMatchObject(breach);
     await expect(buildNode(missing, organisation.people.designer)).rejects.toMatchObject(breach);
     const times = { lastSeenAt: new Date(), expiresAt: new Date(Date.now() + 1000) };
@@ -76,7 +96,9 @@ describe("foreign keys", () => {
     await buildNode(projectId, organisation.people.designer);
     const breach = { name: "SequelizeForeignKeyConstraintError" };
     await expect(Project.destroy({ where: { id: projectId } })).rejects.toMatchObject(breach);
-    await expect(Person.destroy({ where: { id: organisation.people.designer.personId } })).rejects.toMatchObject(breach);
+    await expect(
+      Person.destroy({ where: { id: organisation.people.designer.personId } }),
+    ).rejects.toMatchObject(breach);
   });
 });
 
@@ -87,8 +109,12 @@ describe("checks", () => {
     const email = (): string => `${randomUUID()}@test.example`;
     const role = "owner" as unknown as "admin";
     await expect(Person.create({ ...good, email: email(), role })).rejects.toThrow(/people_role_check/);
-    await expect(Person.create({ ...good, email: email().toUpperCase() })).rejects.toThrow(/people_email_check/);
-    await expect(Person.create({ ...good, email: email(), passwordHash: "plain" })).rejects.toThrow(/password_hash_check/);
+    await expect(Person.create({ ...good, email: email().toUpperCase() })).rejects.toThrow(
+      /people_email_check/,
+    );
+    await expect(Person.create({ ...good, email: email(), passwordHash: "plain" })).rejects.toThrow(
+      /password_hash_check/,
+    );
   });
 
   it("refuse a node whose mark is not the mark in its document", async () => {
@@ -103,7 +129,9 @@ describe("records of what happened", () => {
   it("are added and never changed or removed: audit lines", async () => {
     const { personId: actorId, organisationId } = organisation.people.admin;
     const subjectId = randomUUID();
-    await inTransaction((tx) => writeAudit(tx, { actorId, organisationId, action: "project.edited", subjectId }));
+    await inTransaction((tx) =>
+      writeAudit(tx, { actorId, organisationId, action: "project.edited", subjectId }),
+    );
     const where = { subjectId };
     expect(await AuditEntry.count({ where })).toBe(1);
     await expect(AuditEntry.update({ subjectId: "other" }, { where })).rejects.toThrow(/never changed/);

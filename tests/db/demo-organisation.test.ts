@@ -1,5 +1,5 @@
 /** Guards what the first start gives: people with passwords of their own, kept once and never changed again. */
-import { mkdtempSync, readFileSync, rmSync, statSync } from "node:fs";
+import { readFileSync, rmSync, statSync } from "node:fs";
 import { tmpdir } from "node:os";
 import path from "node:path";
 import { afterAll, describe, expect, it, vi } from "vitest";
@@ -48,7 +48,10 @@ describe("the demo organisation", () => {
   it("keeps every password and every edited row at the next start, and prints no password again", async () => {
     database();
     const before = kept();
-    const organisation = await Organisation.findOne({ where: { name: DEMO_ORGANISATION }, rejectOnEmpty: true });
+    const organisation = await Organisation.findOne({
+      where: { name: DEMO_ORGANISATION },
+      rejectOnEmpty: true,
+    });
     const where = { organisationId: organisation.id, role: "designer" as const };
     const designer = await Person.findOne({ where, rejectOnEmpty: true });
     await designer.update({ name: "Renamed by an admin", role: "checker" });
@@ -63,8 +66,14 @@ describe("the demo organisation", () => {
 
   it("brings no demo node back that was changed or taken off the register", async () => {
     database();
-    const organisation = await Organisation.findOne({ where: { name: DEMO_ORGANISATION }, rejectOnEmpty: true });
-    const project = await Project.findOne({ where: { organisationId: organisation.id }, rejectOnEmpty: true });
+    const organisation = await Organisation.findOne({
+      where: { name: DEMO_ORGANISATION },
+      rejectOnEmpty: true,
+    });
+    const project = await Project.findOne({
+      where: { organisationId: organisation.id },
+      rejectOnEmpty: true,
+    });
     const nodes = await Node.findAll({ where: { projectId: project.id }, order: ["reference"] });
     expect(nodes.length).toBeGreaterThanOrEqual(8);
     const [changed, removed] = nodes;

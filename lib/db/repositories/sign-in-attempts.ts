@@ -1,7 +1,13 @@
 import { QueryTypes, type Transaction } from "sequelize";
-import type { RecentFailures } from "@/lib/auth/sign-in-limit";
 import { database } from "@/lib/db/transaction";
 import { SignInAttempt } from "@/models/sign-in-attempt";
+
+export interface RecentFailures {
+  /** Failures for this e-mail since its last success, this try included. */
+  readonly ofEmail: number;
+  /** Failures from this address, this try included. */
+  readonly ofAddress: number;
+}
 
 export interface Attempt {
   readonly email: string;
