@@ -11,12 +11,8 @@ function fieldOf(path: string): HTMLElement | null {
   return null;
 }
 
-/** Puts the focus into the field of a path. */
-export function focusField(path: string): void {
-  const field = fieldOf(path);
-  field?.focus();
-  field?.scrollIntoView({ block: "center" });
-}
+/** Puts the focus into the field of a path; the browser brings it into sight below the line that stays there. */
+export const focusField = (path: string): void => fieldOf(path)?.focus();
 
 /** How many faults are listed before the rest are only counted. */
 const SHOWN = 6;
