@@ -34,7 +34,7 @@ function BareCell({ row }: { readonly row: NodeRow }) {
   if ("outsideScope" in row.bare) {
     return (
       <Td>
-        <span className="text-soft">outside scope</span>
+        <span className="text-soft">outside scope</span>{" "}
         <span className="block max-w-[34ch] text-note text-soft">{row.bare.outsideScope}</span>
       </Td>
     );
@@ -45,7 +45,7 @@ function BareCell({ row }: { readonly row: NodeRow }) {
       <span className={passes ? "font-[650] text-pass" : "font-[650] text-fail"}>
         {passes ? "passes" : "fails"}
       </span>{" "}
-      <UtilisationFigure value={utilisation} limit={passes ? Math.max(1, utilisation) : 1} />
+      <UtilisationFigure value={utilisation} limit={passes ? Math.max(1, utilisation) : 1} />{" "}
       <span className="block text-note text-soft">{`${componentLabel(component)}, ${side}`}</span>
     </Td>
   );
@@ -65,7 +65,7 @@ function NodeLine({
           className="font-[650] text-ink underline decoration-rule2 underline-offset-4 hover:decoration-petrol"
         >
           {row.reference}
-        </Link>
+        </Link>{" "}
         <span className="block text-note text-soft">{`revision ${row.version}`}</span>
       </th>
       <Td className="whitespace-nowrap">{row.column}</Td>
