@@ -80,7 +80,7 @@ const projectReply = (canEdit: boolean) => ({
 });
 const nodesPath = `GET /api/projects/${projectId}/nodes`;
 
-function show({ canEdit = true, nodes = rows as readonly NodeRow[] } = {}) {
+function show({ canEdit = true, nodes = rows }: { canEdit?: boolean; nodes?: readonly NodeRow[] } = {}) {
   let current = nodes;
   const sent = answerRequests({
     [`GET /api/projects/${projectId}`]: projectReply(canEdit),
