@@ -55,8 +55,8 @@ create_cluster() {
   ensure_secret database-superuser-password
   ensure_secret database-password
   rm -rf "$fresh"
-  install -d -m 711 "${cluster_folder%/*}" 2>/dev/null ||
-    [[ -d ${cluster_folder%/*} ]] || fail "the folder ${cluster_folder%/*} cannot be made."
+  [[ -d ${cluster_folder%/*} ]] || install -d -m 711 "${cluster_folder%/*}" ||
+    fail "the folder ${cluster_folder%/*} cannot be made."
   install -d -m 700 "$fresh"
   password_file=$(mktemp -p "${cluster_folder%/*}")
   read_secret database-superuser-password >"$password_file"
