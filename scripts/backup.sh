@@ -1,6 +1,7 @@
 #!/usr/bin/env bash
 # Keeps database, uploaded files and secrets in one archive: backup.sh [FILE]
 # May run while Panelwright runs. The archive holds secrets and is readable by this user alone.
+# shellcheck disable=SC2154  # variables of the parts that are sourced below
 set -euo pipefail
 root=$(cd "$(dirname "${BASH_SOURCE[0]}")/.." && pwd)
 for part in messages data-folder prerequisites cluster connection; do

@@ -1,4 +1,4 @@
-# shellcheck shell=bash
+# shellcheck shell=bash disable=SC2154  # $root and the like come from the script that sources this
 # The production build, made again only when what goes into it has changed. Sourced after messages.sh.
 
 build_stamp=$root/.next/panelwright-build
@@ -6,7 +6,7 @@ build_stamp=$root/.next/panelwright-build
 # One hash over everything that next build reads, and over the tools it is built with.
 source_state() {
   (
-    cd "$root"
+    cd "$root" || exit 1
     find app components lib models seeders public proxy.ts next.config.mjs postcss.config.mjs tailwind.config.ts \
       tsconfig.json package.json package-lock.json -type f -print0 2>/dev/null |
       LC_ALL=C sort -z | xargs -0 sha256sum | sha256sum

@@ -1,4 +1,4 @@
-# shellcheck shell=bash
+# shellcheck shell=bash disable=SC2154  # $root and the like come from the script that sources this
 # The project's own PostgreSQL cluster: made at the first start, on loopback only, run by a user who is
 # not root. Sourced after messages.sh, data-folder.sh and prerequisites.sh.
 

@@ -1,9 +1,10 @@
-# shellcheck shell=bash
+# shellcheck shell=bash disable=SC2154  # $root and the like come from the script that sources this
 # Reaching the database with PostgreSQL's own programs. Sourced after cluster.sh.
 
 # Sets the libpq variables for an address, so that no password shows in the list of processes.
 use_database() {
   local line
+  # shellcheck disable=SC2016  # the dollars are JavaScript's
   while IFS= read -r line; do
     export "${line?}"
   done < <(node -e '

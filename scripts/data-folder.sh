@@ -1,4 +1,4 @@
-# shellcheck shell=bash
+# shellcheck shell=bash disable=SC2154  # $root and the like come from the script that sources this
 # The data folder: secrets, uploaded files, dumps and the local database. Sourced after messages.sh.
 # Reads $root (the checkout) and PANELWRIGHT_DATA_DIR.
 

@@ -4,6 +4,7 @@
 #   stop        stops it
 #   throw-away  the same as start, in a data folder that `remove` may delete
 #   remove      stops and deletes a throw-away one; refuses any other
+# shellcheck disable=SC2154  # variables of the parts that are sourced below
 set -euo pipefail
 root=$(cd "$(dirname "${BASH_SOURCE[0]}")/.." && pwd)
 for part in messages data-folder prerequisites cluster; do

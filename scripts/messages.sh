@@ -1,4 +1,4 @@
-# shellcheck shell=bash
+# shellcheck shell=bash disable=SC2154  # $root and the like come from the script that sources this
 # Talking to the person at the terminal, and running long commands so that Ctrl-C works during them.
 # Sourced by the other scripts.
 

@@ -1,4 +1,4 @@
-# shellcheck shell=bash
+# shellcheck shell=bash disable=SC2154  # $root and the like come from the script that sources this
 # What must be on the machine: Node, the npm packages of the lock file, Debian packages.
 # Sourced after messages.sh and data-folder.sh.
 

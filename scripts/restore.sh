@@ -2,6 +2,7 @@
 # Puts a backup back: restore.sh FILE [--replace]
 # A database that already has tables is left alone unless --replace is given, and then it is backed up first.
 # Everything in the archive is checked before anything here is touched.
+# shellcheck disable=SC2154  # variables of the parts that are sourced below
 set -euo pipefail
 root=$(cd "$(dirname "${BASH_SOURCE[0]}")/.." && pwd)
 for part in messages data-folder prerequisites cluster connection; do

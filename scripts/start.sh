@@ -3,6 +3,7 @@
 # migrates and fills it, builds if needed, serves. Ctrl-C stops what this run started, and nothing else.
 #   start.sh        the production build
 #   start.sh --dev  the development server
+# shellcheck disable=SC2154  # variables of the parts that are sourced below
 set -euo pipefail
 root=$(cd "$(dirname "${BASH_SOURCE[0]}")/.." && pwd)
 cd "$root"
@@ -42,8 +43,9 @@ end_with_npm
 
 require_web_port() {
   web_port=${PORT:-3000}
-  [[ $web_port =~ ^[0-9]{1,5}$ ]] && ((web_port >= 1 && web_port <= 65535)) ||
+  if ! [[ $web_port =~ ^[0-9]{1,5}$ ]] || ((web_port < 1 || web_port > 65535)); then
     fail "PORT=$web_port is not a port number." "Give a number from 1024 to 65535, for example PORT=3001 npm start."
+  fi
   if port_is_free "$web_port"; then return 0; fi
   if ((web_port < 1024 && EUID != 0)); then
     fail "port $web_port may be used by root only, or it is taken." "Choose another: PORT=3001 npm start"

@@ -3,6 +3,7 @@
 # a database that is thrown away afterwards, checks, tests, builds, drives the built program in a browser.
 #   test.sh                      all of it
 #   test.sh lint unit            only these: format lint types unit database build e2e
+# shellcheck disable=SC2154  # variables of the parts that are sourced below
 set -euo pipefail
 root=$(cd "$(dirname "${BASH_SOURCE[0]}")/.." && pwd)
 cd "$root"
@@ -73,6 +74,7 @@ use_test_database() {
     ensure_postgres
     return 0
   fi
+  # shellcheck disable=SC2034  # read by start_cluster
   database_name=panelwright_test
   start_cluster
   export TEST_DATABASE_URL=$cluster_url
