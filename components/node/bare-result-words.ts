@@ -23,6 +23,9 @@ export const EVERY_CASE = "all";
 export const inCase = (loadCase: string): string =>
   loadCase === EVERY_CASE ? "in every load case" : `in ${loadCase}`;
 
+/** Utilisations that differ by less than this share are the same. */
+const SAME = 1e-6;
+
 /**
  * The check a sentence names: the governing one. Where all is in order a rule of detailing says less than
  * strength does, so the highest utilisation of strength stands for it.
@@ -30,11 +33,10 @@ export const inCase = (loadCase: string): string =>
 export function namedCheck({ passes, governing, checks }: EvaluatedOption): Governing {
   if (!passes || governing.component !== "detailing") return governing;
   const strength = checks.filter((check) => check.component !== "detailing");
-  return strength.reduce<Governing>(
-    (highest, check) =>
-      highest.component === "detailing" || check.utilisation > highest.utilisation ? check : highest,
-    governing,
-  );
+  const highest = Math.max(...strength.map((check) => check.utilisation));
+  const as = strength.filter((check) => check.utilisation >= highest * (1 - SAME));
+  // The joint is as highly used as what stops it: name what stops it.
+  return as.find((check) => check.component !== "joint-moment") ?? as[0] ?? governing;
 }
 
 /** The bare column in one plain sentence: verdict, governing component, side, load case. */

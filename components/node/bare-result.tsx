@@ -98,6 +98,14 @@ function Joints({ outcome }: { readonly outcome: EvaluatedOption }) {
   );
 }
 
+/** Stands where the calculation gave no cautions of its own. */
+const Caution = () => (
+  <p className="mt-3 border-t border-rule pt-2 text-note text-soft">
+    To EN 1993-1-8:2005. National annexes, the project specification and the licensed engineer’s decision come
+    first. Fatigue, seismic detailing and fire are not covered.
+  </p>
+);
+
 export interface BareResultProps {
   readonly bare: BareOutcome | null;
   /** The target utilisation. */
@@ -136,7 +144,10 @@ export function BareResult({ bare, limit, isStale }: BareResultProps) {
           </div>
           <Joints outcome={bare.outcome} />
           {bare.outcome.cautions.length > 0 ? (
-            <ul className="mt-2 list-disc pl-4 text-note text-soft" aria-label="Cautions">
+            <ul
+              className="mt-3 list-disc border-t border-rule pt-2 pl-4 text-note text-soft"
+              aria-label="Cautions"
+            >
               {bare.outcome.cautions.map((caution) => (
                 <li key={caution}>{caution}</li>
               ))}
@@ -144,10 +155,7 @@ export function BareResult({ bare, limit, isStale }: BareResultProps) {
           ) : null}
         </>
       ) : null}
-      <p className="mt-3 border-t border-rule pt-2 text-note text-soft">
-        To EN 1993-1-8:2005. National annexes, the project specification and the licensed engineer’s decision
-        come first. Fatigue, seismic detailing and fire are not covered.
-      </p>
+      {bare?.outcome.kind === "evaluated" ? null : <Caution />}
     </section>
   );
 }

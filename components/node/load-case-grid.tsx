@@ -137,7 +137,12 @@ export function LoadCaseGrid({ errors }: GridProps) {
           {errors.get("loadCases")}
         </p>
       ) : null}
-      <div role="region" aria-label="Load cases" tabIndex={0} className="max-h-[70vh] overflow-auto">
+      <div
+        role="region"
+        aria-label="Load cases"
+        tabIndex={0}
+        className="max-h-[70vh] overflow-auto contain-inline-size"
+      >
         <table className="w-full border-collapse">
           <caption className="sr-only">Actions in each load case</caption>
           <GridHead columns={columns} readOnly={readOnly} />

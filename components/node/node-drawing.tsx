@@ -11,6 +11,7 @@ import {
   viewBoxOf,
   type SvgOptions,
 } from "@/lib/drawing/svg-elements";
+import { extentOf } from "@/lib/drawing/shapes";
 import { DimensionEditor } from "./dimension-editor";
 import { SvgNode } from "./svg-node";
 
@@ -53,7 +54,7 @@ interface DimensionMarkProps extends PartsProps {
 }
 
 const BUTTON_TONE =
-  "cursor-pointer outline-none [&_text]:fill-petrol [&_text]:font-semibold hover:[&_text]:underline hover:[&_polyline]:stroke-petrol focus-visible:[&_rect]:stroke-petrol focus-visible:[&_rect]:[stroke-width:4]";
+  "cursor-pointer outline-none [&_text]:fill-petrol [&_text]:font-semibold hover:[&_text]:underline hover:[&_polyline]:stroke-petrol focus-visible:[&_rect:last-of-type]:stroke-petrol focus-visible:[&_rect:last-of-type]:[stroke-width:4]";
 
 /** Room around the text to point at, mm; wide enough for a finger at the sheet's usual scale. */
 function hitBox({ text, textAt, anchor, rotation }: Dimension, heightMm: number) {
@@ -63,6 +64,17 @@ function hitBox({ text, textAt, anchor, rotation }: Dimension, heightMm: number)
   return rotation === 0
     ? { x: textAt.x - before, y: textAt.y - heightMm * 1.2, width: along, height: across }
     : { x: textAt.x - heightMm * 1.2, y: textAt.y - along / 2, width: across, height: along };
+}
+
+/** The lines of a dimension as an area to point at: a hair line cannot be hit. */
+function linesBox({ lines }: Dimension, marginMm: number) {
+  const { minX, minY, maxX, maxY } = extentOf(lines.flat());
+  return {
+    x: minX - marginMm,
+    y: minY - marginMm,
+    width: maxX - minX + 2 * marginMm,
+    height: maxY - minY + 2 * marginMm,
+  };
 }
 
 function DimensionMark({ view, options, index, dimension, active, onOpen }: DimensionMarkProps) {
@@ -92,8 +104,9 @@ function DimensionMark({ view, options, index, dimension, active, onOpen }: Dime
       onClick={() => onOpen(index)}
       onKeyDown={onKeyDown}
     >
+      <rect {...linesBox(dimension, view.textHeightMm * 0.25)} fill="var(--paper)" fillOpacity={0} />
       <rect {...hitBox(dimension, view.textHeightMm)} fill="var(--paper)" fillOpacity={0} />
-      {drawn}
+      <g pointerEvents="none">{drawn}</g>
     </g>
   );
 }

@@ -53,13 +53,16 @@ export function NodeSheetForm(props: NodeSheetFormProps) {
     }),
     [draft, catalog, canEdit, set, edit, errors],
   );
+  const goToFault = useCallback(() => {
+    const [first] = reading.errors.keys();
+    if (first !== undefined) focusField(first);
+  }, [reading]);
   const { onSave, isSaving } = props;
   const save = useCallback(() => {
     if (isSaving) return;
-    const [firstFault] = reading.errors.keys();
     if (reading.document) onSave(reading.document);
-    else if (firstFault !== undefined) focusField(firstFault);
-  }, [reading, onSave, isSaving]);
+    else goToFault();
+  }, [reading, onSave, isSaving, goToFault]);
   useSaveKey(canEdit ? save : null);
 
   const limit = numberTyped(textAt(draft, "target.utilisation")) || 1;
@@ -78,7 +81,9 @@ export function NodeSheetForm(props: NodeSheetFormProps) {
           saveLabel={props.saveLabel}
           comparisonHref={props.comparisonHref}
           onSave={save}
-          onDrop={() => nodeDraft.open(nodeDraft.opened)}
+          onDrop={() => edit(() => nodeDraft.opened.draft)}
+          onUndo={nodeDraft.undo}
+          onFirstFault={goToFault}
           onJson={() => setShowsJson(true)}
         />
         <div className="mt-3 grid gap-2 empty:hidden">

@@ -17,6 +17,8 @@ export interface SheetBarProps {
   readonly comparisonHref: string | null;
   readonly onSave: () => void;
   readonly onDrop: () => void;
+  readonly onUndo: (() => void) | null;
+  readonly onFirstFault: () => void;
   readonly onJson: () => void;
 }
 
@@ -24,10 +26,12 @@ function standWords({
   faultCount,
   isChanged,
   canEdit,
-}: Pick<SheetBarProps, "faultCount" | "isChanged" | "canEdit">): string {
+  comparisonHref,
+}: Pick<SheetBarProps, "faultCount" | "isChanged" | "canEdit" | "comparisonHref">): string {
   if (!canEdit) return "";
   if (faultCount > 0)
     return faultCount === 1 ? "one field not in order" : `${faultCount} fields not in order`;
+  if (comparisonHref === null) return "not saved yet";
   return isChanged ? "changed, not saved" : "saved";
 }
 
@@ -37,16 +41,23 @@ export function SheetBar(props: SheetBarProps) {
   const stand = standWords(props);
   return (
     <div className="no-print sticky top-0 z-20 -mx-5 flex flex-wrap items-center justify-between gap-x-6 gap-y-1.5 border-y border-ink bg-paper px-5 py-1.5 desk:-mx-9 desk:px-9">
-      <p className="min-w-0 flex-1 truncate">
+      <p className="min-w-0 flex-1">
         {bare === null || bare.outcome.kind === "fault" ? (
           <span className="text-soft">no result yet</span>
         ) : (
           <Sentence parts={bareSummary(bare.outcome, limit)} />
         )}
-        {stand === "" ? null : (
-          <span
-            className={`ml-3 text-note ${props.faultCount > 0 ? "font-semibold text-fail" : "text-soft"}`}
-          >{`${props.faultCount > 0 ? "▲ " : ""}${stand}`}</span>
+        {props.faultCount > 0 && canEdit ? (
+          <button
+            type="button"
+            onClick={props.onFirstFault}
+            className="ml-3 text-note font-semibold text-fail hover:underline"
+          >
+            <span aria-hidden="true">▲ </span>
+            {stand}
+          </button>
+        ) : (
+          <span className="ml-3 text-note text-soft">{stand}</span>
         )}
       </p>
       <div
@@ -55,6 +66,7 @@ export function SheetBar(props: SheetBarProps) {
         className="flex flex-wrap *:-ml-px *:focus-visible:z-10 [&>*]:relative"
       >
         <Button onClick={props.onJson}>JSON</Button>
+        {canEdit && props.onUndo ? <Button onClick={props.onUndo}>Undo</Button> : null}
         {canEdit && isChanged ? <Button onClick={props.onDrop}>Drop changes</Button> : null}
         {comparisonHref ? (
           <ButtonLink href={comparisonHref} kind={canEdit && isChanged ? "plain" : "primary"}>

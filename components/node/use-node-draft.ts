@@ -25,24 +25,58 @@ export interface NodeDraft {
   readonly refused: ReadonlyMap<string, string>;
   readonly set: (path: string, value: DraftValue | undefined) => void;
   readonly edit: (change: (draft: DraftObject) => DraftObject) => void;
+  /** Takes the last change back; null when there is none. */
+  readonly undo: (() => void) | null;
   /** Starts again from a saved version. `onTop` says what stays typed on top of it, given what is typed now. */
   readonly open: (opened: OpenedNode, onTop?: (now: DraftObject) => DraftObject) => void;
   readonly refuse: (errors: readonly { readonly path: string; readonly message: string }[]) => void;
 }
 
+/** A draft as it was before a change, and the field that the change was typed into. */
+interface Before {
+  readonly draft: DraftObject;
+  readonly path: string | null;
+}
+
 interface State {
+  /** The latest last. */
+  readonly before: readonly Before[];
   readonly draft: DraftObject;
   readonly opened: OpenedNode;
   readonly isRestored: boolean;
 }
+
+/** How many changes can be taken back. */
+const KEPT_CHANGES = 60;
 
 const NOTHING_REFUSED: ReadonlyMap<string, string> = new Map();
 
 function startOf(storeKey: string, saved: OpenedNode, mayEdit: boolean): State {
   const kept = mayEdit ? keptDraft(storeKey) : null;
   if (kept === null || sameDraft(kept.draft, saved.draft))
-    return { draft: saved.draft, opened: saved, isRestored: false };
-  return { draft: kept.draft, opened: { version: kept.openedVersion, draft: kept.opened }, isRestored: true };
+    return { before: [], draft: saved.draft, opened: saved, isRestored: false };
+  return {
+    before: [],
+    draft: kept.draft,
+    opened: { version: kept.openedVersion, draft: kept.opened },
+    isRestored: true,
+  };
+}
+
+/** One change: text typed on into one field counts as one. */
+function changed(state: State, change: (draft: DraftObject) => DraftObject, path: string | null): State {
+  const draft = change(state.draft);
+  if (draft === state.draft) return state;
+  const continues = path !== null && state.before.at(-1)?.path === path;
+  const before = continues
+    ? state.before
+    : [...state.before, { draft: state.draft, path }].slice(-KEPT_CHANGES);
+  return { ...state, draft, before };
+}
+
+function takenBack(state: State): State {
+  const last = state.before.at(-1);
+  return last ? { ...state, draft: last.draft, before: state.before.slice(0, -1) } : state;
 }
 
 /**
@@ -76,20 +110,39 @@ export function useNodeDraft(
 
   const edit = useCallback((change: (draft: DraftObject) => DraftObject) => {
     setRefused(NOTHING_REFUSED);
-    setState((now) => ({ ...now, draft: change(now.draft) }));
+    setState((now) => changed(now, change, null));
   }, []);
-  const set = useCallback(
-    (path: string, value: DraftValue | undefined) => edit((now) => withValue(now, path, value)),
-    [edit],
-  );
+  const set = useCallback((path: string, value: DraftValue | undefined) => {
+    setRefused(NOTHING_REFUSED);
+    setState((now) => changed(now, (draft) => withValue(draft, path, value), path));
+  }, []);
+  const undo = useCallback(() => setState(takenBack), []);
   const open = useCallback((next: OpenedNode, onTop?: (now: DraftObject) => DraftObject) => {
     setRefused(NOTHING_REFUSED);
-    setState((now) => ({ opened: next, draft: onTop?.(now.draft) ?? next.draft, isRestored: false }));
+    setState((now) => ({
+      before: [],
+      opened: next,
+      draft: onTop?.(now.draft) ?? next.draft,
+      isRestored: false,
+    }));
   }, []);
   const refuse = useCallback(
     (errors: readonly { readonly path: string; readonly message: string }[]) =>
       setRefused(new Map(errors.map(({ path, message }) => [path, message]))),
     [],
   );
-  return { draft, opened, reading, drawn, isChanged, isRestored, refused, set, edit, open, refuse };
+  return {
+    draft,
+    opened,
+    reading,
+    drawn,
+    isChanged,
+    isRestored,
+    refused,
+    set,
+    edit,
+    undo: state.before.length > 0 ? undo : null,
+    open,
+    refuse,
+  };
 }

@@ -221,8 +221,9 @@ export function elevationDimensions(
     ...endDistances(node, frame, pixel),
     ...levelOffset(frame, pixel),
     ...frame.joints.flatMap((placed) => [
-      ...plateDimensions(placed, pixel),
+      // Rows first: where a leader crosses a dimension of the plate, the dimension is the one to point at.
       ...rowLevels(frame, placed, pixel),
+      ...plateDimensions(placed, pixel),
       beamDepth(frame, placed, options, (placed.rowsMm.length > 0 ? 58 : 20) * pixel, pixel),
     ]),
     columnDepth(frame, options, pixel),

@@ -74,6 +74,8 @@ describe("the bare column in words", () => {
     expect(said(bareSentence(outcome([rule(1.2), check("column-web-shear", 0.4)]), 1))).toContain(
       "detailing on the right reaches 1.20 in every load case",
     );
+    const tied = outcome([rule(0.9), check("joint-moment", 0.6), check("column-web-compression", 0.6)]);
+    expect(namedCheck(tied).component).toBe("column-web-compression");
     expect(EVERY_CASE).toBe(CALCULATED_EVERY_CASE);
   });
   it("gives the reason where the method does not reach", () => {

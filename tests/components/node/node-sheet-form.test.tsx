@@ -129,6 +129,22 @@ describe("the node sheet", () => {
     expect(screen.queryByRole("textbox", { name: "Right end plate thickness (mm)" })).toBeNull();
   });
 
+  it("takes changes back one field at a time, and dropped changes too", () => {
+    render(<Sheet />);
+    type(THICKNESS, "2");
+    type(THICKNESS, "25");
+    type("Number of nodes", "14");
+    fireEvent.click(screen.getByText("Drop changes"));
+    expect(field(THICKNESS)).toHaveValue("20");
+    fireEvent.click(screen.getByText("Undo"));
+    expect(field(THICKNESS)).toHaveValue("25");
+    fireEvent.click(screen.getByText("Undo"));
+    expect(field("Number of nodes")).toHaveValue("12");
+    fireEvent.click(screen.getByText("Undo"));
+    expect(field(THICKNESS)).toHaveValue("20");
+    expect(screen.queryByText("Undo")).toBeNull();
+  });
+
   it("takes rows pasted from a spreadsheet", () => {
     render(<Sheet />);
     fireEvent.paste(field("Load case ULS 1, name"), {

@@ -10,12 +10,12 @@ describe("dimensions of the elevation", () => {
   it("names the field of the node document behind each value", () => {
     const left = dimensionsOf(buildDrawingCase({ joints: [buildJoint("left")] }));
     expect(left.map(({ edits, valueMm }) => [edits, valueMm])).toEqual([
-      ["left.connection.plate.thickness", 20],
-      ["left.connection.plate.extensionTop", 90],
-      ["left.connection.plate.extensionBottom", 30],
       ["left.connection.bolts.rows.0", -45],
       ["left.connection.bolts.rows.1", 65],
       ["left.connection.bolts.rows.2", 385],
+      ["left.connection.plate.thickness", 20],
+      ["left.connection.plate.extensionTop", 90],
+      ["left.connection.plate.extensionBottom", 30],
       [null, 450],
       [null, 290],
     ]);
