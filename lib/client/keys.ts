@@ -7,6 +7,7 @@ export const projectKeys = {
   all: ["projects"] as const,
   one: (projectId: string) => [...projectKeys.all, projectId] as const,
   nodes: (projectId: string) => [...projectKeys.all, projectId, "nodes"] as const,
+  members: (projectId: string) => [...projectKeys.all, projectId, "members"] as const,
 };
 
 export const nodeKeys = {

@@ -1,6 +1,7 @@
 import { mutationOptions, type QueryClient } from "@tanstack/react-query";
 import { type SetStockPlates, StockPlatesReply } from "@/lib/schemas/catalog";
 import { ExclusionsReply, RecalculationReply } from "@/lib/schemas/comparison";
+import { type AddMember, MembersReply } from "@/lib/schemas/members";
 import { DeletedReply, type Node, NodeReply, SavedDocument } from "@/lib/schemas/node";
 import type { NodeDocument } from "@/lib/schemas/node-document";
 import { type CreateProject, type Project, ProjectReply, type UpdateProject } from "@/lib/schemas/project";
@@ -109,6 +110,20 @@ export const updateProjectMutation = (queryClient: QueryClient, projectId: strin
     mutationFn: async (input: UpdateProject): Promise<Project> =>
       (await request(ProjectReply, `/api/projects/${projectId}`, { method: "PATCH", body: input })).project,
     onSuccess: () => queryClient.invalidateQueries({ queryKey: projectKeys.all }),
+  });
+
+export const addMemberMutation = (queryClient: QueryClient, projectId: string) =>
+  mutationOptions({
+    mutationFn: (input: AddMember) =>
+      request(MembersReply, `/api/projects/${projectId}/members`, { method: "POST", body: input }),
+    onSuccess: (reply) => queryClient.setQueryData(projectKeys.members(projectId), reply),
+  });
+
+export const removeMemberMutation = (queryClient: QueryClient, projectId: string) =>
+  mutationOptions({
+    mutationFn: ({ personId }: { readonly personId: string }) =>
+      request(MembersReply, `/api/projects/${projectId}/members/${personId}`, { method: "DELETE" }),
+    onSuccess: (reply) => queryClient.setQueryData(projectKeys.members(projectId), reply),
   });
 
 export const setStockPlatesMutation = (queryClient: QueryClient) =>

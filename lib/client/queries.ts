@@ -2,6 +2,7 @@ import { queryOptions } from "@tanstack/react-query";
 import { CatalogReply } from "@/lib/schemas/catalog";
 import { ComparisonReply, WorkingReply } from "@/lib/schemas/comparison";
 import { Me } from "@/lib/schemas/me";
+import { MembersReply } from "@/lib/schemas/members";
 import { NodeListReply, NodeReply, NodeRevisionListReply, NodeRevisionReply } from "@/lib/schemas/node";
 import { PricesReply } from "@/lib/schemas/prices";
 import { ProjectListReply, ProjectReply } from "@/lib/schemas/project";
@@ -30,6 +31,13 @@ export const projectOptions = (projectId: string) =>
     queryKey: projectKeys.one(projectId),
     queryFn: async ({ signal }) =>
       (await request(ProjectReply, `/api/projects/${projectId}`, { signal })).project,
+  });
+
+/** Who is in the project, and whether the signed-in person may change that. */
+export const membersOptions = (projectId: string) =>
+  queryOptions({
+    queryKey: projectKeys.members(projectId),
+    queryFn: ({ signal }) => request(MembersReply, `/api/projects/${projectId}/members`, { signal }),
   });
 
 /** The register: one row a node, and how money stands in it. */

@@ -25,6 +25,11 @@ export const canCreateProject = (actor: Actor): boolean => hasRight(actor, "proj
 export const canEditProject = (actor: Actor, project: ProjectFacts): boolean =>
   isMember(actor, project) && isOwn(actor, project) && !project.isLocked && hasRight(actor, "project.edit");
 
+/** Who is in a project is said by its designers and by the organisation's admin, who need not be in it. */
+export const canManageMembers = (actor: Actor, project: ProjectFacts): boolean =>
+  isOwn(actor, project) &&
+  ((isMember(actor, project) && hasRight(actor, "project.edit")) || hasRight(actor, "people.manage"));
+
 /**
  * Rates are the business of the organisation that owns them: a member from outside sees an index.
  */

@@ -7,6 +7,8 @@ export const AUDIT_ACTIONS = [
   "person.signed-out",
   "project.created",
   "project.edited",
+  "project.member-added",
+  "project.member-removed",
   "node.created",
   "node.saved",
   "node.deleted",

@@ -8,6 +8,7 @@ import { canManagePeople, canManagePerson } from "@/lib/policies/people";
 import {
   canCreateProject,
   canEditProject,
+  canManageMembers,
   canSeeMoney,
   canViewProject,
   type ProjectFacts,
@@ -39,6 +40,7 @@ type Place = keyof typeof PLACES;
 
 const RULES = {
   canViewProject,
+  canManageMembers,
   canEditProject,
   canSeeMoney,
   canViewNode,
@@ -65,6 +67,13 @@ const TABLE: Readonly<Record<Rule, Readonly<Record<Place, readonly Role[]>>>> = 
     "no member, own organisation": ["admin"],
     "no member, other organisation": nobody,
     "member, own organisation, locked": all,
+  },
+  canManageMembers: {
+    "member, own organisation": ["designer", "admin"],
+    "member, other organisation": nobody,
+    "no member, own organisation": ["admin"],
+    "no member, other organisation": nobody,
+    "member, own organisation, locked": ["designer", "admin"],
   },
   canEditProject: {
     "member, own organisation": ["designer"],
