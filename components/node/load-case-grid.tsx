@@ -141,7 +141,7 @@ export function LoadCaseGrid({ errors }: GridProps) {
         role="region"
         aria-label="Load cases"
         tabIndex={0}
-        className="max-h-[70vh] overflow-auto contain-inline-size"
+        className="relative max-h-[70vh] overflow-auto contain-inline-size"
       >
         <table className="w-full border-collapse">
           <caption className="sr-only">Actions in each load case</caption>
