@@ -38,7 +38,7 @@ interface Column {
 
 const HEAD_COLUMN =
   "sticky left-0 z-10 w-[132px] min-w-[132px] desk:w-[168px] desk:min-w-[168px] head-rule bg-paper px-3 desk:px-3.5 text-left font-[450]";
-const OPEN_WIDTH = "w-[196px] min-w-[168px] desk:min-w-[176px] px-3 desk:px-3.5";
+const OPEN_WIDTH = "w-[196px] min-w-[168px] px-3 desk:px-3.5";
 const FOLDED_WIDTH = "w-[46px] min-w-[46px] px-1.5";
 
 /** Tints of a column: the cheapest on a wash, what cannot be chosen under a hatch. */

@@ -11,19 +11,21 @@ export interface SiteHeaderProps {
 /** The sheet's head rule: product name, navigation, person. */
 export function SiteHeader({ children, end }: SiteHeaderProps) {
   return (
-    <header className="no-print flex flex-wrap items-baseline gap-x-7 gap-y-2 border-b-2 border-ink px-5 pt-3.5 pb-[11px] desk:px-9">
-      <Link
-        href="/"
-        className="text-[1.0625rem] font-[750] tracking-[-0.01em] text-ink no-underline [font-stretch:112%]"
-      >
-        Panelwright
-      </Link>
-      {children ? (
-        <nav aria-label="Main" className="flex flex-wrap items-baseline gap-x-5 gap-y-1">
-          {children}
-        </nav>
-      ) : null}
-      <div className="ml-auto flex flex-wrap items-baseline gap-x-5 gap-y-1">{end}</div>
+    <header className="no-print border-b-2 border-ink">
+      <div className="header-line flex flex-wrap items-baseline gap-x-7 gap-y-2 px-5 pt-3.5 pb-[11px] desk:px-9">
+        <Link
+          href="/"
+          className="text-[1.0625rem] font-[750] tracking-[-0.01em] text-ink no-underline [font-stretch:112%]"
+        >
+          Panelwright
+        </Link>
+        {children ? (
+          <nav aria-label="Main" className="flex flex-wrap items-baseline gap-x-5 gap-y-1">
+            {children}
+          </nav>
+        ) : null}
+        <div className="ml-auto flex flex-wrap items-baseline gap-x-5 gap-y-1">{end}</div>
+      </div>
     </header>
   );
 }

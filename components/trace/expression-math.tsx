@@ -1,7 +1,7 @@
 import { createElement, type ReactNode } from "react";
 import { formatFigures } from "@/components/ui/format-number";
 import { parseExpression, type Expression } from "./parse-expression";
-import { splitSymbol, unitText } from "./symbol-text";
+import { isLetter, splitSymbol, unitText } from "./symbol-text";
 
 /* MathML: drawn by the browser itself, read aloud by screen readers, and free of style attributes. */
 const tag = (name: string, props: object | null, ...children: readonly ReactNode[]) =>
@@ -26,10 +26,9 @@ type NameSetter = (name: string) => ReactNode;
 
 function symbolMath(symbol: string): ReactNode {
   const { base, below } = splitSymbol(symbol);
-  const letter =
-    base.length === 1
-      ? tag("mi", { mathvariant: "normal", className: "italic" }, base)
-      : tag("mtext", null, base);
+  const letter = isLetter(base)
+    ? tag("mi", { mathvariant: "normal", className: "italic" }, base)
+    : tag("mtext", null, base);
   return below === null ? letter : tag("msub", null, letter, tag("mtext", null, below));
 }
 
@@ -46,9 +45,16 @@ function numberMath(value: number): ReactNode {
 const withoutGroup = (expression: Expression): Expression =>
   expression.kind === "group" ? withoutGroup(expression.of) : expression;
 
+/**
+ * A root under a drawn bar. A browser stretches the sign of `msqrt` only with a mathematical font at
+ * hand; without one its bar ends up where it can be misread.
+ */
+const rootMath = (radicand: ReactNode): ReactNode =>
+  row(operator("√", { stretchy: "false", rspace: "0" }), tag("mrow", { className: "radicand" }, radicand));
+
 function callMath(name: string, given: readonly Expression[], set: NameSetter): ReactNode {
   const [first] = given;
-  if (name === "sqrt" && first) return tag("msqrt", null, math(withoutGroup(first), set));
+  if (name === "sqrt" && first) return rootMath(math(withoutGroup(first), set));
   if (name === "abs" && first) return row(operator("|"), math(first, set), operator("|"));
   const list = given.flatMap((item, index) =>
     index === 0 ? [math(item, set)] : [operator(";"), math(item, set)],
@@ -59,14 +65,11 @@ function callMath(name: string, given: readonly Expression[], set: NameSetter): 
 function choiceMath(expression: Extract<Expression, { kind: "choice" }>, set: NameSetter): ReactNode {
   const line = (value: Expression, words: ReactNode) =>
     tag("mtr", null, tag("mtd", null, math(value, set)), tag("mtd", null, words));
-  return row(
-    operator("{"),
-    tag(
-      "mtable",
-      { columnalign: "left left" },
-      line(expression.then, row(tag("mtext", null, "where "), math(expression.condition, set))),
-      line(expression.otherwise, tag("mtext", null, "otherwise")),
-    ),
+  return tag(
+    "mtable",
+    { className: "cases", displaystyle: "true" },
+    line(expression.then, row(tag("mtext", null, "where\u00a0"), math(expression.condition, set))),
+    line(expression.otherwise, tag("mtext", null, "otherwise")),
   );
 }
 

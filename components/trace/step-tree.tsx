@@ -1,7 +1,7 @@
 import type { Step } from "@/lib/calc/trace/trace";
 import { formatFigures, formatNumber } from "@/components/ui/format-number";
 import { ExpressionMath } from "./expression-math";
-import { SymbolText, unitText } from "./symbol-text";
+import { sourceText, SymbolText, unitText } from "./symbol-text";
 
 /** Inner units as a reader of calculations expects them: the exact value first, then kN or kNm. */
 function inLargerUnit(value: number, unit: string): string | null {
@@ -81,7 +81,7 @@ export function StepTree({ steps, openDepth = 1 }: StepTreeProps) {
                 <span aria-hidden="true" className="fold-mark mr-1.5 inline-block w-2.5 text-petrol" />
                 <SymbolText symbol={step.symbol} /> = <Value value={step.value} unit={step.unit} />
               </span>
-              <cite className="text-note text-soft not-italic">{`${step.source.document}:${step.source.edition}, ${step.source.ref}`}</cite>
+              <cite className="text-note text-soft not-italic">{`${sourceText(step.source)}, ${step.source.ref}`}</cite>
             </summary>
             <StepBody step={step} />
             {step.children && step.children.length > 0 ? (

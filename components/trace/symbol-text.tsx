@@ -24,13 +24,21 @@ export function splitSymbol(symbol: string): { readonly base: string; readonly b
   return { base: GREEK[base] ?? base, below: at < 0 ? null : symbol.slice(at + 1) };
 }
 
+/** One letter, with whatever stands over it: set in italics, as symbols are. */
+export const isLetter = (base: string): boolean => /^\p{L}\p{M}*$/u.test(base);
+
+/** Where a formula comes from, as it is cited. An edition is a year, or words where there is none. */
+export const sourceText = (source: { readonly document: string; readonly edition: string }): string =>
+  /^\d/.test(source.edition)
+    ? `${source.document}:${source.edition}`
+    : `${source.document}, ${source.edition}`;
+
 /** A symbol in running text, with its index below the line. */
 export function SymbolText({ symbol }: { readonly symbol: string }) {
   const { base, below } = splitSymbol(symbol);
-  const isLetter = base.length === 1;
   return (
     <span>
-      {isLetter ? <i>{base}</i> : base}
+      {isLetter(base) ? <i>{base}</i> : base}
       {below === null ? null : <sub className="text-[0.78em]">{below}</sub>}
     </span>
   );

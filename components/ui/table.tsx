@@ -49,13 +49,11 @@ export interface SortableThProps {
 export function SortableTh({ direction, onSort, className, children }: SortableThProps) {
   return (
     <Th aria-sort={direction ?? "none"} {...(className ? { className } : {})}>
-      <button
-        type="button"
-        onClick={onSort}
-        className="inline-flex items-baseline gap-1 text-left font-semibold hover:underline"
-      >
+      <button type="button" onClick={onSort} className="[text-align:inherit] font-semibold hover:underline">
         {children}
+        {/* A no-break space: the arrow stays with the last word. */}
         <span aria-hidden="true" className={direction ? "text-petrol" : "text-faint"}>
+          {"\u00a0"}
           {direction === "descending" ? "▾" : "▴"}
         </span>
       </button>

@@ -1,3 +1,5 @@
+import { sourceText } from "@/components/trace/symbol-text";
+
 /** What the method page reads of a formula. */
 export interface ListedFormula {
   readonly id: string;
@@ -17,14 +19,12 @@ const byNumbers = new Intl.Collator("en", { numeric: true });
 
 /** Formulas by document and edition, each group in the order of its clauses. */
 export function formulaGroups(formulas: readonly ListedFormula[]): readonly FormulaGroup[] {
-  const titles = [...new Set(formulas.map(({ source }) => `${source.document}:${source.edition}`))].sort(
-    byNumbers.compare,
-  );
+  const titles = [...new Set(formulas.map(({ source }) => sourceText(source)))].sort(byNumbers.compare);
   return titles.map((title) => ({
     title,
     anchor: title.toLowerCase().replace(/[^a-z0-9]+/g, "-"),
     formulas: formulas
-      .filter(({ source }) => `${source.document}:${source.edition}` === title)
+      .filter(({ source }) => sourceText(source) === title)
       .sort((a, b) => byNumbers.compare(a.source.ref, b.source.ref) || byNumbers.compare(a.id, b.id)),
   }));
 }

@@ -128,7 +128,7 @@ describe("the register of nodes", () => {
     show();
     const href = `/projects/${projectId}/nodes/${nodeId(2)}`;
     expect(await screen.findByRole("link", { name: "C2" })).toHaveAttribute("href", href);
-    expect(screen.getByRole("link", { name: "Comparison of C2" })).toHaveAttribute(
+    expect(screen.getByRole("link", { name: "Compare the options for C2" })).toHaveAttribute(
       "href",
       `${href}/comparison`,
     );

@@ -122,9 +122,10 @@ function Ready({
 /** What the register says in a sentence. */
 function summary(rows: readonly NodeRow[]): string {
   const count = (state: NodeRow["state"]) => rows.filter((row) => row.state === state).length;
+  const bare = count("bare-passes");
   const parts = [
     [count("solved"), "solved"],
-    [count("bare-passes"), "need no stiffening"],
+    [bare, bare === 1 ? "needs no stiffening" : "need no stiffening"],
     [count("nothing-passes"), "where nothing passes"],
     [count("outside-scope"), "outside scope"],
     [count("not-compared"), "not compared yet"],

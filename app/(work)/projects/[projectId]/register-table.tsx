@@ -62,14 +62,14 @@ function NodeLine({
       <th scope="row" className="border-t border-rule px-3 py-1.5 text-left align-top font-normal">
         <Link
           href={href}
-          className="font-[650] text-ink underline decoration-rule2 underline-offset-4 hover:decoration-petrol"
+          className="font-[650] whitespace-nowrap text-ink underline decoration-rule2 underline-offset-4 hover:decoration-petrol"
         >
           {row.reference}
         </Link>{" "}
         <span className="block text-note text-soft">{`revision ${row.version}`}</span>
       </th>
       <Td className="whitespace-nowrap">{row.column}</Td>
-      <Td>{beamWords(row)}</Td>
+      <Td className="min-w-[11ch]">{beamWords(row)}</Td>
       <BareCell row={row} />
       <Td>
         {row.leading ? (
@@ -97,21 +97,16 @@ function NodeLine({
         <span className="block">{row.updatedBy.name}</span>
       </Td>
       <Td className="no-print text-right whitespace-nowrap">
-        <Link
-          href={`${href}/comparison`}
-          className="prose-link"
-          aria-label={`Comparison of ${row.reference}`}
-        >
-          Compare
+        <Link href={`${href}/comparison`} className="prose-link">
+          Compare<span className="sr-only">{` the options for ${row.reference}`}</span>
         </Link>
         {onDelete ? (
           <button
             type="button"
             onClick={() => onDelete(row)}
-            aria-label={`Delete ${row.reference}`}
             className="ml-3 text-soft underline-offset-2 hover:text-fail hover:underline"
           >
-            Delete
+            Delete <span className="sr-only">{row.reference}</span>
           </button>
         ) : null}
       </Td>
