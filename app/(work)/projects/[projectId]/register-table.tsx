@@ -97,8 +97,9 @@ function NodeLine({
         <span className="block">{row.updatedBy.name}</span>
       </Td>
       <Td className="no-print text-right whitespace-nowrap">
-        <Link href={`${href}/comparison`} className="prose-link">
-          Compare<span className="sr-only">{` the options for ${row.reference}`}</span>
+        <Link href={`${href}/comparison`}>
+          <span className="prose-link">Compare</span>{" "}
+          <span className="sr-only">{`the options for ${row.reference}`}</span>
         </Link>
         {onDelete ? (
           <button
