@@ -1,6 +1,6 @@
 import { joinClasses } from "@/components/ui/join-classes";
 import { formatUtilisation } from "@/components/ui/format-number";
-import type { Cell, Opening } from "./comparison-rows";
+import type { Cell, Opening } from "./comparison-cells";
 import { stopProps } from "./use-grid-keys";
 import { UtilisationBar, UtilisationFigure } from "./utilisation-bar";
 

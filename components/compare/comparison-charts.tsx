@@ -3,7 +3,7 @@ import type { ResultDocument } from "@/lib/schemas/result-document";
 import { formatMinutes, formatWholeMoney, moneyUnit } from "@/components/ui/format-number";
 import { StackedFigure } from "@/components/cost/stacked-figure";
 import { stackedShares, type LetteredOption } from "@/components/cost/stacked-shares";
-import { isEvaluated } from "./comparison-rows";
+import { isEvaluated } from "./comparison-cells";
 import { sentenceCase } from "./component-labels";
 import { columnLetter } from "./rank-words";
 

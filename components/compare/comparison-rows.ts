@@ -6,78 +6,11 @@ import type {
   OptionDocument,
   ResultDocument,
 } from "@/lib/schemas/result-document";
-import {
-  formatMinutes,
-  formatMoney,
-  formatNumber,
-  formatWholeMoney,
-  moneyUnit,
-} from "@/components/ui/format-number";
+import { formatNumber } from "@/components/ui/format-number";
+
 import { COMPONENT_ROWS, componentLabel, type RowGroupKey } from "./component-labels";
-
-/** What opens when a cell is pressed. */
-export type Opening =
-  | { readonly about: "component"; readonly component: ComponentId }
-  | { readonly about: "joint" }
-  | { readonly about: "hours"; readonly trade?: string }
-  | { readonly about: "cost"; readonly category?: string }
-  | { readonly about: "option" };
-
-export type Cell =
-  /** No number here, and why in words: "not added", "outside scope". */
-  | { readonly kind: "none"; readonly words: string }
-  | {
-      readonly kind: "utilisation";
-      readonly value: number;
-      readonly component: ComponentId;
-      /** Where the worst is: "right, ULS 3". */
-      readonly where: string;
-      readonly isGoverning: boolean;
-      readonly opens: Opening;
-    }
-  | {
-      readonly kind: "quantity";
-      readonly text: string;
-      readonly unit: string;
-      readonly note?: string;
-      readonly isBig?: boolean;
-      readonly opens: Opening | null;
-    }
-  | {
-      readonly kind: "verdict";
-      readonly word: string;
-      readonly tone: "pass" | "fail" | "plain";
-      readonly value: number | null;
-      readonly note: string;
-      readonly opens: Opening;
-    }
-  | { readonly kind: "list"; readonly items: readonly string[] };
-
-export interface Row {
-  readonly key: string;
-  readonly label: string;
-  /** A part of the figure above it: "of which welder". */
-  readonly isPart?: boolean;
-  /** In the order of the options. */
-  readonly cells: readonly Cell[];
-}
-
-export interface RowGroup {
-  readonly key: string;
-  /** Null: the rows stand by themselves and do not fold. */
-  readonly title: string | null;
-  readonly startsFolded: boolean;
-  readonly rows: readonly Row[];
-  /** One cell an option, shown in the group's own line while it is folded. */
-  readonly folded?: readonly Cell[];
-}
-
-/** All load cases together, or one of them by name. */
-export type LoadCaseChoice = { readonly kind: "envelope" } | { readonly kind: "one"; readonly name: string };
-
-export const isEvaluated = (option: OptionDocument): option is EvaluatedOptionDocument =>
-  !("outsideScope" in option);
-const OUTSIDE: Cell = { kind: "none", words: "outside scope" };
+import { across, isEvaluated, type Cell, type LoadCaseChoice, type RowGroup } from "./comparison-cells";
+import { costGroup, hoursGroup, massGroup } from "./estimate-rows";
 
 /** The checks of an option in the chosen load case, worst first. */
 export function checksOf(
@@ -106,10 +39,6 @@ export function whereWords(check: ComponentDocument, choice: LoadCaseChoice): st
     .filter(Boolean)
     .join(", ");
 }
-
-/** One cell an option; an option outside the method never shows a number. */
-const across = (result: ResultDocument, cell: (option: EvaluatedOptionDocument) => Cell): readonly Cell[] =>
-  result.options.map((option) => (isEvaluated(option) ? cell(option) : OUTSIDE));
 
 function utilisationCell(
   option: EvaluatedOptionDocument,
@@ -161,11 +90,11 @@ function utilisationGroup(result: ResultDocument, choice: LoadCaseChoice, key: R
   };
 }
 
-function verdictCell(option: EvaluatedOptionDocument, choice: LoadCaseChoice): Cell {
+function verdictCell(option: EvaluatedOptionDocument, choice: LoadCaseChoice, limit: number): Cell {
   const worst = checksOf(option, choice)[0];
   const word = option.passes ? "passes" : "fails";
   const note =
-    !option.passes && !option.stiffnessReached && option.governing.utilisation <= 1
+    !option.passes && !option.stiffnessReached && option.governing.utilisation <= limit
       ? "not stiff enough"
       : worst
         ? `${componentLabel(worst.component)}, ${worst.side}${choice.kind === "envelope" ? `, ${worst.loadCase}` : ""}`
@@ -183,7 +112,7 @@ function verdictCell(option: EvaluatedOptionDocument, choice: LoadCaseChoice): C
 function verdictGroup(result: ResultDocument, choice: LoadCaseChoice): RowGroup {
   const cells = result.options.map((option): Cell =>
     isEvaluated(option)
-      ? verdictCell(option, choice)
+      ? verdictCell(option, choice, result.node.target.utilisation)
       : {
           kind: "verdict",
           word: "outside scope",
@@ -253,131 +182,6 @@ function stiffnessGroup(result: ResultDocument, choice: LoadCaseChoice): RowGrou
         key: "resistance",
         label: "moment resistance",
         cells: across(result, (option) => resistanceCell(option, choice)),
-      },
-    ],
-  };
-}
-
-const nothingAdded: Cell = { kind: "none", words: "nothing added" };
-
-function estimateCells(
-  result: ResultDocument,
-  cell: (option: EvaluatedOptionDocument) => Cell,
-): readonly Cell[] {
-  return across(result, (option) => (option.measures.length === 0 ? nothingAdded : cell(option)));
-}
-
-function hoursGroup(result: ResultDocument): RowGroup {
-  const minutes = (value: number, isBig: boolean, opens: Opening): Cell => ({
-    kind: "quantity",
-    text: formatMinutes(value),
-    unit: "",
-    isBig,
-    opens,
-  });
-  const trades = [
-    ...new Set(
-      result.options.filter(isEvaluated).flatMap((option) => Object.keys(option.estimate.minutesByTrade)),
-    ),
-  ].sort();
-  const shop = estimateCells(result, (option) =>
-    minutes(option.estimate.shopMinutes, true, { about: "hours" }),
-  );
-  return {
-    key: "hours",
-    title: "Hours added",
-    startsFolded: false,
-    folded: shop,
-    rows: [
-      { key: "shop", label: "shop, a node", cells: shop },
-      {
-        key: "site",
-        label: "site, a node",
-        cells: estimateCells(result, (option) =>
-          minutes(option.estimate.siteMinutes, false, { about: "hours" }),
-        ),
-      },
-      ...trades.map((trade) => ({
-        key: `trade-${trade}`,
-        label: trade.replaceAll("-", " "),
-        isPart: true,
-        cells: estimateCells(result, (option) =>
-          minutes(option.estimate.minutesByTrade[trade] ?? 0, false, { about: "hours", trade }),
-        ),
-      })),
-    ],
-  };
-}
-
-function costGroup(result: ResultDocument): RowGroup {
-  const money = (value: number, currency: string, isBig: boolean, opens: Opening): Cell => ({
-    kind: "quantity",
-    text:
-      opens.about === "cost" && opens.category !== undefined ? formatWholeMoney(value) : formatMoney(value),
-    unit: moneyUnit(currency),
-    isBig,
-    opens,
-  });
-  const categories = [
-    ...new Set(
-      result.options
-        .filter(isEvaluated)
-        .flatMap(({ estimate }) =>
-          Object.entries(estimate.costByCategory).flatMap(([key, value]) => (value === 0 ? [] : [key])),
-        ),
-    ),
-  ];
-  const perNode = estimateCells(result, ({ estimate }) =>
-    money(estimate.cost, estimate.currency, true, { about: "cost" }),
-  );
-  return {
-    key: "cost",
-    title: "Cost added",
-    startsFolded: false,
-    folded: perNode,
-    rows: [
-      { key: "cost", label: "a node", cells: perNode },
-      {
-        key: "cost-quantity",
-        label: `all ${result.node.quantity} nodes`,
-        cells: estimateCells(result, ({ estimate }) =>
-          money(estimate.costForQuantity, estimate.currency, false, { about: "cost" }),
-        ),
-      },
-      ...categories.map((category) => ({
-        key: `category-${category}`,
-        label: category === "column" ? "heavier column" : category,
-        isPart: true,
-        cells: estimateCells(result, ({ estimate }) =>
-          money(estimate.costByCategory[category] ?? 0, estimate.currency, false, {
-            about: "cost",
-            category,
-          }),
-        ),
-      })),
-    ],
-  };
-}
-
-function massGroup(result: ResultDocument): RowGroup {
-  const quantity = (value: number, unit: string): Cell => ({
-    kind: "quantity",
-    text: formatNumber(value, value < 100 ? 1 : 0),
-    unit,
-    opens: { about: "cost" },
-  });
-  const mass = estimateCells(result, ({ estimate }) => quantity(estimate.mass, "kg"));
-  return {
-    key: "mass",
-    title: "Steel added",
-    startsFolded: false,
-    folded: mass,
-    rows: [
-      { key: "mass", label: "mass, a node", cells: mass },
-      {
-        key: "carbon",
-        label: "embodied carbon",
-        cells: estimateCells(result, ({ estimate }) => quantity(estimate.carbon, "kg CO₂e")),
       },
     ],
   };

@@ -15,7 +15,7 @@ import { Notice } from "@/components/ui/notice";
 import { Failed, Loading } from "@/components/ui/states";
 import { useViewportWidth } from "@/components/ui/use-viewport-width";
 import { ComparisonCharts } from "./comparison-charts";
-import type { LoadCaseChoice, Opening } from "./comparison-rows";
+import type { LoadCaseChoice, Opening } from "./comparison-cells";
 import { ComparisonTable } from "./comparison-table";
 import { differenceWords } from "./difference-words";
 import { sectionWords } from "./measure-words";

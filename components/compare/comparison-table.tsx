@@ -3,14 +3,8 @@ import { useMemo, useRef, useState, type ReactNode } from "react";
 import type { OptionDocument, ResultDocument } from "@/lib/schemas/result-document";
 import { joinClasses } from "@/components/ui/join-classes";
 import { CellContent } from "./comparison-cell";
-import {
-  comparisonGroups,
-  isEvaluated,
-  type LoadCaseChoice,
-  type Opening,
-  type Row,
-  type RowGroup,
-} from "./comparison-rows";
+import { isEvaluated, type LoadCaseChoice, type Opening, type Row, type RowGroup } from "./comparison-cells";
+import { comparisonGroups } from "./comparison-rows";
 import { Bubble, OptionHead } from "./option-head";
 import { columnLetter } from "./rank-words";
 import { stopProps, useGridKeys } from "./use-grid-keys";

@@ -1,6 +1,6 @@
 import type { OptionDocument, ResultDocument } from "@/lib/schemas/result-document";
 import { formatMoney, moneyUnit } from "@/components/ui/format-number";
-import { isEvaluated } from "./comparison-rows";
+import { isEvaluated } from "./comparison-cells";
 
 export interface RankWords {
   /** The rank as a figure; null where the option is not ranked. */

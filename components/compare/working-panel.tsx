@@ -11,7 +11,8 @@ import { Dialog } from "@/components/ui/dialog";
 import { formatMinutes, formatNumber } from "@/components/ui/format-number";
 import { Failed, Loading } from "@/components/ui/states";
 import { componentLabel, sentenceCase } from "./component-labels";
-import { checksOf, isEvaluated, whereWords, type LoadCaseChoice, type Opening } from "./comparison-rows";
+import { isEvaluated, type LoadCaseChoice, type Opening } from "./comparison-cells";
+import { checksOf, whereWords } from "./comparison-rows";
 import { measureFacts, measureName } from "./measure-words";
 import { UtilisationFigure } from "./utilisation-bar";
 

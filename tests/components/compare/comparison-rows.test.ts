@@ -1,7 +1,8 @@
 import { describe, expect, it } from "vitest";
 import { COMPONENT_IDS } from "@/lib/calc/result";
 import { COMPONENT_ROWS } from "@/components/compare/component-labels";
-import { comparisonGroups, type Cell } from "@/components/compare/comparison-rows";
+import type { Cell } from "@/components/compare/comparison-cells";
+import { comparisonGroups } from "@/components/compare/comparison-rows";
 import {
   buildCheck,
   buildJoint,
