@@ -8,7 +8,7 @@ import type {
   OptionOutcome,
 } from "@/lib/calc/result";
 import { componentOnSide } from "@/lib/ranking/component-words";
-import { formatUtilisation } from "@/components/ui/format-number";
+import { formatNumber, formatUtilisation } from "@/components/ui/format-number";
 
 /** A piece of a sentence and how it is said. */
 export interface SentencePart {
@@ -30,13 +30,23 @@ const SAME = 1e-6;
  * The check a sentence names: the governing one. Where all is in order a rule of detailing says less than
  * strength does, so the highest utilisation of strength stands for it.
  */
-export function namedCheck({ passes, governing, checks }: EvaluatedOption): Governing {
-  if (!passes || governing.component !== "detailing") return governing;
+export function namedCheck({ governing, checks }: EvaluatedOption, limit: number): Governing {
+  if (governing.component !== "detailing" || governing.utilisation > limit) return governing;
   const strength = checks.filter((check) => check.component !== "detailing");
   const highest = Math.max(...strength.map((check) => check.utilisation));
   const as = strength.filter((check) => check.utilisation >= highest * (1 - SAME));
   // The joint is as highly used as what stops it: name what stops it.
   return as.find((check) => check.component !== "joint-moment") ?? as[0] ?? governing;
+}
+
+/** How stiff the softest joint is, in words that go on. */
+function softestWords(outcome: EvaluatedOption): string {
+  const softest = jointLines(outcome).reduce<JointLine | null>(
+    (least, joint) => (least === null || joint.stiffnessKnmPerRad < least.stiffnessKnmPerRad ? joint : least),
+    null,
+  );
+  if (softest === null) return "";
+  return `, the ${softest.side} joint is ${softest.stiffnessClass} at ${formatNumber(softest.stiffnessKnmPerRad)} kNm/rad`;
 }
 
 /** The bare column in one plain sentence: verdict, governing component, side, load case. */
@@ -48,7 +58,7 @@ export function bareSentence(outcome: OptionOutcome, limit: number): readonly Se
       { text: `: ${outcome.reason}` },
     ];
   }
-  const { component, side, loadCase, utilisation } = namedCheck(outcome);
+  const { component, side, loadCase, utilisation } = namedCheck(outcome, limit);
   const what = componentOnSide(component, side);
   const figure = formatUtilisation(utilisation, limit);
   if (outcome.passes) {
@@ -58,7 +68,16 @@ export function bareSentence(outcome: OptionOutcome, limit: number): readonly Se
       { text: `: ${what} is highest at ${figure} ${inCase(loadCase)}.` },
     ];
   }
-  const above = limit === 1 || utilisation <= limit ? "" : `, above the target of ${limit.toFixed(2)}`;
+  if (utilisation <= limit) {
+    return [
+      { text: "The bare column " },
+      { text: "fails", tone: "fail" },
+      {
+        text: `: it is not as stiff as asked for${softestWords(outcome)}. Strength is enough: ${what} is highest at ${figure} ${inCase(loadCase)}.`,
+      },
+    ];
+  }
+  const above = limit === 1 ? "" : `, above the target of ${limit.toFixed(2)}`;
   return [
     { text: "The bare column " },
     { text: "fails", tone: "fail" },
@@ -72,10 +91,11 @@ export function bareSummary(outcome: OptionOutcome, limit: number): readonly Sen
   if (outcome.kind === "outside-scope") {
     return [{ text: "Bare column " }, { text: "outside the method", tone: "strong" }];
   }
-  const { component, side, loadCase, utilisation } = namedCheck(outcome);
+  const { component, side, loadCase, utilisation } = namedCheck(outcome, limit);
   return [
     { text: "Bare column " },
     outcome.passes ? { text: "good enough", tone: "pass" } : { text: "fails", tone: "fail" },
+    ...(!outcome.passes && utilisation <= limit ? [{ text: " in stiffness, strength" }] : []),
     {
       text: ` ${formatUtilisation(utilisation, limit)}, ${componentOnSide(component, side)} ${inCase(loadCase)}`,
     },
@@ -90,8 +110,12 @@ export interface ComponentLine {
 }
 
 /** One line a component, worst check of each, in the order given. */
-export function componentLines(outcome: EvaluatedOption, order: readonly ComponentId[]): ComponentLine[] {
-  const named = namedCheck(outcome);
+export function componentLines(
+  outcome: EvaluatedOption,
+  order: readonly ComponentId[],
+  limit: number,
+): ComponentLine[] {
+  const named = namedCheck(outcome, limit);
   return order.flatMap((component) => {
     const checks = outcome.checks.filter((check) => check.component === component);
     const [first, ...rest] = checks;

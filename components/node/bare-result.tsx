@@ -26,7 +26,11 @@ const stiffnessText = (value: number): string =>
   formatNumber(value >= 10 * STIFFNESS_STEP ? Math.round(value / STIFFNESS_STEP) * STIFFNESS_STEP : value);
 
 function Utilisations({ outcome, limit }: { readonly outcome: EvaluatedOption; readonly limit: number }) {
-  const lines = componentLines(outcome, [...COMPONENT_ROWS.panel, ...COMPONENT_ROWS.connection, "detailing"]);
+  const lines = componentLines(
+    outcome,
+    [...COMPONENT_ROWS.panel, ...COMPONENT_ROWS.connection, "detailing"],
+    limit,
+  );
   return (
     <table className="w-full border-collapse">
       <caption className="sr-only">Utilisation of each component, the worst of all load cases</caption>

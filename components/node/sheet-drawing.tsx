@@ -3,6 +3,7 @@
 import { useMemo, useState } from "react";
 import type { Level, NodeCase } from "@/lib/calc/node";
 import { drawNode } from "@/lib/drawing/draw-node";
+import type { Extent } from "@/lib/drawing/drawing";
 import { isDraftObject, textAt, valueAt, type DraftObject } from "./node-draft";
 import { NodeDrawing } from "./node-drawing";
 
@@ -42,6 +43,12 @@ function useDrawing(node: NodeCase | null, draft: DraftObject, sectionLevel: Lev
   );
 }
 
+/** The window is as wide to both sides of the column: a node with one beam keeps the scale of one with two. */
+function evenly({ minX, maxX, minY, maxY }: Extent): Extent {
+  const half = Math.max(-minX, maxX);
+  return { minX: -half, maxX: half, minY, maxY };
+}
+
 const editing = (onEdit: SheetDrawingProps["onEdit"]) => (onEdit ? { interactive: true, onEdit } : {});
 
 /** The live elevation of the node sheet. */
@@ -55,7 +62,13 @@ export function SheetElevation({ node, draft, isBehind, activePath, onEdit }: Sh
     );
   return (
     <>
-      <NodeDrawing drawing={drawing} activePath={activePath} {...editing(onEdit)} className={WIDTH} />
+      <NodeDrawing
+        drawing={drawing}
+        extent={evenly(drawing.elevation.extent)}
+        activePath={activePath}
+        {...editing(onEdit)}
+        className={WIDTH}
+      />
       <p className="mt-1 flex flex-wrap items-baseline justify-between gap-x-4 text-note text-soft">
         <span>{onEdit ? "To scale, mm. Press a dimension to change it." : "To scale, mm."}</span>
         {isBehind ? (
@@ -92,6 +105,7 @@ export function SheetSection({ node, draft, activePath, onEdit }: SheetDrawingPr
       <NodeDrawing
         drawing={drawing}
         view="section"
+        extent={evenly(drawing.section.extent)}
         activePath={activePath}
         {...editing(onEdit)}
         className={`mt-2 ${WIDTH}`}

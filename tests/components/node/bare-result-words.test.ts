@@ -69,14 +69,39 @@ describe("the bare column in words", () => {
   it("names strength rather than a rule of detailing that is met, but names one that is broken", () => {
     const rule = (utilisation: number) => check("detailing", utilisation, { loadCase: EVERY_CASE });
     expect(
-      namedCheck(outcome([rule(0.9), check("column-web-shear", 0.4), check("bolt-tension", 0.6)])).component,
+      namedCheck(outcome([rule(0.9), check("column-web-shear", 0.4), check("bolt-tension", 0.6)]), 1)
+        .component,
     ).toBe("bolt-tension");
     expect(said(bareSentence(outcome([rule(1.2), check("column-web-shear", 0.4)]), 1))).toContain(
       "detailing on the right reaches 1.20 in every load case",
     );
     const tied = outcome([rule(0.9), check("joint-moment", 0.6), check("column-web-compression", 0.6)]);
-    expect(namedCheck(tied).component).toBe("column-web-compression");
+    expect(namedCheck(tied, 1).component).toBe("column-web-compression");
     expect(EVERY_CASE).toBe(CALCULATED_EVERY_CASE);
+  });
+  it("says that stiffness is what lacks where strength is enough", () => {
+    const joint = {
+      side: "left" as const,
+      loadCase: "ULS 1",
+      momentResistanceNmm: 1e8,
+      secantStiffnessNmmPerRad: null,
+      leverArmMm: 300,
+      stiffnessClass: "semi-rigid" as const,
+      strengthClass: "partial-strength" as const,
+      rows: [],
+    };
+    const soft = outcome(
+      [check("detailing", 0.9, { loadCase: EVERY_CASE }), check("column-web-shear", 0.4)],
+      {
+        passes: false,
+        stiffnessReached: false,
+        joints: [{ ...joint, initialStiffnessNmmPerRad: 28_100e6 }],
+      },
+    );
+    expect(said(bareSentence(soft, 1))).toBe(
+      "The bare column fails: it is not as stiff as asked for, the left joint is semi-rigid at 28\u202f100 kNm/rad. Strength is enough: panel shear on the right is highest at 0.40 in ULS 3.",
+    );
+    expect(said(bareSummary(soft, 1))).toContain("fails in stiffness, strength 0.40");
   });
   it("gives the reason where the method does not reach", () => {
     expect(
@@ -90,6 +115,7 @@ describe("the bare column in figures", () => {
     const lines = componentLines(
       outcome([check("column-web-shear", 0.4), check("column-web-shear", 0.7), check("bolt-tension", 0.9)]),
       ["column-web-shear", "column-web-tension", "bolt-tension"],
+      1,
     );
     expect(lines.map((line) => [line.component, line.check.utilisation, line.isGoverning])).toEqual([
       ["column-web-shear", 0.7, false],
