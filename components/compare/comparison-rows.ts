@@ -187,17 +187,26 @@ function stiffnessGroup(result: ResultDocument, choice: LoadCaseChoice): RowGrou
   };
 }
 
-function cautionsOf(option: OptionDocument): readonly string[] {
+/** Cautions that every option inside the method carries: said once, below the table. One option alone keeps its own. */
+export function commonCautions(result: ResultDocument): readonly string[] {
+  const [first, ...others] = result.options.filter(isEvaluated);
+  if (!first || others.length === 0) return [];
+  return first.cautions.filter((words) => others.every((option) => option.cautions.includes(words)));
+}
+
+function cautionsOf(option: OptionDocument, common: readonly string[]): readonly string[] {
   // Its one caution, why it is outside, already stands in the row of verdicts.
   if (!isEvaluated(option)) return [];
-  return [option.connectionFailure, option.passes ? null : option.sizing, ...option.cautions].filter(
+  const own = option.cautions.filter((words) => !common.includes(words));
+  return [option.connectionFailure, option.passes ? null : option.sizing, ...own].filter(
     (words): words is string => Boolean(words),
   );
 }
 
 function cautionGroup(result: ResultDocument): RowGroup {
+  const common = commonCautions(result);
   const cells = result.options.map((option): Cell => {
-    const items = cautionsOf(option);
+    const items = cautionsOf(option, common);
     return items.length === 0 ? { kind: "none", words: "none" } : { kind: "list", items };
   });
   return {

@@ -1,6 +1,5 @@
 "use client";
 import { useMutation, useQuery, useQueryClient } from "@tanstack/react-query";
-import Link from "next/link";
 import { useMemo, useState } from "react";
 import { recalculateMutation, setExclusionsMutation } from "@/lib/client/mutations";
 import { catalogOptions, comparisonOptions, nodeOptions, workingOptions } from "@/lib/client/queries";
@@ -20,6 +19,7 @@ import { ComparisonTable } from "./comparison-table";
 import { differenceWords } from "./difference-words";
 import { sectionWords } from "./measure-words";
 import { drawOptions } from "./option-drawings";
+import { ComparisonFoot } from "./comparison-foot";
 import { columnLetter } from "./rank-words";
 import { VerdictLine } from "./verdict-line";
 import { WorkingPanel, type Working } from "./working-panel";
@@ -235,36 +235,13 @@ function Ready({ comparison, projectId }: { readonly comparison: Comparison; rea
         drawing={drawing}
       />
       <div className="stays-in-view">
-        <Foot comparison={comparison} />
+        <ComparisonFoot comparison={comparison} />
         <ComparisonCharts result={result} />
       </div>
       {open ? (
         <OpenPanel comparison={comparison} open={open} choice={choice} onClose={() => setOpen(null)} />
       ) : null}
     </>
-  );
-}
-
-/** What the figures are, who may rely on them, and how far. */
-function Foot({ comparison }: { readonly comparison: Comparison }) {
-  return (
-    <div className="flex flex-wrap justify-between gap-x-10 gap-y-2 pt-3.5 text-note text-soft">
-      <p className="max-w-[88ch]">
-        {comparison.result.basis}. Threaded bars with inner nuts are outside its clauses: a mechanics model
-        stands in, its bounds are in the working, and results outside them are refused. Fatigue, seismic
-        detailing and fire are not covered. The national annex, the project specification and the licensed
-        engineer’s decision come first.{" "}
-        <Link href="/method" className="prose-link">
-          Every formula used
-        </Link>
-      </p>
-      <p>
-        {comparison.money === "index"
-          ? "Money as an index: the cheapest option that costs anything is 100. "
-          : `${comparison.pricedBy}. `}
-        {`Engine ${comparison.engine}, ${new Date(comparison.createdAt).toLocaleString("en-GB", { dateStyle: "medium", timeStyle: "short" })}, ${comparison.createdBy.name}`}
-      </p>
-    </div>
   );
 }
 

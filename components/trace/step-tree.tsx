@@ -1,5 +1,6 @@
 import type { Step } from "@/lib/calc/trace/trace";
 import { formatFigures, formatNumber } from "@/components/ui/format-number";
+import { ScrollBox } from "@/components/ui/scroll-box";
 import { ExpressionMath } from "./expression-math";
 import { sourceText, SymbolText, unitText } from "./symbol-text";
 
@@ -49,7 +50,7 @@ function Inputs({ step }: { readonly step: Step }) {
 function StepBody({ step }: { readonly step: Step }) {
   return (
     <>
-      <div className="overflow-x-auto py-1">
+      <ScrollBox label="Formula">
         <ExpressionMath expression={step.expression} symbols={step.symbols} symbol={step.symbol} />
         <ExpressionMath
           expression={step.expression}
@@ -57,7 +58,7 @@ function StepBody({ step }: { readonly step: Step }) {
           inputs={step.inputs}
           result={{ value: step.value, unit: step.unit }}
         />
-      </div>
+      </ScrollBox>
       <Inputs step={step} />
     </>
   );
@@ -72,7 +73,7 @@ export interface StepTreeProps {
 /** The working of a number: each step with its formula, the numbers put in, its result and where it comes from. Steps fold. */
 export function StepTree({ steps, openDepth = 1 }: StepTreeProps) {
   return (
-    <ol className="grid gap-2">
+    <ol className="grid grid-cols-[minmax(0,1fr)] gap-2">
       {steps.map((step, index) => (
         <li key={`${step.id}-${index}`} className="border-l-2 border-rule2 pl-3">
           <details open={openDepth > 0}>

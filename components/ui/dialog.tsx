@@ -76,7 +76,7 @@ export function Dialog({ title, onClose, shape = "box", children, actions }: Dia
       className={joinClasses(
         "m-0 bg-sheet p-0 text-ink backdrop:bg-[rgb(10_16_20/0.45)]",
         shape === "panel"
-          ? "fixed inset-y-0 right-0 left-auto h-dvh max-h-none w-[min(46rem,94vw)] max-w-none border-l-2 border-ink"
+          ? "fixed inset-y-0 right-0 left-auto h-dvh max-h-none w-[min(54rem,94vw)] max-w-none border-l-2 border-ink"
           : "fixed top-[12vh] right-0 left-0 mx-auto max-h-[76vh] w-[min(34rem,92vw)] border-2 border-ink",
       )}
     >

@@ -2,6 +2,7 @@ import type { Metadata } from "next";
 import { definedFormulas } from "@/lib/calc";
 import { ExpressionMath } from "@/components/trace/expression-math";
 import { SymbolText, unitText } from "@/components/trace/symbol-text";
+import { ScrollBox } from "@/components/ui/scroll-box";
 import { PageBody, PageHead } from "@/components/layout/page-head";
 import { formulaGroups, type ListedFormula } from "./formula-groups";
 
@@ -20,8 +21,10 @@ function FormulaEntry({ formula }: { readonly formula: ListedFormula }) {
         <p className="text-note">{formula.source.ref}</p>
         <p className="text-note break-words text-soft">{formula.id}</p>
       </div>
-      <div className="min-w-0 overflow-x-auto">
-        <ExpressionMath expression={formula.expression} symbols={formula.symbols} symbol={symbol} />
+      <div className="min-w-0">
+        <ScrollBox label="Formula">
+          <ExpressionMath expression={formula.expression} symbols={formula.symbols} symbol={symbol} />
+        </ScrollBox>
         <ul aria-label="What goes in" className="mt-1 flex flex-wrap gap-x-4 text-note text-soft">
           {Object.entries(formula.symbols).map(([name, [inputSymbol, inputUnit]]) => (
             <li key={name}>

@@ -2,11 +2,12 @@ import { describe, expect, it } from "vitest";
 import { COMPONENT_IDS } from "@/lib/calc/result";
 import { COMPONENT_ROWS } from "@/components/compare/component-labels";
 import type { Cell } from "@/components/compare/comparison-cells";
-import { comparisonGroups } from "@/components/compare/comparison-rows";
+import { commonCautions, comparisonGroups } from "@/components/compare/comparison-rows";
 import {
   buildCheck,
   buildJoint,
   buildOption,
+  buildOutsideScopeOption,
   buildResultDocument,
   stiffeners,
 } from "@/tests/factories/build-result-document";
@@ -85,6 +86,23 @@ describe("the rows of a comparison", () => {
       kind: "list",
       items: ["The bolts fail.", "The thickest stock plate was not enough.", "Check the erection."],
     });
+  });
+
+  it("leave what all options inside the method must mind to the foot, once", () => {
+    const check = buildCheck("column-web-shear", 0.6);
+    const result = buildResultDocument({
+      options: [
+        buildOption(
+          { key: "one", name: "One", checks: [check] },
+          { cautions: ["Fire is not covered.", "Own."] },
+        ),
+        buildOption({ key: "two", name: "Two", checks: [check] }, { cautions: ["Fire is not covered."] }),
+        buildOutsideScopeOption(),
+      ],
+    });
+    expect(commonCautions(result)).toEqual(["Fire is not covered."]);
+    expect(cellOf(result, "cautions", 0)).toEqual({ kind: "list", items: ["Own."] });
+    expect(cellOf(result, "cautions", 1)).toEqual({ kind: "none", words: "none" });
   });
 
   it("give an option outside scope words in every cell but the verdict, which carries the reason", () => {
