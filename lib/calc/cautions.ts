@@ -18,7 +18,9 @@ const TOLERANCE = 0.1;
 /** Load cases whose forces on the node do not balance by more than a tenth of the largest term. */
 export function unbalancedCases(node: NodeCase): readonly string[] {
   const depth = node.column.section.depthMm;
-  return node.loadCases.filter((loadCase) => !isBalanced(loadCase, depth, leverOf(node))).map((loadCase) => loadCase.name);
+  return node.loadCases
+    .filter((loadCase) => !isBalanced(loadCase, depth, leverOf(node)))
+    .map((loadCase) => loadCase.name);
 }
 
 const leverOf = (node: NodeCase): number => {
@@ -56,7 +58,11 @@ function lacksOneSidedCase(node: NodeCase): boolean {
 }
 
 /** What a reader has to know beside the numbers of one option. */
-export function cautionsOf(node: NodeCase, design: PanelDesign, models: readonly JointModel[]): readonly string[] {
+export function cautionsOf(
+  node: NodeCase,
+  design: PanelDesign,
+  models: readonly JointModel[],
+): readonly string[] {
   const cautions: string[] = [...GENERAL];
   const unbalanced = unbalancedCases(node);
   if (unbalanced.length > 0) {
@@ -80,7 +86,9 @@ export function cautionsOf(node: NodeCase, design: PanelDesign, models: readonly
       );
     }
     if (2 * stiffener.widthMm + design.column.section.webThicknessMm < flange.widthMm) {
-      cautions.push(`Stiffeners at the ${level} do not reach as far as the beam flange; as guidance, match it.`);
+      cautions.push(
+        `Stiffeners at the ${level} do not reach as far as the beam flange; as guidance, match it.`,
+      );
     }
     const narrow = models.some(
       (model) =>
@@ -89,7 +97,9 @@ export function cautionsOf(node: NodeCase, design: PanelDesign, models: readonly
         2 * stiffener.widthMm + design.column.section.webThicknessMm < 1.33 * model.joint.view.gaugeMm,
     );
     if (narrow) {
-      cautions.push(`Stiffeners at the ${level} are too narrow to hold the column flange (2 b_sg + t_wc under 1.33 gauge) and do not count for it.`);
+      cautions.push(
+        `Stiffeners at the ${level} are too narrow to hold the column flange (2 b_sg + t_wc under 1.33 gauge) and do not count for it.`,
+      );
     }
   }
   return cautions;

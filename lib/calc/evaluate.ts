@@ -96,7 +96,13 @@ const symmetricOf = (own: number, other: number): number => {
   return largerN > 0 ? symmetricPart(null, { largerN, otherN: Math.min(own, other) }) : 0;
 };
 
-function sideCasesOf(node: NodeCase, panel: ColumnPanel, store: ModelStore, loadCase: LoadCase, steps: boolean): SideCase[] {
+function sideCasesOf(
+  node: NodeCase,
+  panel: ColumnPanel,
+  store: ModelStore,
+  loadCase: LoadCase,
+  steps: boolean,
+): SideCase[] {
   const sides = node.joints.map((joint) => {
     const actions = actionsOf(loadCase, joint.side);
     return { joint, actions, model: store.of(joint, tensionLevelOf(actions)) };
@@ -121,7 +127,12 @@ function sideCasesOf(node: NodeCase, panel: ColumnPanel, store: ModelStore, load
   });
 }
 
-function panelChecks(panel: ColumnPanel, loadCase: LoadCase, sides: readonly SideCase[], steps: boolean): {
+function panelChecks(
+  panel: ColumnPanel,
+  loadCase: LoadCase,
+  sides: readonly SideCase[],
+  steps: boolean,
+): {
   readonly demandN: number;
   readonly checks: ComponentCheck[];
 } {
@@ -181,7 +192,14 @@ function pressedCompression(sides: readonly SideCase[]): ComponentCheck[] {
   });
 }
 
-function caseChecks(node: NodeCase, design: PanelDesign, panel: ColumnPanel, loadCase: LoadCase, sides: readonly SideCase[], steps: boolean): ComponentCheck[] {
+function caseChecks(
+  node: NodeCase,
+  design: PanelDesign,
+  panel: ColumnPanel,
+  loadCase: LoadCase,
+  sides: readonly SideCase[],
+  steps: boolean,
+): ComponentCheck[] {
   const shear = panelChecks(panel, loadCase, sides, steps);
   const checks = [...sides.flatMap(sideChecks), ...shear.checks];
   for (const level of LEVELS) {
@@ -191,7 +209,14 @@ function caseChecks(node: NodeCase, design: PanelDesign, panel: ColumnPanel, loa
   const side = node.joints[0]?.side ?? "left";
   if (design.webPlates) {
     checks.push(
-      ...webPlateChecks(node, panel, design.webPlates, shear.demandN, { side, loadCase: loadCase.name }, steps),
+      ...webPlateChecks(
+        node,
+        panel,
+        design.webPlates,
+        shear.demandN,
+        { side, loadCase: loadCase.name },
+        steps,
+      ),
     );
   }
   if (design.bars.top || design.bars.bottom) {
@@ -201,7 +226,12 @@ function caseChecks(node: NodeCase, design: PanelDesign, panel: ColumnPanel, loa
   return checks;
 }
 
-function detailingChecks(design: PanelDesign, panel: ColumnPanel, models: readonly JointModel[], sides: readonly SideCase[]): ComponentCheck[] {
+function detailingChecks(
+  design: PanelDesign,
+  panel: ColumnPanel,
+  models: readonly JointModel[],
+  sides: readonly SideCase[],
+): ComponentCheck[] {
   const seen = new Set<JointModel>();
   const checks = sides.flatMap((side) => {
     if (seen.has(side.model)) return [];

@@ -60,7 +60,8 @@ export function jointModelOf(
   const { section } = joint.beam;
   const bounds = classBoundsOf(node, panel, joint, steps);
   const straightWeb = section.depthMm - 2 * section.flangeThicknessMm - 2 * section.rootMm;
-  if (connection.kind === "flange-cleats") throw new OutsideScope("flange-cleat joints are not evaluated yet");
+  if (connection.kind === "flange-cleats")
+    throw new OutsideScope("flange-cleat joints are not evaluated yet");
   if (connection.kind === "welded") {
     const view = jointViewOf(node, design, joint, tensionLevel);
     const compression = compressionZoneOf(node, panel, view, steps);

@@ -183,6 +183,9 @@ export interface NodeCase {
   readonly joints: readonly JointCase[];
   readonly loadCases: readonly LoadCase[];
   readonly bracing: "braced" | "unbraced";
-  readonly target: { readonly utilisation: number; readonly stiffness: "any" | "rigid" | { readonly nmmPerRad: number } };
+  readonly target: {
+    readonly utilisation: number;
+    readonly stiffness: "any" | "rigid" | { readonly nmmPerRad: number };
+  };
   readonly tStubModeOne: "method-1" | "method-2";
 }

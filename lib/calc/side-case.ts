@@ -84,7 +84,13 @@ function webStressFactor(panel: ColumnPanel, loadCase: LoadCase, level: Level, s
   });
 }
 
-function compressionOf(node: NodeCase, panel: ColumnPanel, model: JointModel, load: SideLoad, steps: boolean): Traced {
+function compressionOf(
+  node: NodeCase,
+  panel: ColumnPanel,
+  model: JointModel,
+  load: SideLoad,
+  steps: boolean,
+): Traced {
   const bars = isBolted(model) ? model.barCompression : null;
   const given = bars
     ? { distanceRatio: bars.distanceRatio, share: bars.share.value, symmetric: load.symmetric.compression }
@@ -219,7 +225,8 @@ export function weldedSideCase(
     panelLimit(panel, load.beta),
   );
   const resistance = traced(steps, (trace) => {
-    for (const part of [webTension, joint.flangeBending, compression, joint.beamFlange]) trace?.include(part?.step);
+    for (const part of [webTension, joint.flangeBending, compression, joint.beamFlange])
+      trace?.include(part?.step);
     return weldedMomentNmm(trace, { leverMm: joint.leverMm, forceN }, 0);
   });
   const momentNmm = Math.abs(load.actions.momentNmm);

@@ -1,4 +1,9 @@
-import { bearingAlongFactor, bearingEdgeFactor, bearingN, boltShearN } from "../clauses/en1993-1-8-2005/fasteners";
+import {
+  bearingAlongFactor,
+  bearingEdgeFactor,
+  bearingN,
+  boltShearN,
+} from "../clauses/en1993-1-8-2005/fasteners";
 import type { NodeCase } from "../node";
 import { defineFormula } from "../trace/define-formula";
 import { defineSeries, sumText } from "../trace/define-series";
@@ -26,7 +31,11 @@ const boltsOfRowN = defineFormula({
   result: ["V_r,Rd", "N"],
   expression: "2 * min(share * shearN, plateN, flangeN)",
   evaluate: (g) => 2 * Math.min(g.share * g.shearN, g.plateN, g.flangeN),
-  example: { given: { share: 0.5, shearN: 100_000, plateN: 80_000, flangeN: 90_000 }, gives: 100_000, relTol: 1e-12 },
+  example: {
+    given: { share: 0.5, shearN: 100_000, plateN: 80_000, flangeN: 90_000 },
+    gives: 100_000,
+    relTol: 1e-12,
+  },
 });
 
 const shearOfRowsN = defineSeries({
@@ -61,7 +70,11 @@ function bearing(
 ): number {
   const { size, grade } = row.fastener;
   const mark = trace?.mark();
-  const edgeFactor = bearingEdgeFactor(trace, { edgeMm: part.edgeMm, acrossMm: part.gaugeMm, holeMm: size.holeMm });
+  const edgeFactor = bearingEdgeFactor(trace, {
+    edgeMm: part.edgeMm,
+    acrossMm: part.gaugeMm,
+    holeMm: size.holeMm,
+  });
   const bearingFactor = bearingAlongFactor(trace, {
     endMm: part.endMm,
     pitchMm: part.pitchMm,
@@ -108,7 +121,10 @@ function rowShear(
   const common = { pitchMm, gaugeMm: view.gaugeMm };
   const plateN = bearing(trace, node, row, {
     ...common,
-    endMm: Math.min(row.belowTopMm + plate.extensionTopMm, beamDepth + plate.extensionBottomMm - row.belowTopMm),
+    endMm: Math.min(
+      row.belowTopMm + plate.extensionTopMm,
+      beamDepth + plate.extensionBottomMm - row.belowTopMm,
+    ),
     edgeMm: (plate.widthMm - view.gaugeMm) / 2,
     thicknessMm: plate.thicknessMm,
     ultimateMpa: plate.steel.ultimateMpa,
@@ -127,7 +143,12 @@ function rowShear(
 }
 
 /** Vertical shear that the bolts of an end plate carry beside the moment, N. 6.2.2, Table 3.4. */
-export function boltShearResistance(node: NodeCase, panel: ColumnPanel, view: EndPlateView, steps: boolean): Traced {
+export function boltShearResistance(
+  node: NodeCase,
+  panel: ColumnPanel,
+  view: EndPlateView,
+  steps: boolean,
+): Traced {
   const byHeight = [...view.rows].sort((a, b) => a.belowTopMm - b.belowTopMm);
   const pitches = byHeight.map((row, index) =>
     Math.min(
@@ -138,7 +159,9 @@ export function boltShearResistance(node: NodeCase, panel: ColumnPanel, view: En
     ),
   );
   return traced(steps, (trace) => {
-    const rowN = byHeight.map((row, index) => rowShear(trace, node, panel, view, row, pitches[index] ?? NO_END_MM));
+    const rowN = byHeight.map((row, index) =>
+      rowShear(trace, node, panel, view, row, pitches[index] ?? NO_END_MM),
+    );
     return shearOfRowsN(trace, { rowN }, 0);
   });
 }

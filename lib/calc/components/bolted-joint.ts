@@ -1,6 +1,10 @@
 import { bendingClass, bendingResistanceNmm, epsilonOf } from "../clauses/en1993-1-1-2005/members";
 import { boltedMomentNmm } from "../clauses/en1993-1-8-2005/assembly";
-import { beamFlangeCompressionN, beamWebTensionN, deepBeamCompressionN } from "../clauses/en1993-1-8-2005/beam";
+import {
+  beamFlangeCompressionN,
+  beamWebTensionN,
+  deepBeamCompressionN,
+} from "../clauses/en1993-1-8-2005/beam";
 import { omegaOf, webTensionN } from "../clauses/en1993-1-8-2005/column-web";
 import { relievedN } from "../mechanics/through-bar-formulas";
 import { sectionProperties } from "../mechanics/section-properties";
@@ -43,7 +47,8 @@ export function beamCompression(node: NodeCase, joint: JointCase, steps: boolean
     webThicknessMm: section.webThicknessMm,
     epsilon,
   });
-  if (beamClass === 4) throw new OutsideScope(`the ${joint.side} beam is a class 4 section (EN 1993-1-1, Table 5.2)`);
+  if (beamClass === 4)
+    throw new OutsideScope(`the ${joint.side} beam is a class 4 section (EN 1993-1-1, Table 5.2)`);
   return traced(steps, (trace) => {
     const momentNmm = bendingResistanceNmm(trace, {
       modulusMm3: beamClass === 2 ? properties.plasticModulusMm3 : properties.elasticModulusMm3,
@@ -54,7 +59,12 @@ export function beamCompression(node: NodeCase, joint: JointCase, steps: boolean
     return section.depthMm > deepBeamMm
       ? deepBeamCompressionN(
           trace,
-          { ...given, widthMm: section.widthMm, yieldMpa: steel.yieldMpa, gammaM0: node.partialFactors.gammaM0 },
+          {
+            ...given,
+            widthMm: section.widthMm,
+            yieldMpa: steel.yieldMpa,
+            gammaM0: node.partialFactors.gammaM0,
+          },
           0,
         )
       : beamFlangeCompressionN(trace, given, 0);
@@ -96,7 +106,12 @@ export function boltedJointOf(
 ): BoltedJoint {
   const beamWeb = beamWebLimits(node, view.joint, parts.plate, steps);
   const beamFlange = beamCompression(node, view.joint, steps);
-  const own = assembleRows(view.tensionRows, [resistancesOf(parts.plate.family), beamWeb], beamFlange.value, false);
+  const own = assembleRows(
+    view.tensionRows,
+    [resistancesOf(parts.plate.family), beamWeb],
+    beamFlange.value,
+    false,
+  );
   const connectionMomentNmm = boltedMomentNmm(null, {
     leverMm: view.tensionRows.map((row) => row.leverMm),
     forceN: own.forces.map((force) => force.value),
@@ -185,4 +200,3 @@ export function columnTension(
     },
   };
 }
-

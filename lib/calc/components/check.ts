@@ -41,12 +41,20 @@ export function checkOf(
 export const EVERY_CASE = "all";
 
 /** A rule of detailing: `actual` has to be at least `needed` (both in the head's unit). */
-export function detailAtLeast(head: Omit<CheckHead, "component" | "loadCase">, needed: number, actual: number): ComponentCheck {
+export function detailAtLeast(
+  head: Omit<CheckHead, "component" | "loadCase">,
+  needed: number,
+  actual: number,
+): ComponentCheck {
   return detail(head, needed, actual, actual > 0 ? needed / actual : needed > 0 ? NOTHING_THERE : 0);
 }
 
 /** A rule of detailing: `actual` may be at most `allowed`. */
-export function detailAtMost(head: Omit<CheckHead, "component" | "loadCase">, actual: number, allowed: number): ComponentCheck {
+export function detailAtMost(
+  head: Omit<CheckHead, "component" | "loadCase">,
+  actual: number,
+  allowed: number,
+): ComponentCheck {
   return detail(head, actual, allowed, allowed > 0 ? actual / allowed : NOTHING_THERE);
 }
 

@@ -50,7 +50,12 @@ export function rowToStiffenerMm(view: EndPlateView, row: BoltRow): number {
 }
 
 /** The column flange seen from one joint. @throws OutsideScope where a bolt stands on the root radius. */
-export function columnFlangeOf(node: NodeCase, panel: ColumnPanel, view: EndPlateView, steps: boolean): ColumnFlange {
+export function columnFlangeOf(
+  node: NodeCase,
+  panel: ColumnPanel,
+  view: EndPlateView,
+  steps: boolean,
+): ColumnFlange {
   const { section, steel } = panel;
   const rows = view.tensionRows;
   const eMm = (section.widthMm - view.gaugeMm) / 2;
@@ -63,8 +68,7 @@ export function columnFlangeOf(node: NodeCase, panel: ColumnPanel, view: EndPlat
   const half = view.joint.beam.section.flangeThicknessMm / 2;
   const stiffener = view.tensionStiffener;
   const isStiffened =
-    stiffener !== null &&
-    2 * stiffener.widthMm + section.webThicknessMm >= WIDE_ENOUGH_SHARE * view.gaugeMm;
+    stiffener !== null && 2 * stiffener.widthMm + section.webThicknessMm >= WIDE_ENOUGH_SHARE * view.gaugeMm;
   const positions = rows.map((_, index) => index);
   const outside = positions.filter((index) => (rows[index]?.fromFaceMm ?? 0) < half);
   const inside = positions.filter((index) => (rows[index]?.fromFaceMm ?? 0) >= half);

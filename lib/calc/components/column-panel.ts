@@ -1,8 +1,4 @@
-import {
-  epsilonOf,
-  rolledShearAreaMm2,
-  weldedShearAreaMm2,
-} from "../clauses/en1993-1-1-2005/members";
+import { epsilonOf, rolledShearAreaMm2, weldedShearAreaMm2 } from "../clauses/en1993-1-1-2005/members";
 import {
   enlargedShearAreaMm2,
   panelFrameShearN,
@@ -57,11 +53,16 @@ function tensionWebMm(design: PanelDesign): number {
   return (design.column.steel.yieldMpa <= 355 ? 1.4 : 1.3) * web;
 }
 
-function shearResistance(trace: Trace | null, node: NodeCase, design: PanelDesign, panel: {
-  readonly shearAreaMm2: number;
-  readonly webDepthMm: number;
-  readonly epsilon: number;
-}): number {
+function shearResistance(
+  trace: Trace | null,
+  node: NodeCase,
+  design: PanelDesign,
+  panel: {
+    readonly shearAreaMm2: number;
+    readonly webDepthMm: number;
+    readonly epsilon: number;
+  },
+): number {
   const { section, steel } = design.column;
   const { gammaM0 } = node.partialFactors;
   const mark = trace?.mark();
@@ -87,7 +88,8 @@ function shearResistance(trace: Trace | null, node: NodeCase, design: PanelDesig
     yieldMpa: steel.yieldMpa,
     gammaM0,
   });
-  const weaker = 2 * top.widthMm * top.thicknessMm ** 2 <= 2 * bottom.widthMm * bottom.thicknessMm ** 2 ? top : bottom;
+  const weaker =
+    2 * top.widthMm * top.thicknessMm ** 2 <= 2 * bottom.widthMm * bottom.thicknessMm ** 2 ? top : bottom;
   const stiffenerMomentNmm = tStubMomentNmm(trace, {
     lengthMm: 2 * weaker.widthMm,
     thicknessMm: weaker.thicknessMm,
@@ -138,4 +140,3 @@ export function columnPanelOf(node: NodeCase, design: PanelDesign, steps: boolea
     tensionWebMm: tensionWebMm(design),
   };
 }
-

@@ -1,4 +1,9 @@
-import { ELASTIC_MODULUS_MPA, curveCReduction, epsilonOf, strutSlenderness } from "../clauses/en1993-1-1-2005/members";
+import {
+  ELASTIC_MODULUS_MPA,
+  curveCReduction,
+  epsilonOf,
+  strutSlenderness,
+} from "../clauses/en1993-1-1-2005/members";
 import * as stiffenerRules from "../clauses/en1993-1-5-2006/stiffeners";
 import * as web from "../clauses/en1993-1-8-2005/column-web";
 import { webCompressionSpringMm } from "../clauses/en1993-1-8-2005/stiffness";
@@ -83,7 +88,12 @@ function cruciformBuckling(
     columnBeyondMm >= full / 2
       ? full
       : web.truncatedBreadthMm(trace, { fullMm: full, aboveMm: columnBeyondMm, belowMm: full });
-  const pair = { widthMm: stiffener.widthMm, thicknessMm: stiffener.thicknessMm, webThicknessMm, webLengthMm };
+  const pair = {
+    widthMm: stiffener.widthMm,
+    thicknessMm: stiffener.thicknessMm,
+    webThicknessMm,
+    webLengthMm,
+  };
   const areaMm2 = stiffenerRules.cruciformAreaMm2(trace, pair);
   const inertiaMm4 = stiffenerRules.cruciformInertiaMm4(trace, pair);
   const slenderness = strutSlenderness(trace, {
@@ -131,7 +141,9 @@ function stiffenedZoneOf(
     }),
     buckling:
       stiffener.length === "full"
-        ? traced(steps, (trace) => cruciformBuckling(trace, node, panel, stiffener, view.columnBeyondCompressionMm))
+        ? traced(steps, (trace) =>
+            cruciformBuckling(trace, node, panel, stiffener, view.columnBeyondCompressionMm),
+          )
         : null,
     plateShare: (netAreaMm2 * yieldMpa) / (netAreaMm2 * yieldMpa + webPart),
   };
@@ -190,7 +202,11 @@ export function compressionResistance(
     return traced(steps, (trace) => {
       trace?.include(stiffener.crushing.step);
       trace?.include(buckling.step);
-      return web.webCompressionN(trace, { yieldingN: stiffener.crushing.value, bucklingN: buckling.value }, 0);
+      return web.webCompressionN(
+        trace,
+        { yieldingN: stiffener.crushing.value, bucklingN: buckling.value },
+        0,
+      );
     });
   }
   return traced(steps, (trace) => {
@@ -202,7 +218,13 @@ export function compressionResistance(
       shearAreaMm2: panel.shearArea.value,
     });
     trace?.include(load.kWc.step);
-    const strip = { omega, kWc: load.kWc.value, breadthMm: zone.breadth.value, thicknessMm, yieldMpa: panel.steel.yieldMpa };
+    const strip = {
+      omega,
+      kWc: load.kWc.value,
+      breadthMm: zone.breadth.value,
+      thicknessMm,
+      yieldMpa: panel.steel.yieldMpa,
+    };
     const relieve = (value: number, relief: number, mark: number | undefined): number =>
       relief > 0 ? relievedN(trace, { resistanceN: value, relief }, mark) : value;
     let mark = trace?.mark();

@@ -1,6 +1,14 @@
 import { boltTensionN } from "../clauses/en1993-1-8-2005/fasteners";
 import type { PanelDesign, ThroughBars, TransverseStiffeners } from "../measures/panel-design";
-import type { EndPlateConnection, FastenerGrade, FastenerSize, JointCase, Level, NodeCase, Weld } from "../node";
+import type {
+  EndPlateConnection,
+  FastenerGrade,
+  FastenerSize,
+  JointCase,
+  Level,
+  NodeCase,
+  Weld,
+} from "../node";
 import { OutsideScope } from "../outcome";
 import { traced, type Traced } from "../trace/traced";
 
@@ -67,12 +75,18 @@ const SHEAR_ROW_SHARE = 0.25;
 const other = (level: Level): Level => (level === "top" ? "bottom" : "top");
 const flangeWeld = (joint: JointCase, level: Level): Weld => {
   const { connection } = joint;
-  if (connection.kind === "flange-cleats") throw new OutsideScope("flange-cleat joints are not evaluated yet");
+  if (connection.kind === "flange-cleats")
+    throw new OutsideScope("flange-cleat joints are not evaluated yet");
   return level === "top" ? connection.welds.topFlange : connection.welds.bottomFlange;
 };
 
 /** The joint with its tension flange at `tensionLevel`. */
-export function jointViewOf(node: NodeCase, design: PanelDesign, joint: JointCase, tensionLevel: Level): JointView {
+export function jointViewOf(
+  node: NodeCase,
+  design: PanelDesign,
+  joint: JointCase,
+  tensionLevel: Level,
+): JointView {
   const { endDistanceAboveMm, endDistanceBelowMm } = node.column;
   const half = joint.beam.section.flangeThicknessMm / 2;
   const beyond = {

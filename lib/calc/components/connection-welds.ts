@@ -1,4 +1,8 @@
-import { filletShearStrengthMpa, filletTransverseStrengthMpa, weldForceN } from "../clauses/en1993-1-8-2005/welds";
+import {
+  filletShearStrengthMpa,
+  filletTransverseStrengthMpa,
+  weldForceN,
+} from "../clauses/en1993-1-8-2005/welds";
 import type { ConnectionWelds, JointCase, NodeCase, Steel, Weld } from "../node";
 import { traced, type Traced } from "../trace/traced";
 
@@ -63,6 +67,7 @@ export function connectionWeldLimits(
               0,
             ),
           ),
-    flangeYieldN: (section.widthMm * section.flangeThicknessMm * steel.yieldMpa) / node.partialFactors.gammaM0,
+    flangeYieldN:
+      (section.widthMm * section.flangeThicknessMm * steel.yieldMpa) / node.partialFactors.gammaM0,
   };
 }

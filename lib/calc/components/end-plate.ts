@@ -110,7 +110,11 @@ export function endPlateOf(node: NodeCase, panel: ColumnPanel, view: EndPlateVie
       other: traced(steps, (trace) => {
         if (index === firstInside && besideFlange) {
           trace?.include(besideFlange.step);
-          return lines.groupBesideStiffenerMm(trace, { stiffenedMm: besideFlange.value, mMm, eMm, pitchMm }, 0);
+          return lines.groupBesideStiffenerMm(
+            trace,
+            { stiffenedMm: besideFlange.value, mMm, eMm, pitchMm },
+            0,
+          );
         }
         return lines.groupEndPatternMm(trace, { mMm, eMm, pitchMm });
       }),

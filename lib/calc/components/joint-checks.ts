@@ -34,7 +34,11 @@ function familyChecks(
     for (const { first, part, limit } of ending) {
       const members = part.rows.map((row) => row.row).sort((a, b) => a - b);
       checks.push(
-        checkOf({ ...common, rows: members }, sum(side.rowDemandsN.slice(first, first + part.rows.length)), limit),
+        checkOf(
+          { ...common, rows: members },
+          sum(side.rowDemandsN.slice(first, first + part.rows.length)),
+          limit,
+        ),
       );
     }
   }
@@ -54,11 +58,21 @@ function weldChecks(side: SideCase): ComponentCheck[] {
   const checks: ComponentCheck[] = [];
   if (welds.tensionFlange) {
     const served = isBoltedCase(side)
-      ? sum(side.rowDemandsN.slice(0, side.model.joint.plate.isInside[0] === false ? FLANGE_WELD_ROWS.extended : FLANGE_WELD_ROWS.flush))
+      ? sum(
+          side.rowDemandsN.slice(
+            0,
+            side.model.joint.plate.isInside[0] === false ? FLANGE_WELD_ROWS.extended : FLANGE_WELD_ROWS.flush,
+          ),
+        )
       : side.tensionDemandN;
     checks.push(
       checkOf(
-        { ...head, level: joint.view.tensionLevel, clause: "EN 1993-1-8, 4.5.3.2", what: "tension flange weld" },
+        {
+          ...head,
+          level: joint.view.tensionLevel,
+          clause: "EN 1993-1-8, 4.5.3.2",
+          what: "tension flange weld",
+        },
         Math.min(served, welds.flangeYieldN),
         welds.tensionFlange,
       ),
@@ -86,13 +100,23 @@ function commonChecks(side: SideCase): ComponentCheck[] {
       side.resistance,
     ),
     checkOf(
-      { ...head, component: "column-web-compression", level: view.compressionLevel, clause: "EN 1993-1-8, 6.2.6.2" },
+      {
+        ...head,
+        component: "column-web-compression",
+        level: view.compressionLevel,
+        clause: "EN 1993-1-8, 6.2.6.2",
+      },
       side.compressionDemandN,
       side.compression,
       { stiffnessCoefficientMm: compression.spring.value },
     ),
     checkOf(
-      { ...head, component: "beam-flange-compression", level: view.compressionLevel, clause: "EN 1993-1-8, 6.2.6.7" },
+      {
+        ...head,
+        component: "beam-flange-compression",
+        level: view.compressionLevel,
+        clause: "EN 1993-1-8, 6.2.6.7",
+      },
       side.compressionDemandN,
       beamFlange,
     ),
@@ -114,7 +138,13 @@ function boltedChecks(side: BoltedSideCase): ComponentCheck[] {
     const { value, step } = row.fastener.tension;
     const pair: Traced = { value: 2 * value, step };
     return checkOf(
-      { ...head, component: "bolt-tension", level: view.tensionLevel, row: row.row, clause: "EN 1993-1-8, Table 3.4" },
+      {
+        ...head,
+        component: "bolt-tension",
+        level: view.tensionLevel,
+        row: row.row,
+        clause: "EN 1993-1-8, Table 3.4",
+      },
       side.rowDemandsN[index] ?? 0,
       pair,
       { stiffnessCoefficientMm: springs[index]?.bolts.value },
@@ -139,7 +169,12 @@ function boltedChecks(side: BoltedSideCase): ComponentCheck[] {
       plate,
       (index) => springs[index]?.plate.value,
     ),
-    ...familyChecks(side, { component: "beam-web-tension", clause: "EN 1993-1-8, 6.2.6.8" }, joint.beamWeb, none),
+    ...familyChecks(
+      side,
+      { component: "beam-web-tension", clause: "EN 1993-1-8, 6.2.6.8" },
+      joint.beamWeb,
+      none,
+    ),
     ...boltTension,
     checkOf(
       { ...head, component: "bolt-shear", clause: "EN 1993-1-8, 6.2.2 and Table 3.4" },
@@ -190,7 +225,12 @@ export function connectionDetailing(side: SideCase, columnFlangeWidthMm: number)
       ? []
       : [
           detailAtLeast(
-            { ...head, level: view.tensionLevel, clause: "EN 1993-1-8, 4.10(3)", what: "breadth of column flange that works without a stiffener" },
+            {
+              ...head,
+              level: view.tensionLevel,
+              clause: "EN 1993-1-8, 4.10(3)",
+              what: "breadth of column flange that works without a stiffener",
+            },
             joint.leastBreadthMm,
             joint.flangeBreadthMm,
           ),
@@ -209,10 +249,20 @@ export function connectionDetailing(side: SideCase, columnFlangeWidthMm: number)
   const clause = "EN 1993-1-8, Table 3.3";
   return [
     detailAtLeast({ ...head, clause, what: "edge distance of the bolts, 1.2 d_0" }, 1.2 * holeMm, edge),
-    detailAtLeast({ ...head, clause, what: "end distance in the plate, 1.2 d_0" }, 1.2 * holeMm, Math.min(...ends)),
+    detailAtLeast(
+      { ...head, clause, what: "end distance in the plate, 1.2 d_0" },
+      1.2 * holeMm,
+      Math.min(...ends),
+    ),
     detailAtLeast({ ...head, clause, what: "gauge, 2.4 d_0" }, 2.4 * holeMm, gaugeMm),
     ...(pitches.length > 0
-      ? [detailAtLeast({ ...head, clause, what: "distance between bolt rows, 2.2 d_0" }, 2.2 * holeMm, Math.min(...pitches))]
+      ? [
+          detailAtLeast(
+            { ...head, clause, what: "distance between bolt rows, 2.2 d_0" },
+            2.2 * holeMm,
+            Math.min(...pitches),
+          ),
+        ]
       : []),
   ];
 }

@@ -142,13 +142,19 @@ const noFlexibilityNmmPerRad = defineFormula({
 export function initialStiffness(leverMm: Traced, springs: readonly Traced[], steps: boolean): Traced {
   const finite = springs.filter((spring) => Number.isFinite(spring.value));
   if (finite.length === 0) {
-    return traced(steps, (trace) => noFlexibilityNmmPerRad(trace, { stiffnessNmmPerRad: NO_FLEXIBILITY_NMM_PER_RAD }));
+    return traced(steps, (trace) =>
+      noFlexibilityNmmPerRad(trace, { stiffnessNmmPerRad: NO_FLEXIBILITY_NMM_PER_RAD }),
+    );
   }
   return traced(steps, (trace) => {
     trace?.include(leverMm.step);
     const mark = trace?.mark();
     finite.forEach((spring) => trace?.include(spring.step));
-    const flexibilityPerMm = springFlexibilityPerMm(trace, { springMm: finite.map((spring) => spring.value) }, mark);
+    const flexibilityPerMm = springFlexibilityPerMm(
+      trace,
+      { springMm: finite.map((spring) => spring.value) },
+      mark,
+    );
     return rules.initialStiffnessNmmPerRad(
       trace,
       { elasticMpa: ELASTIC_MODULUS_MPA, leverMm: leverMm.value, flexibilityPerMm },
@@ -161,7 +167,12 @@ export function initialStiffness(leverMm: Traced, springs: readonly Traced[], st
 const PSI = 2.7;
 
 /** S_j at the load case's moment, Nmm/rad; null above the resistance. 6.3.1(6). */
-export function secantStiffness(momentNmm: number, resistanceNmm: number, initial: Traced, steps: boolean): Traced | null {
+export function secantStiffness(
+  momentNmm: number,
+  resistanceNmm: number,
+  initial: Traced,
+  steps: boolean,
+): Traced | null {
   if (momentNmm > resistanceNmm) return null;
   return traced(steps, (trace) => {
     const mu = rules.stiffnessRatioMu(trace, { momentNmm, resistanceNmm, psi: PSI });
@@ -181,7 +192,12 @@ export interface ClassBounds {
 const SWAY_BEAM_SHARE = 0.1;
 
 /** Class boundaries for one beam on this column. */
-export function classBoundsOf(node: NodeCase, panel: ColumnPanel, joint: JointCase, steps: boolean): ClassBounds {
+export function classBoundsOf(
+  node: NodeCase,
+  panel: ColumnPanel,
+  joint: JointCase,
+  steps: boolean,
+): ClassBounds {
   const beam = sectionProperties(joint.beam.section);
   const boundary = (factor: number): Traced =>
     traced(steps, (trace) =>

@@ -40,7 +40,11 @@ const triangularN = defineFormula({
 const leftByEquilibriumN = defineFormula({
   id: "en1993-1-8:2005/6.2.7.2/equilibrium",
   source: { ...document, ref: "6.2.7.2(7)" },
-  symbols: { forceN: ["F_tr,Rd", "N"], limitN: ["limit of ΣF_t,Rd", "N"], aboveN: ["ΣF_t,Rd of the rows before", "N"] },
+  symbols: {
+    forceN: ["F_tr,Rd", "N"],
+    limitN: ["limit of ΣF_t,Rd", "N"],
+    aboveN: ["ΣF_t,Rd of the rows before", "N"],
+  },
   result: ["F_tr,Rd", "N"],
   expression: "max(0, min(forceN, limitN - aboveN))",
   evaluate: (g) => Math.max(0, Math.min(g.forceN, g.limitN - g.aboveN)),
@@ -90,7 +94,11 @@ export function assembleRows(
           const before = rows[place];
           if (before && earlier.value > NEAR_BOLT_FAILURE * before.fastener.tension.value) {
             partN.push(
-              triangularN(trace, { earlierN: earlier.value, leverMm: row.leverMm, earlierLeverMm: before.leverMm }),
+              triangularN(trace, {
+                earlierN: earlier.value,
+                leverMm: row.leverMm,
+                earlierLeverMm: before.leverMm,
+              }),
             );
           }
         });

@@ -13,7 +13,11 @@ export interface RowFamily {
 /** A limit on each row alone and on each group, N; null where the part does not limit. */
 export interface RowFamilyLimits {
   readonly alone: readonly (Traced | null)[];
-  readonly groupsEndingAt: readonly (readonly { readonly first: number; readonly part: TStubPart; readonly limit: Traced }[])[];
+  readonly groupsEndingAt: readonly (readonly {
+    readonly first: number;
+    readonly part: TStubPart;
+    readonly limit: Traced;
+  }[])[];
 }
 
 export interface GroupPosition {
@@ -62,7 +66,10 @@ export function rowFamilyOf(
         const end = members[members.length - 1];
         const start = members[0];
         if (end === undefined || start === undefined) continue;
-        groupsEndingAt[end]?.push({ first: start, part: tStubPartOf(members.map(at), lengths, settingOf(start)) });
+        groupsEndingAt[end]?.push({
+          first: start,
+          part: tStubPartOf(members.map(at), lengths, settingOf(start)),
+        });
       }
     }
   }

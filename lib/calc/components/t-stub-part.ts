@@ -111,7 +111,12 @@ function modesOf(rows: readonly BoltRow[], one: Traced, two: Traced, setting: TS
       trace?.include(length.step);
       return tStubMomentNmm(
         trace,
-        { lengthMm: length.value, thicknessMm, yieldMpa: steel.yieldMpa, gammaM0: node.partialFactors.gammaM0 },
+        {
+          lengthMm: length.value,
+          thicknessMm,
+          yieldMpa: steel.yieldMpa,
+          gammaM0: node.partialFactors.gammaM0,
+        },
         0,
       );
     });
@@ -144,7 +149,12 @@ function modesOf(rows: readonly BoltRow[], one: Traced, two: Traced, setting: TS
   };
 }
 
-function least(one: Traced | null, two: Traced, three: Traced, steps: boolean): { resistance: Traced; mode: 1 | 2 | 3 } {
+function least(
+  one: Traced | null,
+  two: Traced,
+  three: Traced,
+  steps: boolean,
+): { resistance: Traced; mode: 1 | 2 | 3 } {
   const children: readonly (Step | undefined)[] = [one?.step, two.step, three.step];
   const resistance = traced(steps, (trace) => {
     children.forEach((step) => trace?.include(step));

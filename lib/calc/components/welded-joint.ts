@@ -1,6 +1,11 @@
 import { stiffenerNetAreaMm2 } from "../clauses/en1993-1-5-2006/stiffeners";
 import { weldedFlangeBendingN } from "../clauses/en1993-1-8-2005/beam";
-import { omegaOf, truncatedBreadthMm, webTensionN, weldedBreadthMm } from "../clauses/en1993-1-8-2005/column-web";
+import {
+  omegaOf,
+  truncatedBreadthMm,
+  webTensionN,
+  weldedBreadthMm,
+} from "../clauses/en1993-1-8-2005/column-web";
 import { webTensionSpringMm } from "../clauses/en1993-1-8-2005/stiffness";
 import { leastFlangeBreadthMm, weldedFlangeBreadthMm } from "../clauses/en1993-1-8-2005/welds";
 import { weldLegMm, type TransverseStiffeners } from "../measures/panel-design";
@@ -55,7 +60,14 @@ const stiffenedTensionN = defineFormula({
   evaluate: (g) =>
     (g.netAreaMm2 * g.stiffenerYieldMpa + g.breadthMm * g.webThicknessMm * g.webYieldMpa) / g.gammaM0,
   example: {
-    given: { netAreaMm2: 2000, stiffenerYieldMpa: 275, breadthMm: 200, webThicknessMm: 10, webYieldMpa: 265, gammaM0: 1 },
+    given: {
+      netAreaMm2: 2000,
+      stiffenerYieldMpa: 275,
+      breadthMm: 200,
+      webThicknessMm: 10,
+      webYieldMpa: 265,
+      gammaM0: 1,
+    },
     gives: 550_000 + 530_000,
     relTol: 1e-12,
   },
@@ -72,7 +84,11 @@ function tensionBreadthOf(panel: ColumnPanel, view: JointView, steps: boolean): 
     const near = view.columnBeyondTensionMm;
     return near >= full / 2
       ? full
-      : truncatedBreadthMm(trace, { fullMm: full, aboveMm: near, belowMm: view.joint.beam.section.depthMm }, 0);
+      : truncatedBreadthMm(
+          trace,
+          { fullMm: full, aboveMm: near, belowMm: view.joint.beam.section.depthMm },
+          0,
+        );
   });
 }
 
@@ -104,7 +120,12 @@ export function weldedJointOf(
         weldedFlangeBreadthMm(trace, breadthGiven);
         return weldedFlangeBendingN(
           trace,
-          { breadthMm: flangeBreadthMm, beamFlangeMm: section.flangeThicknessMm, yieldMpa: steel.yieldMpa, gammaM0 },
+          {
+            breadthMm: flangeBreadthMm,
+            beamFlangeMm: section.flangeThicknessMm,
+            yieldMpa: steel.yieldMpa,
+            gammaM0,
+          },
           0,
         );
       });

@@ -20,11 +20,21 @@ const farSideN = defineFormula({
     edition: "this project's finite-element study",
     ref: "far flange without prying, far web over the row's length",
   },
-  symbols: { flangeN: ["2 M_pl,1 / m", "N"], lengthMm: ["l_eff", "mm"], webMm: ["t_wc", "mm"], yieldMpa: ["f_y,wc", "N/mm2"], gammaM0: ["γ_M0", "1"] },
+  symbols: {
+    flangeN: ["2 M_pl,1 / m", "N"],
+    lengthMm: ["l_eff", "mm"],
+    webMm: ["t_wc", "mm"],
+    yieldMpa: ["f_y,wc", "N/mm2"],
+    gammaM0: ["γ_M0", "1"],
+  },
   result: ["F_far,Rd", "N"],
   expression: "min(flangeN, lengthMm * webMm * yieldMpa / gammaM0)",
   evaluate: (g) => Math.min(g.flangeN, (g.lengthMm * g.webMm * g.yieldMpa) / g.gammaM0),
-  example: { given: { flangeN: 300_000, lengthMm: 200, webMm: 10, yieldMpa: 275, gammaM0: 1 }, gives: 300_000, relTol: 1e-12 },
+  example: {
+    given: { flangeN: 300_000, lengthMm: 200, webMm: 10, yieldMpa: 275, gammaM0: 1 },
+    gives: 300_000,
+    relTol: 1e-12,
+  },
 });
 
 /** Force from one side's flange at the other side's tension row: outward positive. */
@@ -55,7 +65,14 @@ interface RowBar {
   readonly pressN: number;
 }
 
-function rowBar(own: BoltedSideCase, index: number, share: Traced, row: BoltRow, farCase: SideCase | undefined, steps: boolean): RowBar {
+function rowBar(
+  own: BoltedSideCase,
+  index: number,
+  share: Traced,
+  row: BoltRow,
+  farCase: SideCase | undefined,
+  steps: boolean,
+): RowBar {
   const part = own.model.joint.flange.family.alone[index];
   const demandN = own.rowDemandsN[index] ?? 0;
   const far = farSideOf(own, index, farCase);
@@ -64,7 +81,9 @@ function rowBar(own: BoltedSideCase, index: number, share: Traced, row: BoltRow,
   const relief = bar.reliefTension(null, { share: share.value, symmetric: symmetric.tension });
   const pressShare = farCase && isBoltedCase(farCase) ? (farCase.model.barCompression?.share.value ?? 0) : 0;
   const rows = own.model.barShares.filter((candidate) => candidate !== null).length;
-  const pressN = far.isCompression ? Math.max(0, (share.value * demandN + (pressShare * far.forceN) / rows) / 2) : 0;
+  const pressN = far.isCompression
+    ? Math.max(0, (share.value * demandN + (pressShare * far.forceN) / rows) / 2)
+    : 0;
   const force = traced(steps, (trace) => {
     trace?.include(share.step);
     const prying = bar.pryingN(trace, {
@@ -76,7 +95,9 @@ function rowBar(own: BoltedSideCase, index: number, share: Traced, row: BoltRow,
     });
     const isYielded = part.mode !== 3 && demandN > part.resistance.value;
     if (isYielded) return bar.barForceYieldedN(trace, { forceN: demandN, pryingN: prying }, 0);
-    const meanN = far.isCompression ? pressN / Math.max(share.value, 1e-9) : (demandN + Math.max(far.forceN, 0)) / 2;
+    const meanN = far.isCompression
+      ? pressN / Math.max(share.value, 1e-9)
+      : (demandN + Math.max(far.forceN, 0)) / 2;
     return bar.barForceElasticN(trace, { share: share.value, meanN, forceN: demandN, pryingN: prying }, 0);
   });
   return { row, share, demandN, far, force, pressN };
@@ -95,7 +116,13 @@ export function barPressN(own: SideCase, far: SideCase | undefined): number {
   return rowBars(own, far, false).reduce((sum, { pressN }) => sum + pressN, 0);
 }
 
-function tensionCheck(node: NodeCase, panel: ColumnPanel, own: BoltedSideCase, entry: RowBar, steps: boolean): ComponentCheck {
+function tensionCheck(
+  node: NodeCase,
+  panel: ColumnPanel,
+  own: BoltedSideCase,
+  entry: RowBar,
+  steps: boolean,
+): ComponentCheck {
   const { row } = entry;
   const { size, tension } = row.fastener;
   const limit = traced(steps, (trace) => {
@@ -123,7 +150,13 @@ function tensionCheck(node: NodeCase, panel: ColumnPanel, own: BoltedSideCase, e
   );
 }
 
-function farFlangeCheck(node: NodeCase, panel: ColumnPanel, own: BoltedSideCase, entry: RowBar, steps: boolean): ComponentCheck | null {
+function farFlangeCheck(
+  node: NodeCase,
+  panel: ColumnPanel,
+  own: BoltedSideCase,
+  entry: RowBar,
+  steps: boolean,
+): ComponentCheck | null {
   const inwardN = entry.force.value - Math.max(entry.far.forceN, 0);
   if (entry.far.isCompression || inwardN <= 0) return null;
   const { family, mMm } = own.model.joint.flange;

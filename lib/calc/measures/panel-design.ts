@@ -16,5 +16,6 @@ export interface PanelDesign {
 export type ApplyMeasure<M extends MeasureCase> = (design: PanelDesign, measure: M) => PanelDesign;
 
 /** Throat x sqrt 2; a butt weld has no leg. */
-export const weldLegMm = (weld: { readonly kind: "butt" } | { readonly kind: "fillet"; readonly throatMm: number }): number =>
-  weld.kind === "fillet" ? weld.throatMm * Math.SQRT2 : 0;
+export const weldLegMm = (
+  weld: { readonly kind: "butt" } | { readonly kind: "fillet"; readonly throatMm: number },
+): number => (weld.kind === "fillet" ? weld.throatMm * Math.SQRT2 : 0);

@@ -1,4 +1,9 @@
-import { ELASTIC_MODULUS_MPA, curveCReduction, epsilonOf, strutSlenderness } from "../clauses/en1993-1-1-2005/members";
+import {
+  ELASTIC_MODULUS_MPA,
+  curveCReduction,
+  epsilonOf,
+  strutSlenderness,
+} from "../clauses/en1993-1-1-2005/members";
 import { circularMm, patternMm } from "../clauses/en1993-1-8-2005/yield-lines";
 import { flangeSpringMm, webTensionSpringMm } from "../clauses/en1993-1-8-2005/stiffness";
 import type { BoltedJoint } from "../components/bolted-joint";
@@ -34,7 +39,8 @@ const innerLengthMm = (panel: ColumnPanel, bars: ThroughBars): number =>
 function refuseOutsideColumnBounds(panel: ColumnPanel, gaugeMm: number, bars: ThroughBars): void {
   const { section } = panel;
   if (section.make !== "rolled") refuse("hot-rolled columns only");
-  if (section.depthMm < 200 || section.depthMm > 400) refuse(`column depth 200 to 400 mm (${section.depthMm} mm)`);
+  if (section.depthMm < 200 || section.depthMm > 400)
+    refuse(`column depth 200 to 400 mm (${section.depthMm} mm)`);
   const ratio = ((gaugeMm - section.webThicknessMm) / 2 - 0.8 * section.rootMm) / section.flangeThicknessMm;
   if (ratio < 2 || ratio > 4.6) refuse(`m / t_f 2 to 4.6 (${ratio.toFixed(2)})`);
   if (bars.size.diameterMm < 16 || bars.size.diameterMm > 30) refuse(`bars M16 to M30 (${bars.size.name})`);
@@ -48,12 +54,19 @@ function endPlateOfJoint(joint: JointCase): EndPlateConnection {
   return connection.kind === "end-plate" ? connection : refuse("bolted end plates only");
 }
 
-function refuseOutsideRowBounds(node: NodeCase, panel: ColumnPanel, connection: EndPlateConnection, joint: JointCase, level: Level): void {
+function refuseOutsideRowBounds(
+  node: NodeCase,
+  panel: ColumnPanel,
+  connection: EndPlateConnection,
+  joint: JointCase,
+  level: Level,
+): void {
   const { thicknessMm } = connection.plate;
   if (thicknessMm < 12 || thicknessMm > 30) refuse(`end plate 12 to 30 mm (${thicknessMm} mm)`);
   const beamDepth = joint.beam.section.depthMm;
   const rows = connection.bolts.rowsMm.filter((row) => levelOfRow(row, beamDepth) === level);
-  if (rows.length === 0) throw new OutsideScope(`there is no bolt row at the ${level} level for bars to replace`);
+  if (rows.length === 0)
+    throw new OutsideScope(`there is no bolt row at the ${level} level for bars to replace`);
   const needed = 1.6 * panel.section.depthMm;
   for (const row of rows) {
     const above = node.column.endDistanceAboveMm;
@@ -82,7 +95,8 @@ export function refuseOutsideBarBounds(node: NodeCase, design: PanelDesign, pane
         other.bolts.rowsMm.filter((row) => levelOfRow(row, depth) === level).join(" ");
       if (
         connection.bolts.gaugeMm !== first.bolts.gaugeMm ||
-        sameRows(connection, joint.beam.section.depthMm) !== sameRows(first, node.joints[0]?.beam.section.depthMm ?? 0)
+        sameRows(connection, joint.beam.section.depthMm) !==
+          sameRows(first, node.joints[0]?.beam.section.depthMm ?? 0)
       ) {
         refuse("the same rows and gauge left and right");
       }
@@ -109,13 +123,20 @@ function groupShare(joint: BoltedJoint, index: number): number {
 }
 
 /** Share eta of each tension row that bars hold; null for a row of bolts. */
-export function barTensionShares(panel: ColumnPanel, joint: BoltedJoint, steps: boolean): readonly (Traced | null)[] {
+export function barTensionShares(
+  panel: ColumnPanel,
+  joint: BoltedJoint,
+  steps: boolean,
+): readonly (Traced | null)[] {
   const { section, properties } = panel;
   return joint.view.tensionRows.map((row, index) => {
     const bars = row.fastener.bars;
     if (!bars) return null;
     return traced(steps, (trace) => {
-      const flangeSpring = bar.barFlangeSpringMm(trace, { flangeMm: section.flangeThicknessMm, mMm: joint.flange.mMm });
+      const flangeSpring = bar.barFlangeSpringMm(trace, {
+        flangeMm: section.flangeThicknessMm,
+        mMm: joint.flange.mMm,
+      });
       const webSpring = bar.barWebSpringMm(trace, {
         webMm: section.webThicknessMm,
         flangeMm: section.flangeThicknessMm,
@@ -155,7 +176,13 @@ export interface BarCompression {
   readonly buckling: Traced;
 }
 
-function compressionShare(trace: Trace | null, panel: ColumnPanel, joint: BoltedJoint, bars: ThroughBars, distanceRatio: number): number {
+function compressionShare(
+  trace: Trace | null,
+  panel: ColumnPanel,
+  joint: BoltedJoint,
+  bars: ThroughBars,
+  distanceRatio: number,
+): number {
   const { section, properties } = panel;
   const { mMm } = joint.flange;
   const eMm = (section.widthMm - joint.view.gaugeMm) / 2;
@@ -208,7 +235,12 @@ function barBuckling(trace: Trace | null, node: NodeCase, panel: ColumnPanel, ba
 }
 
 /** Bars at the joint's compression level; null where there are none or a stiffener takes the force. */
-export function barCompressionOf(node: NodeCase, panel: ColumnPanel, joint: BoltedJoint, steps: boolean): BarCompression | null {
+export function barCompressionOf(
+  node: NodeCase,
+  panel: ColumnPanel,
+  joint: BoltedJoint,
+  steps: boolean,
+): BarCompression | null {
   const { view, compression } = joint;
   const near = view.rows.filter((row) => row.level === view.compressionLevel && row.fastener.bars);
   const bars = near[0]?.fastener.bars;

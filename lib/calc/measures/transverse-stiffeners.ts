@@ -10,7 +10,10 @@ import { checkOf, detailAtLeast, detailAtMost } from "../components/check";
 import { SPREAD_SHARE, rowToStiffenerMm } from "../components/column-flange";
 import type { ColumnPanel } from "../components/column-panel";
 import { isBolted, type JointModel } from "../joint-model";
-import { tensionStiffenerPlainN, tensionStiffenerSharedN } from "../clauses/en1993-1-5-2006/tension-stiffeners";
+import {
+  tensionStiffenerPlainN,
+  tensionStiffenerSharedN,
+} from "../clauses/en1993-1-5-2006/tension-stiffeners";
 import type { Level, NodeCase, Side } from "../node";
 import type { ComponentCheck } from "../result";
 import { isBoltedCase, type BoltedSideCase, type SideCase } from "../side-case";
@@ -33,7 +36,9 @@ const netAreaMm2 = (trace: Trace | null, stiffener: TransverseStiffeners): numbe
 
 /** Length of each plate along the web, mm. */
 const depthOf = (panel: ColumnPanel, stiffener: TransverseStiffeners): number =>
-  stiffener.length === "full" ? panel.section.depthMm - 2 * panel.section.flangeThicknessMm : stiffener.length;
+  stiffener.length === "full"
+    ? panel.section.depthMm - 2 * panel.section.flangeThicknessMm
+    : stiffener.length;
 
 /** Detailing of the pair at one level. Every rule names where it comes from. */
 export function stiffenerDetailing(
@@ -121,7 +126,9 @@ function tensionForce(side: BoltedSideCase, panel: ColumnPanel, steps: boolean):
     if (!row) return 0;
     const before = rows[index - 1];
     const after = rows[index + 1];
-    const out = before ? spreadBetween(row.fromFaceMm, before.fromFaceMm) : Math.min(reach, view.columnBeyondTensionMm + row.fromFaceMm);
+    const out = before
+      ? spreadBetween(row.fromFaceMm, before.fromFaceMm)
+      : Math.min(reach, view.columnBeyondTensionMm + row.fromFaceMm);
     return Math.max(out, 0) + (after ? spreadBetween(row.fromFaceMm, after.fromFaceMm) : reach);
   };
   const m2 = (index: number): number => {
@@ -169,16 +176,30 @@ function plateForce(sideCase: SideCase, level: Level, panel: ColumnPanel, steps:
     return { side, isTension: true, force };
   }
   const share = compression.stiffener?.plateShare ?? 1;
-  return { side, isTension: false, force: { value: Math.max(sideCase.compressionDemandN, 0) * share, step: undefined } };
+  return {
+    side,
+    isTension: false,
+    force: { value: Math.max(sideCase.compressionDemandN, 0) * share, step: undefined },
+  };
 }
 
-function weldLimit(node: NodeCase, stiffener: TransverseStiffeners, throatMm: number, lengthMm: number, steps: boolean): Traced {
+function weldLimit(
+  node: NodeCase,
+  stiffener: TransverseStiffeners,
+  throatMm: number,
+  lengthMm: number,
+  steps: boolean,
+): Traced {
   const { ultimateMpa, betaW } = stiffener.steel;
   return traced(steps, (trace) =>
     weldForceN(
       trace,
       {
-        strengthMpa: filletShearStrengthMpa(trace, { ultimateMpa, betaW, gammaM2: node.partialFactors.gammaM2 }),
+        strengthMpa: filletShearStrengthMpa(trace, {
+          ultimateMpa,
+          betaW,
+          gammaM2: node.partialFactors.gammaM2,
+        }),
         throatMm,
         lengthMm,
       },
@@ -224,7 +245,12 @@ export function stiffenerChecks(
             { demandStep: force.step },
           )
         : checkOf(
-            { ...head, side, component: "transverse-stiffener", clause: "EN 1993-1-5, 9.4 and SCI/BCSA P398" },
+            {
+              ...head,
+              side,
+              component: "transverse-stiffener",
+              clause: "EN 1993-1-5, 9.4 and SCI/BCSA P398",
+            },
             sideCase.compressionDemandN,
             sideCase.compression,
           ),
@@ -232,7 +258,13 @@ export function stiffenerChecks(
     if (stiffener.flangeWeld.kind === "fillet") {
       checks.push(
         checkOf(
-          { ...head, side, component: "stiffener-weld", clause: "EN 1993-1-8, 4.5.3.3", what: "stiffener to flange" },
+          {
+            ...head,
+            side,
+            component: "stiffener-weld",
+            clause: "EN 1993-1-8, 4.5.3.3",
+            what: "stiffener to flange",
+          },
           force.value,
           weldLimit(node, stiffener, stiffener.flangeWeld.throatMm, 4 * straight, steps),
           { demandStep: force.step },
@@ -243,16 +275,25 @@ export function stiffenerChecks(
   // Towards the right is positive: tension on the left pulls left, compression on the left pushes right.
   const net = Math.abs(
     forces.reduce(
-      (total, { side, isTension, force }) => total + (side === "left" ? -1 : 1) * (isTension ? 1 : -1) * force.value,
+      (total, { side, isTension, force }) =>
+        total + (side === "left" ? -1 : 1) * (isTension ? 1 : -1) * force.value,
       0,
     ),
   );
-  const side = forces.reduce((larger, other) => (other.force.value > larger.force.value ? other : larger)).side;
+  const side = forces.reduce((larger, other) =>
+    other.force.value > larger.force.value ? other : larger,
+  ).side;
   const along = depthOf(panel, stiffener) - 2 * stiffener.clipMm;
   if (stiffener.webWeld.kind === "fillet") {
     checks.push(
       checkOf(
-        { ...head, side, component: "stiffener-weld", clause: "EN 1993-1-8, 4.5.3.3", what: "stiffener to web" },
+        {
+          ...head,
+          side,
+          component: "stiffener-weld",
+          clause: "EN 1993-1-8, 4.5.3.3",
+          what: "stiffener to web",
+        },
         net,
         weldLimit(node, stiffener, stiffener.webWeld.throatMm, 4 * along, steps),
       ),

@@ -10,7 +10,10 @@ import type { ComponentCheck } from "../result";
 import { traced } from "../trace/traced";
 import { weldLegMm, type ApplyMeasure, type WebPlates } from "./panel-design";
 
-export const applyWebPlates: ApplyMeasure<WebPlates> = (design, measure) => ({ ...design, webPlates: measure });
+export const applyWebPlates: ApplyMeasure<WebPlates> = (design, measure) => ({
+  ...design,
+  webPlates: measure,
+});
 
 /** Slenderness limit of a plate held at its edges only. EN 1993-1-8:2005, 6.2.6.1(14). */
 const SLENDER_PLATE = 40;
@@ -23,7 +26,9 @@ export function neededPlateHeightMm(model: JointModel): number {
   const compressionReach = armMm + Math.min(compression.breadth.value / 2, view.columnBeyondCompressionMm);
   if (!isBolted(model)) {
     const { tensionBreadth } = model.joint;
-    return 2 * Math.max(compressionReach, armMm + Math.min(tensionBreadth.value / 2, view.columnBeyondTensionMm));
+    return (
+      2 * Math.max(compressionReach, armMm + Math.min(tensionBreadth.value / 2, view.columnBeyondTensionMm))
+    );
   }
   const end = armMm + view.columnBeyondTensionMm;
   const rowReach = model.joint.view.tensionRows.map((row, index) => {
@@ -72,7 +77,12 @@ export function webPlateDetailing(panel: ColumnPanel, plates: WebPlates, side: S
       SLENDER_PLATE * epsilon * plates.thicknessMm,
     ),
     detailAtLeast(
-      { ...head, clause: "EN 1993-1-8, 6.2.6.1(8)", what: "web plate of the column's own grade", unit: "ratio" },
+      {
+        ...head,
+        clause: "EN 1993-1-8, 6.2.6.1(8)",
+        what: "web plate of the column's own grade",
+        unit: "ratio",
+      },
       1,
       sameGrade ? 1 : 0,
     ),
@@ -118,10 +128,19 @@ export function webPlateChecks(
   ];
   const { weld } = plates;
   if (weld.kind === "fillet") {
-    const strength = { ultimateMpa: plates.steel.ultimateMpa, betaW: plates.steel.betaW, gammaM2: node.partialFactors.gammaM2 };
+    const strength = {
+      ultimateMpa: plates.steel.ultimateMpa,
+      betaW: plates.steel.betaW,
+      gammaM2: node.partialFactors.gammaM2,
+    };
     checks.push(
       checkOf(
-        { ...head, component: "web-plate-weld", clause: "EN 1993-1-8, 4.5.3.3", what: "shear flow along one plate edge" },
+        {
+          ...head,
+          component: "web-plate-weld",
+          clause: "EN 1993-1-8, 4.5.3.3",
+          what: "shear flow along one plate edge",
+        },
         perPlateN,
         traced(steps, (trace) =>
           weldForceN(

@@ -210,7 +210,12 @@ export const barForceYieldedN = defineFormula({
 export const barColumnSpringMm = defineFormula({
   id: id("k_34"),
   source: from("stiffness of the column side: k3 and k4 in series over (1 - 0.75 η r)"),
-  symbols: { webSpringMm: ["k_3", "mm"], flangeSpringMm: ["k_4", "mm"], share: ["η", "1"], symmetric: ["r", "1"] },
+  symbols: {
+    webSpringMm: ["k_3", "mm"],
+    flangeSpringMm: ["k_4", "mm"],
+    share: ["η", "1"],
+    symmetric: ["r", "1"],
+  },
   result: ["k_34", "mm"],
   expression: "1 / (1 / webSpringMm + 1 / flangeSpringMm) / (1 - 0.75 * share * symmetric)",
   evaluate: (g) => 1 / (1 / g.webSpringMm + 1 / g.flangeSpringMm) / (1 - 0.75 * g.share * g.symmetric),
@@ -251,10 +256,17 @@ export const barShareCompression = defineFormula({
   expression:
     "max(0, 1 - 0.8 * distanceRatio) * (2 * barNPerMm / (2 * elasticMpa * compressionSpringMm)) / (1 + 2 * barNPerMm / columnNPerMm)",
   evaluate: (g) =>
-    (Math.max(0, 1 - 0.8 * g.distanceRatio) * ((2 * g.barNPerMm) / (2 * g.elasticMpa * g.compressionSpringMm))) /
+    (Math.max(0, 1 - 0.8 * g.distanceRatio) *
+      ((2 * g.barNPerMm) / (2 * g.elasticMpa * g.compressionSpringMm))) /
     (1 + (2 * g.barNPerMm) / g.columnNPerMm),
   example: {
-    given: { distanceRatio: 0.5, barNPerMm: 400, elasticMpa: 200, compressionSpringMm: 10, columnNPerMm: 800 },
+    given: {
+      distanceRatio: 0.5,
+      barNPerMm: 400,
+      elasticMpa: 200,
+      compressionSpringMm: 10,
+      columnNPerMm: 800,
+    },
     gives: (0.6 * 0.2) / 2,
     relTol: 1e-12,
   },

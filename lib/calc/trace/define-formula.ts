@@ -41,7 +41,10 @@ export function defineFormula<K extends string>(spec: FormulaSpec<K>): Formula<K
     if (limit !== null) throw new OutsideScope(limit, spec.id);
     const value = spec.evaluate(given);
     if (!Number.isFinite(value)) {
-      throw new NotANumber(spec.id, keys.filter((key) => !Number.isFinite(given[key])));
+      throw new NotANumber(
+        spec.id,
+        keys.filter((key) => !Number.isFinite(given[key])),
+      );
     }
     if (trace !== null) {
       trace.record(

@@ -16,13 +16,25 @@ export function defineSeries<K extends string>(spec: {
   readonly exampleCount: number;
   readonly evaluate: (terms: { readonly [key in K]: readonly number[] }) => number;
   readonly build: (count: number) => Omit<FormulaSpec, "evaluate" | "example">;
-  readonly example: { readonly given: { readonly [key in K]: readonly number[] }; readonly gives: number; readonly relTol: number };
+  readonly example: {
+    readonly given: { readonly [key in K]: readonly number[] };
+    readonly gives: number;
+    readonly relTol: number;
+  };
 }): Series<K> {
   const flat = (terms: { readonly [key in K]: readonly number[] }): Record<string, number> =>
-    Object.fromEntries(spec.terms.flatMap((key) => terms[key].map((value, index) => [`${key}${index + 1}`, value])));
-  const unflat = (given: Readonly<Record<string, number>>, count: number): { readonly [key in K]: readonly number[] } =>
     Object.fromEntries(
-      spec.terms.map((key) => [key, Array.from({ length: count }, (_, index) => given[`${key}${index + 1}`] ?? NaN)]),
+      spec.terms.flatMap((key) => terms[key].map((value, index) => [`${key}${index + 1}`, value])),
+    );
+  const unflat = (
+    given: Readonly<Record<string, number>>,
+    count: number,
+  ): { readonly [key in K]: readonly number[] } =>
+    Object.fromEntries(
+      spec.terms.map((key) => [
+        key,
+        Array.from({ length: count }, (_, index) => given[`${key}${index + 1}`] ?? NaN),
+      ]),
     ) as unknown as { readonly [key in K]: readonly number[] };
   const named = (count: number): Formula =>
     defineFormula({
@@ -32,7 +44,11 @@ export function defineSeries<K extends string>(spec: {
     });
   const example = named(spec.exampleCount);
   const unregistered = new Map<number, FormulaSpec>([[spec.exampleCount, example.spec]]);
-  const run = (trace: Trace | null, terms: { readonly [key in K]: readonly number[] }, mark?: number): number => {
+  const run = (
+    trace: Trace | null,
+    terms: { readonly [key in K]: readonly number[] },
+    mark?: number,
+  ): number => {
     const value = spec.evaluate(terms);
     if (!Number.isFinite(value)) throw new NotANumber(example.spec.id, spec.terms);
     if (trace !== null) {

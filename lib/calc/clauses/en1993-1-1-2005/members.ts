@@ -38,11 +38,20 @@ export const rolledShearAreaMm2 = defineFormula({
     "max(areaMm2 - 2 * widthMm * flangeThicknessMm + (webThicknessMm + 2 * rootMm) * flangeThicknessMm, (depthMm - 2 * flangeThicknessMm) * webThicknessMm)",
   evaluate: (g) =>
     Math.max(
-      g.areaMm2 - 2 * g.widthMm * g.flangeThicknessMm + (g.webThicknessMm + 2 * g.rootMm) * g.flangeThicknessMm,
+      g.areaMm2 -
+        2 * g.widthMm * g.flangeThicknessMm +
+        (g.webThicknessMm + 2 * g.rootMm) * g.flangeThicknessMm,
       (g.depthMm - 2 * g.flangeThicknessMm) * g.webThicknessMm,
     ),
   example: {
-    given: { areaMm2: 5000, widthMm: 100, flangeThicknessMm: 10, webThicknessMm: 10, rootMm: 10, depthMm: 220 },
+    given: {
+      areaMm2: 5000,
+      widthMm: 100,
+      flangeThicknessMm: 10,
+      webThicknessMm: 10,
+      rootMm: 10,
+      depthMm: 220,
+    },
     gives: 5000 - 2000 + 300,
     relTol: 1e-12,
   },

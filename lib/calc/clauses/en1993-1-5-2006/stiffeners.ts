@@ -19,8 +19,7 @@ export const cruciformAreaMm2 = defineFormula({
   symbols: pair,
   result: ["A_s,eff", "mm2"],
   expression: "2 * widthMm * thicknessMm + (webLengthMm + thicknessMm) * webThicknessMm",
-  evaluate: (g) =>
-    2 * g.widthMm * g.thicknessMm + (g.webLengthMm + g.thicknessMm) * g.webThicknessMm,
+  evaluate: (g) => 2 * g.widthMm * g.thicknessMm + (g.webLengthMm + g.thicknessMm) * g.webThicknessMm,
   example: { given: examplePair, gives: 1600 + 310 * 10, relTol: 1e-12 },
 });
 
@@ -30,8 +29,7 @@ export const cruciformInertiaMm4 = defineFormula({
   source: from("9.1(2), Figure 9.1"),
   symbols: pair,
   result: ["I_s", "mm4"],
-  expression:
-    "thicknessMm * (2 * widthMm + webThicknessMm)^3 / 12 + webLengthMm * webThicknessMm^3 / 12",
+  expression: "thicknessMm * (2 * widthMm + webThicknessMm)^3 / 12 + webLengthMm * webThicknessMm^3 / 12",
   evaluate: (g) =>
     (g.thicknessMm * (2 * g.widthMm + g.webThicknessMm) ** 3) / 12 +
     (g.webLengthMm * g.webThicknessMm ** 3) / 12,
@@ -51,7 +49,11 @@ export const cruciformBucklingN = defineFormula({
   result: ["N_b,Rd", "N"],
   expression: "reduction * areaMm2 * yieldMpa / gammaM1",
   evaluate: (g) => (g.reduction * g.areaMm2 * g.yieldMpa) / g.gammaM1,
-  example: { given: { reduction: 0.5, areaMm2: 4000, yieldMpa: 275, gammaM1: 1.1 }, gives: 500_000, relTol: 1e-12 },
+  example: {
+    given: { reduction: 0.5, areaMm2: 4000, yieldMpa: 275, gammaM1: 1.1 },
+    gives: 500_000,
+    relTol: 1e-12,
+  },
 });
 
 /** Largest outstand that cannot buckle by twisting, mm. EN 1993-1-5:2006, 9.2.1(8). */
@@ -123,7 +125,8 @@ export const stiffenerNetAreaMm2 = defineFormula({
   result: ["A_s,net", "mm2"],
   expression: "2 * (widthMm - clipMm) * thicknessMm",
   evaluate: (g) => 2 * (g.widthMm - g.clipMm) * g.thicknessMm,
-  limitBroken: (g) => (g.clipMm >= g.widthMm ? "the corner clip leaves nothing of the stiffener at the flange" : null),
+  limitBroken: (g) =>
+    g.clipMm >= g.widthMm ? "the corner clip leaves nothing of the stiffener at the flange" : null,
   example: { given: { widthMm: 110, clipMm: 15, thicknessMm: 15 }, gives: 2850, relTol: 1e-12 },
 });
 
@@ -141,7 +144,11 @@ export const yieldForceN = defineFormula({
 /** Shear of the column web along both sides of a partial-depth stiffener's web weld, N. EN 1993-1-1:2005, 6.2.6(2). */
 export const twoShearPlanesN = defineFormula({
   id: "en1993-1-1:2005/6.2.6/two shear planes",
-  source: { document: "EN 1993-1-1", edition: "2005", ref: "6.2.6(2), Eq. (6.18), two planes along the weld" },
+  source: {
+    document: "EN 1993-1-1",
+    edition: "2005",
+    ref: "6.2.6(2), Eq. (6.18), two planes along the weld",
+  },
   symbols: {
     lengthMm: ["l_w", "mm"],
     thicknessMm: ["t_wc", "mm"],

@@ -8,7 +8,10 @@ const numbered = (
 ): Record<string, readonly [string, string]> =>
   Object.fromEntries(
     Object.entries(names).flatMap(([key, [symbol, unit]]) =>
-      Array.from({ length: count }, (_, index) => [`${key}${index + 1}`, [`${symbol},${index + 1}`, unit] as const]),
+      Array.from({ length: count }, (_, index) => [
+        `${key}${index + 1}`,
+        [`${symbol},${index + 1}`, unit] as const,
+      ]),
     ),
   );
 
@@ -122,7 +125,11 @@ export const equivalentSpringMm = defineSeries({
     result: ["k_eq", "mm"],
     expression: `(${sumText(count, (n) => `springMm${n} * leverMm${n}`)})^2 / (${sumText(count, (n) => `springMm${n} * leverMm${n}^2`)})`,
   }),
-  example: { given: { springMm: [2, 2], leverMm: [500, 400] }, gives: (1800 * 1800) / 820_000, relTol: 1e-12 },
+  example: {
+    given: { springMm: [2, 2], leverMm: [500, 400] },
+    gives: (1800 * 1800) / 820_000,
+    relTol: 1e-12,
+  },
 });
 
 /** Flexibility of the joint's springs together, 1/mm. 6.3.1(4), Eq. (6.27). */

@@ -9,7 +9,11 @@ export const beamFlangeCompressionN = defineFormula({
   result: ["F_c,fb,Rd", "N"],
   expression: "momentNmm / (depthMm - flangeThicknessMm)",
   evaluate: (g) => g.momentNmm / (g.depthMm - g.flangeThicknessMm),
-  example: { given: { momentNmm: 5e8, depthMm: 515, flangeThicknessMm: 15 }, gives: 1_000_000, relTol: 1e-12 },
+  example: {
+    given: { momentNmm: 5e8, depthMm: 515, flangeThicknessMm: 15 },
+    gives: 1_000_000,
+    relTol: 1e-12,
+  },
 });
 
 /** The same for a beam deeper than 600 mm: the web may give 20 % at most, N. 6.2.6.7(1). */
@@ -52,7 +56,11 @@ export const beamWebTensionN = defineFormula({
   result: ["F_t,wb,Rd", "N"],
   expression: "breadthMm * thicknessMm * yieldMpa / gammaM0",
   evaluate: (g) => (g.breadthMm * g.thicknessMm * g.yieldMpa) / g.gammaM0,
-  example: { given: { breadthMm: 200, thicknessMm: 10, yieldMpa: 275, gammaM0: 1 }, gives: 550_000, relTol: 1e-12 },
+  example: {
+    given: { breadthMm: 200, thicknessMm: 10, yieldMpa: 275, gammaM0: 1 },
+    gives: 550_000,
+    relTol: 1e-12,
+  },
 });
 
 /** Column flange under a welded beam flange without a stiffener, N. 6.2.6.4.3(1), Eq. (6.20). */

@@ -24,7 +24,14 @@ export const panelShearN = defineFormula({
   evaluate: (g) => (0.9 * g.yieldMpa * g.shearAreaMm2) / (Math.sqrt(3) * g.gammaM0),
   // P398 (2013), example F.1, gives 779 kN for UB 533x210x82 S275 (A_vc = 5450 mm2 to 3 figures).
   example: {
-    given: { shearAreaMm2: 5452, yieldMpa: 275, webDepthMm: 476.5, webThicknessMm: 9.6, epsilon: 0.924, gammaM0: 1 },
+    given: {
+      shearAreaMm2: 5452,
+      yieldMpa: 275,
+      webDepthMm: 476.5,
+      webThicknessMm: 9.6,
+      epsilon: 0.924,
+      gammaM0: 1,
+    },
     gives: 779_000,
     relTol: 1e-3,
   },
@@ -38,7 +45,11 @@ export const enlargedShearAreaMm2 = defineFormula({
   result: ["A_vc", "mm2"],
   expression: "shearAreaMm2 + plateWidthMm * webThicknessMm",
   evaluate: (g) => g.shearAreaMm2 + g.plateWidthMm * g.webThicknessMm,
-  example: { given: { shearAreaMm2: 3000, plateWidthMm: 200, webThicknessMm: 10 }, gives: 5000, relTol: 1e-12 },
+  example: {
+    given: { shearAreaMm2: 3000, plateWidthMm: 200, webThicknessMm: 10 },
+    gives: 5000,
+    relTol: 1e-12,
+  },
 });
 
 /** What a frame of column flanges and stiffeners adds to the panel's shear resistance, N. 6.2.6.1(4), Eq. (6.8). */
@@ -54,7 +65,10 @@ export const panelFrameShearN = defineFormula({
   expression:
     "min(4 * flangeMomentNmm / spacingMm, (2 * flangeMomentNmm + 2 * stiffenerMomentNmm) / spacingMm)",
   evaluate: (g) =>
-    Math.min((4 * g.flangeMomentNmm) / g.spacingMm, (2 * g.flangeMomentNmm + 2 * g.stiffenerMomentNmm) / g.spacingMm),
+    Math.min(
+      (4 * g.flangeMomentNmm) / g.spacingMm,
+      (2 * g.flangeMomentNmm + 2 * g.stiffenerMomentNmm) / g.spacingMm,
+    ),
   example: {
     given: { flangeMomentNmm: 4_000_000, stiffenerMomentNmm: 1_000_000, spacingMm: 400 },
     gives: 25_000,
@@ -88,7 +102,11 @@ export const omegaOf = defineFormula({
     if (beta <= 1) return one + 2 * (1 - beta) * (1 - one);
     return one + (beta - 1) * (1 / Math.sqrt(1 + 5.2 * ratio) - one);
   },
-  example: { given: { beta: 2, stripMm2: 1000, shearAreaMm2: 2000 }, gives: 1 / Math.sqrt(2.3), relTol: 1e-12 },
+  example: {
+    given: { beta: 2, stripMm2: 1000, shearAreaMm2: 2000 },
+    gives: 1 / Math.sqrt(2.3),
+    relTol: 1e-12,
+  },
 });
 
 /** Slenderness of the web strip as a plate. 6.2.6.2(1). */
@@ -105,7 +123,10 @@ export const webPlateSlenderness = defineFormula({
   result: ["λ̄_p", "1"],
   expression: "0.932 * sqrt(breadthMm * webDepthMm * yieldMpa / (elasticMpa * webThicknessMm^2))",
   evaluate: (g) =>
-    0.932 * Math.sqrt((g.breadthMm * g.webDepthMm * g.yieldMpa) / (g.elasticMpa * g.webThicknessMm * g.webThicknessMm)),
+    0.932 *
+    Math.sqrt(
+      (g.breadthMm * g.webDepthMm * g.yieldMpa) / (g.elasticMpa * g.webThicknessMm * g.webThicknessMm),
+    ),
   example: {
     given: { breadthMm: 210, webDepthMm: 100, yieldMpa: 400, elasticMpa: 210_000, webThicknessMm: 2 },
     gives: 0.932 * Math.sqrt(10),
@@ -120,7 +141,8 @@ export const rhoOf = defineFormula({
   symbols: { slenderness: ["λ̄_p", "1"] },
   result: ["ρ", "1"],
   expression: "slenderness <= 0.72 ? 1 : (slenderness - 0.2) / slenderness^2",
-  evaluate: ({ slenderness }) => (slenderness <= 0.72 ? 1 : (slenderness - 0.2) / (slenderness * slenderness)),
+  evaluate: ({ slenderness }) =>
+    slenderness <= 0.72 ? 1 : (slenderness - 0.2) / (slenderness * slenderness),
   example: { given: { slenderness: 1 }, gives: 0.8, relTol: 1e-12 },
 });
 
@@ -152,7 +174,8 @@ export const kWcOf = defineFormula({
   symbols: { stressMpa: ["σ_com,Ed", "N/mm2"], yieldMpa: ["f_y,wc", "N/mm2"] },
   result: ["k_wc", "1"],
   expression: "stressMpa <= 0.7 * yieldMpa ? 1 : 1.7 - stressMpa / yieldMpa",
-  limitBroken: (g) => (g.stressMpa > g.yieldMpa ? "the column web yields under the column's own axial force and moment" : null),
+  limitBroken: (g) =>
+    g.stressMpa > g.yieldMpa ? "the column web yields under the column's own axial force and moment" : null,
   evaluate: (g) => (g.stressMpa <= 0.7 * g.yieldMpa ? 1 : 1.7 - g.stressMpa / g.yieldMpa),
   example: { given: { stressMpa: 225, yieldMpa: 250 }, gives: 0.8, relTol: 1e-12 },
 });

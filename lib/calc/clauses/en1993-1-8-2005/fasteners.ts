@@ -78,9 +78,17 @@ export const bearingN = defineFormula({
   },
   result: ["F_b,Rd", "N"],
   expression: "edgeFactor * bearingFactor * ultimateMpa * diameterMm * thicknessMm / gammaM2",
-  evaluate: (g) => (g.edgeFactor * g.bearingFactor * g.ultimateMpa * g.diameterMm * g.thicknessMm) / g.gammaM2,
+  evaluate: (g) =>
+    (g.edgeFactor * g.bearingFactor * g.ultimateMpa * g.diameterMm * g.thicknessMm) / g.gammaM2,
   example: {
-    given: { edgeFactor: 2.5, bearingFactor: 0.5, ultimateMpa: 400, diameterMm: 20, thicknessMm: 10, gammaM2: 1.25 },
+    given: {
+      edgeFactor: 2.5,
+      bearingFactor: 0.5,
+      ultimateMpa: 400,
+      diameterMm: 20,
+      thicknessMm: 10,
+      gammaM2: 1.25,
+    },
     gives: 80_000,
     relTol: 1e-12,
   },
@@ -109,10 +117,14 @@ export const bearingAlongFactor = defineFormula({
     ultimateMpa: ["f_u", "N/mm2"],
   },
   result: ["α_b", "1"],
-  expression:
-    "min(endMm / (3 * holeMm), pitchMm / (3 * holeMm) - 0.25, boltUltimateMpa / ultimateMpa, 1)",
+  expression: "min(endMm / (3 * holeMm), pitchMm / (3 * holeMm) - 0.25, boltUltimateMpa / ultimateMpa, 1)",
   evaluate: (g) =>
-    Math.min(g.endMm / (3 * g.holeMm), g.pitchMm / (3 * g.holeMm) - 0.25, g.boltUltimateMpa / g.ultimateMpa, 1),
+    Math.min(
+      g.endMm / (3 * g.holeMm),
+      g.pitchMm / (3 * g.holeMm) - 0.25,
+      g.boltUltimateMpa / g.ultimateMpa,
+      1,
+    ),
   example: {
     given: { endMm: 30, pitchMm: 100, holeMm: 20, boltUltimateMpa: 800, ultimateMpa: 400 },
     gives: 0.5,

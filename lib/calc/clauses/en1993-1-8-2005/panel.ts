@@ -28,7 +28,14 @@ export const panelShearForceN = defineFormula({
   expression: "leftNmm / leftLeverMm - rightNmm / rightLeverMm - (aboveN - belowN) / 2",
   evaluate: (g) => g.leftNmm / g.leftLeverMm - g.rightNmm / g.rightLeverMm - (g.aboveN - g.belowN) / 2,
   example: {
-    given: { leftNmm: 2e8, leftLeverMm: 400, rightNmm: 1e8, rightLeverMm: 400, aboveN: 20_000, belowN: -20_000 },
+    given: {
+      leftNmm: 2e8,
+      leftLeverMm: 400,
+      rightNmm: 1e8,
+      rightLeverMm: 400,
+      aboveN: 20_000,
+      belowN: -20_000,
+    },
     gives: 230_000,
     relTol: 1e-12,
   },

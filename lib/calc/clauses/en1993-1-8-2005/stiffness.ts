@@ -106,7 +106,11 @@ export const initialStiffnessNmmPerRad = defineFormula({
   result: ["S_j,ini", "Nmm/rad"],
   expression: "elasticMpa * leverMm^2 / flexibilityPerMm",
   evaluate: (g) => (g.elasticMpa * g.leverMm * g.leverMm) / g.flexibilityPerMm,
-  example: { given: { elasticMpa: 210_000, leverMm: 400, flexibilityPerMm: 0.5 }, gives: 67.2e9, relTol: 1e-12 },
+  example: {
+    given: { elasticMpa: 210_000, leverMm: 400, flexibilityPerMm: 0.5 },
+    gives: 67.2e9,
+    relTol: 1e-12,
+  },
 });
 
 /** How much softer a joint is at a moment above two thirds of its resistance. 6.3.1(6), Eq. (6.28), Table 6.8. */

@@ -14,7 +14,11 @@ export const tStubMomentNmm = defineFormula({
   result: ["M_pl,Rd", "Nmm"],
   expression: "0.25 * lengthMm * thicknessMm^2 * yieldMpa / gammaM0",
   evaluate: (g) => (0.25 * g.lengthMm * g.thicknessMm * g.thicknessMm * g.yieldMpa) / g.gammaM0,
-  example: { given: { lengthMm: 200, thicknessMm: 20, yieldMpa: 265, gammaM0: 1 }, gives: 5_300_000, relTol: 1e-12 },
+  example: {
+    given: { lengthMm: 200, thicknessMm: 20, yieldMpa: 265, gammaM0: 1 },
+    gives: 5_300_000,
+    relTol: 1e-12,
+  },
 });
 
 const modeOneSymbols = {
@@ -43,7 +47,9 @@ export const modeOneN = defineFormula({
   evaluate: (g) =>
     ((8 * g.nMm - 2 * g.headMm) * g.momentNmm) / (2 * g.mMm * g.nMm - g.headMm * (g.mMm + g.nMm)),
   limitBroken: (g) =>
-    2 * g.mMm * g.nMm - g.headMm * (g.mMm + g.nMm) <= 0 ? "2 m n does not exceed e_w (m + n): mode 1 cannot occur" : null,
+    2 * g.mMm * g.nMm - g.headMm * (g.mMm + g.nMm) <= 0
+      ? "2 m n does not exceed e_w (m + n): mode 1 cannot occur"
+      : null,
   example: {
     given: { momentNmm: 1_000_000, mMm: 40, nMm: 50, headMm: 10 },
     gives: (380 * 1_000_000) / (4000 - 900),

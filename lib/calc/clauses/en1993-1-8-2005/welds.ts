@@ -61,7 +61,14 @@ export const weldedFlangeBreadthMm = defineFormula({
       Math.min(((g.flangeThicknessMm / g.plateThicknessMm) * g.flangeYieldMpa) / g.plateYieldMpa, 1) *
       g.flangeThicknessMm,
   example: {
-    given: { webThicknessMm: 10, rootMm: 12, flangeThicknessMm: 14, plateThicknessMm: 20, flangeYieldMpa: 275, plateYieldMpa: 275 },
+    given: {
+      webThicknessMm: 10,
+      rootMm: 12,
+      flangeThicknessMm: 14,
+      plateThicknessMm: 20,
+      flangeYieldMpa: 275,
+      plateYieldMpa: 275,
+    },
     gives: 10 + 24 + 7 * 0.7 * 14,
     relTol: 1e-12,
   },
@@ -71,9 +78,17 @@ export const weldedFlangeBreadthMm = defineFormula({
 export const leastFlangeBreadthMm = defineFormula({
   id: id("4.10/least b_eff"),
   source: from("4.10(3), Eq. (4.7)"),
-  symbols: { plateYieldMpa: ["f_y,p", "N/mm2"], plateUltimateMpa: ["f_u,p", "N/mm2"], plateWidthMm: ["b_p", "mm"] },
+  symbols: {
+    plateYieldMpa: ["f_y,p", "N/mm2"],
+    plateUltimateMpa: ["f_u,p", "N/mm2"],
+    plateWidthMm: ["b_p", "mm"],
+  },
   result: ["b_eff,min", "mm"],
   expression: "plateYieldMpa / plateUltimateMpa * plateWidthMm",
   evaluate: (g) => (g.plateYieldMpa / g.plateUltimateMpa) * g.plateWidthMm,
-  example: { given: { plateYieldMpa: 300, plateUltimateMpa: 400, plateWidthMm: 200 }, gives: 150, relTol: 1e-12 },
+  example: {
+    given: { plateYieldMpa: 300, plateUltimateMpa: 400, plateWidthMm: 200 },
+    gives: 150,
+    relTol: 1e-12,
+  },
 });

@@ -57,7 +57,9 @@ export const patternNearEndMm = defineFormula({
  */
 export const besideStiffenerMm = defineFormula({
   id: id("table-6.5/alpha m"),
-  source: from("Tables 6.5 and 6.6, row beside a stiffener or beam flange; lower bound 4m + 1.25e is this project's"),
+  source: from(
+    "Tables 6.5 and 6.6, row beside a stiffener or beam flange; lower bound 4m + 1.25e is this project's",
+  ),
   symbols: { alpha: ["α", "1"], mMm: m, eMm: e },
   result: ["α m", "mm"],
   expression: "max(alpha * mMm, 4 * mMm + 1.25 * eMm)",
