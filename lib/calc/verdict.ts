@@ -26,6 +26,8 @@ const precedence = (component: ComponentId): number => {
 export function governingOf(checks: readonly ComponentCheck[], node: NodeCase): Governing {
   let best: ComponentCheck | null = null;
   for (const check of checks) {
+    // A rule of detailing that is kept says nothing about how hard the joint works.
+    if (check.component === "detailing" && check.utilisation <= 1) continue;
     if (!best) {
       best = check;
       continue;
