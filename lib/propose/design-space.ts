@@ -1,8 +1,8 @@
 import type { MeasureCase } from "@/lib/calc/node";
 
 /**
- * One shape of an option whose welds are still open. `ladders` holds how many sizes each weld may
- * take; on a ladder a higher step is a stronger and a dearer weld. A shape without ladders is complete.
+ * One shape of an option with sizes still open: its welds, a plate's height. `ladders` holds how many sizes each
+ * may take; on a ladder a higher step is never weaker and never cheaper. A shape without ladders is complete.
  */
 export interface Shape {
   readonly ladders: readonly number[];
@@ -40,7 +40,7 @@ export const shapesOf = (space: DesignSpace): readonly Shape[] =>
 export const lowestSteps = (shape: Shape): readonly number[] => shape.ladders.map(() => 0);
 export const highestSteps = (shape: Shape): readonly number[] => shape.ladders.map((length) => length - 1);
 
-/** With the strongest welds. */
+/** With every open size at its largest. */
 export const buildStrongest = (shape: Shape): readonly MeasureCase[] => shape.build(highestSteps(shape));
-/** With the lightest welds, below whose price the shape cannot go. */
+/** With every open size at its least, below whose price the shape cannot go. */
 export const buildLightest = (shape: Shape): readonly MeasureCase[] => shape.build(lowestSteps(shape));

@@ -66,9 +66,13 @@ export class Judge {
     const refusing =
       outcome.kind === "evaluated"
         ? this.node.loadCases.filter(({ name }) => name === severestCase(outcome, this.targetUtilisation))
-        : [];
+        : this.node.loadCases.filter((one) => this.isOutsideScopeIn(one, measures)).slice(0, 1);
     this.watch(refusing);
     return false;
+  }
+
+  private isOutsideScopeIn(loadCase: LoadCase, measures: readonly MeasureCase[]): boolean {
+    return this.remember({ ...this.node, loadCases: [loadCase] }, measures).kind === "outside-scope";
   }
 
   /** Adds load cases to the watched ones; where that adds none, all are watched, so that a search ends. */

@@ -3,7 +3,7 @@ import { buildStrongest, highestSteps, type Shape } from "./design-space";
 import type { Goal, Judge } from "./judge";
 
 /**
- * The cheapest weld steps of one shape. Holds what earlier shapes came to, since the next one mostly comes to
+ * The cheapest sizes of one shape. Holds what earlier shapes came to, since the next one mostly comes to
  * the same: then a few evaluations prove it.
  */
 export class LadderSearch {
@@ -56,7 +56,7 @@ export class LadderSearch {
     for (let next = open.shift(); next !== undefined; next = open.shift()) {
       if (next.price >= below) return null;
       if (this.judge.meets(shape.build(next.steps), goal)) return next.steps;
-      // Climbing is in vain where the strongest welds fail too.
+      // Climbing is in vain where the largest sizes fail too.
       isReachable ??= this.judge.meets(buildStrongest(shape), goal);
       if (!isReachable) return null;
       for (const [ladder, length] of shape.ladders.entries()) {

@@ -53,7 +53,7 @@ export class Search {
     }
   }
 
-  /** The lowest utilisation that the strongest welds of any shape reach; null where all are outside scope. */
+  /** The lowest utilisation that any shape reaches at its largest sizes; null where all are outside scope. */
   private nearestGoal(space: DesignSpace): Goal | null {
     const shapes = space.kind === "list" ? space.shapes : this.nearestOfProduct(space);
     const reached = shapes.flatMap((shape) => this.judge.watchedUtilisation(buildStrongest(shape)) ?? []);
@@ -79,7 +79,7 @@ export class Search {
     return space.kind === "list" ? this.inList(space.shapes, goal) : this.inProduct(space, goal);
   }
 
-  /** Shapes are taken by the price of their lightest welds, below which none of them can go. */
+  /** Shapes are taken by the price of their least sizes, below which none of them can go. */
   private inList(shapes: readonly Shape[], goal: Goal): readonly MeasureCase[] | null {
     const byFloor = shapes
       .map((shape, index) => ({ shape, index, floor: this.judge.priceOf(buildLightest(shape)) }))

@@ -1,6 +1,6 @@
 import type { JointCase, MeasureCase, NodeCase, Weld } from "@/lib/calc/node";
 import type { Shape } from "./design-space";
-import type { Stock } from "./stock";
+import type { Stock, StockPlate } from "./stock";
 
 /** Plates are cut to whole steps of 10 mm in height (common practice, no source). */
 const HEIGHT_STEP_MM = 10;
@@ -33,46 +33,50 @@ function reachBeyondFlangeMm(node: NodeCase, joint: JointCase): number {
   return Math.max(compression, tension);
 }
 
-/** Height that covers both levels of every joint, mm, in whole steps. */
-export function webPlateHeightMm(node: NodeCase): number {
-  const heights = node.joints.map(
-    (joint) => joint.beam.section.depthMm + 2 * reachBeyondFlangeMm(node, joint),
+/**
+ * Heights worth trying, mm, in whole steps: from the beam's depth to what certainly covers both levels of every
+ * joint. How much is needed in between, the check of the plate says.
+ */
+export function webPlateHeightsMm(node: NodeCase): readonly number[] {
+  const steps = (heights: readonly number[]): number => Math.ceil(Math.max(...heights) / HEIGHT_STEP_MM);
+  const depths = node.joints.map(({ beam }) => beam.section.depthMm);
+  const least = steps(depths);
+  const most = steps(
+    node.joints.map((joint, index) => (depths[index] ?? 0) + 2 * reachBeyondFlangeMm(node, joint)),
   );
-  return Math.ceil(Math.max(...heights) / HEIGHT_STEP_MM) * HEIGHT_STEP_MM;
+  return Array.from({ length: most - least + 1 }, (_, step) => (least + step) * HEIGHT_STEP_MM);
+}
+
+/** Fillets count in tension from t / sqrt 2 on (6.2.6.3(7)); a butt weld is the strongest and the dearest. */
+function weldsOf(stock: Stock, thicknessMm: number): readonly Weld[] {
+  const fillets = stock.throatsMm.filter((throat) => throat >= thicknessMm / Math.SQRT2);
+  return [...fillets.map((throatMm) => ({ kind: "fillet" as const, throatMm })), { kind: "butt" }];
 }
 
 /** Every stock shape of a supplementary web plate on one or both sides, between the root toes. */
 export function webPlateSpace(node: NodeCase, stock: Stock, sides: 1 | 2): readonly Shape[] {
   const { depthMm, flangeThicknessMm, rootMm, webThicknessMm } = node.column.section;
   const widthMm = Math.floor(depthMm - 2 * flangeThicknessMm - 2 * rootMm);
-  const heightMm = webPlateHeightMm(node);
-  return stock.plates
-    .filter(
-      ({ thicknessMm, steel }) =>
-        widthMm > 0 &&
-        thicknessMm >= webThicknessMm &&
-        widthMm < SLENDERNESS_LIMIT * Math.sqrt(235 / steel.yieldMpa) * thicknessMm,
-    )
-    .map(({ thicknessMm, steel }) => {
-      // Fillets count in tension from t / sqrt 2 on (6.2.6.3(7)); a butt weld is the strongest and the dearest.
-      const fillets = stock.throatsMm.filter((throat) => throat >= thicknessMm / Math.SQRT2);
-      const welds: readonly Weld[] = [
-        ...fillets.map((throatMm) => ({ kind: "fillet" as const, throatMm })),
-        { kind: "butt" },
-      ];
-      return {
-        ladders: [welds.length],
-        build: ([step]: readonly number[]): readonly MeasureCase[] => [
-          {
-            kind: "web-plates",
-            sides,
-            thicknessMm,
-            widthMm,
-            heightMm,
-            steel,
-            weld: welds[step ?? 0] ?? { kind: "butt" },
-          },
-        ],
-      };
-    });
+  const heights = webPlateHeightsMm(node);
+  const isWithinLimits = ({ thicknessMm, steel }: StockPlate): boolean =>
+    widthMm > 0 &&
+    thicknessMm >= webThicknessMm &&
+    widthMm < SLENDERNESS_LIMIT * Math.sqrt(235 / steel.yieldMpa) * thicknessMm;
+  return stock.plates.filter(isWithinLimits).map(({ thicknessMm, steel }) => {
+    const welds = weldsOf(stock, thicknessMm);
+    return {
+      ladders: [welds.length, heights.length],
+      build: ([weldStep, heightStep]: readonly number[]): readonly MeasureCase[] => [
+        {
+          kind: "web-plates",
+          sides,
+          thicknessMm,
+          widthMm,
+          heightMm: heights[heightStep ?? 0] ?? 0,
+          steel,
+          weld: welds[weldStep ?? 0] ?? { kind: "butt" },
+        },
+      ],
+    };
+  });
 }

@@ -14,6 +14,8 @@ export interface Verdict {
 }
 
 type Evaluated = EvaluatedOptionDocument;
+type Component = Evaluated["components"][number];
+type Governing = Evaluated["governing"] & { readonly what?: string };
 
 const isEvaluated = (option: OptionDocument): option is Evaluated => !("outsideScope" in option);
 const isBare = (option: OptionDocument): boolean => option.measures.length === 0;
@@ -38,9 +40,28 @@ function hours(minutes: number): string {
     : `${Math.floor(whole / 60)}${NBSP}h ${String(left).padStart(2, "0")}${NBSP}min`;
 }
 
-function governingWords(option: Evaluated): string {
-  const { component, side, loadCase, utilisation } = option.governing;
-  return `${componentOnSide(component, side)} reaches ${utilisationWords(utilisation)} in ${loadCase}`;
+/**
+ * What the verdict names as governing. A rule of detailing that is met just so, as a throat of 3 mm against 3 mm,
+ * says nothing of how hard the joint works: then the most used of the other components is named.
+ */
+function governingCheck(option: Evaluated, target: number): Governing {
+  const { governing } = option;
+  if (governing.component !== "detailing") return governing;
+  const isBroken = governing.utilisation > target;
+  const worst = option.components
+    .filter(({ component }) => (component === "detailing") === isBroken && component !== "joint-moment")
+    .reduce<Component | null>((a, b) => (a === null || b.utilisation > a.utilisation ? b : a), null);
+  if (worst === null) return governing;
+  const { component, side, loadCase, utilisation, what } = worst;
+  return { component, side, loadCase, utilisation, ...(what === undefined ? {} : { what }) };
+}
+
+/** "web compression on the right reaches 1.31 in ULS 3"; `verb` is "reaches" or "is highest at". */
+function governingWords(option: Evaluated, target: number, verb: string): string {
+  const { component, side, loadCase, utilisation, what } = governingCheck(option, target);
+  if (component === "detailing")
+    return `detailing on the ${side} is not in order${what === undefined ? "" : ` (${what})`}`;
+  return `${componentOnSide(component, side)} ${verb} ${utilisationWords(utilisation)} in ${loadCase}`;
 }
 
 /** The joint furthest from the stiffness asked for. */
@@ -60,11 +81,12 @@ const isOverUtilised = (option: Evaluated, target: number): boolean => option.go
 function failureWords(option: Evaluated, result: ResultDocument): string {
   const { utilisation, stiffness } = result.node.target;
   if (isOverUtilised(option, utilisation)) {
-    const words = governingWords(option);
+    const words = governingWords(option, utilisation, "reaches");
     // A target other than 1 explains why 0.93 fails.
     return utilisation === 1 ? words : `${words}, above the target of ${utilisation.toFixed(2)}`;
   }
-  return option.stiffnessReached ? governingWords(option) : stiffnessWords(option, stiffness);
+  if (!option.stiffnessReached) return stiffnessWords(option, stiffness);
+  return governingWords(option, utilisation, "reaches");
 }
 
 const endSentence = (words: string): string =>
@@ -86,7 +108,7 @@ function bareParts(result: ResultDocument): readonly VerdictPart[] {
     return [
       { text: "The bare column is " },
       { text: "good enough", tone: "pass" },
-      { text: `: ${governingWords(bare).replace(" reaches ", " is highest at ")}. ` },
+      { text: `: ${governingWords(bare, result.node.target.utilisation, "is highest at")}. ` },
     ];
   }
   return [

@@ -109,6 +109,43 @@ describe("verdictSentence", () => {
     expect(say(result([bare]))).toMatch(/No stiffening is needed\.$/);
   });
 
+  it("names the most used component where detailing that is met just so counts highest", () => {
+    const check = (component: string, utilisation: number, more: object = {}) =>
+      ({
+        component,
+        side: "left",
+        loadCase: "ULS 1",
+        utilisation,
+        ...more,
+      }) as Evaluated["components"][number];
+    const bare = evaluated("bare", "Bare column", 1, {
+      rank: 1,
+      governing: { component: "detailing", side: "left", loadCase: "all", utilisation: 1 },
+      components: [
+        check("detailing", 1),
+        check("joint-moment", 0.47),
+        check("end-plate-bending", 0.47),
+        check("column-web-shear", 0.2),
+      ],
+    });
+    expect(say(result([bare]))).toMatch(
+      /^The bare column is good enough: end-plate bending on the left is highest at 0\.47 in ULS 1\. /,
+    );
+    const broken = {
+      ...bare,
+      passes: false,
+      rank: null,
+      governing: { ...bare.governing, utilisation: 1.2 },
+      components: [
+        check("detailing", 1.2, { what: "edge distance of the plate" }),
+        check("column-web-shear", 1.1),
+      ],
+    };
+    expect(say(result([broken, bars]))).toMatch(
+      /^The bare column fails: detailing on the left is not in order \(edge distance of the plate\)\. /,
+    );
+  });
+
   it("does not print 1.00 for what is over 1", () => {
     expect(say(result([evaluated("bare", "Bare column", 1.0032), bars]))).toContain("reaches 1.003 in");
     expect(say(result([evaluated("bare", "Bare column", 1.0001), bars]))).toContain(
