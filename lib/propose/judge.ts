@@ -25,7 +25,7 @@ export class Judge {
     private readonly price: PriceOf,
     private readonly evaluate: Evaluate,
   ) {
-    this.watched = { ...node, loadCases: node.loadCases.slice(0, 1) };
+    this.watched = { ...node, loadCases: heaviestCase(node.loadCases) };
   }
 
   /** Utilisation that no component may exceed. */
@@ -91,6 +91,14 @@ export class Judge {
     this.outcomes.set(key, outcome);
     return outcome;
   }
+}
+
+/** The load case with the largest moment on either side: the likeliest to decide. */
+function heaviestCase(loadCases: readonly LoadCase[]): readonly LoadCase[] {
+  const moment = ({ left, right }: LoadCase): number =>
+    Math.max(Math.abs(left?.momentNmm ?? 0), Math.abs(right?.momentNmm ?? 0));
+  const [first, ...others] = loadCases;
+  return first === undefined ? [] : [others.reduce((a, b) => (moment(b) > moment(a) ? b : a), first)];
 }
 
 function reaches(outcome: OptionOutcome, goal: Goal): boolean {

@@ -43,13 +43,25 @@ function spyEvaluate(seen: string[][]) {
 }
 
 describe("Judge", () => {
-  it("looks at one load case first, and at the one that refused from then on", () => {
+  it("looks at the heaviest load case first, and adds the one that refuses from then on", () => {
     const seen: string[][] = [];
-    const judge = new Judge(node, () => 0, spyEvaluate(seen));
-    expect(judge.meets(columnOf(300), TARGET)).toBe(true);
-    expect(judge.confirms(columnOf(300), TARGET)).toBe(false);
-    expect(judge.meets(columnOf(300), TARGET)).toBe(false);
-    expect(seen).toEqual([["ULS 1"], ["ULS 1", "ULS 2", "ULS 3"], ["ULS 1", "ULS 3"]]);
+    const evaluate = spyEvaluate(seen);
+    // The last case has the largest moment, but a made-up weakness makes the second one decide.
+    const judge = new Judge(
+      node,
+      () => 0,
+      (asked, measures) => {
+        const outcome = evaluate(asked, measures);
+        const isWeak = asked.loadCases.some(({ name }) => name === "ULS 2");
+        return isWeak
+          ? ({ ...outcome, passes: false, utilisation: 2, governing: { loadCase: "ULS 2" } } as OptionOutcome)
+          : outcome;
+      },
+    );
+    expect(judge.meets(columnOf(500), TARGET)).toBe(true);
+    expect(judge.confirms(columnOf(500), TARGET)).toBe(false);
+    expect(judge.meets(columnOf(500), TARGET)).toBe(false);
+    expect(seen).toEqual([["ULS 3"], ["ULS 1", "ULS 2", "ULS 3"], ["ULS 3", "ULS 2"]]);
   });
 
   it("evaluates and prices each candidate once", () => {
