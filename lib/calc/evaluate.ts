@@ -127,15 +127,14 @@ function sideCasesOf(
   });
 }
 
+/** Adds the panel's check, once for each side, and returns its shear, N. */
 function panelChecks(
+  checks: ComponentCheck[],
   panel: ColumnPanel,
   loadCase: LoadCase,
   sides: readonly SideCase[],
   steps: boolean,
-): {
-  readonly demandN: number;
-  readonly checks: ComponentCheck[];
-} {
+): number {
   const of = (side: Side) => sides.find((candidate) => candidate.model.joint.view.joint.side === side);
   const left = of("left");
   const right = of("right");
@@ -150,9 +149,8 @@ function panelChecks(
     }),
   );
   const demandN = Math.abs(force.value);
-  return {
-    demandN,
-    checks: sides.map((side) =>
+  for (const side of sides) {
+    checks.push(
       checkOf(
         {
           component: "column-web-shear",
@@ -164,8 +162,9 @@ function panelChecks(
         panel.shear,
         { stiffnessCoefficientMm: side.panelSpring?.value, demandStep: force.step },
       ),
-    ),
-  };
+    );
+  }
+  return demandN;
 }
 
 /** Bars under moments turning the same way add to the compression they face: the check is repeated with it. */
@@ -193,15 +192,16 @@ function pressedCompression(sides: readonly SideCase[]): ComponentCheck[] {
 }
 
 function caseChecks(
+  checks: ComponentCheck[],
   node: NodeCase,
   design: PanelDesign,
   panel: ColumnPanel,
   loadCase: LoadCase,
   sides: readonly SideCase[],
   steps: boolean,
-): ComponentCheck[] {
-  const shear = panelChecks(panel, loadCase, sides, steps);
-  const checks = [...sides.flatMap(sideChecks), ...shear.checks];
+): void {
+  for (const side of sides) sideChecks(checks, side);
+  const shearN = panelChecks(checks, panel, loadCase, sides, steps);
   for (const level of LEVELS) {
     const stiffener = design.stiffeners[level];
     if (stiffener) checks.push(...stiffenerChecks(node, panel, stiffener, level, sides, steps));
@@ -209,21 +209,13 @@ function caseChecks(
   const side = node.joints[0]?.side ?? "left";
   if (design.webPlates) {
     checks.push(
-      ...webPlateChecks(
-        node,
-        panel,
-        design.webPlates,
-        shear.demandN,
-        { side, loadCase: loadCase.name },
-        steps,
-      ),
+      ...webPlateChecks(node, panel, design.webPlates, shearN, { side, loadCase: loadCase.name }, steps),
     );
   }
   if (design.bars.top || design.bars.bottom) {
     sides.forEach((own, index) => checks.push(...barChecks(node, panel, own, sides[1 - index], steps)));
     checks.push(...pressedCompression(sides));
   }
-  return checks;
 }
 
 function detailingChecks(
@@ -261,7 +253,7 @@ function evaluate(node: NodeCase, measures: readonly MeasureCase[], steps: boole
     const sides = sideCasesOf(node, panel, store, loadCase, steps);
     everySide.push(...sides);
     joints.push(...sides.map(jointResultOf));
-    checks.push(...caseChecks(node, design, panel, loadCase, sides, steps));
+    caseChecks(checks, node, design, panel, loadCase, sides, steps);
   }
   const models = store.all();
   if (design.webPlates) refuseShortPlate(design.webPlates, models);

@@ -28,25 +28,28 @@ export const COMPONENT_IDS = [
 
 export type ComponentId = (typeof COMPONENT_IDS)[number];
 
-/** One check of one component in one load case. Demand and resistance share `unit`. */
+/**
+ * One check of one component in one load case. Demand and resistance share `unit`. Every field is always there,
+ * undefined where it says nothing: hundreds are made for each candidate of a proposal, and one shape keeps that quick.
+ */
 export interface ComponentCheck {
   readonly component: ComponentId;
   readonly side: Side;
-  readonly level?: Level;
+  readonly level: Level | undefined;
   /** 1 = first in `bolts.rows`. */
-  readonly row?: number;
-  readonly rows?: readonly number[];
+  readonly row: number | undefined;
+  readonly rows: readonly number[] | undefined;
   readonly loadCase: string;
   readonly clause: string;
   /** Words that tell which of several rules of a component this is (detailing, welds). */
-  readonly what?: string;
+  readonly what: string | undefined;
   readonly unit: "N" | "Nmm" | "mm" | "ratio";
   readonly demand: number;
   readonly resistance: number;
   readonly utilisation: number;
-  readonly stiffnessCoefficientMm?: number;
+  readonly stiffnessCoefficientMm: number | undefined;
   /** How the resistance (first) and, where it is worth showing, the demand came about. */
-  readonly steps?: readonly Step[];
+  readonly steps: readonly Step[] | undefined;
 }
 
 export type StiffnessClass = "pinned" | "semi-rigid" | "rigid";

@@ -152,16 +152,10 @@ export function boltedSideCase(
   const { joint } = model;
   const compression = compressionOf(node, panel, model, load, steps);
   const column = columnTension(node, panel, joint, load.beta, reliefOf(model, load.symmetric.tension), steps);
-  const plate = {
-    alone: joint.plate.family.alone.map((part) => part.resistance),
-    groupsEndingAt: joint.plate.family.groupsEndingAt.map((ending) =>
-      ending.map(({ first, part }) => ({ first, part, limit: part.resistance })),
-    ),
-  };
   const limitN = Math.min(compression.value, joint.beamFlange.value, panelLimit(panel, load.beta));
   const rows = assembleRows(
     joint.view.tensionRows,
-    [column.flange, column.web, plate, joint.beamWeb],
+    [column.flange, column.web, joint.plateLimits, joint.beamWeb],
     limitN,
     steps,
   );
@@ -188,7 +182,10 @@ export function boltedSideCase(
     steps,
   );
   return {
-    ...load,
+    loadCase: load.loadCase,
+    actions: load.actions,
+    beta: load.beta,
+    symmetric: load.symmetric,
     model,
     momentNmm,
     resistance,
@@ -238,7 +235,10 @@ export function weldedSideCase(
     steps,
   );
   return {
-    ...load,
+    loadCase: load.loadCase,
+    actions: load.actions,
+    beta: load.beta,
+    symmetric: load.symmetric,
     model,
     momentNmm,
     resistance,

@@ -19,7 +19,7 @@ export function presentCheck(check: ComponentCheck, withSteps: boolean): Compone
   return {
     component: check.component,
     side: check.side,
-    ...(check.level ? { level: check.level } : {}),
+    ...(check.level !== undefined ? { level: check.level } : {}),
     ...(check.row !== undefined ? { row: check.row } : {}),
     ...(check.rows ? { rows: [...check.rows] } : {}),
     loadCase: check.loadCase,

@@ -26,6 +26,10 @@ export interface BoltedJoint {
   readonly view: EndPlateView;
   readonly flange: ColumnFlange;
   readonly plate: EndPlate;
+  /** The end plate's own resistances, row by row and group by group. */
+  readonly plateLimits: RowFamilyLimits;
+  /** The column flange's resistances where no bars relieve it. */
+  readonly flangeLimits: RowFamilyLimits;
   readonly beamWeb: RowFamilyLimits;
   readonly compression: CompressionZone;
   readonly beamFlange: Traced;
@@ -106,17 +110,22 @@ export function boltedJointOf(
 ): BoltedJoint {
   const beamWeb = beamWebLimits(node, view.joint, parts.plate, steps);
   const beamFlange = beamCompression(node, view.joint, steps);
-  const own = assembleRows(
-    view.tensionRows,
-    [resistancesOf(parts.plate.family), beamWeb],
-    beamFlange.value,
-    false,
-  );
+  const plateLimits = resistancesOf(parts.plate.family);
+  const own = assembleRows(view.tensionRows, [plateLimits, beamWeb], beamFlange.value, false);
   const connectionMomentNmm = boltedMomentNmm(null, {
     leverMm: view.tensionRows.map((row) => row.leverMm),
     forceN: own.forces.map((force) => force.value),
   });
-  return { kind: "bolted", view, ...parts, beamWeb, beamFlange, connectionMomentNmm };
+  return {
+    kind: "bolted",
+    view,
+    ...parts,
+    plateLimits,
+    flangeLimits: resistancesOf(parts.flange.family),
+    beamWeb,
+    beamFlange,
+    connectionMomentNmm,
+  };
 }
 
 /** How bars relieve the column in one load case: 0 where they do not. By position among the tension rows. */
@@ -167,23 +176,32 @@ export function columnTension(
       );
       return share > 0 ? relievedN(trace, { resistanceN: plain, relief: share }, 0) : plain;
     });
-  const alone = family.alone.map((part, index) => part.relieved(relief.flange[index] ?? 0));
-  const groups = family.groupsEndingAt.map((ending) =>
-    ending.map(({ first, part }) => ({
-      first,
-      part,
-      relieved: part.relieved(groupRelief(relief.flange, first, part.rows.length)),
-    })),
-  );
+  const isRelieved = relief.web.some((share) => share > 0);
+  const alone = isRelieved
+    ? family.alone.map((part, index) => part.relieved(relief.flange[index] ?? 0))
+    : family.alone;
+  const groups = isRelieved
+    ? family.groupsEndingAt.map((ending) =>
+        ending.map(({ first, part }) => ({
+          first,
+          part,
+          relieved: part.relieved(groupRelief(relief.flange, first, part.rows.length)),
+        })),
+      )
+    : family.groupsEndingAt.map((ending) =>
+        ending.map(({ first, part }) => ({ first, part, relieved: part })),
+      );
   const isGroupHeld = (first: number, count: number): boolean =>
     isWebHeld.slice(first, first + count).every((isHeld) => isHeld);
   return {
-    flange: {
-      alone: alone.map((part) => part.resistance),
-      groupsEndingAt: groups.map((ending) =>
-        ending.map(({ first, part, relieved }) => ({ first, part, limit: relieved.resistance })),
-      ),
-    },
+    flange: isRelieved
+      ? {
+          alone: alone.map((part) => part.resistance),
+          groupsEndingAt: groups.map((ending) =>
+            ending.map(({ first, part, relieved }) => ({ first, part, limit: relieved.resistance })),
+          ),
+        }
+      : joint.flangeLimits,
     web: {
       alone: alone.map((part, index) =>
         isWebHeld[index] ? null : webOf(part.modeLengthMm, relief.web[index] ?? 0),

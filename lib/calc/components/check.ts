@@ -23,19 +23,32 @@ export function checkOf(
   resistance: Traced,
   more: { readonly stiffnessCoefficientMm?: number | undefined; readonly demandStep?: Step | undefined } = {},
 ): ComponentCheck {
-  const steps = [resistance.step, more.demandStep].filter((step): step is Step => step !== undefined);
+  const { stiffnessCoefficientMm } = more;
   return {
-    unit: "N",
-    ...head,
+    component: head.component,
+    side: head.side,
+    level: head.level,
+    row: head.row,
+    rows: head.rows,
+    loadCase: head.loadCase,
+    clause: head.clause,
+    what: head.what,
+    unit: head.unit ?? "N",
     demand,
     resistance: resistance.value,
     utilisation: demand <= 0 ? 0 : demand / resistance.value,
-    ...(more.stiffnessCoefficientMm !== undefined && Number.isFinite(more.stiffnessCoefficientMm)
-      ? { stiffnessCoefficientMm: more.stiffnessCoefficientMm }
-      : {}),
-    ...(steps.length > 0 ? { steps } : {}),
+    stiffnessCoefficientMm:
+      stiffnessCoefficientMm !== undefined && Number.isFinite(stiffnessCoefficientMm)
+        ? stiffnessCoefficientMm
+        : undefined,
+    steps: stepsOf(resistance.step, more.demandStep),
   };
 }
+
+const stepsOf = (first: Step | undefined, second: Step | undefined): readonly Step[] | undefined =>
+  first === undefined && second === undefined
+    ? undefined
+    : [first, second].filter((step): step is Step => step !== undefined);
 
 /** Load case named by checks that no load case changes. */
 export const EVERY_CASE = "all";
@@ -67,12 +80,19 @@ const detail = (
   resistance: number,
   utilisation: number,
 ): ComponentCheck => ({
-  unit: "mm",
-  ...head,
   component: "detailing",
+  side: head.side,
+  level: head.level,
+  row: head.row,
+  rows: head.rows,
   loadCase: EVERY_CASE,
+  clause: head.clause,
+  what: head.what,
+  unit: head.unit ?? "mm",
   demand,
   resistance,
   // Rounding of dimensions given in mm must not fail a rule met exactly.
   utilisation: utilisation > 1 && utilisation < 1 + 1e-9 ? 1 : utilisation,
+  stiffnessCoefficientMm: undefined,
+  steps: undefined,
 });

@@ -6,56 +6,49 @@ import type { RowFamilyLimits } from "./row-groups";
 
 const sum = (values: readonly number[]): number => values.reduce((total, value) => total + value, 0);
 
-/** Checks of one family (flange, web, plate, beam web): each row alone and each group, tightest group per set of rows. */
+/** Adds the checks of one family (flange, web, plate, beam web): each row alone and each group. */
 function familyChecks(
-  side: BoltedSideCase,
-  head: Omit<CheckHead, "side" | "loadCase">,
+  checks: ComponentCheck[],
+  sideCase: BoltedSideCase,
+  head: Pick<CheckHead, "component" | "clause">,
   limits: RowFamilyLimits,
   coefficient: (index: number) => number | undefined,
-): ComponentCheck[] {
-  const common = {
-    ...head,
-    side: side.model.joint.view.joint.side,
-    level: side.model.joint.view.tensionLevel,
-    loadCase: side.loadCase.name,
-  };
-  const rows = side.model.joint.view.tensionRows;
-  const checks: ComponentCheck[] = [];
+): void {
+  const { component, clause } = head;
+  const side = sideCase.model.joint.view.joint.side;
+  const level = sideCase.model.joint.view.tensionLevel;
+  const loadCase = sideCase.loadCase.name;
+  const { rowDemandsN } = sideCase;
+  const rows = sideCase.model.joint.view.tensionRows;
   limits.alone.forEach((limit, index) => {
     const row = rows[index];
     if (!limit || !row) return;
     checks.push(
-      checkOf({ ...common, row: row.row }, side.rowDemandsN[index] ?? 0, limit, {
+      checkOf({ component, clause, side, level, loadCase, row: row.row }, rowDemandsN[index] ?? 0, limit, {
         stiffnessCoefficientMm: coefficient(index),
       }),
     );
   });
   for (const ending of limits.groupsEndingAt) {
     for (const { first, part, limit } of ending) {
-      const members = part.rows.map((row) => row.row).sort((a, b) => a - b);
+      let demandN = 0;
+      for (let index = first; index < first + part.rows.length; index += 1)
+        demandN += rowDemandsN[index] ?? 0;
       checks.push(
-        checkOf(
-          { ...common, rows: members },
-          sum(side.rowDemandsN.slice(first, first + part.rows.length)),
-          limit,
-        ),
+        checkOf({ component, clause, side, level, loadCase, rows: part.rowNumbers }, demandN, limit),
       );
     }
   }
-  return checks;
 }
 
 /** Rows that the tension flange's own weld serves: the extension row and the two below it (SCI/BCSA P398). */
 const FLANGE_WELD_ROWS = { extended: 3, flush: 2 } as const;
 
-function weldChecks(side: SideCase): ComponentCheck[] {
+function weldChecks(checks: ComponentCheck[], side: SideCase): void {
   const { welds, joint } = side.model;
-  const head = {
-    component: "connection-weld",
-    side: joint.view.joint.side,
-    loadCase: side.loadCase.name,
-  } as const;
-  const checks: ComponentCheck[] = [];
+  const component = "connection-weld";
+  const ofSide = joint.view.joint.side;
+  const loadCase = side.loadCase.name;
   if (welds.tensionFlange) {
     const served = isBoltedCase(side)
       ? sum(
@@ -68,7 +61,9 @@ function weldChecks(side: SideCase): ComponentCheck[] {
     checks.push(
       checkOf(
         {
-          ...head,
+          component,
+          side: ofSide,
+          loadCase,
           level: joint.view.tensionLevel,
           clause: "EN 1993-1-8, 4.5.3.2",
           what: "tension flange weld",
@@ -81,27 +76,28 @@ function weldChecks(side: SideCase): ComponentCheck[] {
   if (welds.webShear) {
     checks.push(
       checkOf(
-        { ...head, clause: "EN 1993-1-8, 4.5.3.3", what: "web weld in shear" },
+        { component, side: ofSide, loadCase, clause: "EN 1993-1-8, 4.5.3.3", what: "web weld in shear" },
         Math.abs(side.actions.shearN),
         welds.webShear,
       ),
     );
   }
-  return checks;
 }
 
-function commonChecks(side: SideCase): ComponentCheck[] {
+function commonChecks(checks: ComponentCheck[], side: SideCase): void {
   const { view, compression, beamFlange } = side.model.joint;
-  const head = { side: view.joint.side, loadCase: side.loadCase.name };
-  return [
+  const ofSide = view.joint.side;
+  const loadCase = side.loadCase.name;
+  checks.push(
     checkOf(
-      { ...head, component: "joint-moment", clause: "EN 1993-1-8, 6.2.7", unit: "Nmm" },
+      { side: ofSide, loadCase, component: "joint-moment", clause: "EN 1993-1-8, 6.2.7", unit: "Nmm" },
       side.momentNmm,
       side.resistance,
     ),
     checkOf(
       {
-        ...head,
+        side: ofSide,
+        loadCase,
         component: "column-web-compression",
         level: view.compressionLevel,
         clause: "EN 1993-1-8, 6.2.6.2",
@@ -112,7 +108,8 @@ function commonChecks(side: SideCase): ComponentCheck[] {
     ),
     checkOf(
       {
-        ...head,
+        side: ofSide,
+        loadCase,
         component: "beam-flange-compression",
         level: view.compressionLevel,
         clause: "EN 1993-1-8, 6.2.6.7",
@@ -120,68 +117,68 @@ function commonChecks(side: SideCase): ComponentCheck[] {
       side.compressionDemandN,
       beamFlange,
     ),
-  ];
+  );
 }
 
-function boltedChecks(side: BoltedSideCase): ComponentCheck[] {
-  const { joint, springs, shear } = side.model;
+function boltedChecks(checks: ComponentCheck[], sideCase: BoltedSideCase): void {
+  const { joint, springs, shear } = sideCase.model;
   const { view } = joint;
-  const none = (): undefined => undefined;
-  const plate: RowFamilyLimits = {
-    alone: joint.plate.family.alone.map((part) => part.resistance),
-    groupsEndingAt: joint.plate.family.groupsEndingAt.map((ending) =>
-      ending.map(({ first, part }) => ({ first, part, limit: part.resistance })),
-    ),
-  };
-  const head = { side: view.joint.side, loadCase: side.loadCase.name };
-  const boltTension = view.tensionRows.map((row, index): ComponentCheck => {
+  familyChecks(
+    checks,
+    sideCase,
+    { component: "column-flange-bending", clause: "EN 1993-1-8, 6.2.6.4" },
+    sideCase.column.flange,
+    (index) => springs[index]?.flange.value,
+  );
+  familyChecks(
+    checks,
+    sideCase,
+    { component: "column-web-tension", clause: "EN 1993-1-8, 6.2.6.3" },
+    sideCase.column.web,
+    (index) => springs[index]?.webTension.value,
+  );
+  familyChecks(
+    checks,
+    sideCase,
+    { component: "end-plate-bending", clause: "EN 1993-1-8, 6.2.6.5" },
+    joint.plateLimits,
+    (index) => springs[index]?.plate.value,
+  );
+  familyChecks(
+    checks,
+    sideCase,
+    { component: "beam-web-tension", clause: "EN 1993-1-8, 6.2.6.8" },
+    joint.beamWeb,
+    () => undefined,
+  );
+  const { side } = view.joint;
+  const loadCase = sideCase.loadCase.name;
+  view.tensionRows.forEach((row, index) => {
     const { value, step } = row.fastener.tension;
     const pair: Traced = { value: 2 * value, step };
-    return checkOf(
-      {
-        ...head,
-        component: "bolt-tension",
-        level: view.tensionLevel,
-        row: row.row,
-        clause: "EN 1993-1-8, Table 3.4",
-      },
-      side.rowDemandsN[index] ?? 0,
-      pair,
-      { stiffnessCoefficientMm: springs[index]?.bolts.value },
+    checks.push(
+      checkOf(
+        {
+          component: "bolt-tension",
+          side,
+          level: view.tensionLevel,
+          row: row.row,
+          loadCase,
+          clause: "EN 1993-1-8, Table 3.4",
+        },
+        sideCase.rowDemandsN[index] ?? 0,
+        pair,
+        { stiffnessCoefficientMm: springs[index]?.bolts.value },
+      ),
     );
   });
-  return [
-    ...familyChecks(
-      side,
-      { component: "column-flange-bending", clause: "EN 1993-1-8, 6.2.6.4" },
-      side.column.flange,
-      (index) => springs[index]?.flange.value,
-    ),
-    ...familyChecks(
-      side,
-      { component: "column-web-tension", clause: "EN 1993-1-8, 6.2.6.3" },
-      side.column.web,
-      (index) => springs[index]?.webTension.value,
-    ),
-    ...familyChecks(
-      side,
-      { component: "end-plate-bending", clause: "EN 1993-1-8, 6.2.6.5" },
-      plate,
-      (index) => springs[index]?.plate.value,
-    ),
-    ...familyChecks(
-      side,
-      { component: "beam-web-tension", clause: "EN 1993-1-8, 6.2.6.8" },
-      joint.beamWeb,
-      none,
-    ),
-    ...boltTension,
+  checks.push(
     checkOf(
-      { ...head, component: "bolt-shear", clause: "EN 1993-1-8, 6.2.2 and Table 3.4" },
-      Math.abs(side.actions.shearN),
+      { component: "bolt-shear", side, loadCase, clause: "EN 1993-1-8, 6.2.2 and Table 3.4" },
+      Math.abs(sideCase.actions.shearN),
       shear,
     ),
-  ];
+  );
 }
 
 function weldedChecks(side: WeldedSideCase): ComponentCheck[] {
@@ -208,12 +205,13 @@ function weldedChecks(side: WeldedSideCase): ComponentCheck[] {
   return checks;
 }
 
-/** Every check of one side in one load case but the panel's and the measures' own. */
-export const sideChecks = (side: SideCase): ComponentCheck[] => [
-  ...commonChecks(side),
-  ...(isBoltedCase(side) ? boltedChecks(side) : weldedChecks(side)),
-  ...weldChecks(side),
-];
+/** Adds every check of one side in one load case but the panel's and the measures' own. */
+export function sideChecks(checks: ComponentCheck[], side: SideCase): void {
+  commonChecks(checks, side);
+  if (isBoltedCase(side)) boltedChecks(checks, side);
+  else checks.push(...weldedChecks(side));
+  weldChecks(checks, side);
+}
 
 /** Rules of bolt spacing and of welded flanges that no load case changes. */
 export function connectionDetailing(side: SideCase, columnFlangeWidthMm: number): ComponentCheck[] {

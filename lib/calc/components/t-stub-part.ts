@@ -26,6 +26,8 @@ export interface PatternLengths {
 /** One equivalent T-stub: a row alone or a group of neighbouring rows of one flange or plate. */
 export interface TStubPart {
   readonly rows: readonly BoltRow[];
+  /** The rows as the document numbers them, ascending. */
+  readonly rowNumbers: readonly number[];
   /** l_eff,1 = min(cp, nc); l_eff,2 = nc. */
   readonly lengthOneMm: Traced;
   readonly lengthTwoMm: Traced;
@@ -212,6 +214,7 @@ export function tStubPartOf(
   };
   return {
     rows,
+    rowNumbers: rows.map((row) => row.row).sort((a, b) => a - b),
     lengthOneMm,
     lengthTwoMm,
     shortestByRowMm: lengths.map((pair) => Math.min(pair.circular.value, pair.other.value)),
