@@ -135,11 +135,7 @@ describe("every rule of the pure core is reached by a test", () => {
     expect(sources.filter((file) => !reached.has(file))).toEqual([]);
   });
 
-  it.each(["lib/calc/components", "lib/calc/clauses", "lib/policies"])(
-    "%s is named in tests of its own",
-    (folder) => {
-      const mirror = filesUnder(path.join("tests", folder), /\.test\.ts$/);
-      expect(mirror.length).toBeGreaterThan(0);
-    },
-  );
+  it.each(["lib/calc", "lib/cost", "lib/propose", "lib/policies"])("%s has tests of its own", (folder) => {
+    expect(filesUnder(path.join("tests", folder), /\.test\.ts$/).length).toBeGreaterThan(0);
+  });
 });
