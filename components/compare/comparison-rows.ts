@@ -8,7 +8,7 @@ import type {
 } from "@/lib/schemas/result-document";
 import { formatNumber } from "@/components/ui/format-number";
 
-import { COMPONENT_ROWS, componentLabel, type RowGroupKey } from "./component-labels";
+import { caseWords, COMPONENT_ROWS, componentLabel, EVERY_CASE, type RowGroupKey } from "./component-labels";
 import { across, isEvaluated, type Cell, type LoadCaseChoice, type RowGroup } from "./comparison-cells";
 import { costGroup, hoursGroup, massGroup } from "./estimate-rows";
 
@@ -21,7 +21,7 @@ export function checksOf(
   return option.components
     .filter(
       (check) =>
-        (choice.kind === "envelope" || check.loadCase === choice.name) &&
+        (choice.kind === "envelope" || check.loadCase === choice.name || check.loadCase === EVERY_CASE) &&
         (component === undefined || check.component === component),
     )
     .sort((a, b) => b.utilisation - a.utilisation);
@@ -35,7 +35,13 @@ export function whereWords(check: ComponentDocument, choice: LoadCaseChoice): st
       : check.row !== undefined
         ? `row ${check.row}`
         : null;
-  return [check.side, check.level, rows, check.what, choice.kind === "envelope" ? check.loadCase : null]
+  return [
+    check.side,
+    check.level,
+    rows,
+    check.what,
+    choice.kind === "envelope" ? caseWords(check.loadCase) : null,
+  ]
     .filter(Boolean)
     .join(", ");
 }
@@ -97,7 +103,7 @@ function verdictCell(option: EvaluatedOptionDocument, choice: LoadCaseChoice, li
     !option.passes && !option.stiffnessReached && option.governing.utilisation <= limit
       ? "not stiff enough"
       : worst
-        ? `${componentLabel(worst.component)}, ${worst.side}${choice.kind === "envelope" ? `, ${worst.loadCase}` : ""}`
+        ? `${componentLabel(worst.component)}, ${worst.side}${choice.kind === "envelope" ? `, ${caseWords(worst.loadCase)}` : ""}`
         : "";
   return {
     kind: "verdict",

@@ -46,3 +46,9 @@ export const componentLabel = (component: ComponentId): string =>
 
 /** A label at the start of a line. */
 export const sentenceCase = (words: string): string => words.charAt(0).toUpperCase() + words.slice(1);
+
+/** Load case of a check that no load case changes, such as a rule of detailing: it holds in each of them. */
+export const EVERY_CASE = "all";
+
+/** A load case in words, after a comma. */
+export const caseWords = (loadCase: string): string => (loadCase === EVERY_CASE ? "every case" : loadCase);

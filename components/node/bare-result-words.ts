@@ -7,6 +7,7 @@ import type {
   JointResult,
   OptionOutcome,
 } from "@/lib/calc/result";
+import { EVERY_CASE } from "@/components/compare/component-labels";
 import { componentOnSide } from "@/lib/ranking/component-words";
 import { formatNumber, formatUtilisation } from "@/components/ui/format-number";
 
@@ -15,9 +16,6 @@ export interface SentencePart {
   readonly text: string;
   readonly tone?: "pass" | "fail" | "strong";
 }
-
-/** What the calculation names as the load case of a check that no load case changes. */
-export const EVERY_CASE = "all";
 
 /** "in ULS 3"; a rule of detailing holds in every load case alike. */
 export const inCase = (loadCase: string): string =>

@@ -1,10 +1,15 @@
 "use client";
 
 import type { EvaluatedOption } from "@/lib/calc/result";
-import { COMPONENT_ROWS, componentLabel, sentenceCase } from "@/components/compare/component-labels";
+import {
+  caseWords,
+  COMPONENT_ROWS,
+  componentLabel,
+  sentenceCase,
+} from "@/components/compare/component-labels";
 import { UtilisationBar, UtilisationFigure } from "@/components/compare/utilisation-bar";
 import { formatNumber } from "@/components/ui/format-number";
-import { EVERY_CASE, bareSentence, componentLines, jointLines, type SentencePart } from "./bare-result-words";
+import { bareSentence, componentLines, jointLines, type SentencePart } from "./bare-result-words";
 import type { BareOutcome } from "./use-bare-outcome";
 
 const TONES = { pass: "font-[650] text-pass", fail: "font-[650] text-fail", strong: "font-[650]" } as const;
@@ -55,7 +60,7 @@ function Utilisations({ outcome, limit }: { readonly outcome: EvaluatedOption; r
             <td className="py-1 pl-2 text-right">
               <UtilisationFigure value={check.utilisation} limit={limit} />
             </td>
-            <td className="py-1 pl-3 text-note whitespace-nowrap text-soft">{`${check.side}, ${check.loadCase === EVERY_CASE ? "every case" : check.loadCase}`}</td>
+            <td className="py-1 pl-3 text-note whitespace-nowrap text-soft">{`${check.side}, ${caseWords(check.loadCase)}`}</td>
           </tr>
         ))}
       </tbody>

@@ -69,7 +69,7 @@ export const LoadCaseRow = memo(function LoadCaseRow(props: LoadCaseRowProps) {
         onPaste={(event) => {
           if (props.onPasteRows(index, column, event.clipboardData.getData("text"))) event.preventDefault();
         }}
-        className={`control min-h-8! w-full min-w-14 border-transparent! px-1.5! hover:border-rule2! focus:border-petrol! ${error === undefined ? "" : "border-fail!"} ${column === "name" ? "min-w-24" : "text-right"}`}
+        className={`control min-h-8! w-full min-w-14 border-transparent! px-1.5! hover:border-rule2! focus:border-petrol! ${error === undefined ? "" : "border-fail!"} ${column === "name" ? "min-w-44" : "text-right"}`}
       />
     );
   };

@@ -1,7 +1,7 @@
 import type { ComponentProps, ReactNode } from "react";
 import { joinClasses } from "./join-classes";
 
-/** A ruled table that scrolls sideways inside its own frame; the frame takes focus so that keys can scroll it. */
+/** A ruled table that scrolls sideways inside its own frame, never widening the page; the frame takes focus so that keys can scroll it. */
 export function Table({
   label,
   className,
@@ -9,7 +9,12 @@ export function Table({
   ...rest
 }: { readonly label: string } & ComponentProps<"table">) {
   return (
-    <div role="region" aria-label={label} tabIndex={0} className="overflow-x-auto border border-ink bg-sheet">
+    <div
+      role="region"
+      aria-label={label}
+      tabIndex={0}
+      className="overflow-x-auto border border-ink bg-sheet contain-inline-size"
+    >
       <table {...rest} aria-label={label} className={joinClasses("w-full border-collapse", className)}>
         {children}
       </table>

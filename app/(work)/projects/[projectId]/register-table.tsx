@@ -46,7 +46,12 @@ function BareCell({ row }: { readonly row: NodeRow }) {
         {passes ? "passes" : "fails"}
       </span>{" "}
       <UtilisationFigure value={utilisation} limit={passes ? Math.max(1, utilisation) : 1} />{" "}
-      <span className="block text-note text-soft">{`${componentLabel(component)}, ${side}`}</span>
+      <span className="block text-note text-soft">
+        {/* Strong enough by itself, so it is the utilisation or the stiffness asked of this node that it misses. */}
+        {!passes && utilisation <= 1
+          ? "misses the node’s own target"
+          : `${componentLabel(component)}, ${side}`}
+      </span>
     </Td>
   );
 }
