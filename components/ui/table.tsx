@@ -13,7 +13,7 @@ export function Table({
       role="region"
       aria-label={label}
       tabIndex={0}
-      className="overflow-x-auto border border-ink bg-sheet contain-inline-size"
+      className="relative overflow-x-auto border border-ink bg-sheet contain-inline-size"
     >
       <table {...rest} aria-label={label} className={joinClasses("w-full border-collapse", className)}>
         {children}
