@@ -59,10 +59,13 @@ export const EndPlateConnection = z.strictObject({
       preloaded: z.boolean().optional(),
       assembly: z.enum(["HR", "HV", "plain"]).optional(),
     })
-    .refine((bolts) => bolts.rows.every((row, index) => index === 0 || row > (bolts.rows[index - 1] ?? row)), {
-      path: ["rows"],
-      message: "List the rows from the top down, each further below the top flange than the one before.",
-    }),
+    .refine(
+      (bolts) => bolts.rows.every((row, index) => index === 0 || row > (bolts.rows[index - 1] ?? row)),
+      {
+        path: ["rows"],
+        message: "List the rows from the top down, each further below the top flange than the one before.",
+      },
+    ),
   welds: ConnectionWelds,
 });
 
@@ -88,7 +91,11 @@ export const FlangeCleatConnection = z.strictObject({
     .optional(),
 });
 
-export const Connection = z.discriminatedUnion("kind", [EndPlateConnection, WeldedConnection, FlangeCleatConnection]);
+export const Connection = z.discriminatedUnion("kind", [
+  EndPlateConnection,
+  WeldedConnection,
+  FlangeCleatConnection,
+]);
 
 const sideFields = {
   beam: z.strictObject({ section: SectionInput, steel: SteelInput, span: positive }),
@@ -224,19 +231,35 @@ export const NodeDocument = z
   })
   .superRefine((node, context) => {
     if (!node.left && !node.right) {
-      context.addIssue({ code: "custom", path: ["left"], message: "Give a beam on the left, on the right or on both sides." });
+      context.addIssue({
+        code: "custom",
+        path: ["left"],
+        message: "Give a beam on the left, on the right or on both sides.",
+      });
     }
     node.loadCases.forEach((loadCase, index) => {
       for (const side of ["left", "right"] as const) {
         if (node[side] && !loadCase[side]) {
-          context.addIssue({ code: "custom", path: ["loadCases", index, side], message: `Give the ${side} beam's moment, axial force and shear.` });
+          context.addIssue({
+            code: "custom",
+            path: ["loadCases", index, side],
+            message: `Give the ${side} beam's moment, axial force and shear.`,
+          });
         }
         if (!node[side] && loadCase[side]) {
-          context.addIssue({ code: "custom", path: ["loadCases", index, side], message: `There is no beam on the ${side}.` });
+          context.addIssue({
+            code: "custom",
+            path: ["loadCases", index, side],
+            message: `There is no beam on the ${side}.`,
+          });
         }
       }
       if (node.loadCases.findIndex((other) => other.name === loadCase.name) !== index) {
-        context.addIssue({ code: "custom", path: ["loadCases", index, "name"], message: "Give each load case a name of its own." });
+        context.addIssue({
+          code: "custom",
+          path: ["loadCases", index, "name"],
+          message: "Give each load case a name of its own.",
+        });
       }
     });
   });

@@ -121,7 +121,9 @@ export const ResultDocument = z.object({
   options: z.array(OptionDocument),
 });
 
-export const DocumentErrors = z.object({ errors: z.array(z.object({ path: z.string(), message: z.string() })) });
+export const DocumentErrors = z.object({
+  errors: z.array(z.object({ path: z.string(), message: z.string() })),
+});
 
 export type ResultDocument = z.infer<typeof ResultDocument>;
 export type OptionDocument = z.infer<typeof OptionDocument>;
