@@ -24,7 +24,7 @@ import type { Traced } from "./trace/traced";
 interface ModelBase {
   readonly bounds: ClassBounds;
   readonly welds: ConnectionWeldLimits;
-  /** Lever arm without the help of bars: tells how the forces left and right compare. */
+  /** Between the beam's flanges, by geometry alone: tells how the forces left and right compare. */
   readonly leverMm: number;
 }
 
@@ -107,7 +107,7 @@ export function jointModelOf(
       straightWeb / 2,
       steps,
     ),
-    leverMm: tension.leverMm.value,
+    leverMm: section.depthMm - section.flangeThicknessMm,
     springs,
     tension,
     shear: boltShearResistance(node, panel, view, steps),

@@ -1,0 +1,182 @@
+import * as fc from "fast-check";
+import { describe, expect, it } from "vitest";
+import { evaluateDocument } from "@/lib/evaluation/evaluate-document";
+import type { MeasureInput, NodeDocument } from "@/lib/schemas/node-document";
+import type { EvaluatedOptionDocument, OptionDocument } from "@/lib/schemas/result-document";
+import { loadSeedCatalog } from "@/seeders/data/load-catalog";
+import { loadSeedPrices } from "@/seeders/data/load-prices";
+import { randomNodeDocument } from "@/tests/factories/random-node-document";
+
+/** Laws that hold on every node, tried on random ones. */
+const shop = { catalog: loadSeedCatalog(), prices: loadSeedPrices() };
+const SEED = 20261201;
+
+function optionsOf(document: NodeDocument): readonly OptionDocument[] {
+  const evaluated = evaluateDocument(document, shop, { steps: "none" });
+  if (!evaluated.ok) throw new Error(JSON.stringify(evaluated.errors));
+  return evaluated.result.options;
+}
+
+const isInScope = (option: OptionDocument): option is EvaluatedOptionDocument => !("outsideScope" in option);
+
+/** Every number of a document, wherever it stands. */
+function* numbersOf(value: unknown): Generator<number> {
+  if (typeof value === "number") yield value;
+  else if (value !== null && typeof value === "object")
+    for (const part of Object.values(value)) yield* numbersOf(part);
+}
+
+const expectFinite = (options: readonly OptionDocument[]): void => {
+  for (const number of numbersOf(options))
+    if (!Number.isFinite(number)) throw new Error("a number is not finite");
+};
+
+const mirrored = (document: NodeDocument): NodeDocument => {
+  const { left, right, ...rest } = document;
+  return {
+    ...rest,
+    ...(right ? { left: { beam: right.beam, connection: right.connection } } : {}),
+    ...(left ? { right: left } : {}),
+    loadCases: document.loadCases.map(({ name, left: a, right: b, column }) => ({
+      name,
+      ...(b ? { left: b } : {}),
+      ...(a ? { right: a } : {}),
+      column: {
+        ...column,
+        momentAbove: -column.momentAbove,
+        momentBelow: -column.momentBelow,
+        shearAbove: -column.shearAbove,
+        shearBelow: -column.shearBelow,
+      },
+    })),
+  };
+};
+
+const close = (a: number, b: number): boolean =>
+  Math.abs(a - b) <= 1e-9 * Math.max(Math.abs(a), Math.abs(b), 1e-9);
+
+const resistancesOf = (option: OptionDocument | undefined, component: string): number[] =>
+  option && isInScope(option)
+    ? option.components.filter((check) => check.component === component).map((check) => check.resistance)
+    : [];
+
+describe("random nodes", () => {
+  it("give finite numbers on 10,000 documents, at least 60 % in scope, every kind among them", () => {
+    let inScope = 0;
+    let all = 0;
+    const kinds = new Set<string>();
+    fc.assert(
+      fc.property(randomNodeDocument, (document) => {
+        const options = optionsOf(document);
+        expectFinite(options);
+        for (const option of options) {
+          all += 1;
+          if (!isInScope(option)) continue;
+          inScope += 1;
+          kinds.add(document.left?.connection.kind ?? "");
+          kinds.add(option.measures.map((measure) => measure.kind).join(" + "));
+        }
+      }),
+      { numRuns: 10_000, seed: SEED },
+    );
+    expect(inScope / all).toBeGreaterThanOrEqual(0.6);
+    for (const kind of [
+      "",
+      "end-plate",
+      "welded",
+      "transverse-stiffeners",
+      "web-plates",
+      "through-bars",
+      "heavier-column",
+    ]) {
+      expect([...kinds]).toContain(kind);
+    }
+    expect([...kinds]).toContain("through-bars + transverse-stiffeners");
+  }, 300_000);
+
+  it("give finite numbers in 500 full proposals", () => {
+    fc.assert(
+      fc.property(randomNodeDocument, ({ options: _given, ...document }) =>
+        expectFinite(optionsOf(document)),
+      ),
+      { numRuns: 500, seed: SEED },
+    );
+  }, 300_000);
+
+  it("give mirrored nodes mirrored results", () => {
+    fc.assert(
+      fc.property(randomNodeDocument, (document) => {
+        const straight = optionsOf(document);
+        const turned = optionsOf(mirrored(document));
+        straight.forEach((option, index) => {
+          const other = turned[index];
+          if (!other || isInScope(option) !== isInScope(other)) throw new Error("scope differs");
+          if (!isInScope(option) || !isInScope(other)) return;
+          expect(close(option.governing.utilisation, other.governing.utilisation)).toBe(true);
+          for (const joint of option.joints) {
+            const twin = other.joints.find(
+              (candidate) => candidate.side !== joint.side && candidate.loadCase === joint.loadCase,
+            );
+            expect(close(joint.momentResistance, twin?.momentResistance ?? NaN)).toBe(true);
+            expect(close(joint.initialStiffness, twin?.initialStiffness ?? NaN)).toBe(true);
+          }
+        });
+      }),
+      { numRuns: 300, seed: SEED },
+    );
+  }, 120_000);
+
+  it("never lose resistance to a thicker plate", () => {
+    const thicker = (measure: MeasureInput): MeasureInput =>
+      measure.kind === "transverse-stiffeners"
+        ? { ...measure, thickness: measure.thickness + 5 }
+        : measure.kind === "web-plates"
+          ? {
+              ...measure,
+              thickness: measure.thickness + 5,
+              weld: measure.weld === "butt" ? "butt" : measure.weld + 5,
+            }
+          : measure;
+    fc.assert(
+      fc.property(randomNodeDocument, (document) => {
+        const before = optionsOf(document);
+        const after = optionsOf({
+          ...document,
+          options: document.options?.map((option) => ({ ...option, measures: option.measures.map(thicker) })),
+        });
+        before.forEach((option, index) => {
+          for (const component of [
+            "column-web-compression",
+            "column-web-shear",
+            "column-flange-bending",
+            "transverse-stiffener",
+          ]) {
+            const more = resistancesOf(after[index], component);
+            resistancesOf(option, component).forEach((value, place) => {
+              const raised = more[place] ?? NaN;
+              if (!(raised >= value * (1 - 1e-9)))
+                throw new Error(`${component}: ${value} fell to ${raised}`);
+            });
+          }
+        });
+      }),
+      { numRuns: 400, seed: SEED },
+    );
+  }, 120_000);
+
+  it("are refused with a path when a field is spoilt", () => {
+    fc.assert(
+      fc.property(
+        randomNodeDocument,
+        fc.constantFrom("column", "loadCases", "frame", "target", "quantity", "partialFactors"),
+        (document, field) => {
+          const evaluated = evaluateDocument({ ...document, [field]: "spoilt" }, shop, { steps: "none" });
+          expect(evaluated.ok).toBe(false);
+          if (!evaluated.ok)
+            expect(evaluated.errors.some((error) => error.path.startsWith(field))).toBe(true);
+        },
+      ),
+      { numRuns: 100, seed: SEED },
+    );
+  });
+});
