@@ -169,7 +169,7 @@ export function compressionZoneOf(
   });
   const stiffener = stiffenedZoneOf(node, panel, view, breadth, steps);
   const spring =
-    stiffener?.buckling != null
+    stiffener !== null && stiffener.buckling !== null
       ? { value: Infinity, step: undefined }
       : traced(steps, (trace) =>
           webCompressionSpringMm(trace, {

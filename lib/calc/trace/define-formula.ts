@@ -34,7 +34,7 @@ export const definedFormulas = (): readonly FormulaSpec[] => [...registry.values
  */
 export function defineFormula<K extends string>(spec: FormulaSpec<K>): Formula<K> {
   if (registry.has(spec.id)) throw new Error(`Two formulas share the id ${spec.id}`);
-  registry.set(spec.id, spec as unknown as FormulaSpec);
+  registry.set(spec.id, spec);
   const keys = Object.keys(spec.symbols) as K[];
   const run = (trace: Trace | null, given: Given<K>, mark?: number): number => {
     const limit = spec.limitBroken?.(given) ?? null;

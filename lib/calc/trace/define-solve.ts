@@ -20,7 +20,7 @@ export function defineSolve<K extends string>(spec: {
     const solution = spec.search(given);
     if (!Number.isFinite(solution)) throw new NotANumber(spec.residual.id, Object.keys(given));
     if (trace !== null)
-      residual(trace, { ...given, solution } as { readonly [key in K | "solution"]: number }, mark);
+      residual(trace, { ...given, solution }, mark);
     return solution;
   };
   return Object.assign(run, { residual });
