@@ -52,6 +52,76 @@ const mirrored = (document: NodeDocument): NodeDocument => {
   };
 };
 
+const otherLevel = { top: "bottom", bottom: "top" } as const;
+
+const turnedMeasure = (measure: MeasureInput): MeasureInput =>
+  "levels" in measure ? { ...measure, levels: measure.levels.map((level) => otherLevel[level]) } : measure;
+
+const turnedSide = <S extends NonNullable<NodeDocument["left"]>>(side: S): S => {
+  const { connection } = side;
+  if (connection.kind === "flange-cleats") return side;
+  const welds = {
+    ...connection.welds,
+    topFlange: connection.welds.bottomFlange,
+    bottomFlange: connection.welds.topFlange,
+  };
+  if (connection.kind === "welded") return { ...side, connection: { ...connection, welds } };
+  const depth = depthOfBeam(side.beam.section);
+  const { plate, bolts } = connection;
+  return {
+    ...side,
+    connection: {
+      ...connection,
+      welds,
+      plate: { ...plate, extensionTop: plate.extensionBottom, extensionBottom: plate.extensionTop },
+      bolts: { ...bolts, rows: bolts.rows.map((row) => depth - row).reverse() },
+    },
+  };
+};
+
+const depthOfBeam = (section: unknown): number => {
+  const row = shop.catalog.sections.find((candidate) => candidate.designation === section);
+  if (!row) throw new Error("the random nodes name beams of the catalogue");
+  return row.depthMm;
+};
+
+/** The same node seen upside down: levels swap, moments change their sign. */
+const upsideDown = (document: NodeDocument): NodeDocument => {
+  const { endDistanceAbove, endDistanceBelow, ...column } = document.column;
+  const turnedActions = (actions: { moment: number; axialForce: number; shear: number }) => ({
+    ...actions,
+    moment: -actions.moment,
+    shear: -actions.shear,
+  });
+  return {
+    ...document,
+    column: {
+      ...column,
+      ...(endDistanceBelow === undefined ? {} : { endDistanceAbove: endDistanceBelow }),
+      ...(endDistanceAbove === undefined ? {} : { endDistanceBelow: endDistanceAbove }),
+    },
+    ...(document.left ? { left: turnedSide(document.left) } : {}),
+    ...(document.right ? { right: turnedSide(document.right) } : {}),
+    loadCases: document.loadCases.map(({ name, left, right, column: forces }) => ({
+      name,
+      ...(left ? { left: turnedActions(left) } : {}),
+      ...(right ? { right: turnedActions(right) } : {}),
+      column: {
+        axialForce: forces.axialForce,
+        momentAbove: forces.momentBelow,
+        momentBelow: forces.momentAbove,
+        shearAbove: forces.shearBelow,
+        shearBelow: forces.shearAbove,
+      },
+    })),
+    options: document.options?.map((option) => ({ ...option, measures: option.measures.map(turnedMeasure) })),
+  };
+};
+
+/** A moment of nothing has no sense to turn: its tension level is a choice, not a result. */
+const hasZeroMoment = (document: NodeDocument): boolean =>
+  document.loadCases.some(({ left, right }) => left?.moment === 0 || right?.moment === 0);
+
 const close = (a: number, b: number): boolean =>
   Math.abs(a - b) <= 1e-9 * Math.max(Math.abs(a), Math.abs(b), 1e-9);
 
@@ -122,6 +192,35 @@ describe("random nodes", () => {
           }
         });
       }),
+      { numRuns: 300, seed: SEED },
+    );
+  }, 120_000);
+
+  it("swap their levels when turned upside down with their moments", () => {
+    fc.assert(
+      fc.property(
+        randomNodeDocument.filter((document) => !hasZeroMoment(document)),
+        (document) => {
+          const straight = optionsOf(document);
+          const turned = optionsOf(upsideDown(document));
+          straight.forEach((option, index) => {
+            const other = turned[index];
+            if (!other || isInScope(option) !== isInScope(other)) throw new Error("scope differs");
+            if (!isInScope(option) || !isInScope(other)) return;
+            option.joints.forEach((joint, place) => {
+              expect(close(joint.momentResistance, other.joints[place]?.momentResistance ?? NaN)).toBe(true);
+              expect(close(joint.initialStiffness, other.joints[place]?.initialStiffness ?? NaN)).toBe(true);
+            });
+            const compression = (of: EvaluatedOptionDocument) =>
+              of.components.filter((check) => check.component === "column-web-compression");
+            const twins = compression(other);
+            compression(option).forEach((check, place) => {
+              expect(check.level && otherLevel[check.level]).toBe(twins[place]?.level);
+              expect(close(check.resistance, twins[place]?.resistance ?? NaN)).toBe(true);
+            });
+          });
+        },
+      ),
       { numRuns: 300, seed: SEED },
     );
   }, 120_000);
