@@ -97,7 +97,11 @@ function utilisationGroup(result: ResultDocument, choice: LoadCaseChoice, key: R
 }
 
 function verdictCell(option: EvaluatedOptionDocument, choice: LoadCaseChoice, limit: number): Cell {
-  const worst = checksOf(option, choice)[0];
+  // The one that the sentence above the table names; rules of detailing that are kept never are.
+  const worst =
+    choice.kind === "envelope"
+      ? option.governing
+      : checksOf(option, choice).find((check) => check.component !== "detailing" || check.utilisation > 1);
   const word = option.passes ? "passes" : "fails";
   const note =
     !option.passes && !option.stiffnessReached && option.governing.utilisation <= limit
