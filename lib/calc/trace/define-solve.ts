@@ -19,8 +19,7 @@ export function defineSolve<K extends string>(spec: {
   const run = (trace: Trace | null, given: { readonly [key in K]: number }, mark?: number): number => {
     const solution = spec.search(given);
     if (!Number.isFinite(solution)) throw new NotANumber(spec.residual.id, Object.keys(given));
-    if (trace !== null)
-      residual(trace, { ...given, solution }, mark);
+    if (trace !== null) residual(trace, { ...given, solution }, mark);
     return solution;
   };
   return Object.assign(run, { residual });
