@@ -178,7 +178,7 @@ export function boltedSideCase(
   const panelSpring = panelSpringOf(panel, load.beta, tension.leverMm, steps);
   const initial = initialStiffness(
     tension.leverMm,
-    [...(panelSpring ? [panelSpring] : []), joint.compression.spring, tension.spring],
+    [panelSpring, joint.compression.spring, tension.spring],
     steps,
   );
   return {
@@ -229,11 +229,7 @@ export function weldedSideCase(
   const momentNmm = Math.abs(load.actions.momentNmm);
   const lever: Traced = { value: joint.leverMm, step: undefined };
   const panelSpring = panelSpringOf(panel, load.beta, lever, steps);
-  const initial = initialStiffness(
-    lever,
-    [...(panelSpring ? [panelSpring] : []), joint.compression.spring, joint.spring],
-    steps,
-  );
+  const initial = initialStiffness(lever, [panelSpring, joint.compression.spring, joint.spring], steps);
   return {
     loadCase: load.loadCase,
     actions: load.actions,

@@ -118,9 +118,9 @@ function rowShear(
     reduction,
     gammaM2: node.partialFactors.gammaM2,
   });
-  const common = { pitchMm, gaugeMm: view.gaugeMm };
   const plateN = bearing(trace, node, row, {
-    ...common,
+    pitchMm,
+    gaugeMm: view.gaugeMm,
     endMm: Math.min(
       row.belowTopMm + plate.extensionTopMm,
       beamDepth + plate.extensionBottomMm - row.belowTopMm,
@@ -130,7 +130,8 @@ function rowShear(
     ultimateMpa: plate.steel.ultimateMpa,
   });
   const flangeN = bearing(trace, node, row, {
-    ...common,
+    pitchMm,
+    gaugeMm: view.gaugeMm,
     endMm: Math.min(
       (node.column.endDistanceAboveMm ?? NO_END_MM) + row.belowTopMm,
       (node.column.endDistanceBelowMm ?? NO_END_MM) + beamDepth - row.belowTopMm,
@@ -150,18 +151,13 @@ export function boltShearResistance(
   steps: boolean,
 ): Traced {
   const byHeight = [...view.rows].sort((a, b) => a.belowTopMm - b.belowTopMm);
-  const pitches = byHeight.map((row, index) =>
-    Math.min(
-      ...[byHeight[index - 1], byHeight[index + 1]].flatMap((other) =>
-        other ? [Math.abs(other.belowTopMm - row.belowTopMm)] : [],
-      ),
-      NO_END_MM,
-    ),
-  );
+  const toNeighbour = (row: BoltRow, other: BoltRow | undefined): number =>
+    other ? Math.abs(other.belowTopMm - row.belowTopMm) : NO_END_MM;
   return traced(steps, (trace) => {
-    const rowN = byHeight.map((row, index) =>
-      rowShear(trace, node, panel, view, row, pitches[index] ?? NO_END_MM),
-    );
+    const rowN = byHeight.map((row, index) => {
+      const pitchMm = Math.min(toNeighbour(row, byHeight[index - 1]), toNeighbour(row, byHeight[index + 1]));
+      return rowShear(trace, node, panel, view, row, pitchMm);
+    });
     return shearOfRowsN(trace, { rowN }, 0);
   });
 }

@@ -59,19 +59,21 @@ export function beamCompression(node: NodeCase, joint: JointCase, steps: boolean
       yieldMpa: steel.yieldMpa,
       gammaM0: node.partialFactors.gammaM0,
     });
-    const given = { momentNmm, depthMm: section.depthMm, flangeThicknessMm: section.flangeThicknessMm };
-    return section.depthMm > deepBeamMm
+    const { depthMm, flangeThicknessMm } = section;
+    return depthMm > deepBeamMm
       ? deepBeamCompressionN(
           trace,
           {
-            ...given,
+            momentNmm,
+            depthMm,
+            flangeThicknessMm,
             widthMm: section.widthMm,
             yieldMpa: steel.yieldMpa,
             gammaM0: node.partialFactors.gammaM0,
           },
           0,
         )
-      : beamFlangeCompressionN(trace, given, 0);
+      : beamFlangeCompressionN(trace, { momentNmm, depthMm, flangeThicknessMm }, 0);
   });
 }
 
@@ -119,7 +121,9 @@ export function boltedJointOf(
   return {
     kind: "bolted",
     view,
-    ...parts,
+    flange: parts.flange,
+    plate: parts.plate,
+    compression: parts.compression,
     plateLimits,
     flangeLimits: resistancesOf(parts.flange.family),
     beamWeb,

@@ -218,25 +218,29 @@ export function compressionResistance(
       shearAreaMm2: panel.shearArea.value,
     });
     trace?.include(load.kWc.step);
-    const strip = {
-      omega,
-      kWc: load.kWc.value,
-      breadthMm: zone.breadth.value,
-      thicknessMm,
-      yieldMpa: panel.steel.yieldMpa,
-    };
+    const kWc = load.kWc.value;
+    const breadthMm = zone.breadth.value;
+    const { yieldMpa } = panel.steel;
     const relieve = (value: number, relief: number, mark: number | undefined): number =>
       relief > 0 ? relievedN(trace, { resistanceN: value, relief }, mark) : value;
     let mark = trace?.mark();
     const { gammaM0, gammaM1 } = node.partialFactors;
     let yieldingN = stiffener?.crushing.value;
     if (stiffener) trace?.include(stiffener.crushing.step);
-    yieldingN ??= relieve(web.webCrushingN(trace, { ...strip, gammaM0 }), load.reliefCrushing, mark);
+    yieldingN ??= relieve(
+      web.webCrushingN(trace, { omega, kWc, breadthMm, thicknessMm, yieldMpa, gammaM0 }),
+      load.reliefCrushing,
+      mark,
+    );
     if (stiffener && zone.rho.value >= 1) return yieldingN;
     mark = trace?.mark();
     trace?.include(zone.rho.step);
     const bucklingN = relieve(
-      web.webBucklingN(trace, { ...strip, rho: zone.rho.value, gammaM1 }, mark),
+      web.webBucklingN(
+        trace,
+        { omega, kWc, rho: zone.rho.value, breadthMm, thicknessMm, yieldMpa, gammaM1 },
+        mark,
+      ),
       load.reliefBuckling,
       mark,
     );

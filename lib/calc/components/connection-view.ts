@@ -177,7 +177,15 @@ export function endPlateViewOf(
   }
   const { extensionTopMm, extensionBottomMm } = connection.plate;
   return {
-    ...view,
+    joint,
+    tensionLevel,
+    compressionLevel: view.compressionLevel,
+    tensionWeld: view.tensionWeld,
+    compressionWeld: view.compressionWeld,
+    columnBeyondTensionMm: view.columnBeyondTensionMm,
+    columnBeyondCompressionMm: view.columnBeyondCompressionMm,
+    tensionStiffener: view.tensionStiffener,
+    compressionStiffener: view.compressionStiffener,
     connection,
     gaugeMm: connection.bolts.gaugeMm,
     extensionTensionMm: tensionLevel === "top" ? extensionTopMm : extensionBottomMm,

@@ -121,11 +121,18 @@ export function endPlateOf(node: NodeCase, panel: ColumnPanel, view: EndPlateVie
     };
   };
 
-  const common = { node, thicknessMm: plate.thicknessMm, steel: plate.steel, steps };
+  const settingOf = (leverMm: number, nMm: number): TStubSetting => ({
+    node,
+    thicknessMm: plate.thicknessMm,
+    steel: plate.steel,
+    steps,
+    mMm: leverMm,
+    nMm,
+  });
   const eMinMm = Math.min(eMm, (panel.section.widthMm - view.gaugeMm) / 2);
-  const insideSetting: TStubSetting = { ...common, mMm, nMm: Math.min(eMinMm, 1.25 * mMm) };
+  const insideSetting: TStubSetting = settingOf(mMm, Math.min(eMinMm, 1.25 * mMm));
   const outsideSetting: TStubSetting = extension
-    ? { ...common, mMm: extension.mx.value, nMm: Math.min(extension.exMm, 1.25 * extension.mx.value) }
+    ? settingOf(extension.mx.value, Math.min(extension.exMm, 1.25 * extension.mx.value))
     : insideSetting;
   return {
     family: rowFamilyOf(

@@ -139,8 +139,14 @@ const noFlexibilityNmmPerRad = defineFormula({
 });
 
 /** S_j,ini from the springs that count; infinite ones are left out. 6.3.1(4), Tables 6.9 and 6.10. */
-export function initialStiffness(leverMm: Traced, springs: readonly Traced[], steps: boolean): Traced {
-  const finite = springs.filter((spring) => Number.isFinite(spring.value));
+export function initialStiffness(
+  leverMm: Traced,
+  springs: readonly (Traced | null)[],
+  steps: boolean,
+): Traced {
+  const finite = springs.filter(
+    (spring): spring is Traced => spring !== null && Number.isFinite(spring.value),
+  );
   if (finite.length === 0) {
     return traced(steps, (trace) =>
       noFlexibilityNmmPerRad(trace, { stiffnessNmmPerRad: NO_FLEXIBILITY_NMM_PER_RAD }),

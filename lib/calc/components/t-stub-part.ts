@@ -130,8 +130,10 @@ function modesOf(rows: readonly BoltRow[], one: Traced, two: Traced, setting: TS
       ? null
       : traced(steps, (trace) => {
           trace?.include(momentOne.step);
-          const given = { momentNmm: momentOne.value, mMm };
-          return simple ? modeOneSimpleN(trace, given, 0) : modeOneN(trace, { ...given, nMm, headMm }, 0);
+          const momentNmm = momentOne.value;
+          return simple
+            ? modeOneSimpleN(trace, { momentNmm, mMm }, 0)
+            : modeOneN(trace, { momentNmm, mMm, nMm, headMm }, 0);
         });
   const momentTwo = plastic(two);
   const boltsN = 2 * sum(rows.map((row) => row.fastener.tension.value));
@@ -196,7 +198,7 @@ export function tStubPartOf(
   const modes = modesOf(rows, lengthOneMm, lengthTwoMm, setting);
   const lengthOf = (mode: 1 | 2 | 3): number => (mode === 1 ? lengthOneMm.value : lengthTwoMm.value);
   const plain = least(modes.oneNOrNull, modes.two, modes.three, steps);
-  const own = { ...plain, modeLengthMm: lengthOf(plain.mode) };
+  const own = { resistance: plain.resistance, mode: plain.mode, modeLengthMm: lengthOf(plain.mode) };
   const relieved = (relief: number): Pick<TStubPart, "resistance" | "mode" | "modeLengthMm"> => {
     if (relief === 0) return own;
     const one = modes.oneNOrNull;
@@ -210,7 +212,7 @@ export function tStubPartOf(
       relievedModeTwoN(trace, { momentNmm: modes.momentTwoNmm, mMm, nMm, boltsN: modes.boltsN, relief }),
     );
     const raised = least(raisedOne, raisedTwo, modes.three, steps);
-    return { ...raised, modeLengthMm: lengthOf(raised.mode) };
+    return { resistance: raised.resistance, mode: raised.mode, modeLengthMm: lengthOf(raised.mode) };
   };
   return {
     rows,
@@ -222,7 +224,9 @@ export function tStubPartOf(
     nMm,
     momentTwoNmm: modes.momentTwoNmm,
     boltsN: modes.boltsN,
-    ...own,
+    resistance: own.resistance,
+    mode: own.mode,
+    modeLengthMm: own.modeLengthMm,
     relieved,
   };
 }
