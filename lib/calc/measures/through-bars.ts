@@ -61,6 +61,8 @@ function refuseOutsideRowBounds(
   joint: JointCase,
   level: Level,
 ): void {
+  const { perRow } = connection.bolts;
+  if (perRow !== 2) refuse(`two bars a row (${perRow})`);
   const { thicknessMm } = connection.plate;
   if (thicknessMm < 12 || thicknessMm > 30) refuse(`end plate 12 to 30 mm (${thicknessMm} mm)`);
   const beamDepth = joint.beam.section.depthMm;
