@@ -3,6 +3,7 @@ import { useMutation, useQuery, useQueryClient } from "@tanstack/react-query";
 import { useMemo, useState } from "react";
 import { recalculateMutation, setExclusionsMutation } from "@/lib/client/mutations";
 import { catalogOptions, comparisonOptions, nodeOptions, workingOptions } from "@/lib/client/queries";
+import { inReadingOrder } from "@/lib/ranking/option-order";
 import { verdictSentence } from "@/lib/ranking/verdict";
 import type { Comparison, ComparisonDifference } from "@/lib/schemas/comparison";
 import type { NodeDocument } from "@/lib/schemas/node-document";
@@ -190,7 +191,14 @@ function useDrawings(comparison: Comparison) {
   };
 }
 
-function Ready({ comparison, projectId }: { readonly comparison: Comparison; readonly projectId: string }) {
+/** The comparison with its options in the order they are read in: columns, letters and charts all follow it. */
+const inOrder = (stored: Comparison): Comparison => ({
+  ...stored,
+  result: { ...stored.result, options: inReadingOrder(stored.result.options) },
+});
+
+function Ready({ stored, projectId }: { readonly stored: Comparison; readonly projectId: string }) {
+  const comparison = useMemo(() => inOrder(stored), [stored]);
   const { result, nodeId } = comparison;
   const queryClient = useQueryClient();
   const abilities = useQuery(nodeOptions(nodeId)).data?.abilities;
@@ -272,7 +280,7 @@ export function ComparisonScreen({
       ) : comparison.data.result.options.length === 0 ? (
         <p className="pt-6">There is no option to compare.</p>
       ) : (
-        <Ready comparison={comparison.data} projectId={projectId} />
+        <Ready stored={comparison.data} projectId={projectId} />
       )}
     </PageBody>
   );

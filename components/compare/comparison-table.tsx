@@ -1,11 +1,13 @@
 "use client";
-import { useMemo, useRef, useState, type ReactNode } from "react";
+import { useEffect, useMemo, useRef, useState, type ReactNode, type RefObject } from "react";
 import type { OptionDocument, ResultDocument } from "@/lib/schemas/result-document";
 import { joinClasses } from "@/components/ui/join-classes";
 import { CellContent } from "./comparison-cell";
 import { isEvaluated, type LoadCaseChoice, type Opening, type Row, type RowGroup } from "./comparison-cells";
 import { comparisonGroups } from "./comparison-rows";
-import { Bubble, OptionHead } from "./option-head";
+import { OptionHead } from "./option-head";
+import { ColumnsLine, startsFolded } from "./columns-line";
+import { FoldedHead, FoldedName } from "./folded-column";
 import { columnLetter } from "./rank-words";
 import { stopProps, useGridKeys } from "./use-grid-keys";
 
@@ -67,12 +69,13 @@ function HeadRows({
             "top-0 z-30 border-b border-b-rule pb-9 align-bottom text-note text-soft",
           )}
         >
-          Rank by cost
+          Rank by cost, cheapest first
         </th>
         {columns.map((column) => (
           <th
             key={column.option.key}
             scope="col"
+            data-option={column.option.key}
             className={columnClass(
               column,
               "sticky top-0 z-20 h-px border-b border-b-rule pt-3.5 pb-2",
@@ -80,15 +83,13 @@ function HeadRows({
             )}
           >
             {column.isFolded ? (
-              <button
-                type="button"
-                {...stopProps(column.index + 1)}
-                onClick={() => onFold(column.option.key)}
-                className="mt-1"
-              >
-                <Bubble letter={column.letter} isBest={column.isBest} />{" "}
-                <span className="sr-only">{`${column.option.name}, folded. Unfold it`}</span>
-              </button>
+              <FoldedHead
+                option={column.option}
+                result={result}
+                letter={column.letter}
+                column={column.index + 1}
+                onUnfold={() => onFold(column.option.key)}
+              />
             ) : (
               <OptionHead
                 option={column.option}
@@ -120,7 +121,11 @@ function HeadRows({
             key={column.option.key}
             className={columnClass(column, "border-b border-b-ink pb-2.5")}
           >
-            {column.isFolded ? null : <div {...stopProps(column.index + 1)}>{drawing(column.option)}</div>}
+            {column.isFolded ? (
+              <FoldedName option={column.option} />
+            ) : (
+              <div {...stopProps(column.index + 1)}>{drawing(column.option)}</div>
+            )}
           </td>
         ))}
       </tr>
@@ -237,13 +242,34 @@ const toggled = (set: ReadonlySet<string>, key: string): ReadonlySet<string> => 
   return next;
 };
 
+/** Columns that are folded. Where one is folded or unfolded in its head, the focus stays in that head. */
+function useFoldedColumns(table: RefObject<HTMLTableElement | null>, options: readonly OptionDocument[]) {
+  const [folded, setFolded] = useState<ReadonlySet<string>>(() => new Set(startsFolded(options)));
+  const pressed = useRef<string | null>(null);
+  useEffect(() => {
+    const key = pressed.current;
+    if (key === null) return;
+    pressed.current = null;
+    const heads = [...(table.current?.querySelectorAll<HTMLElement>("th[data-option]") ?? [])];
+    heads
+      .find((head) => head.dataset.option === key)
+      ?.querySelector<HTMLElement>("[data-fold]")
+      ?.focus();
+  }, [folded, table]);
+  const toggle = (key: string) => {
+    pressed.current = key;
+    setFolded((set) => toggled(set, key));
+  };
+  return { folded, toggle, setFolded };
+}
+
 /** The options side by side: one column an option, one row a figure, groups of rows that fold, columns that fold. */
 export function ComparisonTable(props: ComparisonTableProps) {
   const { result, choice, excluded, onOpen } = props;
   const table = useRef<HTMLTableElement>(null);
   const keys = useGridKeys(table);
   const groups = useMemo(() => comparisonGroups(result, choice), [result, choice]);
-  const [foldedColumns, setFoldedColumns] = useState<ReadonlySet<string>>(new Set());
+  const { folded: foldedColumns, toggle: foldColumn, setFolded } = useFoldedColumns(table, result.options);
   const [foldedGroups, setFoldedGroups] = useState<ReadonlySet<string>>(
     () => new Set(groups.filter((group) => group.startsFolded).map((group) => group.key)),
   );
@@ -256,29 +282,28 @@ export function ComparisonTable(props: ComparisonTableProps) {
     isOff: !isEvaluated(option) || excluded.includes(option.key),
   }));
   return (
-    <table
-      ref={table}
-      {...keys}
-      role="grid"
-      aria-label={`Options for ${result.node.reference}`}
-      className="comparison-table border border-ink bg-sheet"
-    >
-      <HeadRows
-        columns={columns}
-        props={props}
-        onFold={(key) => setFoldedColumns((set) => toggled(set, key))}
-      />
-      {groups.map((group) => (
-        <BodyGroup
-          key={group.key}
-          group={group}
-          columns={columns}
-          limit={result.node.target.utilisation}
-          onOpen={onOpen}
-          isFolded={foldedGroups.has(group.key)}
-          onToggle={() => setFoldedGroups((set) => toggled(set, group.key))}
-        />
-      ))}
-    </table>
+    <>
+      <ColumnsLine options={result.options} folded={foldedColumns} onFold={setFolded} />
+      <table
+        ref={table}
+        {...keys}
+        role="grid"
+        aria-label={`Options for ${result.node.reference}`}
+        className="comparison-table border border-ink bg-sheet"
+      >
+        <HeadRows columns={columns} props={props} onFold={foldColumn} />
+        {groups.map((group) => (
+          <BodyGroup
+            key={group.key}
+            group={group}
+            columns={columns}
+            limit={result.node.target.utilisation}
+            onOpen={onOpen}
+            isFolded={foldedGroups.has(group.key)}
+            onToggle={() => setFoldedGroups((set) => toggled(set, group.key))}
+          />
+        ))}
+      </table>
+    </>
   );
 }

@@ -72,7 +72,7 @@ export function OptionHead({
         )}
       </span>
       <span className="no-print mt-1.5 flex gap-3 font-normal">
-        <button type="button" {...stopProps(column)} onClick={onFold} className={SMALL}>
+        <button type="button" {...stopProps(column)} data-fold onClick={onFold} className={SMALL}>
           Fold <span className="sr-only">{`option ${letter}`}</span>
         </button>
         {onToggleExcluded ? (

@@ -32,7 +32,7 @@ export function rankWords(option: OptionDocument, result: ResultDocument): RankW
   };
 }
 
-/** The letter in the bubble: A to Z, then AA. It follows the place in the comparison, not the key. */
+/** The letter in the bubble: A to Z, then AA. It follows the place of the column, not the key. */
 export function columnLetter(index: number): string {
   const letter = String.fromCharCode(65 + (index % 26));
   return index < 26 ? letter : columnLetter(Math.floor(index / 26) - 1) + letter;

@@ -88,6 +88,24 @@ describe("the comparison page", () => {
     );
   });
 
+  it("stands the bare column first, then the options as they rank, then what fails or is outside scope", async () => {
+    show(buildComparison());
+    await screen.findByTestId("verdict");
+    const heads = within(screen.getByRole("grid"))
+      .getAllByRole("columnheader")
+      .map((head) => head.textContent);
+    const order = [
+      /^A Bare column/,
+      /^B Bars at top, stiffeners at bottom.*Rank 1/,
+      /^C Stiffeners top and bottom.*Rank 2/,
+      /^D Heavier column.*Rank 3/,
+      /^E Bars at top.*not ranked: fails/,
+      /^F Web plate, one side.*not ranked: outside scope/,
+    ];
+    expect(heads).toHaveLength(1 + order.length);
+    order.forEach((words, index) => expect(heads[index + 1]).toMatch(words));
+  });
+
   it("reads the working of one option only when a number asks for it, and gives the focus back", async () => {
     const user = userEvent.setup();
     const path = `/api/nodes/${nodeId}/working?option=bare`;
@@ -111,7 +129,7 @@ describe("the comparison page", () => {
     const sent = show(buildComparison(), {
       [`PUT /api/nodes/${nodeId}/exclusions`]: { body: { excluded: ["stiffeners"] } },
     });
-    await user.click(await screen.findByRole("button", { name: /Set aside.*option D/ }));
+    await user.click(await screen.findByRole("button", { name: /Set aside.*option C/ }));
     await waitFor(() =>
       expect(sent.find(({ method }) => method === "PUT")?.body).toEqual({ optionKeys: ["stiffeners"] }),
     );

@@ -2,7 +2,8 @@ import { render, screen, within } from "@testing-library/react";
 import userEvent from "@testing-library/user-event";
 import { describe, expect, it, vi } from "vitest";
 import { ComparisonTable, type ComparisonTableProps } from "@/components/compare/comparison-table";
-import { buildResultDocument } from "@/tests/factories/build-result-document";
+import type { ResultDocument } from "@/lib/schemas/result-document";
+import { buildOutsideScopeOption, buildResultDocument } from "@/tests/factories/build-result-document";
 
 function show(changes: Partial<ComparisonTableProps> = {}) {
   const onOpen = vi.fn();
@@ -133,6 +134,45 @@ describe("folding and setting aside", () => {
   });
 });
 
+/** Eight options, three of them outside scope. */
+function buildManyOptions(): ResultDocument {
+  const result = buildResultDocument();
+  const outside = ["one", "two"].map((key) => buildOutsideScopeOption({ key, name: `Bars ${key}` }));
+  return { ...result, options: [...result.options, ...outside] };
+}
+
+describe("with more columns than a laptop shows", () => {
+  it("starts with what is outside scope folded, and says in the head what is folded and why", () => {
+    show({ result: buildManyOptions() });
+    expect(screen.getByRole("status")).toHaveTextContent(
+      "8 options: 3 ranked, 2 fail, 3 outside scope. 3 folded",
+    );
+    expect(
+      screen.getByRole("button", { name: "G Bars one, folded, not ranked: outside scope. Unfold it" }),
+    ).toBeVisible();
+    expect(screen.getByText("drawing of Bars at top")).toBeVisible();
+    expect(screen.queryByText("drawing of Bars one")).toBeNull();
+  });
+
+  it("folds all that is not ranked at once, the bare column excepted, and unfolds all", async () => {
+    const user = userEvent.setup();
+    show({ result: buildManyOptions() });
+    await user.click(screen.getByRole("button", { name: "Fold what is not ranked" }));
+    expect(screen.queryByText("drawing of Bars at top")).toBeNull();
+    expect(screen.getByText("drawing of Bare column")).toBeVisible();
+    expect(screen.getByText("drawing of Heavier column")).toBeVisible();
+    expect(screen.queryByRole("button", { name: "Fold what is not ranked" })).toBeNull();
+    await user.click(screen.getByRole("button", { name: "Unfold all" }));
+    expect(screen.getByText("drawing of Bars one")).toBeVisible();
+  });
+
+  it("leaves a sheet that fits as it is", () => {
+    show();
+    expect(screen.queryByRole("status")).toBeNull();
+    expect(screen.getByText("drawing of Web plate, one side")).toBeVisible();
+  });
+});
+
 describe("by keyboard", () => {
   it("is one Tab stop; arrows move, Home and End go to the ends, Enter opens", async () => {
     const user = userEvent.setup();
@@ -153,6 +193,16 @@ describe("by keyboard", () => {
     expect(screen.getByRole("button", { name: /^web compression, Bare column:/ })).toHaveFocus();
     await user.tab();
     expect(document.body).toHaveFocus();
+  });
+
+  it("keeps the focus in the head of a column that is folded and unfolded", async () => {
+    const user = userEvent.setup();
+    show();
+    screen.getByRole("button", { name: "Fold option B" }).focus();
+    await user.keyboard("{Enter}");
+    expect(screen.getByRole("button", { name: /^B Bars at top, folded/ })).toHaveFocus();
+    await user.keyboard("{Enter}");
+    expect(screen.getByRole("button", { name: "Fold option B" })).toHaveFocus();
   });
 
   it("stays reachable by Tab when the focused column folds away", async () => {
