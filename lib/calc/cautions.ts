@@ -1,5 +1,7 @@
 import { isBolted, type JointModel } from "./joint-model";
-import type { PanelDesign } from "./measures/panel-design";
+import { isOnePanel } from "./mechanics/panel-levels";
+import { hasBars, type PanelDesign } from "./measures/panel-design";
+import type { StiffenerPair } from "./measures/stiffener-pairs";
 import type { LoadCase, NodeCase } from "./node";
 
 const GENERAL = [
@@ -12,6 +14,9 @@ const BARS = [
   "Threaded bars with inner nuts are outside the clauses of EN 1993-1-8: the model is mechanics with bounds from linear-elastic finite elements; nothing outside those bounds is answered.",
   "The bars work only with every inner nut tight on its flange: state the tightening order and its inspection, and nuts and bars to EN 1090-2. Outer nuts with washers on both flanges. Bar resistances are taken at 0.85 for cut threads.",
 ] as const;
+
+const UNEQUAL =
+  "The beams differ in depth or level: the panel is cut into zones at their flanges, each with its own shear by equilibrium, and a joint's beta is that of the worst zone it shears.";
 
 const TOLERANCE = 0.1;
 
@@ -70,37 +75,54 @@ export function cautionsOf(
       `Joint moments and column forces do not balance in ${unbalanced.length === node.loadCases.length ? "any load case" : unbalanced.join(", ")}: check the column's moments and shears.`,
     );
   }
-  if (design.bars.top || design.bars.bottom) {
+  if (hasBars(design)) {
     cautions.push(...BARS);
     if (lacksOneSidedCase(node)) {
       cautions.push("No load case leaves one beam unloaded; the relief by bars halves there, so add one.");
     }
   }
-  for (const level of ["top", "bottom"] as const) {
-    const stiffener = design.stiffeners[level];
-    const flange = models[0]?.joint.view.joint.beam.section;
-    if (!stiffener || !flange) continue;
-    if (stiffener.thicknessMm < flange.flangeThicknessMm) {
-      cautions.push(
-        `Stiffeners at the ${level} are thinner than the beam flange (${stiffener.thicknessMm} against ${flange.flangeThicknessMm} mm); as guidance, match it.`,
-      );
-    }
-    if (2 * stiffener.widthMm + design.column.section.webThicknessMm < flange.widthMm) {
-      cautions.push(
-        `Stiffeners at the ${level} do not reach as far as the beam flange; as guidance, match it.`,
-      );
-    }
-    const narrow = models.some(
-      (model) =>
-        isBolted(model) &&
-        model.joint.view.tensionLevel === level &&
-        2 * stiffener.widthMm + design.column.section.webThicknessMm < 1.33 * model.joint.view.gaugeMm,
+  for (const pair of design.pairs) cautions.push(...pairCautions(design, pair, models));
+  if (!isOnePanel(node.joints)) cautions.push(UNEQUAL);
+  return cautions;
+}
+
+/** What a pair of stiffeners does not do as guidance would have it. */
+function pairCautions(
+  design: PanelDesign,
+  { stiffener, level, sides, slopeCosine }: StiffenerPair,
+  models: readonly JointModel[],
+): readonly string[] {
+  const cautions: string[] = [];
+  const served = models.filter((model) => sides.includes(model.joint.view.joint.side));
+  const flanges = served.map((model) => model.joint.view.joint.beam.section);
+  const thickest = Math.max(...flanges.map(({ flangeThicknessMm }) => flangeThicknessMm));
+  const widest = Math.max(...flanges.map(({ widthMm }) => widthMm));
+  const breadthMm = 2 * stiffener.widthMm + design.column.section.webThicknessMm;
+  if (stiffener.thicknessMm < thickest) {
+    cautions.push(
+      `Stiffeners at the ${level} are thinner than the beam flange (${stiffener.thicknessMm} against ${thickest} mm); as guidance, match it.`,
     );
-    if (narrow) {
-      cautions.push(
-        `Stiffeners at the ${level} are too narrow to hold the column flange (2 b_sg + t_wc under 1.33 gauge) and do not count for it.`,
-      );
-    }
+  }
+  if (breadthMm < widest) {
+    cautions.push(
+      `Stiffeners at the ${level} do not reach as far as the beam flange; as guidance, match it.`,
+    );
+  }
+  const isNarrow = served.some(
+    (model) =>
+      isBolted(model) &&
+      model.joint.view.tensionLevel === level &&
+      breadthMm < 1.33 * model.joint.view.gaugeMm,
+  );
+  if (isNarrow) {
+    cautions.push(
+      `Stiffeners at the ${level} are too narrow to hold the column flange (2 b_sg + t_wc under 1.33 gauge) and do not count for it.`,
+    );
+  }
+  if (slopeCosine < 1) {
+    cautions.push(
+      `The stiffeners at the ${level} slope from one beam's flange to the other's: two pairs so near each other leave no room to weld.`,
+    );
   }
   return cautions;
 }

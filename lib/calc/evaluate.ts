@@ -1,13 +1,20 @@
 import { cautionsOf } from "./cautions";
-import { betaOf, panelShearForceN } from "./clauses/en1993-1-8-2005/panel";
 import { checkOf } from "./components/check";
 import { columnPanelOf, type ColumnPanel } from "./components/column-panel";
 import { connectionDetailing, sideChecks } from "./components/joint-checks";
+import {
+  betaOfSide,
+  panelChecks,
+  panelGeometryOf,
+  type JointShear,
+  type PanelGeometry,
+} from "./components/panel-shear";
 import { isBolted, jointModelOf, type JointModel } from "./joint-model";
+import { areFacing } from "./mechanics/panel-levels";
 import { symmetricPart } from "./mechanics/through-bar-formulas";
 import { designOf } from "./measures/apply-measures";
 import { barChecks, barPressN } from "./measures/bar-checks";
-import type { PanelDesign } from "./measures/panel-design";
+import { hasBars, type PanelDesign } from "./measures/panel-design";
 import { refuseOutsideBarBounds } from "./measures/through-bars";
 import { stiffenerChecks, stiffenerDetailing } from "./measures/transverse-stiffeners";
 import { refuseShortPlate, webPlateChecks, webPlateDetailing } from "./measures/web-plates";
@@ -15,7 +22,6 @@ import type { BeamActions, JointCase, Level, LoadCase, MeasureCase, NodeCase, Si
 import { OutsideScope } from "./outcome";
 import type { ComponentCheck, JointResult, OptionOutcome } from "./result";
 import { boltedSideCase, jointResultOf, weldedSideCase, type SideCase } from "./side-case";
-import { traced } from "./trace/traced";
 import { connectionFailureOf, governingOf, reachesStiffness } from "./verdict";
 
 export interface EvaluateSettings {
@@ -23,7 +29,6 @@ export interface EvaluateSettings {
   readonly steps: boolean;
 }
 
-const LEVELS: readonly Level[] = ["top", "bottom"];
 /** Axial force of a beam up to which the joint's moment resistance is not affected. EN 1993-1-8:2005, 6.2.7.1(2). */
 const SMALL_AXIAL_SHARE = 0.05;
 
@@ -33,16 +38,6 @@ const actionsOf = (loadCase: LoadCase, side: Side): BeamActions => {
   if (!actions) throw new RangeError(`Load case ${loadCase.name} has no forces for the ${side} beam`);
   return actions;
 };
-
-function refuseUnequalBeams(node: NodeCase): void {
-  const [first, second] = node.joints;
-  if (!first || !second) return;
-  const a = first.beam.section;
-  const b = second.beam.section;
-  if (a.depthMm !== b.depthMm || a.flangeThicknessMm !== b.flangeThicknessMm || second.levelOffsetMm !== 0) {
-    throw new OutsideScope("beams of unequal depth, flange thickness or level are not evaluated yet");
-  }
-}
 
 function refuseLargeAxialForce(joint: JointCase, loadCase: LoadCase): void {
   const { axialForceN } = actionsOf(loadCase, joint.side);
@@ -82,89 +77,63 @@ class ModelStore {
   }
 }
 
-/** beta of one joint: 1 alone, exact with both moments; 2, the most there is, where its own moment is nothing. 5.3(9). */
-function betaOfSide(node: NodeCase, loadCase: LoadCase, side: Side): number {
-  if (node.joints.length === 1) return 1;
-  const ownNmm = actionsOf(loadCase, side).momentNmm;
-  const otherNmm = actionsOf(loadCase, side === "left" ? "right" : "left").momentNmm;
-  return ownNmm === 0 ? 2 : betaOf(null, { ownNmm, otherNmm });
-}
-
 /** Symmetric part of two forces of one sense; `own` and `other` positive in that sense. */
 const symmetricOf = (own: number, other: number): number => {
   const largerN = Math.max(own, other);
   return largerN > 0 ? symmetricPart(null, { largerN, otherN: Math.min(own, other) }) : 0;
 };
 
+/** One side in one load case, before its resistance is known. */
+interface LoadedSide {
+  readonly joint: JointCase;
+  readonly actions: BeamActions;
+  readonly model: JointModel;
+}
+
+/** Outward force at the top flange, N. */
+const topForceN = (side: LoadedSide): number => side.actions.momentNmm / side.model.leverMm;
+/** z of 6.3.3.1 with several rows, between the flanges where welded. */
+const shearOf = ({ actions, model }: LoadedSide): JointShear => ({
+  momentNmm: actions.momentNmm,
+  leverMm: isBolted(model) ? model.tension.leverMm.value : model.leverMm,
+});
+
+/** How far the forces left and right are symmetric at one level; a flange that faces none stands alone. */
+function symmetricAt(own: LoadedSide, other: LoadedSide | undefined, level: Level): number {
+  // At the tension level outward is positive, at the compression level inward; both are the moment's own sense.
+  const sense = tensionLevelOf(own.actions) === "top" ? 1 : -1;
+  const isFaced = other !== undefined && areFacing(own.joint, other.joint, level);
+  return symmetricOf(sense * topForceN(own), isFaced ? sense * topForceN(other) : 0);
+}
+
 function sideCasesOf(
   node: NodeCase,
   panel: ColumnPanel,
   store: ModelStore,
+  geometry: PanelGeometry,
   loadCase: LoadCase,
   steps: boolean,
 ): SideCase[] {
-  const sides = node.joints.map((joint) => {
+  const sides = node.joints.map((joint): LoadedSide => {
     const actions = actionsOf(loadCase, joint.side);
     return { joint, actions, model: store.of(joint, tensionLevelOf(actions)) };
   });
-  /** Outward force at the top flange, N. */
-  const topForce = (side: (typeof sides)[number] | undefined): number =>
-    side ? side.actions.momentNmm / side.model.leverMm : 0;
   return sides.map((own, index) => {
     const other = sides[1 - index];
-    const sense = tensionLevelOf(own.actions) === "top" ? 1 : -1;
-    // At the tension level outward is positive, at the compression level inward; both are the moment's own sense.
-    const symmetric = symmetricOf(sense * topForce(own), sense * topForce(other));
+    const { tensionLevel, compressionLevel } = own.model.joint.view;
     const load = {
       loadCase,
       actions: own.actions,
-      beta: betaOfSide(node, loadCase, own.joint.side),
-      symmetric: { tension: symmetric, compression: symmetric },
+      beta: betaOfSide(geometry, own.joint.side, shearOf(own), other ? shearOf(other) : null),
+      symmetric: {
+        tension: symmetricAt(own, other, tensionLevel),
+        compression: symmetricAt(own, other, compressionLevel),
+      },
     };
     return isBolted(own.model)
       ? boltedSideCase(node, panel, own.model, load, steps)
       : weldedSideCase(node, panel, own.model, load, steps);
   });
-}
-
-/** Adds the panel's check, once for each side, and returns its shear, N. */
-function panelChecks(
-  checks: ComponentCheck[],
-  panel: ColumnPanel,
-  loadCase: LoadCase,
-  sides: readonly SideCase[],
-  steps: boolean,
-): number {
-  const of = (side: Side) => sides.find((candidate) => candidate.model.joint.view.joint.side === side);
-  const left = of("left");
-  const right = of("right");
-  const force = traced(steps, (trace) =>
-    panelShearForceN(trace, {
-      leftNmm: left?.actions.momentNmm ?? 0,
-      leftLeverMm: left?.lever.value ?? right?.lever.value ?? 1,
-      rightNmm: right?.actions.momentNmm ?? 0,
-      rightLeverMm: right?.lever.value ?? left?.lever.value ?? 1,
-      aboveN: loadCase.column.shearAboveN,
-      belowN: loadCase.column.shearBelowN,
-    }),
-  );
-  const demandN = Math.abs(force.value);
-  for (const side of sides) {
-    checks.push(
-      checkOf(
-        {
-          component: "column-web-shear",
-          side: side.model.joint.view.joint.side,
-          loadCase: loadCase.name,
-          clause: "EN 1993-1-8, 6.2.6.1 and 5.3",
-        },
-        demandN,
-        panel.shear,
-        { stiffnessCoefficientMm: side.panelSpring?.value, demandStep: force.step },
-      ),
-    );
-  }
-  return demandN;
 }
 
 /** Bars under moments turning the same way add to the compression they face: the check is repeated with it. */
@@ -196,23 +165,21 @@ function caseChecks(
   node: NodeCase,
   design: PanelDesign,
   panel: ColumnPanel,
+  geometry: PanelGeometry,
   loadCase: LoadCase,
   sides: readonly SideCase[],
   steps: boolean,
 ): void {
   for (const side of sides) sideChecks(checks, side);
-  const shearN = panelChecks(checks, panel, loadCase, sides, steps);
-  for (const level of LEVELS) {
-    const stiffener = design.stiffeners[level];
-    if (stiffener) checks.push(...stiffenerChecks(node, panel, stiffener, level, sides, steps));
-  }
+  const shearN = panelChecks(checks, panel, geometry, loadCase, sides, steps);
+  for (const pair of design.pairs) checks.push(...stiffenerChecks(node, panel, pair, sides, steps));
   const side = node.joints[0]?.side ?? "left";
   if (design.webPlates) {
     checks.push(
       ...webPlateChecks(node, panel, design.webPlates, shearN, { side, loadCase: loadCase.name }, steps),
     );
   }
-  if (design.bars.top || design.bars.bottom) {
+  if (hasBars(design)) {
     sides.forEach((own, index) => checks.push(...barChecks(node, panel, own, sides[1 - index], steps)));
     checks.push(...pressedCompression(sides));
   }
@@ -230,30 +197,27 @@ function detailingChecks(
     seen.add(side.model);
     return connectionDetailing(side, panel.section.widthMm);
   });
-  for (const level of LEVELS) {
-    const stiffener = design.stiffeners[level];
-    if (stiffener) checks.push(...stiffenerDetailing(panel, stiffener, level, models));
-  }
+  for (const pair of design.pairs) checks.push(...stiffenerDetailing(panel, pair, models));
   const side = models[0]?.joint.view.joint.side ?? "left";
   if (design.webPlates) checks.push(...webPlateDetailing(panel, design.webPlates, side));
   return checks;
 }
 
 function evaluate(node: NodeCase, measures: readonly MeasureCase[], steps: boolean): OptionOutcome {
-  refuseUnequalBeams(node);
   const design = designOf(node, measures);
   const panel = columnPanelOf(node, design, steps);
   refuseOutsideBarBounds(node, design, panel);
+  const geometry = panelGeometryOf(node);
   const store = new ModelStore(node, design, panel, steps);
   const checks: ComponentCheck[] = [];
   const joints: JointResult[] = [];
   const everySide: SideCase[] = [];
   for (const loadCase of node.loadCases) {
     for (const joint of node.joints) refuseLargeAxialForce(joint, loadCase);
-    const sides = sideCasesOf(node, panel, store, loadCase, steps);
+    const sides = sideCasesOf(node, panel, store, geometry, loadCase, steps);
     everySide.push(...sides);
     joints.push(...sides.map(jointResultOf));
-    caseChecks(checks, node, design, panel, loadCase, sides, steps);
+    caseChecks(checks, node, design, panel, geometry, loadCase, sides, steps);
   }
   const models = store.all();
   if (design.webPlates) refuseShortPlate(design.webPlates, models);

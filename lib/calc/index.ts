@@ -6,4 +6,6 @@ export type * from "./node";
 export * from "./result";
 export { sectionProperties, type SectionProperties } from "./mechanics/section-properties";
 export { ELASTIC_MODULUS_MPA } from "./clauses/en1993-1-1-2005/members";
+export { areFacing } from "./mechanics/panel-levels";
+export { pairsOfMeasure, type StiffenerPair } from "./measures/stiffener-pairs";
 export { CUT_THREAD_REDUCTION } from "./components/connection-view";

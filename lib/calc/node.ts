@@ -6,6 +6,9 @@
 export type Side = "left" | "right";
 export type Level = "top" | "bottom";
 
+/** Whose flanges a measure stands at where the two beams' levels differ; left out = both. */
+export type MeasureSides = Side | "both";
+
 export interface ISection {
   readonly designation: string;
   readonly make: "rolled" | "welded";
@@ -124,6 +127,7 @@ export type MeasureCase =
   | {
       readonly kind: "transverse-stiffeners";
       readonly levels: readonly Level[];
+      readonly at?: MeasureSides;
       readonly thicknessMm: number;
       /** Each side of the web. */
       readonly widthMm: number;
@@ -162,6 +166,7 @@ export type MeasureCase =
   | {
       readonly kind: "through-bars";
       readonly levels: readonly Level[];
+      readonly at?: MeasureSides;
       readonly size: FastenerSize;
       readonly grade: FastenerGrade;
       readonly innerNuts: boolean;

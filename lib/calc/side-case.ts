@@ -17,7 +17,7 @@ import { assembleRows } from "./components/row-assembly";
 import { weldedTension } from "./components/welded-joint";
 import { isBolted, type BoltedModel, type JointModel, type WeldedModel } from "./joint-model";
 import { reliefBuckling, reliefCrushing, reliefTension } from "./mechanics/through-bar-formulas";
-import type { BeamActions, Level, LoadCase, NodeCase } from "./node";
+import type { BeamActions, Level, LoadCase, NodeCase, Side } from "./node";
 import type { JointResult } from "./result";
 import type { Step } from "./trace/trace";
 import { traced, type Traced } from "./trace/traced";
@@ -138,8 +138,8 @@ const panelSpringOf = (panel: ColumnPanel, beta: number, lever: Traced, steps: b
       })
     : null;
 
-const panelLimit = (panel: ColumnPanel, beta: number): number =>
-  beta > 0 ? panelLimitOnRowsN(null, { panelN: panel.shear.value, beta }) : Infinity;
+const panelLimit = (panel: ColumnPanel, side: Side, beta: number): number =>
+  beta > 0 ? panelLimitOnRowsN(null, { panelN: panel.shear[side].value, beta }) : Infinity;
 
 /** One bolted side in one load case: 6.2.7.2, 6.3. */
 export function boltedSideCase(
@@ -152,7 +152,11 @@ export function boltedSideCase(
   const { joint } = model;
   const compression = compressionOf(node, panel, model, load, steps);
   const column = columnTension(node, panel, joint, load.beta, reliefOf(model, load.symmetric.tension), steps);
-  const limitN = Math.min(compression.value, joint.beamFlange.value, panelLimit(panel, load.beta));
+  const limitN = Math.min(
+    compression.value,
+    joint.beamFlange.value,
+    panelLimit(panel, joint.view.joint.side, load.beta),
+  );
   const rows = assembleRows(
     joint.view.tensionRows,
     [column.flange, column.web, joint.plateLimits, joint.beamWeb],
@@ -219,7 +223,7 @@ export function weldedSideCase(
     joint.beamFlange.value,
     webTension.value,
     joint.flangeBending?.value ?? Infinity,
-    panelLimit(panel, load.beta),
+    panelLimit(panel, joint.view.joint.side, load.beta),
   );
   const resistance = traced(steps, (trace) => {
     for (const part of [webTension, joint.flangeBending, compression, joint.beamFlange])

@@ -116,8 +116,9 @@ export function barShapes(
 }
 
 /** Rows of the whole node by height: a bar goes through both sides, so equal heights are one row. */
-function barRows(frame: Frame, level: Level): { yMm: number; row: number }[] {
-  const rows = frame.joints.flatMap((placed) =>
+function barRows(frame: Frame, { at }: ThroughBars, level: Level): { yMm: number; row: number }[] {
+  const named = frame.joints.filter(({ side }) => at === undefined || at === "both" || at === side);
+  const rows = named.flatMap((placed) =>
     placed.rowsMm.flatMap((yMm, index) =>
       levelOfRow(placed, yMm) === level ? [{ yMm, row: index + 1 }] : [],
     ),
@@ -125,12 +126,19 @@ function barRows(frame: Frame, level: Level): { yMm: number; row: number }[] {
   return rows.filter(({ yMm }, index) => rows.findIndex((other) => Math.abs(other.yMm - yMm) < 1) === index);
 }
 
+/** Whether a bar passes at this height, so that no bolt stands there. */
+const isBarAt = (frame: Frame, measures: readonly MeasureCase[], yMm: number): boolean =>
+  (["top", "bottom"] as const).some((level) => {
+    const bars = barsAt(measures, level);
+    return bars !== undefined && barRows(frame, bars, level).some((row) => Math.abs(row.yMm - yMm) < 1);
+  });
+
 const boltsOfJoint = (frame: Frame, placed: PlacedJoint, measures: readonly MeasureCase[]): Shape[] => {
   const { connection } = placed.joint;
   if (connection.kind !== "end-plate") return [];
   return placed.rowsMm.flatMap((yMm, index) => {
     const level = levelOfRow(placed, yMm);
-    if (barsAt(measures, level)) return [];
+    if (isBarAt(frame, measures, yMm)) return [];
     const innerMm = placed.sign * (frame.innerFaceMm - backingMm(measures, level));
     return boltShapes(connection.bolts.size, {
       sign: placed.sign,
@@ -148,7 +156,7 @@ export function fastenerShapes(frame: Frame, measures: readonly MeasureCase[]): 
     const measure = barsAt(measures, level);
     if (!measure) return [];
     const innerMm = frame.innerFaceMm - backingMm(measures, level);
-    return barRows(frame, level).flatMap(({ yMm, row }) =>
+    return barRows(frame, measure, level).flatMap(({ yMm, row }) =>
       barShapes(
         measure,
         { leftOuterMm: outerFaceMm(frame, -1, yMm), rightOuterMm: outerFaceMm(frame, 1, yMm), innerMm },

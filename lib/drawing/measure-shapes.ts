@@ -1,3 +1,4 @@
+import { pairsOfMeasure, type StiffenerPair } from "@/lib/calc";
 import type { Level, MeasureCase, Side, Weld } from "@/lib/calc/node";
 import type { Point, Shape } from "./drawing";
 import { flangeHeightsMm, type Frame } from "./frame";
@@ -26,49 +27,85 @@ function endFillets(weld: Weld, faceMm: number, yMm: number, thicknessMm: number
   });
 }
 
-/** Spans between the column flanges: the whole width, or a length from each flange that a beam is on. */
-function stiffenerSpans(
-  frame: Frame,
-  length: "full" | number,
-): { from: number; to: number; welded: number[] }[] {
+/** A plate's two ends, left before right, and which of them stand on a flange. */
+interface StiffenerSpan {
+  readonly from: Point;
+  readonly to: Point;
+  readonly welded: readonly Point[];
+}
+
+/** Middle of a joint's flange at the pair's level, on the sheet. */
+function flangeHeightMm(frame: Frame, side: Side, level: Level): number | undefined {
+  const placed = frame.joints.find((candidate) => candidate.side === side);
+  if (!placed) return undefined;
+  const half = placed.joint.beam.section.flangeThicknessMm / 2;
+  return level === "top" ? placed.topMm + half : placed.bottomMm - half;
+}
+
+/** Spans between the column flanges: the whole width, sloping from beam to beam, or a length from each flange served. */
+function stiffenerSpans(frame: Frame, pair: StiffenerPair): StiffenerSpan[] {
   const inner = frame.innerFaceMm;
-  if (length === "full") return [{ from: -inner, to: inner, welded: [-inner, inner] }];
-  return frame.joints.map(({ sign }) => ({
-    from: sign * inner,
-    to: sign * (inner - length),
-    welded: [sign * inner],
-  }));
+  const { length } = pair.stiffener;
+  const heights = pair.sides.map((side) => flangeHeightMm(frame, side, pair.level) ?? 0);
+  const [first = 0, second = first] = heights;
+  if (length === "full") {
+    const isLevel = pair.slopeCosine === 1;
+    const [left, right] = pair.sides[0] === "left" ? [first, second] : [second, first];
+    const from = { x: -inner, y: isLevel ? first : left };
+    const to = { x: inner, y: isLevel ? first : right };
+    return [{ from, to, welded: [from, to] }];
+  }
+  return pair.sides.map((side, index) => {
+    const sign = side === "left" ? -1 : 1;
+    const y = heights[index] ?? 0;
+    const onFlange = { x: sign * inner, y };
+    const free = { x: sign * (inner - length), y };
+    return sign < 0
+      ? { from: onFlange, to: free, welded: [onFlange] }
+      : { from: free, to: onFlange, welded: [onFlange] };
+  });
 }
 
 function transverse(frame: Frame, measure: Of<"transverse-stiffeners">): Shape[] {
   const half = measure.thicknessMm / 2;
-  return measure.levels.flatMap((level) =>
-    flangeHeightsMm(frame, level).flatMap((yMm) =>
-      stiffenerSpans(frame, measure.length).flatMap(({ from, to, welded }) => [
-        rectBetween(
-          "stiffener",
-          "stiffener",
-          { x: from, y: yMm - half },
-          { x: to, y: yMm + half },
-          { level },
-        ),
-        ...welded.flatMap((faceMm) =>
-          endFillets(measure.flangeWeld, faceMm, yMm, measure.thicknessMm, level),
-        ),
-      ]),
-    ),
-  );
+  const joints = frame.joints.map(({ joint }) => joint);
+  return pairsOfMeasure(frame.column, joints, measure).flatMap((pair) => {
+    const { level } = pair;
+    return stiffenerSpans(frame, pair).flatMap(({ from, to, welded }) => [
+      from.y === to.y
+        ? rectBetween(
+            "stiffener",
+            "stiffener",
+            { x: from.x, y: from.y - half },
+            { x: to.x, y: to.y + half },
+            { level },
+          )
+        : strip("stiffener", from, to, measure.thicknessMm, { level }),
+      ...welded.flatMap(({ x, y }) => endFillets(measure.flangeWeld, x, y, measure.thicknessMm, level)),
+    ]);
+  });
 }
 
 /** A strip of plate of the given thickness along a line, cut off at both flange faces by vertical lines. */
-function strip(from: Point, to: Point, thicknessMm: number): Shape {
+function strip(
+  kind: "stiffener" | "diagonal",
+  from: Point,
+  to: Point,
+  thicknessMm: number,
+  about: { readonly level?: Level } = {},
+): Shape {
   const rise = (thicknessMm / 2) * Math.hypot(1, (to.y - from.y) / (to.x - from.x));
-  return polygon("diagonal", "stiffener", [
-    { x: from.x, y: from.y - rise },
-    { x: to.x, y: to.y - rise },
-    { x: to.x, y: to.y + rise },
-    { x: from.x, y: from.y + rise },
-  ]);
+  return polygon(
+    kind,
+    "stiffener",
+    [
+      { x: from.x, y: from.y - rise },
+      { x: to.x, y: to.y - rise },
+      { x: to.x, y: to.y + rise },
+      { x: from.x, y: from.y + rise },
+    ],
+    about,
+  );
 }
 
 function diagonals(frame: Frame, measure: Of<"diagonal-stiffeners">): Shape[] {
@@ -83,15 +120,19 @@ function diagonals(frame: Frame, measure: Of<"diagonal-stiffeners">): Shape[] {
     ];
   };
   const other: Side = measure.towards === "left" ? "right" : "left";
-  if (measure.arrangement === "single") return [strip(...ends(measure.towards), measure.thicknessMm)];
+  if (measure.arrangement === "single")
+    return [strip("diagonal", ...ends(measure.towards), measure.thicknessMm)];
   if (measure.arrangement === "cross") {
-    return [strip(...ends(measure.towards), measure.thicknessMm), strip(...ends(other), measure.thicknessMm)];
+    return [
+      strip("diagonal", ...ends(measure.towards), measure.thicknessMm),
+      strip("diagonal", ...ends(other), measure.thicknessMm),
+    ];
   }
   const sign = measure.towards === "left" ? -1 : 1;
   const meeting = { x: -sign * inner, y: (top + bottom) / 2 };
   return [
-    strip({ x: sign * inner, y: top }, meeting, measure.thicknessMm),
-    strip({ x: sign * inner, y: bottom }, meeting, measure.thicknessMm),
+    strip("diagonal", { x: sign * inner, y: top }, meeting, measure.thicknessMm),
+    strip("diagonal", { x: sign * inner, y: bottom }, meeting, measure.thicknessMm),
   ];
 }
 

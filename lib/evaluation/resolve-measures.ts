@@ -33,6 +33,7 @@ function transverseStiffeners(
   return {
     kind: input.kind,
     levels: input.levels,
+    ...(input.at === undefined ? {} : { at: input.at }),
     thicknessMm: input.thickness,
     widthMm: input.width,
     length: input.length,
@@ -88,7 +89,8 @@ function throughBars(
   const size = resolveFastenerSize(context, input.size, `${path}.size`);
   const grade = resolveFastenerGrade(context, input.grade, `${path}.grade`);
   if (!size || !grade) return null;
-  return { kind: input.kind, levels: input.levels, size, grade, innerNuts: input.innerNuts };
+  const { kind, levels, at, innerNuts } = input;
+  return { kind, levels, ...(at === undefined ? {} : { at }), size, grade, innerNuts };
 }
 
 /** The heavier column is of the column's own grade, with the strength of its own flange thickness. */
@@ -169,6 +171,7 @@ function describeMeasure(measure: MeasureCase): MeasureInput {
       return {
         kind: measure.kind,
         levels: [...measure.levels],
+        ...(measure.at === undefined ? {} : { at: measure.at }),
         thickness: measure.thicknessMm,
         width: measure.widthMm,
         length: measure.length,
@@ -210,6 +213,7 @@ function describeMeasure(measure: MeasureCase): MeasureInput {
       return {
         kind: measure.kind,
         levels: [...measure.levels],
+        ...(measure.at === undefined ? {} : { at: measure.at }),
         size: measure.size.name,
         grade: measure.grade.name,
         innerNuts: measure.innerNuts,

@@ -1,4 +1,5 @@
-import type { Level, MeasureCase, NodeCase } from "@/lib/calc/node";
+import { areFacing } from "@/lib/calc";
+import type { Level, MeasureCase, MeasureSides, NodeCase } from "@/lib/calc/node";
 import type { Shape } from "./design-space";
 import type { Stock, StockPlate } from "./stock";
 
@@ -49,6 +50,16 @@ export function partialLengthsMm(node: NodeCase): readonly number[] {
   return [roundUp(clear / 2), roundUp((3 * clear) / 4)];
 }
 
+/** Where the beams' flanges differ in level, one of them may do with a pair of its own. */
+function sidesWorthTrying(
+  node: NodeCase,
+  levels: readonly Level[],
+): readonly { readonly at?: MeasureSides }[] {
+  const [first, second] = node.joints;
+  const isApart = first && second && levels.some((level) => !areFacing(first, second, level));
+  return isApart ? [{ at: "left" }, { at: "right" }, {}] : [{}];
+}
+
 /** Every stock shape of a pair of transverse stiffeners at the given levels, alike at each level. */
 export function stiffenerSpace(
   node: NodeCase,
@@ -68,17 +79,19 @@ export function stiffenerSpace(
         .map((widthMm) => ({ length, thicknessMm, steel, widthMm })),
     ),
   );
-  return shapes.map((shape) => ({
-    ladders: [throats.length, throats.length],
-    build: ([flange, web]: readonly number[]): readonly MeasureCase[] => [
-      {
-        kind: "transverse-stiffeners",
-        levels,
-        ...shape,
-        clipMm,
-        flangeWeld: { kind: "fillet", throatMm: throats[flange ?? 0] ?? LEAST_THROAT_MM },
-        webWeld: { kind: "fillet", throatMm: throats[web ?? 0] ?? LEAST_THROAT_MM },
-      },
-    ],
-  }));
+  return sidesWorthTrying(node, levels)
+    .flatMap((at) => shapes.map((shape) => ({ ...at, ...shape })))
+    .map((shape) => ({
+      ladders: [throats.length, throats.length],
+      build: ([flange, web]: readonly number[]): readonly MeasureCase[] => [
+        {
+          kind: "transverse-stiffeners",
+          levels,
+          ...shape,
+          clipMm,
+          flangeWeld: { kind: "fillet", throatMm: throats[flange ?? 0] ?? LEAST_THROAT_MM },
+          webWeld: { kind: "fillet", throatMm: throats[web ?? 0] ?? LEAST_THROAT_MM },
+        },
+      ],
+    }));
 }

@@ -28,6 +28,9 @@ const levels = fc
     which === "both" ? ["top", "bottom"] : which === "top" ? ["top"] : ["bottom"],
   );
 
+/** Which beam's flanges, where they differ in level. */
+const at = fc.constantFrom({}, { at: "left" as const }, { at: "right" as const });
+
 const measureOf = (steel: string): fc.Arbitrary<MeasureInput[]> =>
   fc.oneof(
     fc.constant<MeasureInput[]>([]),
@@ -43,7 +46,7 @@ const measureOf = (steel: string): fc.Arbitrary<MeasureInput[]> =>
         flangeWeld: fc.constantFrom(5, 8, "butt" as const),
         webWeld: fc.constantFrom(4, 6),
       })
-      .map((measure): MeasureInput[] => [measure]),
+      .chain((measure) => at.map((where): MeasureInput[] => [{ ...measure, ...where }])),
     fc
       .record({
         kind: fc.constant("web-plates" as const),
@@ -63,7 +66,7 @@ const measureOf = (steel: string): fc.Arbitrary<MeasureInput[]> =>
         grade: fc.constantFrom("8.8", "10.9"),
         innerNuts: fc.constant(true),
       })
-      .map((measure): MeasureInput[] => [measure]),
+      .chain((measure) => at.map((where): MeasureInput[] => [{ ...measure, ...where }])),
     fc
       .constantFrom("HE 360 M", "HE 400 B")
       .map((section): MeasureInput[] => [{ kind: "heavier-column", section }]),
@@ -106,6 +109,22 @@ const sideOf = (
   };
 };
 
+/** The right beam like the left one, or of another depth or level: tops or bottoms in line, a step, far apart. */
+const rightBeam = (beam: string) =>
+  fc.oneof(
+    { weight: 3, arbitrary: fc.constant({ beam, levelOffset: 0 }) },
+    {
+      weight: 2,
+      arbitrary: fc
+        .constantFrom(...beams)
+        .chain((other) =>
+          fc
+            .constantFrom(0, 30, 60, 150, -150, 700, (depths[beam] ?? 0) - (depths[other] ?? 0))
+            .map((levelOffset) => ({ beam: other, levelOffset })),
+        ),
+    },
+  );
+
 const moment = fc.integer({ min: -250, max: 250 });
 
 /** A valid document with one to three given options; about a fifth are welded, half are one-sided. */
@@ -126,35 +145,38 @@ export const randomNodeDocument: fc.Arbitrary<NodeDocument> = fc
     }),
   })
   .chain((pick) =>
-    fc.array(measureOf(pick.steel), { minLength: 1, maxLength: 3 }).map((measures): NodeDocument => {
-      const side = sideOf(pick.beam, pick.steel, pick.isWelded, pick.thickness, pick.size, pick.gauge);
-      const actions = (value: number) => ({ moment: value, axialForce: 0, shear: 80 });
-      return {
-        reference: "random",
-        basis: "EN 1993-1-8:2005",
-        partialFactors: { gammaM0: 1, gammaM1: 1, gammaM2: 1.25 },
-        column: {
-          section: pick.column,
-          steel: pick.steel,
-          storeyHeight: 3600,
-          ...(pick.isTop ? { endDistanceAbove: 120 } : {}),
-        },
-        left: side,
-        ...(pick.isTwoSided ? { right: side } : {}),
-        loadCases: pick.cases.map(({ left, right, axial }, index) => ({
-          name: `Case ${index + 1}`,
-          left: actions(left),
-          ...(pick.isTwoSided ? { right: actions(right) } : {}),
-          column: { axialForce: axial, momentAbove: 20, momentBelow: -20, shearAbove: 5, shearBelow: -5 },
-        })),
-        frame: { bracing: "unbraced" },
-        target: { utilisation: 1, stiffness: "any" },
-        quantity: 4,
-        options: measures.map((given, index) => ({
-          key: `o${index}`,
-          name: `Option ${index}`,
-          measures: given,
-        })),
-      };
-    }),
+    fc
+      .tuple(rightBeam(pick.beam), fc.array(measureOf(pick.steel), { minLength: 1, maxLength: 3 }))
+      .map(([other, measures]): NodeDocument => {
+        const right = sideOf(other.beam, pick.steel, pick.isWelded, pick.thickness, pick.size, pick.gauge);
+        const side = sideOf(pick.beam, pick.steel, pick.isWelded, pick.thickness, pick.size, pick.gauge);
+        const actions = (value: number) => ({ moment: value, axialForce: 0, shear: 80 });
+        return {
+          reference: "random",
+          basis: "EN 1993-1-8:2005",
+          partialFactors: { gammaM0: 1, gammaM1: 1, gammaM2: 1.25 },
+          column: {
+            section: pick.column,
+            steel: pick.steel,
+            storeyHeight: 3600,
+            ...(pick.isTop ? { endDistanceAbove: 120 } : {}),
+          },
+          left: side,
+          ...(pick.isTwoSided ? { right: { ...right, levelOffset: other.levelOffset } } : {}),
+          loadCases: pick.cases.map(({ left, right, axial }, index) => ({
+            name: `Case ${index + 1}`,
+            left: actions(left),
+            ...(pick.isTwoSided ? { right: actions(right) } : {}),
+            column: { axialForce: axial, momentAbove: 20, momentBelow: -20, shearAbove: 5, shearBelow: -5 },
+          })),
+          frame: { bracing: "unbraced" },
+          target: { utilisation: 1, stiffness: "any" },
+          quantity: 4,
+          options: measures.map((given, index) => ({
+            key: `o${index}`,
+            name: `Option ${index}`,
+            measures: given,
+          })),
+        };
+      }),
   );

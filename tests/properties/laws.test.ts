@@ -31,12 +31,22 @@ const expectFinite = (options: readonly OptionDocument[]): void => {
     if (!Number.isFinite(number)) throw new Error("a number is not finite");
 };
 
+const otherSide = { left: "right", right: "left", both: "both" } as const;
+
+const mirroredMeasure = (measure: MeasureInput): MeasureInput =>
+  "at" in measure && measure.at !== undefined ? { ...measure, at: otherSide[measure.at] } : measure;
+
 const mirrored = (document: NodeDocument): NodeDocument => {
   const { left, right, ...rest } = document;
+  const levelOffset = -(right?.levelOffset ?? 0);
   return {
     ...rest,
     ...(right ? { left: { beam: right.beam, connection: right.connection } } : {}),
-    ...(left ? { right: left } : {}),
+    ...(left ? { right: { ...left, levelOffset } } : {}),
+    options: document.options?.map((option) => ({
+      ...option,
+      measures: option.measures.map(mirroredMeasure),
+    })),
     loadCases: document.loadCases.map(({ name, left: a, right: b, column }) => ({
       name,
       ...(b ? { left: b } : {}),
@@ -79,6 +89,12 @@ const turnedSide = <S extends NonNullable<NodeDocument["left"]>>(side: S): S => 
   };
 };
 
+/** How far the right beam's bottom stands above the left one's: its step once both are upside down. */
+const turnedOffset = ({ left, right }: NodeDocument): number =>
+  left && right
+    ? depthOfBeam(left.beam.section) - depthOfBeam(right.beam.section) - (right.levelOffset ?? 0)
+    : 0;
+
 const depthOfBeam = (section: unknown): number => {
   const row = shop.catalog.sections.find((candidate) => candidate.designation === section);
   if (!row) throw new Error("the random nodes name beams of the catalogue");
@@ -101,7 +117,9 @@ const upsideDown = (document: NodeDocument): NodeDocument => {
       ...(endDistanceAbove === undefined ? {} : { endDistanceBelow: endDistanceAbove }),
     },
     ...(document.left ? { left: turnedSide(document.left) } : {}),
-    ...(document.right ? { right: turnedSide(document.right) } : {}),
+    ...(document.right
+      ? { right: { ...turnedSide(document.right), levelOffset: turnedOffset(document) } }
+      : {}),
     loadCases: document.loadCases.map(({ name, left, right, column: forces }) => ({
       name,
       ...(left ? { left: turnedActions(left) } : {}),

@@ -9,6 +9,7 @@ import { defineFormula } from "../trace/define-formula";
 import { defineSeries, sumText } from "../trace/define-series";
 import type { Trace } from "../trace/trace";
 import { traced, type Traced } from "../trace/traced";
+import { rowEnds } from "./column-flange";
 import type { ColumnPanel } from "./column-panel";
 import type { BoltRow, EndPlateView } from "./connection-view";
 
@@ -110,6 +111,7 @@ function rowShear(
   const { plate } = view.connection;
   const { size, grade, reduction } = row.fastener;
   const beamDepth = view.joint.beam.section.depthMm;
+  const ends = rowEnds(view, row);
   const mark = trace?.mark();
   const shearN = boltShearN(trace, {
     alphaV: grade.alphaV,
@@ -132,10 +134,7 @@ function rowShear(
   const flangeN = bearing(trace, node, row, {
     pitchMm,
     gaugeMm: view.gaugeMm,
-    endMm: Math.min(
-      (node.column.endDistanceAboveMm ?? NO_END_MM) + row.belowTopMm,
-      (node.column.endDistanceBelowMm ?? NO_END_MM) + beamDepth - row.belowTopMm,
-    ),
+    endMm: Math.min(ends.outwardMm, ends.inwardMm, NO_END_MM),
     edgeMm: (panel.section.widthMm - view.gaugeMm) / 2,
     thicknessMm: panel.section.flangeThicknessMm,
     ultimateMpa: panel.steel.ultimateMpa,

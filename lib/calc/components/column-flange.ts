@@ -30,7 +30,8 @@ interface RowEnds {
   readonly inwardMm: number;
 }
 
-function rowEnds(view: EndPlateView, row: BoltRow): RowEnds {
+/** From a row to the column's ends, mm. */
+export function rowEnds(view: EndPlateView, row: BoltRow): RowEnds {
   const { depthMm, flangeThicknessMm } = view.joint.beam.section;
   return {
     outwardMm: view.columnBeyondTensionMm - flangeThicknessMm / 2 + row.fromFaceMm,

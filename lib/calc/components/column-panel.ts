@@ -6,9 +6,10 @@ import {
   stiffenedPanelShearN,
 } from "../clauses/en1993-1-8-2005/column-web";
 import { tStubMomentNmm } from "../clauses/en1993-1-8-2005/t-stub";
+import { isOnePanel } from "../mechanics/panel-levels";
 import { sectionProperties, type SectionProperties } from "../mechanics/section-properties";
 import type { PanelDesign } from "../measures/panel-design";
-import type { ISection, NodeCase, Steel } from "../node";
+import type { ISection, JointCase, NodeCase, Side, Steel } from "../node";
 import type { Trace } from "../trace/trace";
 import { traced, type Traced } from "../trace/traced";
 
@@ -20,7 +21,8 @@ export interface ColumnPanel {
   readonly epsilon: number;
   /** With a web plate as enlarged by 6.2.6.1(6). */
   readonly shearArea: Traced;
-  readonly shear: Traced;
+  /** V_wp,Rd on each side: the frame of flanges and stiffeners is that of the side's own beam. */
+  readonly shear: Readonly<Record<Side, Traced>>;
   /** 1.5 or 2 times the web under web plates, 6.2.6.2(6). */
   readonly compressionWebMm: number;
   /** 1.4 or 1.3 (fillet), 1.5 or 2 (butt) times the web under web plates, 6.2.6.3(7). */
@@ -62,6 +64,7 @@ function shearResistance(
     readonly webDepthMm: number;
     readonly epsilon: number;
   },
+  joint: JointCase | undefined,
 ): number {
   const { section, steel } = design.column;
   const { gammaM0 } = node.partialFactors;
@@ -78,9 +81,9 @@ function shearResistance(
     },
     0,
   );
-  const { top, bottom } = design.stiffeners;
-  const first = node.joints[0];
-  if (!top || !bottom || top.length !== "full" || bottom.length !== "full" || !first) return plain;
+  if (!joint) return plain;
+  const { top, bottom } = design.stiffeners[joint.side];
+  if (!top || !bottom || top.length !== "full" || bottom.length !== "full") return plain;
   const frameMark = trace?.mark();
   const flangeMomentNmm = tStubMomentNmm(trace, {
     lengthMm: section.widthMm,
@@ -96,7 +99,7 @@ function shearResistance(
     yieldMpa: weaker.steel.yieldMpa,
     gammaM0,
   });
-  const { depthMm, flangeThicknessMm } = first.beam.section;
+  const { depthMm, flangeThicknessMm } = joint.beam.section;
   const frame = panelFrameShearN(
     trace,
     { flangeMomentNmm, stiffenerMomentNmm, spacingMm: depthMm - flangeThicknessMm },
@@ -121,21 +124,23 @@ export function columnPanelOf(node: NodeCase, design: PanelDesign, steps: boolea
         )
       : own;
   });
-  const shear = traced(steps, (trace) => {
-    trace?.include(shearArea.step);
-    return shearResistance(trace, node, design, {
-      shearAreaMm2: shearArea.value,
-      webDepthMm: properties.webDepthMm,
-      epsilon,
+  const shearOf = (joint: JointCase | undefined): Traced =>
+    traced(steps, (trace) => {
+      trace?.include(shearArea.step);
+      const numbers = { shearAreaMm2: shearArea.value, webDepthMm: properties.webDepthMm, epsilon };
+      return shearResistance(trace, node, design, numbers, joint);
     });
-  });
+  const [first, second] = node.joints;
+  const own = shearOf(first);
+  const isAlike = !second || isOnePanel(node.joints);
+  const other = isAlike ? own : shearOf(second);
   return {
     section,
     steel,
     properties,
     epsilon,
     shearArea,
-    shear,
+    shear: first?.side === "right" ? { left: other, right: own } : { left: own, right: other },
     compressionWebMm: (plates ? (plates.sides === 1 ? 1.5 : 2) : 1) * section.webThicknessMm,
     tensionWebMm: tensionWebMm(design),
   };

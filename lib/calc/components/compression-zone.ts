@@ -7,6 +7,7 @@ import {
 import * as stiffenerRules from "../clauses/en1993-1-5-2006/stiffeners";
 import * as web from "../clauses/en1993-1-8-2005/column-web";
 import { webCompressionSpringMm } from "../clauses/en1993-1-8-2005/stiffness";
+import { alongSlopeN } from "../mechanics/sloped-plates";
 import { relievedN } from "../mechanics/through-bar-formulas";
 import { weldLegMm, type TransverseStiffeners } from "../measures/panel-design";
 import type { NodeCase } from "../node";
@@ -78,8 +79,10 @@ function cruciformBuckling(
   node: NodeCase,
   panel: ColumnPanel,
   stiffener: TransverseStiffeners,
-  columnBeyondMm: number,
+  view: JointView,
 ): number {
+  const columnBeyondMm = view.columnBeyondCompressionMm;
+  const slopeCosine = view.compressionSlopeCosine;
   const yieldMpa = Math.min(stiffener.steel.yieldMpa, panel.steel.yieldMpa);
   const { webThicknessMm, depthMm, flangeThicknessMm } = panel.section;
   const epsilon = epsilonOf(trace, { yieldMpa });
@@ -97,16 +100,17 @@ function cruciformBuckling(
   const areaMm2 = stiffenerRules.cruciformAreaMm2(trace, pair);
   const inertiaMm4 = stiffenerRules.cruciformInertiaMm4(trace, pair);
   const slenderness = strutSlenderness(trace, {
-    bucklingLengthMm: depthMm - 2 * flangeThicknessMm,
+    bucklingLengthMm: (depthMm - 2 * flangeThicknessMm) / slopeCosine,
     gyrationMm: Math.sqrt(inertiaMm4 / areaMm2),
     epsilon,
   });
   const reduction = curveCReduction(trace, { slenderness });
-  return stiffenerRules.cruciformBucklingN(
+  const strutN = stiffenerRules.cruciformBucklingN(
     trace,
     { reduction, areaMm2, yieldMpa, gammaM1: node.partialFactors.gammaM1 },
     0,
   );
+  return alongSlopeN(trace, strutN, slopeCosine);
 }
 
 function stiffenedZoneOf(
@@ -126,7 +130,7 @@ function stiffenedZoneOf(
     stiffener,
     crushing: traced(steps, (trace) => {
       trace?.include(breadth.step);
-      return stiffenerRules.stiffenerCrushingN(
+      const straightN = stiffenerRules.stiffenerCrushingN(
         trace,
         {
           netAreaMm2: stiffenerRules.stiffenerNetAreaMm2(trace, { widthMm, clipMm, thicknessMm }),
@@ -138,12 +142,11 @@ function stiffenedZoneOf(
         },
         0,
       );
+      return alongSlopeN(trace, straightN, view.compressionSlopeCosine);
     }),
     buckling:
       stiffener.length === "full"
-        ? traced(steps, (trace) =>
-            cruciformBuckling(trace, node, panel, stiffener, view.columnBeyondCompressionMm),
-          )
+        ? traced(steps, (trace) => cruciformBuckling(trace, node, panel, stiffener, view))
         : null,
     plateShare: (netAreaMm2 * yieldMpa) / (netAreaMm2 * yieldMpa + webPart),
   };

@@ -1,4 +1,5 @@
 import { boltTensionN } from "../clauses/en1993-1-8-2005/fasteners";
+import { columnBeyondMm } from "../mechanics/panel-levels";
 import type { PanelDesign, ThroughBars, TransverseStiffeners } from "../measures/panel-design";
 import type {
   EndPlateConnection,
@@ -28,6 +29,9 @@ export interface JointView {
   /** The stiffener pair in line with each flange. */
   readonly tensionStiffener: TransverseStiffeners | null;
   readonly compressionStiffener: TransverseStiffeners | null;
+  /** Cosine of the slope of the pair in line with each flange; 1 where it is level. */
+  readonly tensionSlopeCosine: number;
+  readonly compressionSlopeCosine: number;
 }
 
 /** What holds one bolt row together: its bolts, or the threaded bars that replace them. */
@@ -87,23 +91,23 @@ export function jointViewOf(
   joint: JointCase,
   tensionLevel: Level,
 ): JointView {
-  const { endDistanceAboveMm, endDistanceBelowMm } = node.column;
   const half = joint.beam.section.flangeThicknessMm / 2;
-  const beyond = {
-    top: endDistanceAboveMm === null ? Infinity : endDistanceAboveMm + half,
-    bottom: endDistanceBelowMm === null ? Infinity : endDistanceBelowMm + half,
-  };
+  const beyond = columnBeyondMm(node, joint);
   const compressionLevel = other(tensionLevel);
+  const slopeAt = (at: Level): number =>
+    design.pairs.find(({ level, sides }) => level === at && sides.includes(joint.side))?.slopeCosine ?? 1;
   return {
     joint,
     tensionLevel,
     compressionLevel,
     tensionWeld: flangeWeld(joint, tensionLevel),
     compressionWeld: flangeWeld(joint, compressionLevel),
-    columnBeyondTensionMm: beyond[tensionLevel],
-    columnBeyondCompressionMm: beyond[compressionLevel],
-    tensionStiffener: design.stiffeners[tensionLevel],
-    compressionStiffener: design.stiffeners[compressionLevel],
+    columnBeyondTensionMm: beyond[tensionLevel] + half,
+    columnBeyondCompressionMm: beyond[compressionLevel] + half,
+    tensionStiffener: design.stiffeners[joint.side][tensionLevel],
+    compressionStiffener: design.stiffeners[joint.side][compressionLevel],
+    tensionSlopeCosine: slopeAt(tensionLevel),
+    compressionSlopeCosine: slopeAt(compressionLevel),
   };
 }
 
@@ -147,10 +151,11 @@ export function endPlateViewOf(
 ): EndPlateView {
   const view = jointViewOf(node, design, joint, tensionLevel);
   const { depthMm, flangeThicknessMm } = joint.beam.section;
+  const { top, bottom } = design.bars[joint.side];
   const fasteners = {
     bolts: fastenerOf(node, connection, null, steps),
-    top: design.bars.top ? fastenerOf(node, connection, design.bars.top, steps) : null,
-    bottom: design.bars.bottom ? fastenerOf(node, connection, design.bars.bottom, steps) : null,
+    top: top ? fastenerOf(node, connection, top, steps) : null,
+    bottom: bottom ? fastenerOf(node, connection, bottom, steps) : null,
   };
   const rows = connection.bolts.rowsMm
     .map((belowTopMm, index): BoltRow => {
@@ -186,6 +191,8 @@ export function endPlateViewOf(
     columnBeyondCompressionMm: view.columnBeyondCompressionMm,
     tensionStiffener: view.tensionStiffener,
     compressionStiffener: view.compressionStiffener,
+    tensionSlopeCosine: view.tensionSlopeCosine,
+    compressionSlopeCosine: view.compressionSlopeCosine,
     connection,
     gaugeMm: connection.bolts.gaugeMm,
     extensionTensionMm: tensionLevel === "top" ? extensionTopMm : extensionBottomMm,

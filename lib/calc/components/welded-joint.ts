@@ -8,6 +8,7 @@ import {
 } from "../clauses/en1993-1-8-2005/column-web";
 import { webTensionSpringMm } from "../clauses/en1993-1-8-2005/stiffness";
 import { leastFlangeBreadthMm, weldedFlangeBreadthMm } from "../clauses/en1993-1-8-2005/welds";
+import { alongSlopeN } from "../mechanics/sloped-plates";
 import { weldLegMm, type TransverseStiffeners } from "../measures/panel-design";
 import type { NodeCase, WeldedConnection } from "../node";
 import { defineFormula } from "../trace/define-formula";
@@ -159,7 +160,7 @@ export function weldedJointOf(
     stiffenedTension: stiffener
       ? traced(steps, (trace) => {
           trace?.include(tensionBreadth.step);
-          return stiffenedTensionN(
+          const straightN = stiffenedTensionN(
             trace,
             {
               netAreaMm2,
@@ -171,6 +172,7 @@ export function weldedJointOf(
             },
             0,
           );
+          return alongSlopeN(trace, straightN, view.tensionSlopeCosine);
         })
       : null,
     plateShare: stiffener ? (netAreaMm2 * stiffenerYieldMpa) / (netAreaMm2 * stiffenerYieldMpa + webPart) : 0,

@@ -1,7 +1,8 @@
 import type { MeasureCase, NodeCase } from "../node";
 import { OutsideScope } from "../outcome";
 import { applyHeavierColumn } from "./heavier-column";
-import type { PanelDesign } from "./panel-design";
+import { nowhere, type PanelDesign } from "./panel-design";
+import { sharedWhereFacing, stiffenerPairsOf } from "./stiffener-pairs";
 import { applyThroughBars } from "./through-bars";
 import { applyTransverseStiffeners } from "./transverse-stiffeners";
 import { applyWebPlates } from "./web-plates";
@@ -31,10 +32,13 @@ function refuseRepeats(measures: readonly MeasureCase[]): void {
   const named = new Set<string>();
   for (const measure of measures) {
     const levels = "levels" in measure ? measure.levels : ["panel"];
+    const at = "at" in measure ? (measure.at ?? "both") : "both";
     for (const level of levels) {
-      const key = `${measure.kind} ${level}`;
-      if (named.has(key)) throw new OutsideScope("the same measure is given twice at one level");
-      named.add(key);
+      for (const side of at === "both" ? ["left", "right"] : [at]) {
+        const key = `${measure.kind} ${level} ${side}`;
+        if (named.has(key)) throw new OutsideScope("the same measure is given twice at one level");
+        named.add(key);
+      }
     }
   }
 }
@@ -44,13 +48,14 @@ export function designOf(node: NodeCase, measures: readonly MeasureCase[]): Pane
   refuseRepeats(measures);
   const bare: PanelDesign = {
     column: node.column,
-    stiffeners: { top: null, bottom: null },
+    stiffeners: nowhere(),
+    pairs: [],
     webPlates: null,
-    bars: { top: null, bottom: null },
+    bars: nowhere(),
   };
-  const design = measures.reduce(apply, bare);
-  if (design.webPlates && (design.stiffeners.top || design.stiffeners.bottom)) {
-    notYet("web plates together with transverse stiffeners");
-  }
-  return design;
+  const applied = measures.reduce(apply, bare);
+  const stiffeners = sharedWhereFacing(node.joints, applied.stiffeners);
+  const pairs = stiffenerPairsOf(applied.column.section, node.joints, stiffeners);
+  if (applied.webPlates && pairs.length > 0) notYet("web plates together with transverse stiffeners");
+  return { ...applied, stiffeners, pairs, bars: sharedWhereFacing(node.joints, applied.bars) };
 }

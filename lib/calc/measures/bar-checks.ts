@@ -3,11 +3,13 @@ import { punchingN } from "../clauses/en1993-1-8-2005/fasteners";
 import { checkOf } from "../components/check";
 import type { ColumnPanel } from "../components/column-panel";
 import type { BoltRow } from "../components/connection-view";
+import { areFacing } from "../mechanics/panel-levels";
 import * as bar from "../mechanics/through-bar-formulas";
 import { defineFormula } from "../trace/define-formula";
 import type { NodeCase, Side } from "../node";
 import type { ComponentCheck } from "../result";
 import { isBoltedCase, type BoltedSideCase, type SideCase } from "../side-case";
+import { SAME_HEIGHT_MM } from "./through-bars";
 import { traced, type Traced } from "../trace/traced";
 
 const CLAUSE = "through-bars: mechanics, no clause";
@@ -45,12 +47,18 @@ interface FarSide {
 }
 
 function farSideOf(own: BoltedSideCase, index: number, far: SideCase | undefined): FarSide {
-  if (!far || !isBoltedCase(far)) return { forceN: 0, isCompression: false };
-  const row = own.model.joint.view.tensionRows[index];
-  if (far.model.joint.view.tensionLevel !== own.model.joint.view.tensionLevel) {
+  const nothing = { forceN: 0, isCompression: false };
+  if (!far || !isBoltedCase(far)) return nothing;
+  const { joint, tensionLevel, tensionRows } = own.model.joint.view;
+  const farView = far.model.joint.view;
+  if (!areFacing(joint, farView.joint, tensionLevel)) return nothing;
+  if (farView.tensionLevel !== tensionLevel) {
     return { forceN: -Math.max(far.compressionDemandN, 0), isCompression: far.compressionDemandN > 0 };
   }
-  const place = far.model.joint.view.tensionRows.findIndex((candidate) => candidate.row === row?.row);
+  const heightMm = joint.levelOffsetMm + (tensionRows[index]?.belowTopMm ?? NaN);
+  const place = farView.tensionRows.findIndex(
+    (row) => Math.abs(farView.joint.levelOffsetMm + row.belowTopMm - heightMm) < SAME_HEIGHT_MM,
+  );
   return { forceN: place < 0 ? 0 : (far.rowDemandsN[place] ?? 0), isCompression: false };
 }
 

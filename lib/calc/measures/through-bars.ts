@@ -9,12 +9,13 @@ import { flangeSpringMm, webTensionSpringMm } from "../clauses/en1993-1-8-2005/s
 import type { BoltedJoint } from "../components/bolted-joint";
 import type { ColumnPanel } from "../components/column-panel";
 import { levelOfRow, type BoltRow } from "../components/connection-view";
+import { areFacing, columnBeyondMm } from "../mechanics/panel-levels";
 import * as bar from "../mechanics/through-bar-formulas";
 import type { EndPlateConnection, JointCase, Level, NodeCase } from "../node";
 import { OutsideScope } from "../outcome";
 import type { Trace } from "../trace/trace";
 import { traced, type Traced } from "../trace/traced";
-import type { ApplyMeasure, PanelDesign, ThroughBars } from "./panel-design";
+import { placedAt, type ApplyMeasure, type PanelDesign, type ThroughBars } from "./panel-design";
 
 /** Threaded bars in place of the bolts at the named levels. @throws OutsideScope without inner nuts. */
 export const applyThroughBars: ApplyMeasure<ThroughBars> = (design, measure) => {
@@ -23,9 +24,7 @@ export const applyThroughBars: ApplyMeasure<ThroughBars> = (design, measure) => 
       "bars without inner nuts leave the compression zone without help and the joint softer; they are not evaluated",
     );
   }
-  const bars = { ...design.bars };
-  for (const level of measure.levels) bars[level] = measure;
-  return { ...design, bars };
+  return { ...design, bars: placedAt(design.bars, measure.at ?? "both", measure.levels, measure) };
 };
 
 const refuse = (bound: string): never => {
@@ -54,6 +53,12 @@ function endPlateOfJoint(joint: JointCase): EndPlateConnection {
   return connection.kind === "end-plate" ? connection : refuse("bolted end plates only");
 }
 
+/** Heights of a joint's rows at one of its levels, mm below the top of the left beam. */
+const rowHeightsMm = (joint: JointCase, connection: EndPlateConnection, level: Level): readonly number[] =>
+  connection.bolts.rowsMm
+    .filter((row) => levelOfRow(row, joint.beam.section.depthMm) === level)
+    .map((row) => joint.levelOffsetMm + row);
+
 function refuseOutsideRowBounds(
   node: NodeCase,
   panel: ColumnPanel,
@@ -65,44 +70,61 @@ function refuseOutsideRowBounds(
   if (perRow !== 2) refuse(`two bars a row (${perRow})`);
   const { thicknessMm } = connection.plate;
   if (thicknessMm < 12 || thicknessMm > 30) refuse(`end plate 12 to 30 mm (${thicknessMm} mm)`);
-  const beamDepth = joint.beam.section.depthMm;
-  const rows = connection.bolts.rowsMm.filter((row) => levelOfRow(row, beamDepth) === level);
+  const bottom = joint.levelOffsetMm + joint.beam.section.depthMm;
+  const rows = rowHeightsMm(joint, connection, level);
   if (rows.length === 0)
     throw new OutsideScope(`there is no bolt row at the ${level} level for bars to replace`);
   const needed = 1.6 * panel.section.depthMm;
+  const beyond = columnBeyondMm(node, joint);
   for (const row of rows) {
-    const above = node.column.endDistanceAboveMm;
-    const below = node.column.endDistanceBelowMm;
-    if ((above !== null && above + row < needed) || (below !== null && below + beamDepth - row < needed)) {
+    if (beyond.top + row - joint.levelOffsetMm < needed || beyond.bottom + bottom - row < needed) {
       refuse("rows at least 1.6 column depths from the column's end");
     }
   }
 }
 
+/** Bars of one beam that reach the column's other flange must meet rows of their own there, or nothing at all. */
+function refuseBlockedFarSide(
+  own: JointCase,
+  ownPlate: EndPlateConnection,
+  far: JointCase,
+  level: Level,
+  bars: ThroughBars,
+): void {
+  const farPlate = endPlateOfJoint(far);
+  const rows = rowHeightsMm(own, ownPlate, level);
+  const farRows = farPlate.bolts.rowsMm.map((row) => far.levelOffsetMm + row);
+  const top = far.levelOffsetMm - farPlate.plate.extensionTopMm;
+  const bottom = far.levelOffsetMm + far.beam.section.depthMm + farPlate.plate.extensionBottomMm;
+  const half = bars.size.washerDiameterMm / 2;
+  const isFree = rows.every((row) => row + half <= top || row - half >= bottom);
+  if (isFree && !areFacing(own, far, level)) return;
+  const facing = rowHeightsMm(far, farPlate, level);
+  const isSame =
+    areFacing(own, far, level) &&
+    ownPlate.bolts.gaugeMm === farPlate.bolts.gaugeMm &&
+    rows.length === facing.length &&
+    rows.every((row) => farRows.some((other) => Math.abs(row - other) < SAME_HEIGHT_MM));
+  if (!isSame) refuse("the same rows and gauge left and right");
+}
+
+/** Holes drilled through both flanges at once are at one height. */
+export const SAME_HEIGHT_MM = 0.5;
+
 /** @throws OutsideScope naming the bound that a level of bars breaks. */
 export function refuseOutsideBarBounds(node: NodeCase, design: PanelDesign, panel: ColumnPanel): void {
-  for (const level of ["top", "bottom"] as const) {
-    const bars = design.bars[level];
-    if (!bars) continue;
-    if (design.stiffeners[level]) refuse("no bars at the level of a stiffener");
-    if (design.webPlates) refuse("no web plate beside bars");
-    const connections = node.joints.map(endPlateOfJoint);
-    const first = connections[0];
-    if (!first) continue;
-    refuseOutsideColumnBounds(panel, first.bolts.gaugeMm, bars);
-    node.joints.forEach((joint, index) => {
-      const connection = connections[index] ?? first;
+  for (const joint of node.joints) {
+    for (const level of ["top", "bottom"] as const) {
+      const bars = design.bars[joint.side][level];
+      if (!bars) continue;
+      if (design.stiffeners[joint.side][level]) refuse("no bars at the level of a stiffener");
+      if (design.webPlates) refuse("no web plate beside bars");
+      const connection = endPlateOfJoint(joint);
+      refuseOutsideColumnBounds(panel, connection.bolts.gaugeMm, bars);
       refuseOutsideRowBounds(node, panel, connection, joint, level);
-      const sameRows = (other: EndPlateConnection, depth: number): string =>
-        other.bolts.rowsMm.filter((row) => levelOfRow(row, depth) === level).join(" ");
-      if (
-        connection.bolts.gaugeMm !== first.bolts.gaugeMm ||
-        sameRows(connection, joint.beam.section.depthMm) !==
-          sameRows(first, node.joints[0]?.beam.section.depthMm ?? 0)
-      ) {
-        refuse("the same rows and gauge left and right");
-      }
-    });
+      for (const far of node.joints)
+        if (far !== joint) refuseBlockedFarSide(joint, connection, far, level, bars);
+    }
   }
 }
 

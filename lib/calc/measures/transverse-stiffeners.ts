@@ -14,18 +14,20 @@ import {
   tensionStiffenerPlainN,
   tensionStiffenerSharedN,
 } from "../clauses/en1993-1-5-2006/tension-stiffeners";
-import type { Level, NodeCase, Side } from "../node";
+import { flangeLevelMm } from "../mechanics/panel-levels";
+import { forceAlongN } from "../mechanics/sloped-plates";
+import type { JointCase, NodeCase, Side } from "../node";
 import type { ComponentCheck } from "../result";
 import { isBoltedCase, type BoltedSideCase, type SideCase } from "../side-case";
 import type { Trace } from "../trace/trace";
 import { traced, type Traced } from "../trace/traced";
-import type { ApplyMeasure, TransverseStiffeners } from "./panel-design";
+import { placedAt, type ApplyMeasure, type TransverseStiffeners } from "./panel-design";
+import type { StiffenerPair } from "./stiffener-pairs";
 
-export const applyTransverseStiffeners: ApplyMeasure<TransverseStiffeners> = (design, measure) => {
-  const stiffeners = { ...design.stiffeners };
-  for (const level of measure.levels) stiffeners[level] = measure;
-  return { ...design, stiffeners };
-};
+export const applyTransverseStiffeners: ApplyMeasure<TransverseStiffeners> = (design, measure) => ({
+  ...design,
+  stiffeners: placedAt(design.stiffeners, measure.at ?? "both", measure.levels, measure),
+});
 
 const netAreaMm2 = (trace: Trace | null, stiffener: TransverseStiffeners): number =>
   stiffenerNetAreaMm2(trace, {
@@ -40,35 +42,38 @@ const depthOf = (panel: ColumnPanel, stiffener: TransverseStiffeners): number =>
     ? panel.section.depthMm - 2 * panel.section.flangeThicknessMm
     : stiffener.length;
 
-/** Detailing of the pair at one level. Every rule names where it comes from. */
+/** Height of the pair behind one joint's flange, mm below the top of the left beam. */
+function pairLevelMm(pair: StiffenerPair, joint: JointCase, models: readonly JointModel[]): number {
+  const served = pair.sides.includes(joint.side)
+    ? joint
+    : models.find((model) => pair.sides.includes(model.joint.view.joint.side))?.joint.view.joint;
+  return flangeLevelMm(served ?? joint, pair.level);
+}
+
+/** Detailing of one pair. Every rule names where it comes from. */
 export function stiffenerDetailing(
   panel: ColumnPanel,
-  stiffener: TransverseStiffeners,
-  level: Level,
+  pair: StiffenerPair,
   models: readonly JointModel[],
 ): ComponentCheck[] {
-  const side = models[0]?.joint.view.joint.side ?? "left";
+  const { stiffener, level } = pair;
+  const side = pair.sides[0] ?? "left";
   const head = { side, level };
   const { section } = panel;
   const epsilon = epsilonOf(null, { yieldMpa: stiffener.steel.yieldMpa });
   const throats = [stiffener.flangeWeld, stiffener.webWeld].flatMap((weld) =>
     weld.kind === "fillet" ? [weld.throatMm] : [],
   );
-  const nutRoom = models.flatMap((model) =>
-    isBolted(model)
-      ? model.joint.view.rows.map((row) => {
-          const flangeMiddle =
-            level === "top"
-              ? model.joint.view.joint.beam.section.flangeThicknessMm / 2
-              : model.joint.view.joint.beam.section.depthMm -
-                model.joint.view.joint.beam.section.flangeThicknessMm / 2;
-          return {
-            face: Math.abs(row.belowTopMm - flangeMiddle) - stiffener.thicknessMm / 2,
-            nut: row.fastener.size.acrossPointsMm / 2,
-          };
-        })
-      : [],
-  );
+  // A full-depth pair passes the nuts of the other beam too, whether or not it serves that beam.
+  const nutRoom = models.flatMap((model) => {
+    const { joint } = model.joint.view;
+    if (!isBolted(model) || (stiffener.length !== "full" && !pair.sides.includes(joint.side))) return [];
+    const plateMm = pairLevelMm(pair, joint, models);
+    return model.joint.view.rows.map((row) => ({
+      face: Math.abs(joint.levelOffsetMm + row.belowTopMm - plateMm) - stiffener.thicknessMm / 2,
+      nut: row.fastener.size.acrossPointsMm / 2,
+    }));
+  });
   const tightest = nutRoom.sort((a, b) => a.face - a.nut - (b.face - b.nut))[0];
   return [
     detailAtMost(
@@ -166,21 +171,19 @@ interface PlateForce {
   readonly force: Traced;
 }
 
-function plateForce(sideCase: SideCase, level: Level, panel: ColumnPanel, steps: boolean): PlateForce {
+function plateForce(sideCase: SideCase, pair: StiffenerPair, panel: ColumnPanel, steps: boolean): PlateForce {
   const { view, compression } = sideCase.model.joint;
-  const side = view.joint.side;
-  if (view.tensionLevel === level) {
+  const { side } = view.joint;
+  const along = ({ value, step }: Traced): Traced => ({ value: forceAlongN(value, pair.slopeCosine), step });
+  if (view.tensionLevel === pair.level) {
     const force = isBoltedCase(sideCase)
       ? tensionForce(sideCase, panel, steps)
       : { value: Math.max(sideCase.tensionDemandN, 0) * sideCase.model.joint.plateShare, step: undefined };
-    return { side, isTension: true, force };
+    return { side, isTension: true, force: along(force) };
   }
   const share = compression.stiffener?.plateShare ?? 1;
-  return {
-    side,
-    isTension: false,
-    force: { value: Math.max(sideCase.compressionDemandN, 0) * share, step: undefined },
-  };
+  const force = { value: Math.max(sideCase.compressionDemandN, 0) * share, step: undefined };
+  return { side, isTension: false, force: along(force) };
 }
 
 function weldLimit(
@@ -208,18 +211,19 @@ function weldLimit(
   );
 }
 
-/** Plates and welds of the pair at one level in one load case, both sides' forces with their signs. */
+/** Plates and welds of one pair in one load case, the forces of the sides it serves with their signs. */
 export function stiffenerChecks(
   node: NodeCase,
   panel: ColumnPanel,
-  stiffener: TransverseStiffeners,
-  level: Level,
-  sides: readonly SideCase[],
+  pair: StiffenerPair,
+  everySide: readonly SideCase[],
   steps: boolean,
 ): ComponentCheck[] {
-  const forces = sides.map((side) => plateForce(side, level, panel, steps));
+  const { stiffener, level } = pair;
+  const sides = everySide.filter((side) => pair.sides.includes(side.model.joint.view.joint.side));
   const first = sides[0];
   if (!first) return [];
+  const forces = sides.map((side) => plateForce(side, pair, panel, steps));
   const head = { level, loadCase: first.loadCase.name };
   const checks: ComponentCheck[] = [];
   const straight = stiffener.widthMm - stiffener.clipMm;

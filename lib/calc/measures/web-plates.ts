@@ -40,7 +40,14 @@ export function neededPlateHeightMm(model: JointModel): number {
 
 /** @throws OutsideScope where the plate does not cover what it is to strengthen. */
 export function refuseShortPlate(plates: WebPlates, models: readonly JointModel[]): void {
-  const needed = Math.max(...models.map(neededPlateHeightMm));
+  const reach = models.map((model) => {
+    const { levelOffsetMm, beam } = model.joint.view.joint;
+    const half = neededPlateHeightMm(model) / 2;
+    const middle = levelOffsetMm + beam.section.depthMm / 2;
+    return { top: middle - half, bottom: middle + half };
+  });
+  // One plate for all the beams, wherever on the web that puts it.
+  const needed = Math.max(...reach.map(({ bottom }) => bottom)) - Math.min(...reach.map(({ top }) => top));
   if (plates.heightMm < needed - 0.5) {
     throw new OutsideScope(
       `the web plate is ${plates.heightMm} mm high and has to cover ${Math.ceil(needed)} mm: the effective widths in tension and compression (6.2.6.1(9))`,

@@ -1,5 +1,5 @@
 import type { MeasureCase } from "@/lib/calc";
-import { type BoltedSide, boltedSides, rowsAtLevels } from "./bolt-rows";
+import { type BoltedSide, barRowsOf, boltedSides } from "./bolt-rows";
 import { barMassKg, boltMassKg, nutMassKg, threadBeyondNutMm, washerMassKg } from "./fastener-mass";
 import type { MeasureContext } from "./measure-context";
 import type { QuantityTake } from "./quantities";
@@ -7,38 +7,42 @@ import type { QuantityTake } from "./quantities";
 type Measure = Extract<MeasureCase, { kind: "through-bars" }>;
 
 /**
- * One bar for each bolt position of the rows at the given levels, through both column flanges. It
- * takes the place of the bolts of every joint it serves; a one-sided node needs holes in the far flange.
+ * One bar for each bolt position of the rows at the given levels, through both column flanges. It takes the place of
+ * the bolts of every joint it serves; where no beam faces it, it needs holes in the far flange.
  */
 export function takeThroughBars(take: QuantityTake, context: MeasureContext, measure: Measure): void {
   const sides = boltedSides(context.joints);
-  const lead = sides[0];
-  if (lead === undefined) return;
-  const bars = Math.max(
-    ...sides.map((side) => rowsAtLevels(side, measure.levels) * side.connection.bolts.perRow),
-  );
-  if (bars === 0) return;
-  takeBars(
-    take,
-    context,
-    measure,
-    lead,
-    bars,
-    sides.reduce((sum, side) => sum + side.connection.plate.thicknessMm, 0),
-  );
-  for (const side of sides) takeSavedBolts(take, context, side, measure);
-  if (sides.length === 1) {
-    take.records.push({
-      driver: "hole",
-      group: `section ${measure.size.holeMm}`,
-      values: {
-        through: "section",
-        holes: bars,
-        diameterMm: measure.size.holeMm,
-        thicknessMm: context.column.flangeThicknessMm,
-      },
-    });
+  const rows = barRowsOf(sides, measure);
+  for (const group of [sides, ...(sides.length > 1 ? sides.map((side) => [side]) : [])]) {
+    const lead = group[0];
+    const here = rows.filter((row) => isSameGroup(row.sides, group));
+    if (lead === undefined || here.length === 0) continue;
+    const bars = here.length * lead.connection.bolts.perRow;
+    const platesMm = group.reduce((sum, side) => sum + side.connection.plate.thicknessMm, 0);
+    takeBars(take, context, measure, lead, bars, platesMm);
+    if (group.length === 1) takeFarHoles(take, context, measure, bars);
   }
+  for (const side of sides) {
+    const replaced = rows.filter((row) => row.sides.includes(side)).length;
+    takeSavedBolts(take, context, side, replaced * side.connection.bolts.perRow);
+  }
+}
+
+const isSameGroup = (a: readonly BoltedSide[], b: readonly BoltedSide[]): boolean =>
+  a.length === b.length && a.every((side) => b.includes(side));
+
+/** Holes in the flange that no beam is bolted to. */
+function takeFarHoles(take: QuantityTake, context: MeasureContext, measure: Measure, holes: number): void {
+  take.records.push({
+    driver: "hole",
+    group: `section ${measure.size.holeMm}`,
+    values: {
+      through: "section",
+      holes,
+      diameterMm: measure.size.holeMm,
+      thicknessMm: context.column.flangeThicknessMm,
+    },
+  });
 }
 
 function takeBars(
@@ -88,10 +92,9 @@ function takeSavedBolts(
   take: QuantityTake,
   { column }: MeasureContext,
   side: BoltedSide,
-  measure: Measure,
+  bolts: number,
 ): void {
-  const { size, grade, perRow, preloaded } = side.connection.bolts;
-  const bolts = rowsAtLevels(side, measure.levels) * perRow;
+  const { size, grade, preloaded } = side.connection.bolts;
   if (bolts === 0) return;
   const bolt = bolts * boltMassKg(size, side.connection.plate.thicknessMm + column.flangeThicknessMm);
   const nuts = bolts * nutMassKg(size);

@@ -1,4 +1,4 @@
-import type { MeasureCase } from "@/lib/calc";
+import { pairsOfMeasure, type MeasureCase } from "@/lib/calc";
 import { clearDepthMm } from "./column-piece";
 import type { MeasureContext } from "./measure-context";
 import { takePlates } from "./plate-parts";
@@ -8,8 +8,8 @@ import { weldEdges } from "./stiffener-welds";
 type Measure = Extract<MeasureCase, { kind: "transverse-stiffeners" }>;
 
 /**
- * A pair of plates at each level. Full-depth plates reach from flange to flange; partial ones start
- * at the flange of each joint, so a two-sided node has two pairs a level.
+ * The measure's pairs of plates. A full-depth pair reaches from flange to flange and may serve both beams, sloping
+ * where their flanges are a little apart; partial ones start at the flange of each joint.
  */
 export function takeTransverseStiffeners(
   take: QuantityTake,
@@ -19,8 +19,10 @@ export function takeTransverseStiffeners(
   const { column, joints } = context;
   const clearMm = clearDepthMm(column);
   const isFull = measure.length === "full" || measure.length >= clearMm;
-  const lengthMm = measure.length === "full" ? clearMm : Math.min(measure.length, clearMm);
-  const parts = 2 * measure.levels.length * (isFull ? 1 : joints.length);
+  const pairs = pairsOfMeasure(column, joints, isFull ? { ...measure, length: "full" } : measure);
+  const slopedMm = pairs.reduce((sum, { slopeCosine }) => sum + clearMm / slopeCosine, 0);
+  const lengthMm = isFull ? slopedMm / pairs.length : Math.min(Number(measure.length), clearMm);
+  const parts = 2 * pairs.length;
   const ends = isFull ? 2 : 1;
   takePlates(take, context.pieceMassKg, {
     partType: "transverse-stiffener",

@@ -172,11 +172,6 @@ describe("bars with inner nuts", () => {
 });
 
 describe("scope", () => {
-  it("answers unequal beams with the reason and no numbers", () => {
-    const document = twoSided(200, 100);
-    expect(reasonOf({ ...document, right: { ...buildSide(), levelOffset: 50 } })).toMatch(/unequal depth/);
-  });
-
   it("answers a column web that yields under its own forces with the reason", () => {
     const document = twoSided(200, 100);
     const loadCases = document.loadCases.map((loadCase) => ({
