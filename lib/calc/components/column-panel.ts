@@ -8,7 +8,7 @@ import {
 import { tStubMomentNmm } from "../clauses/en1993-1-8-2005/t-stub";
 import { isOnePanel } from "../mechanics/panel-levels";
 import { sectionProperties, type SectionProperties } from "../mechanics/section-properties";
-import type { PanelDesign } from "../measures/panel-design";
+import type { PanelDesign, TransverseStiffeners } from "../measures/panel-design";
 import type { ISection, JointCase, NodeCase, Side, Steel } from "../node";
 import type { Trace } from "../trace/trace";
 import { traced, type Traced } from "../trace/traced";
@@ -55,6 +55,10 @@ function tensionWebMm(design: PanelDesign): number {
   return (design.column.steel.yieldMpa <= 355 ? 1.4 : 1.3) * web;
 }
 
+/** Tells which of two pairs yields first in bending about its own plane; steels may differ. */
+const bendingRank = ({ widthMm, thicknessMm, steel }: TransverseStiffeners): number =>
+  widthMm * thicknessMm ** 2 * steel.yieldMpa;
+
 function shearResistance(
   trace: Trace | null,
   node: NodeCase,
@@ -91,8 +95,7 @@ function shearResistance(
     yieldMpa: steel.yieldMpa,
     gammaM0,
   });
-  const weaker =
-    2 * top.widthMm * top.thicknessMm ** 2 <= 2 * bottom.widthMm * bottom.thicknessMm ** 2 ? top : bottom;
+  const weaker = bendingRank(top) <= bendingRank(bottom) ? top : bottom;
   const stiffenerMomentNmm = tStubMomentNmm(trace, {
     lengthMm: 2 * weaker.widthMm,
     thicknessMm: weaker.thicknessMm,
