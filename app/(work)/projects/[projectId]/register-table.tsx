@@ -4,6 +4,7 @@ import type { NodeRow } from "@/lib/schemas/node";
 import { componentLabel } from "@/components/compare/component-labels";
 import { UtilisationFigure } from "@/components/compare/utilisation-bar";
 import { formatMinutes, formatMoney } from "@/components/ui/format-number";
+import { joinClasses } from "@/components/ui/join-classes";
 import { shortDate } from "@/components/ui/short-date";
 import { SortableTh, Table, Td, Th } from "@/components/ui/table";
 import { beamWords, STATE_WORDS, type Sorting, type SortKey } from "./register-rows";
@@ -18,6 +19,9 @@ export interface RegisterTableProps {
   /** Null where this person may not delete nodes. */
   readonly onDelete: ((row: NodeRow) => void) | null;
 }
+
+/** On a tablet the beams stand under the column and the last change is left out, so that what can be done stays in the window. */
+const ROOMY_ONLY = "hidden min-[1100px]:table-cell";
 
 const none = (words: string) => (
   <>
@@ -73,8 +77,11 @@ function NodeLine({
         </Link>{" "}
         <span className="block text-note text-soft">{`revision ${row.version}`}</span>
       </th>
-      <Td className="whitespace-nowrap">{row.column}</Td>
-      <Td className="min-w-[11ch]">{beamWords(row)}</Td>
+      <Td className="min-[1100px]:whitespace-nowrap">
+        <span className="whitespace-nowrap">{row.column}</span>{" "}
+        <span className="block text-note text-soft min-[1100px]:hidden">{beamWords(row)}</span>
+      </Td>
+      <Td className={joinClasses(ROOMY_ONLY, "min-w-[11ch]")}>{beamWords(row)}</Td>
       <BareCell row={row} />
       <Td>
         {row.leading ? (
@@ -97,24 +104,26 @@ function NodeLine({
         {row.leading ? formatMoney(row.leading.cost) : none("none")}
       </Td>
       <Td className="text-right">{row.quantity}</Td>
-      <Td className="text-note whitespace-nowrap text-soft">
+      <Td className={joinClasses(ROOMY_ONLY, "text-note whitespace-nowrap text-soft")}>
         {shortDate(row.updatedAt)}
         <span className="block">{row.updatedBy.name}</span>
       </Td>
       <Td className="no-print text-right whitespace-nowrap">
-        <Link href={`${href}/comparison`}>
-          <span className="prose-link">Compare</span>{" "}
-          <span className="sr-only">{`the options for ${row.reference}`}</span>
-        </Link>
-        {onDelete ? (
-          <button
-            type="button"
-            onClick={() => onDelete(row)}
-            className="ml-3 text-soft underline-offset-2 hover:text-fail hover:underline"
-          >
-            Delete <span className="sr-only">{row.reference}</span>
-          </button>
-        ) : null}
+        <span className="inline-flex flex-col items-end gap-x-3 gap-y-1.5 min-[1100px]:flex-row min-[1100px]:items-baseline">
+          <Link href={`${href}/comparison`}>
+            <span className="prose-link">Compare</span>{" "}
+            <span className="sr-only">{`the options for ${row.reference}`}</span>
+          </Link>
+          {onDelete ? (
+            <button
+              type="button"
+              onClick={() => onDelete(row)}
+              className="text-soft underline-offset-2 hover:text-fail hover:underline"
+            >
+              Delete <span className="sr-only">{row.reference}</span>
+            </button>
+          ) : null}
+        </span>
       </Td>
     </tr>
   );
@@ -138,13 +147,13 @@ export function RegisterTable(props: RegisterTableProps) {
         <tr>
           {head("mark", "Mark")}
           {head("column", "Column")}
-          <Th>Beams</Th>
+          <Th className={ROOMY_ONLY}>Beams</Th>
           {head("bare", "Bare column")}
           {head("leading", "Leading option")}
           {head("hours", "Shop hours", "text-right")}
           {head("cost", `Cost, ${moneyUnit}`, "text-right")}
           {head("quantity", "Alike", "text-right")}
-          {head("updated", "Updated")}
+          {head("updated", "Updated", ROOMY_ONLY)}
           <Th className="no-print">
             <span className="sr-only">Actions</span>
           </Th>
