@@ -51,6 +51,21 @@ describe("sectionProperties", () => {
     expect(computed.webDepthMm).toBeCloseTo(360 - 2 * 6 * Math.SQRT2, 10);
   });
 
+  it("has the hand values of a rolled section: four fillets of (1 - pi / 4) r^2, 0.2234 r from their edges", () => {
+    const computed = sectionProperties(ROLLED);
+    const fillet = (1 - Math.PI / 4) * 24 ** 2;
+    // First moment of a fillet about its edge: that of the square less that of the quarter circle, whose centroid is 4r / 3 pi from its own centre.
+    const quarter = (Math.PI / 4) * 24 ** 2;
+    const fromEdge = (24 ** 2 * 12 - quarter * (24 - (4 * 24) / (3 * Math.PI))) / fillet;
+    expect(Math.abs(fromEdge / 24 - 0.2234)).toBeLessThan(0.00005);
+    expect(computed.areaMm2).toBeCloseTo(2 * 200 * 20 + 360 * 10 + 4 * fillet, 6);
+    expect(computed.plasticModulusMm3).toBeCloseTo(
+      200 * 20 * 380 + (10 * 360 ** 2) / 4 + 4 * fillet * (180 - fromEdge),
+      3,
+    );
+    expect(computed.elasticModulusMm3).toBeCloseTo(computed.inertiaMm4 / 200, 6);
+  });
+
   it("counts the root fillets of a rolled section as integration over its outline does", () => {
     const computed = sectionProperties(ROLLED);
     const { area, inertia, plastic } = integrate(ROLLED);
