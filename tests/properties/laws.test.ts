@@ -148,6 +148,36 @@ const resistancesOf = (option: OptionDocument | undefined, component: string): n
     ? option.components.filter((check) => check.component === component).map((check) => check.resistance)
     : [];
 
+/** The same node with nothing in the column and every other load so many times as large: k_wc stays 1. */
+const scaled = (document: NodeDocument, factor: number): NodeDocument => {
+  const timesFactor = <T extends Record<string, number>>(forces: T): T =>
+    Object.fromEntries(Object.entries(forces).map(([key, value]) => [key, value * factor])) as T;
+  return {
+    ...document,
+    loadCases: document.loadCases.map(({ name, left, right, column }) => ({
+      name,
+      ...(left ? { left: timesFactor(left) } : {}),
+      ...(right ? { right: timesFactor(right) } : {}),
+      column: { ...timesFactor(column), axialForce: 0, momentAbove: 0, momentBelow: 0 },
+    })),
+  };
+};
+
+type Check = EvaluatedOptionDocument["components"][number];
+
+/**
+ * Demands with a kink: a bar once the flange yields and the far side that it pulls, a tension stiffener once the web
+ * has taken its part, welds behind it, and the weld of a tension flange that never has to exceed the flange.
+ */
+const hasKink = ({ component, clause, what = "" }: Check): boolean =>
+  ["detailing", "bar-tension", "far-flange", "stiffener-weld"].includes(component) ||
+  clause === "SCI/BCSA P398, tension stiffeners" ||
+  what === "column web in shear along a partial-depth stiffener" ||
+  what === "tension flange weld";
+
+const straightChecks = (option: OptionDocument | undefined): Check[] =>
+  option && isInScope(option) ? option.components.filter((check) => !hasKink(check)) : [];
+
 describe("random nodes", () => {
   it("give finite numbers on 10,000 documents, at least 60 % in scope, every kind among them", () => {
     let inScope = 0;
@@ -279,6 +309,65 @@ describe("random nodes", () => {
       }),
       { numRuns: 400, seed: SEED },
     );
+  }, 120_000);
+
+  it("have demands in proportion to their loads and the same resistances, where the column carries nothing", () => {
+    let compared = 0;
+    fc.assert(
+      fc.property(randomNodeDocument, fc.constantFrom(0.3, 1.7, 3), (document, factor) => {
+        const once = optionsOf(scaled(document, 1));
+        const more = optionsOf(scaled(document, factor));
+        once.forEach((option, index) => {
+          const checks = straightChecks(option);
+          const twins = straightChecks(more[index]);
+          if (checks.length !== twins.length)
+            throw new Error(`${checks.length} became ${twins.length} checks`);
+          checks.forEach((check, place) => {
+            const twin = twins[place];
+            compared += 1;
+            // A demand that cancels to nothing is as exact as its terms, which are hundreds of kN.
+            if (!(Math.abs((twin?.demand ?? NaN) - factor * check.demand) <= 1e-9 * (check.demand + 100)))
+              throw new Error(
+                `${check.component}: ${check.demand} became ${twin?.demand} at ${factor} times`,
+              );
+            if (!close(twin?.resistance ?? NaN, check.resistance))
+              throw new Error(`${check.component}: resistance ${check.resistance} to ${twin?.resistance}`);
+          });
+        });
+      }),
+      { numRuns: 300, seed: SEED },
+    );
+    expect(compared).toBeGreaterThan(10_000);
+  }, 120_000);
+
+  it("never lose end-plate bending to a thicker end plate", () => {
+    const thicker = <S extends NonNullable<NodeDocument["left"]>>(side: S): S => {
+      const { connection } = side;
+      if (connection.kind !== "end-plate") return side;
+      const plate = { ...connection.plate, thickness: connection.plate.thickness + 5 };
+      return { ...side, connection: { ...connection, plate } };
+    };
+    let compared = 0;
+    fc.assert(
+      fc.property(randomNodeDocument, (document) => {
+        const { left, right } = document;
+        const after = optionsOf({
+          ...document,
+          ...(left ? { left: thicker(left) } : {}),
+          ...(right ? { right: thicker(right) } : {}),
+        });
+        optionsOf(document).forEach((option, index) => {
+          const more = resistancesOf(after[index], "end-plate-bending");
+          resistancesOf(option, "end-plate-bending").forEach((value, place) => {
+            compared += 1;
+            const raised = more[place] ?? NaN;
+            if (!(raised >= value * (1 - 1e-9))) throw new Error(`end plate: ${value} fell to ${raised}`);
+          });
+        });
+      }),
+      { numRuns: 400, seed: SEED },
+    );
+    expect(compared).toBeGreaterThan(1_000);
   }, 120_000);
 
   it("are refused with a path when a field is spoilt", () => {
