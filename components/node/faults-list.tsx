@@ -14,6 +14,13 @@ function fieldOf(path: string): HTMLElement | null {
 /** Puts the focus into the field of a path; the browser brings it into sight below the line that stays there. */
 export const focusField = (path: string): void => fieldOf(path)?.focus();
 
+/** Puts the focus into a choice and lists what there is to choose, where the browser can. */
+export function openChoice(path: string): void {
+  const field = fieldOf(path);
+  field?.focus();
+  if (field instanceof HTMLSelectElement && typeof field.showPicker === "function") field.showPicker();
+}
+
 /** How many faults are listed before the rest are only counted. */
 const SHOWN = 6;
 

@@ -24,6 +24,8 @@ export interface NodeDrawingProps {
   readonly interactive?: boolean;
   /** Called with the path in the node document and the text as typed. */
   readonly onEdit?: (path: string, text: string) => void;
+  /** Called with the path of a catalogue section whose dimension was pressed: it changes with another section only. */
+  readonly onChooseSection?: (path: string) => void;
   /** The path whose field has the focus: its dimension is drawn in the accent. */
   readonly activePath?: string | null;
   readonly className?: string;
@@ -51,6 +53,7 @@ interface DimensionMarkProps extends PartsProps {
   readonly dimension: Dimension;
   readonly active: boolean;
   readonly onOpen: ((index: number) => void) | null;
+  readonly onChooseSection: ((path: string) => void) | null;
 }
 
 const BUTTON_TONE =
@@ -77,7 +80,17 @@ function linesBox({ lines }: Dimension, marginMm: number) {
   };
 }
 
-function DimensionMark({ view, options, index, dimension, active, onOpen }: DimensionMarkProps) {
+/** What a press on a dimension does, and how that is said; null where it changes nothing. */
+function pressOf({ index, dimension, onOpen, onChooseSection }: DimensionMarkProps) {
+  const { edits, chooses } = dimension;
+  if (edits !== null && onOpen) return { words: "change", press: () => onOpen(index) };
+  if (chooses !== undefined && onChooseSection)
+    return { words: "of the catalogue; choose another section", press: () => onChooseSection(chooses) };
+  return null;
+}
+
+function DimensionMark(props: DimensionMarkProps) {
+  const { view, options, index, dimension, active } = props;
   const text = dimensionTextElement(view, index, options);
   const drawn = (
     <>
@@ -88,20 +101,21 @@ function DimensionMark({ view, options, index, dimension, active, onOpen }: Dime
     </>
   );
   const tone = active ? "[&_text]:fill-petrol [&_text]:font-bold [&_polyline]:stroke-petrol" : "";
-  if (onOpen === null || dimension.edits === null) return <g className={tone}>{drawn}</g>;
+  const action = pressOf(props);
+  if (action === null) return <g className={tone}>{drawn}</g>;
   const onKeyDown = (event: KeyboardEvent) => {
     if (event.key !== "Enter" && event.key !== " ") return;
     event.preventDefault();
-    onOpen(index);
+    action.press();
   };
   return (
     <g
       role="button"
       tabIndex={0}
-      aria-label={`${dimension.name}, ${dimension.text} mm: change`}
-      data-edits={dimension.edits}
+      aria-label={`${dimension.name}, ${dimension.text} mm: ${action.words}`}
+      data-edits={dimension.edits ?? undefined}
       className={`${tone} ${BUTTON_TONE}`}
-      onClick={() => onOpen(index)}
+      onClick={action.press}
       onKeyDown={onKeyDown}
     >
       <rect {...linesBox(dimension, view.textHeightMm * 0.25)} fill="var(--paper)" fillOpacity={0} />
@@ -114,10 +128,10 @@ function DimensionMark({ view, options, index, dimension, active, onOpen }: Dime
 /**
  * The node drawn to scale: an SVG with a title and a description in words. With `interactive`, each
  * dimension that belongs to a field is a button; Enter keeps the new value, Escape drops it, and the
- * focus goes back to the dimension.
+ * focus goes back to the dimension. A size of a catalogue section leads to the choice of that section.
  */
 export function NodeDrawing(props: NodeDrawingProps) {
-  const { drawing, interactive = false, onEdit, activePath = null, className } = props;
+  const { drawing, interactive = false, onEdit, onChooseSection, activePath = null, className } = props;
   const id = useId().replace(/[^A-Za-z0-9]/g, "");
   const view = drawing[props.view ?? "elevation"];
   const extent = props.extent ?? view.extent;
@@ -154,8 +168,9 @@ export function NodeDrawing(props: NodeDrawingProps) {
             options={options}
             index={index}
             dimension={dimension}
-            active={dimension.edits !== null && dimension.edits === activePath}
+            active={activePath !== null && (dimension.edits ?? dimension.chooses) === activePath}
             onOpen={canEdit ? setOpen : null}
+            onChooseSection={(interactive && onChooseSection) || null}
           />
         ))}
       </svg>

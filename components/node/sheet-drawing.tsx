@@ -4,6 +4,7 @@ import { useMemo, useState } from "react";
 import type { Level, NodeCase } from "@/lib/calc/node";
 import { drawNode } from "@/lib/drawing/draw-node";
 import type { Extent } from "@/lib/drawing/drawing";
+import { openChoice } from "./faults-list";
 import { isDraftObject, textAt, valueAt, type DraftObject } from "./node-draft";
 import { NodeDrawing } from "./node-drawing";
 
@@ -49,7 +50,8 @@ function evenly({ minX, maxX, minY, maxY }: Extent): Extent {
   return { minX: -half, maxX: half, minY, maxY };
 }
 
-const editing = (onEdit: SheetDrawingProps["onEdit"]) => (onEdit ? { interactive: true, onEdit } : {});
+const editing = (onEdit: SheetDrawingProps["onEdit"]) =>
+  onEdit ? { interactive: true, onEdit, onChooseSection: openChoice } : {};
 
 /** The live elevation of the node sheet. */
 export function SheetElevation({ node, draft, isBehind, activePath, onEdit }: SheetDrawingProps) {
@@ -70,7 +72,11 @@ export function SheetElevation({ node, draft, isBehind, activePath, onEdit }: Sh
         className={WIDTH}
       />
       <p className="mt-1 flex flex-wrap items-baseline justify-between gap-x-4 text-note text-soft">
-        <span>{onEdit ? "To scale, mm. Press a dimension to change it." : "To scale, mm."}</span>
+        <span>
+          {onEdit
+            ? "To scale, mm. Press a dimension to change it; that of a catalogue section opens the choice of sections."
+            : "To scale, mm."}
+        </span>
         {isBehind ? (
           <span className="font-semibold text-tight">◆ Drawn as the sizes last were in order.</span>
         ) : null}

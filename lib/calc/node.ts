@@ -86,12 +86,34 @@ export interface WeldedConnection {
   readonly welds: ConnectionWelds;
 }
 
-/** A connection the contract knows and this version does not evaluate yet. */
-export interface OtherConnection {
+/** Top and seat angles. The contract knows them and the sheet draws them; this version does not evaluate them. */
+export interface FlangeCleatConnection {
   readonly kind: "flange-cleats";
+  readonly cleat: {
+    /** The leg along the column's flange, and the one along the beam's. */
+    readonly columnLegMm: number;
+    readonly beamLegMm: number;
+    readonly thicknessMm: number;
+    readonly lengthMm: number;
+  };
+  /** Through the column's flange: distance from the heel of the angle. */
+  readonly bolts: { readonly size: FastenerSize; readonly gaugeMm: number; readonly distanceMm: number };
+  /** Through the beam's flange: rows from the heel of the angle. */
+  readonly beamBolts: {
+    readonly size: FastenerSize;
+    readonly gaugeMm: number;
+    readonly rowsMm: readonly number[];
+  };
+  /** From the column's face to the end of the beam. */
+  readonly gapMm: number;
+  readonly webCleats: {
+    readonly legMm: number;
+    readonly thicknessMm: number;
+    readonly lengthMm: number;
+  } | null;
 }
 
-export type ConnectionCase = EndPlateConnection | WeldedConnection | OtherConnection;
+export type ConnectionCase = EndPlateConnection | WeldedConnection | FlangeCleatConnection;
 
 export interface JointCase {
   readonly side: Side;

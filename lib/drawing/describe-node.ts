@@ -7,7 +7,11 @@ const levelWords = (levels: readonly string[]): string =>
 
 function connectionWords({ connection }: JointCase): string {
   if (connection.kind === "welded") return "welded";
-  if (connection.kind === "flange-cleats") return "with flange cleats";
+  if (connection.kind === "flange-cleats") {
+    const { cleat, beamBolts, webCleats } = connection;
+    const legs = `${round(cleat.beamLegMm)} by ${round(cleat.columnLegMm)} by ${round(cleat.thicknessMm)}`;
+    return `flange cleats ${legs}, ${round(cleat.lengthMm)} long, ${beamBolts.size.name} at ${beamBolts.rowsMm.map(round).join(", ")} mm from the heel${webCleats ? ", with web cleats" : ""}`;
+  }
   const { plate, bolts } = connection;
   return `end plate ${round(plate.thicknessMm)} by ${round(plate.widthMm)}, ${bolts.rowsMm.length} rows of ${bolts.perRow} ${bolts.size.name} ${bolts.grade.name} at ${bolts.rowsMm.map(round).join(", ")} mm below the top of the beam`;
 }

@@ -4,9 +4,18 @@ import type { Dimension, Point } from "./drawing";
 export interface Measured {
   readonly id: string;
   readonly edits: string | null;
+  readonly chooses?: string;
   readonly name: string;
   readonly valueMm: number;
 }
+
+/** How a size of a section is changed: a section by its dimensions at its own field, one of the catalogue by another section. */
+export const sectionEdit = (
+  sectionPath: string,
+  field: "h" | "tf",
+  isCustom: boolean | undefined,
+): Pick<Measured, "edits" | "chooses"> =>
+  isCustom ? { edits: `${sectionPath}.${field}` } : { edits: null, chooses: sectionPath };
 
 /** A number as it stands on a drawing: at most one decimal, a true minus sign. */
 export const dimensionText = (valueMm: number): string => {

@@ -1,4 +1,5 @@
 import type { MeasureCase, NodeCase } from "@/lib/calc/node";
+import { cleatShapes } from "./cleat-shapes";
 import { describeNode } from "./describe-node";
 import { TEXT_PX } from "./dimension-lines";
 import type { Dimension, DrawingOptions, DrawingView, Extent, NodeDrawing, Point, Shape } from "./drawing";
@@ -74,6 +75,7 @@ export function drawNode(
   const elevation = [
     ...columnShapes(frame, zigzagMm),
     ...frame.joints.flatMap((placed) => beamShapes(frame, placed, zigzagMm)),
+    ...cleatShapes(frame),
     ...measureShapes(frame, measures),
     ...fastenerShapes(frame, measures),
   ];

@@ -25,6 +25,7 @@ export type Part =
   | "beam-right"
   | "plate-left"
   | "plate-right"
+  | "cleat"
   | "bolt"
   | "weld"
   | "stiffener"
@@ -85,6 +86,8 @@ export interface Dimension {
   readonly id: string;
   /** Path into the node document, such as `left.connection.bolts.rows.0`; null where the drawing cannot change it. */
   readonly edits: string | null;
+  /** Path of the catalogue section that gives this dimension: it changes with another section only. */
+  readonly chooses?: string;
   /** What is measured, in words. */
   readonly name: string;
   readonly valueMm: number;

@@ -1,5 +1,13 @@
 import type { NodeCase } from "@/lib/calc/node";
-import { acrossDimension, dimension, spreadLabels, TEXT_PX, upDimension } from "./dimension-lines";
+import { cleatDimensions } from "./cleat-dimensions";
+import {
+  acrossDimension,
+  dimension,
+  sectionEdit,
+  spreadLabels,
+  TEXT_PX,
+  upDimension,
+} from "./dimension-lines";
 import type { Dimension, DrawingOptions } from "./drawing";
 import type { Frame, PlacedJoint } from "./frame";
 
@@ -8,7 +16,7 @@ function columnDepth(frame: Frame, options: DrawingOptions, pixel: number): Dime
   return acrossDimension(
     {
       id: "column.depth",
-      edits: options.customSections?.column ? "column.section.h" : null,
+      ...sectionEdit("column.section", "h", options.customSections?.column),
       name: "column depth",
       valueMm: frame.column.depthMm,
     },
@@ -35,7 +43,7 @@ function beamDepth(
   return upDimension(
     {
       id: `${placed.side}.beam.depth`,
-      edits: options.customSections?.[placed.side] ? `${placed.side}.beam.section.h` : null,
+      ...sectionEdit(`${placed.side}.beam.section`, "h", options.customSections?.[placed.side]),
       name: `${placed.side} beam depth`,
       valueMm: placed.joint.beam.section.depthMm,
     },
@@ -224,6 +232,7 @@ export function elevationDimensions(
       // Rows first: where a leader crosses a dimension of the plate, the dimension is the one to point at.
       ...rowLevels(frame, placed, pixel),
       ...plateDimensions(placed, pixel),
+      ...cleatDimensions(placed, pixel),
       beamDepth(frame, placed, options, (placed.rowsMm.length > 0 ? 58 : 20) * pixel, pixel),
     ]),
     columnDepth(frame, options, pixel),

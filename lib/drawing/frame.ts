@@ -8,7 +8,7 @@ export interface PlacedJoint {
   /** Outer faces of the beam's top and bottom flange. */
   readonly topMm: number;
   readonly bottomMm: number;
-  /** Outer face of the column flange, and the face the beam ends on (that of the end plate where there is one). */
+  /** Outer face of the column flange, and where the beam begins: on the end plate, past the gap before cleats, else on the column. */
   readonly columnFaceMm: number;
   readonly beamStartMm: number;
   /** Top and bottom of the end plate; null without one. */
@@ -52,8 +52,10 @@ function placeJoint(joint: JointCase, halfDepthMm: number): PlacedJoint {
   const columnFaceMm = sign * halfDepthMm;
   const connection = joint.connection;
   const common = { joint, side: joint.side, sign, topMm, bottomMm, columnFaceMm } as const;
-  if (connection.kind !== "end-plate")
-    return { ...common, beamStartMm: columnFaceMm, plate: null, rowsMm: [] };
+  if (connection.kind !== "end-plate") {
+    const gapMm = connection.kind === "flange-cleats" ? connection.gapMm : 0;
+    return { ...common, beamStartMm: columnFaceMm + sign * gapMm, plate: null, rowsMm: [] };
+  }
   const { plate, bolts } = connection;
   return {
     ...common,
@@ -63,13 +65,14 @@ function placeJoint(joint: JointCase, halfDepthMm: number): PlacedJoint {
   };
 }
 
-/** How far the column must be shown beyond the beams so that every plate and web plate is seen whole. */
+/** How far the column must be shown beyond the beams so that every plate, angle and web plate is seen whole. */
 function columnShownMm(joints: readonly PlacedJoint[], measures: readonly MeasureCase[]): number {
   const beamsMm =
     Math.max(...joints.map((joint) => joint.bottomMm)) - Math.min(...joints.map((joint) => joint.topMm));
-  const extensions = joints.flatMap(({ plate, topMm, bottomMm }) =>
-    plate ? [topMm - plate.topMm + 90, plate.bottomMm - bottomMm + 90] : [],
-  );
+  const extensions = joints.flatMap(({ plate, topMm, bottomMm, joint: { connection } }) => {
+    if (connection.kind === "flange-cleats") return [connection.cleat.columnLegMm + 90];
+    return plate ? [topMm - plate.topMm + 90, plate.bottomMm - bottomMm + 90] : [];
+  });
   const webPlates = measures.flatMap((measure) =>
     measure.kind === "web-plates" ? [(measure.heightMm - beamsMm) / 2 + 60] : [],
   );

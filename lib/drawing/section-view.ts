@@ -1,5 +1,7 @@
 import type { EndPlateConnection, Level, MeasureCase } from "@/lib/calc/node";
-import { acrossDimension, upDimension } from "./dimension-lines";
+import { cleatPlanDimensions } from "./cleat-dimensions";
+import { cleatPlan } from "./cleat-shapes";
+import { acrossDimension, sectionEdit, upDimension } from "./dimension-lines";
 import type { Dimension, DrawingOptions, Point, Shape } from "./drawing";
 import { backingMm, barShapes, boltShapes } from "./fastener-shapes";
 import { levelOfRow, type Frame, type PlacedJoint } from "./frame";
@@ -167,7 +169,8 @@ function fastenersPlan(frame: Frame, measures: readonly MeasureCase[], level: Le
   const gauge = withRows.map((placed) => endPlateOf(placed)?.bolts.gaugeMm ?? 0)[0];
   if (bars?.kind === "through-bars" && gauge !== undefined) {
     const face = (sign: -1 | 1): number =>
-      frame.joints.find((placed) => placed.sign === sign)?.beamStartMm ?? sign * frame.halfDepthMm;
+      frame.joints.find((placed) => placed.sign === sign && placed.plate)?.beamStartMm ??
+      sign * frame.halfDepthMm;
     return [-1, 1].flatMap((signY) =>
       barShapes(bars, { leftOuterMm: face(-1), rightOuterMm: face(1), innerMm }, (signY * gauge) / 2, 1),
     );
@@ -196,6 +199,7 @@ export function sectionShapes(
 ): Shape[] {
   return [
     ...frame.joints.flatMap((placed) => beamCut(frame, placed, zigzagMm)),
+    ...cleatPlan(frame),
     ...addedPlan(frame, measures, level),
     ...columnCut(frame),
     ...fastenersPlan(frame, measures, level),
@@ -206,12 +210,12 @@ export function sectionShapes(
   ];
 }
 
-/** Gauge and width of each end plate, and the width of the column's flange. */
+/** Gauge and width of each end plate or cleat, and the thickness of the column's flange. */
 export function sectionDimensions(frame: Frame, options: DrawingOptions, pixel: number): Dimension[] {
   if ((options.dimensions ?? "full") !== "full") return [];
   const plates = frame.joints.flatMap((placed) => {
     const connection = endPlateOf(placed);
-    if (!connection) return [];
+    if (!connection) return cleatPlanDimensions(frame, placed, pixel);
     const { sign, side } = placed;
     const edge = sign < 0 ? frame.leftMm : frame.rightMm;
     const half = (distance: number) => ({ fromY: -distance / 2, toY: distance / 2 });
@@ -252,7 +256,7 @@ export function sectionDimensions(frame: Frame, options: DrawingOptions, pixel: 
   const column = acrossDimension(
     {
       id: "column.flangeThickness",
-      edits: options.customSections?.column ? "column.section.tf" : null,
+      ...sectionEdit("column.section", "tf", options.customSections?.column),
       name: "column flange thickness",
       valueMm: frame.column.flangeThicknessMm,
     },

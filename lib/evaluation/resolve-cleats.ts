@@ -1,4 +1,4 @@
-import type { OtherConnection } from "@/lib/calc/node";
+import type { FastenerSize, FlangeCleatConnection } from "@/lib/calc/node";
 import type { Connection } from "@/lib/schemas/node-document";
 import { shownMm } from "./resolve-errors";
 import {
@@ -15,12 +15,19 @@ type WebCleatInput = NonNullable<CleatInput["webCleats"]>;
 interface Leg {
   /** The leg of an unequal angle that points this way is not stated, so the longer one is allowed. */
   readonly longestMm: number;
+  readonly shortestMm: number;
   readonly innerFaceMm: number;
 }
 
 function legOf(context: Resolving, section: string, path: string): Leg | null {
   const angle = resolveAngle(context, section, `${path}.section`);
-  return angle && { longestMm: Math.max(angle.legAMm, angle.legBMm), innerFaceMm: angle.thicknessMm };
+  return (
+    angle && {
+      longestMm: Math.max(angle.legAMm, angle.legBMm),
+      shortestMm: Math.min(angle.legAMm, angle.legBMm),
+      innerFaceMm: angle.thicknessMm,
+    }
+  );
 }
 
 function checkAngle(
@@ -58,26 +65,45 @@ function checkHolesOnLeg(
   });
 }
 
-function holeOf(
+function sizeOf(
   context: Resolving,
   bolts: { readonly size: string; readonly grade: string },
   path: string,
-): number | null {
+): FastenerSize | null {
   resolveFastenerGrade(context, bolts.grade, `${path}.grade`);
-  return resolveFastenerSize(context, bolts.size, `${path}.size`)?.holeMm ?? null;
+  return resolveFastenerSize(context, bolts.size, `${path}.size`);
 }
 
-function checkWebCleats(context: Resolving, input: WebCleatInput, path: string): void {
-  checkAngle(context, input, path);
-  holeOf(context, input.bolts, `${path}.bolts`);
-  holeOf(context, input.beamBolts, `${path}.beamBolts`);
+function webCleatsOf(
+  context: Resolving,
+  input: WebCleatInput,
+  path: string,
+): FlangeCleatConnection["webCleats"] {
+  sizeOf(context, input.bolts, `${path}.bolts`);
+  sizeOf(context, input.beamBolts, `${path}.beamBolts`);
+  const leg = checkAngle(context, input, path);
+  return leg && { legMm: leg.longestMm, thicknessMm: leg.innerFaceMm, lengthMm: input.length };
+}
+
+/** The legs of an unequal angle as they must lie for their holes: the longer one where a hole is farther from the heel. */
+function legsOf(leg: Leg, { bolts, beamBolts }: CleatInput): { columnLegMm: number; beamLegMm: number } {
+  const isLongOnBeam = Math.max(...beamBolts.rows) >= bolts.distance;
+  return isLongOnBeam
+    ? { columnLegMm: leg.shortestMm, beamLegMm: leg.longestMm }
+    : { columnLegMm: leg.longestMm, beamLegMm: leg.shortestMm };
 }
 
 /** Looks every name of a cleat connection up and refuses holes off the angle; the calculation does not take cleats yet. */
-export function resolveCleats(context: Resolving, input: CleatInput, path: string): OtherConnection {
+export function resolveCleats(
+  context: Resolving,
+  input: CleatInput,
+  path: string,
+): FlangeCleatConnection | null {
   const leg = checkAngle(context, input.cleat, `${path}.cleat`);
-  const hole = holeOf(context, input.bolts, `${path}.bolts`);
-  const beamHole = holeOf(context, input.beamBolts, `${path}.beamBolts`);
+  const size = sizeOf(context, input.bolts, `${path}.bolts`);
+  const beamSize = sizeOf(context, input.beamBolts, `${path}.beamBolts`);
+  const hole = size?.holeMm ?? null;
+  const beamHole = beamSize?.holeMm ?? null;
   checkHolesOnLeg(context, leg, hole, [input.bolts.distance], () => `${path}.bolts.distance`);
   checkHolesOnLeg(context, leg, beamHole, input.beamBolts.rows, (index) => `${path}.beamBolts.rows.${index}`);
   for (const [bolts, holeMm] of [
@@ -91,6 +117,14 @@ export function resolveCleats(context: Resolving, input: CleatInput, path: strin
       );
     }
   }
-  if (input.webCleats) checkWebCleats(context, input.webCleats, `${path}.webCleats`);
-  return { kind: "flange-cleats" };
+  const webCleats = input.webCleats ? webCleatsOf(context, input.webCleats, `${path}.webCleats`) : null;
+  if (!leg || !size || !beamSize) return null;
+  return {
+    kind: "flange-cleats",
+    cleat: { ...legsOf(leg, input), thicknessMm: leg.innerFaceMm, lengthMm: input.cleat.length },
+    bolts: { size, gaugeMm: input.bolts.gauge, distanceMm: input.bolts.distance },
+    beamBolts: { size: beamSize, gaugeMm: input.beamBolts.gauge, rowsMm: input.beamBolts.rows },
+    gapMm: input.gap,
+    webCleats,
+  };
 }

@@ -80,6 +80,18 @@ describe("the node sheet", () => {
     expect(field("Left bolt gauge (mm)")).toBeInvalid();
   });
 
+  it("leads from the depth of a catalogue section to the choice of sections, and edits a depth of its own in place", async () => {
+    render(<Sheet />);
+    await userEvent.click(
+      screen.getByRole("button", { name: /column depth, 290 mm: of the catalogue; choose another section/ }),
+    );
+    expect(field("Column section")).toHaveFocus();
+    fireEvent.change(field("Column section, family"), { target: { value: "welded, by dimensions" } });
+    await userEvent.click(screen.getByRole("button", { name: /column depth, 290 mm: change/ }));
+    await userEvent.keyboard("320{Enter}");
+    expect(field("Column section, depth (mm)")).toHaveValue("320");
+  });
+
   it("answers for the bare column at once, and anew after a change of the column", async () => {
     render(<Sheet />);
     const sentence = () => screen.getByTestId("bare-result").textContent;

@@ -9,6 +9,7 @@ import {
   HEAVIER,
   STIFFENERS,
   WEB_PLATE,
+  CLEATS,
 } from "./drawing-case";
 
 describe("the drawing in words", () => {
@@ -48,10 +49,12 @@ describe("the drawing in words", () => {
     } as const;
     const joints = [
       buildJoint("left", { connection: { kind: "welded", welds } }),
-      buildJoint("right", { connection: { kind: "flange-cleats" } }),
+      buildJoint("right", { connection: CLEATS }),
     ];
     const words = describeNode(buildDrawingCase({ joints }), []);
     expect(words).toContain("IPE 450, welded");
-    expect(words).toContain("with flange cleats");
+    expect(words).toContain(
+      "flange cleats 150 by 90 by 12, 180 long, M24 at 60, 120 mm from the heel, with web cleats",
+    );
   });
 });

@@ -1,6 +1,7 @@
 import type {
   EndPlateConnection,
   FastenerSize,
+  FlangeCleatConnection,
   ISection,
   JointCase,
   MeasureCase,
@@ -68,6 +69,16 @@ export const END_PLATE: EndPlateConnection = {
   },
   bolts: { size: M24, grade: GRADE, gaugeMm: 120, rowsMm: [-45, 65, 385], perRow: 2, preloaded: false },
   welds: { topFlange: fillet(8), bottomFlange: fillet(6), web: fillet(5) },
+};
+
+/** Angles of 150 by 90 by 12, the long leg on the beam; M24 in both legs. */
+export const CLEATS: FlangeCleatConnection = {
+  kind: "flange-cleats",
+  cleat: { columnLegMm: 90, beamLegMm: 150, thicknessMm: 12, lengthMm: 180 },
+  bolts: { size: M24, gaugeMm: 100, distanceMm: 55 },
+  beamBolts: { size: M24, gaugeMm: 90, rowsMm: [60, 120] },
+  gapMm: 10,
+  webCleats: { legMm: 90, thicknessMm: 8, lengthMm: 230 },
 };
 
 export const buildJoint = (side: Side, more: Partial<JointCase> = {}): JointCase => ({
