@@ -2,6 +2,8 @@ import type { MeasureInput, SectionInput, SteelInput, WeldInput } from "@/lib/sc
 
 const levelsWords = (levels: readonly string[]): string =>
   levels.length === 2 ? "top and bottom" : `at ${levels[0] ?? ""}`;
+const sideWords = (at: "left" | "right" | "both" | undefined): string =>
+  at === "left" || at === "right" ? `, ${at} only` : "";
 const weldWords = (weld: WeldInput): string => (weld === "butt" ? "butt weld" : `throat ${weld} mm`);
 const steelWords = (steel: SteelInput): string => (typeof steel === "string" ? steel : `f_y ${steel.fy}`);
 
@@ -21,7 +23,7 @@ export function measureSummary(measure: MeasureInput): string {
     case "web-plates":
       return `web plate ${measure.width} × ${measure.height} × ${measure.thickness}, ${measure.sides === 1 ? "one side" : "both sides"}`;
     case "backing-plates":
-      return `backing ${measure.width} × ${measure.length} × ${measure.thickness} ${levelsWords(measure.levels)}`;
+      return `backing ${measure.width} × ${measure.length} × ${measure.thickness} ${levelsWords(measure.levels)}${sideWords(measure.at)}`;
     case "through-bars":
       return `bars ${measure.size} ${measure.grade} ${levelsWords(measure.levels)}${measure.innerNuts ? ", inner nuts" : ""}`;
     case "heavier-column":
@@ -62,7 +64,7 @@ export function measureFacts(measure: MeasureInput): readonly (readonly [label: 
       ];
     case "backing-plates":
       return [
-        ["Levels", levelsWords(measure.levels)],
+        ["Levels", `${levelsWords(measure.levels)}${sideWords(measure.at)}`],
         [
           "Plate",
           `${measure.width} × ${measure.length} × ${measure.thickness} mm, ${steelWords(measure.steel)}`,

@@ -18,6 +18,9 @@ const BARS = [
 const UNEQUAL =
   "The beams differ in depth or level: the panel is cut into zones at their flanges, each with its own shear by equilibrium, and a joint's beta is that of the worst zone it shears.";
 
+const BACKING =
+  "Backing plates lie evenly about the bolt rows of their level, fit snugly to flange and root, and are parted by a stiffener there; the bolts are longer by their thickness.";
+
 const TOLERANCE = 0.1;
 
 /** Load cases whose forces on the node do not balance by more than a tenth of the largest term. */
@@ -80,6 +83,9 @@ export function cautionsOf(
     if (lacksOneSidedCase(node)) {
       cautions.push("No load case leaves one beam unloaded; the relief by bars halves there, so add one.");
     }
+  }
+  if (node.joints.some(({ side }) => design.backing[side].top ?? design.backing[side].bottom)) {
+    cautions.push(BACKING);
   }
   for (const pair of design.pairs) cautions.push(...pairCautions(design, pair, models));
   if (!isOnePanel(node.joints)) cautions.push(UNEQUAL);

@@ -13,6 +13,7 @@ import { isBolted, jointModelOf, type JointModel } from "./joint-model";
 import { areFacing } from "./mechanics/panel-levels";
 import { symmetricPart } from "./mechanics/through-bar-formulas";
 import { designOf } from "./measures/apply-measures";
+import { backingDetailing, refuseUnheldBacking } from "./measures/backing-plates";
 import { barChecks, barPressN } from "./measures/bar-checks";
 import { hasBars, type PanelDesign } from "./measures/panel-design";
 import { refuseOutsideBarBounds } from "./measures/through-bars";
@@ -186,6 +187,7 @@ function caseChecks(
 }
 
 function detailingChecks(
+  node: NodeCase,
   design: PanelDesign,
   panel: ColumnPanel,
   models: readonly JointModel[],
@@ -198,6 +200,7 @@ function detailingChecks(
     return connectionDetailing(side, panel.section.widthMm);
   });
   for (const pair of design.pairs) checks.push(...stiffenerDetailing(panel, pair, models));
+  checks.push(...backingDetailing(node, design, panel, models));
   const side = models[0]?.joint.view.joint.side ?? "left";
   if (design.webPlates) checks.push(...webPlateDetailing(panel, design.webPlates, side));
   return checks;
@@ -207,6 +210,7 @@ function evaluate(node: NodeCase, measures: readonly MeasureCase[], steps: boole
   const design = designOf(node, measures);
   const panel = columnPanelOf(node, design, steps);
   refuseOutsideBarBounds(node, design, panel);
+  refuseUnheldBacking(node, design);
   const geometry = panelGeometryOf(node);
   const store = new ModelStore(node, design, panel, steps);
   const checks: ComponentCheck[] = [];
@@ -221,7 +225,7 @@ function evaluate(node: NodeCase, measures: readonly MeasureCase[], steps: boole
   }
   const models = store.all();
   if (design.webPlates) refuseShortPlate(design.webPlates, models);
-  checks.push(...detailingChecks(design, panel, models, everySide));
+  checks.push(...detailingChecks(node, design, panel, models, everySide));
   const target = node.target.utilisation;
   const governing = governingOf(checks, node);
   const isDetailed = checks.every((check) => check.component !== "detailing" || check.utilisation <= 1);

@@ -180,6 +180,7 @@ export type MeasureCase =
   | {
       readonly kind: "backing-plates";
       readonly levels: readonly Level[];
+      readonly at?: MeasureSides;
       readonly thicknessMm: number;
       readonly widthMm: number;
       readonly lengthMm: number;

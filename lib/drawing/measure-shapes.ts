@@ -1,7 +1,7 @@
 import { pairsOfMeasure, type StiffenerPair } from "@/lib/calc";
 import type { Level, MeasureCase, Side, Weld } from "@/lib/calc/node";
 import type { Point, Shape } from "./drawing";
-import { flangeHeightsMm, type Frame } from "./frame";
+import { flangeHeightsMm, levelOfRow, type Frame } from "./frame";
 import { legMm } from "./member-shapes";
 import { polygon, rectBetween } from "./shapes";
 
@@ -153,9 +153,13 @@ function webPlate(frame: Frame, measure: Of<"web-plates">): Shape[] {
 
 function backing(frame: Frame, measure: Of<"backing-plates">): Shape[] {
   return measure.levels.flatMap((level) =>
-    frame.joints.flatMap(({ sign, side, joint, topMm, bottomMm }) => {
-      const tf = joint.beam.section.flangeThicknessMm;
-      const yMm = level === "top" ? topMm + tf / 2 : bottomMm - tf / 2;
+    frame.joints.flatMap((placed) => {
+      const rows = placed.rowsMm.filter((row) => levelOfRow(placed, row) === level);
+      const { sign, side } = placed;
+      if (rows.length === 0 || !(measure.at === undefined || measure.at === "both" || measure.at === side))
+        return [];
+      // As the calculation takes it: evenly about the rows of its level.
+      const yMm = (Math.min(...rows) + Math.max(...rows)) / 2;
       const face = sign * frame.innerFaceMm;
       return rectBetween(
         "backing-plate",

@@ -77,8 +77,8 @@ function backingPlates(
 ): Case<"backing-plates"> | null {
   const steel = resolveSteel(context, input.steel, input.thickness, `${path}.steel`);
   if (!steel) return null;
-  const { kind, levels, thickness: thicknessMm, width: widthMm, length: lengthMm } = input;
-  return { kind, levels, thicknessMm, widthMm, lengthMm, steel };
+  const { kind, levels, at, thickness: thicknessMm, width: widthMm, length: lengthMm } = input;
+  return { kind, levels, ...(at === undefined ? {} : { at }), thicknessMm, widthMm, lengthMm, steel };
 }
 
 function throughBars(
@@ -204,6 +204,7 @@ function describeMeasure(measure: MeasureCase): MeasureInput {
       return {
         kind: measure.kind,
         levels: [...measure.levels],
+        ...(measure.at === undefined ? {} : { at: measure.at }),
         thickness: measure.thicknessMm,
         width: measure.widthMm,
         length: measure.lengthMm,

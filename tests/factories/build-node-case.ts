@@ -171,3 +171,16 @@ export const buildWebPlates = (overrides: Partial<Measure<"web-plates">> = {}): 
   weld: fillet(10 / Math.SQRT2),
   ...overrides,
 });
+
+/** Plates 118 x 12 x 300 behind the flange at the top: 300 / 2 - 8.5 / 2 - 27 = 118.75 mm to the root toe. */
+export const buildBackingPlates = (
+  overrides: Partial<Measure<"backing-plates">> = {},
+): Measure<"backing-plates"> => ({
+  kind: "backing-plates",
+  levels: ["top"],
+  thicknessMm: 12,
+  widthMm: 118,
+  lengthMm: 300,
+  steel: S275,
+  ...overrides,
+});

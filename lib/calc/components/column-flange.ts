@@ -4,6 +4,7 @@ import { weldLegMm } from "../measures/panel-design";
 import type { NodeCase } from "../node";
 import { OutsideScope } from "../outcome";
 import { traced, type Traced } from "../trace/traced";
+import { backingPiecesOf } from "./backing-pieces";
 import type { ColumnPanel } from "./column-panel";
 import type { BoltRow, EndPlateView } from "./connection-view";
 import { rowFamilyOf, type GroupPosition, type RowFamily } from "./row-groups";
@@ -143,7 +144,12 @@ export function columnFlangeOf(
         };
   };
 
-  const setting = { node, thicknessMm: section.flangeThicknessMm, steel, mMm, nMm, steps };
+  const heldRows = {
+    outward: isStiffened ? (rows[outside[outside.length - 1] ?? -1]?.row ?? null) : null,
+    inward: isStiffened ? (rows[inside[0] ?? -1]?.row ?? null) : null,
+  };
+  const backing = backingPiecesOf(view, heldRows);
+  const setting = { node, thicknessMm: section.flangeThicknessMm, steel, mMm, nMm, backing, steps };
   return {
     family: rowFamilyOf(rows, segments, () => setting, alone, grouped),
     mMm,

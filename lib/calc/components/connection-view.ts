@@ -1,6 +1,6 @@
 import { boltTensionN } from "../clauses/en1993-1-8-2005/fasteners";
 import { columnBeyondMm } from "../mechanics/panel-levels";
-import type { PanelDesign, ThroughBars, TransverseStiffeners } from "../measures/panel-design";
+import type { BackingPlates, PanelDesign, ThroughBars, TransverseStiffeners } from "../measures/panel-design";
 import type {
   EndPlateConnection,
   FastenerGrade,
@@ -32,6 +32,8 @@ export interface JointView {
   /** Cosine of the slope of the pair in line with each flange; 1 where it is level. */
   readonly tensionSlopeCosine: number;
   readonly compressionSlopeCosine: number;
+  /** Plates behind this joint's column flange. */
+  readonly backing: Readonly<Record<Level, BackingPlates | null>>;
 }
 
 /** What holds one bolt row together: its bolts, or the threaded bars that replace them. */
@@ -108,6 +110,7 @@ export function jointViewOf(
     compressionStiffener: design.stiffeners[joint.side][compressionLevel],
     tensionSlopeCosine: slopeAt(tensionLevel),
     compressionSlopeCosine: slopeAt(compressionLevel),
+    backing: design.backing[joint.side],
   };
 }
 
@@ -193,6 +196,7 @@ export function endPlateViewOf(
     compressionStiffener: view.compressionStiffener,
     tensionSlopeCosine: view.tensionSlopeCosine,
     compressionSlopeCosine: view.compressionSlopeCosine,
+    backing: view.backing,
     connection,
     gaugeMm: connection.bolts.gaugeMm,
     extensionTensionMm: tensionLevel === "top" ? extensionTopMm : extensionBottomMm,

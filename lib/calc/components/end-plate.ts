@@ -126,6 +126,7 @@ export function endPlateOf(node: NodeCase, panel: ColumnPanel, view: EndPlateVie
     thicknessMm: plate.thicknessMm,
     steel: plate.steel,
     steps,
+    backing: [],
     mMm: leverMm,
     nMm,
   });

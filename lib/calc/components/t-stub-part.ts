@@ -1,6 +1,9 @@
 import { groupLengthMm } from "../clauses/en1993-1-8-2005/assembly";
 import { punchingN } from "../clauses/en1993-1-8-2005/fasteners";
 import {
+  backingMomentNmm,
+  modeOneBackedN,
+  modeOneBackedSimpleN,
   modeOneN,
   modeOneSimpleN,
   modeThreeN,
@@ -9,12 +12,18 @@ import {
   tStubN,
   tStubWithoutModeOneN,
 } from "../clauses/en1993-1-8-2005/t-stub";
+import {
+  backedFromStiffenerMm,
+  backedLengthMm,
+  modeOneWithPlateN,
+} from "../mechanics/backing-plate-formulas";
 import { relievedModeTwoN, relievedN } from "../mechanics/through-bar-formulas";
 import { defineFormula } from "../trace/define-formula";
 import { defineSeries, sumText } from "../trace/define-series";
 import type { NodeCase, Steel } from "../node";
 import type { Step, Trace } from "../trace/trace";
 import { traced, type Traced } from "../trace/traced";
+import type { BackingPiece } from "./backing-pieces";
 import type { BoltRow } from "./connection-view";
 
 /** The two families of yield patterns of one row: circular and other. */
@@ -80,6 +89,8 @@ export interface TStubSetting {
   readonly steel: Steel;
   readonly mMm: number;
   readonly nMm: number;
+  /** Plates behind the flange; none behind an end plate. */
+  readonly backing: readonly BackingPiece[];
   readonly steps: boolean;
 }
 
@@ -106,6 +117,72 @@ interface Modes {
   readonly boltsN: number;
 }
 
+/** Length of the pattern that one piece of plate stands behind, mm. Rows in order from the tension flange. */
+function backedOf(
+  trace: Trace | null,
+  rows: readonly BoltRow[],
+  lengthMm: number,
+  piece: BackingPiece,
+): number {
+  const first = rows[0];
+  const last = rows[rows.length - 1];
+  if (!first || !last) throw new RangeError("A T-stub without rows");
+  if (piece.heldRow === first.row || piece.heldRow === last.row) {
+    return backedFromStiffenerMm(trace, { lengthMm, pieceMm: piece.toMm - piece.fromMm });
+  }
+  return backedLengthMm(trace, {
+    lengthMm,
+    spanMm: last.fromFaceMm - first.fromFaceMm,
+    beforeMm: first.fromFaceMm - piece.fromMm,
+    afterMm: piece.toMm - last.fromFaceMm,
+  });
+}
+
+interface ModeOneGiven {
+  readonly momentNmm: number;
+  readonly mMm: number;
+  readonly nMm: number;
+  readonly headMm: number;
+}
+
+/** Mode 1 by the chosen method; where one plate stands behind all the rows, the larger of without and with it. */
+function modeOneOf(
+  trace: Trace | null,
+  rows: readonly BoltRow[],
+  one: Traced,
+  setting: TStubSetting,
+  given: ModeOneGiven,
+): number {
+  const isSimple = setting.node.tStubModeOne === "method-1";
+  const piece = setting.backing.find((candidate) =>
+    rows.every((row) => row.fromFaceMm > candidate.fromMm && row.fromFaceMm < candidate.toMm),
+  );
+  const { mMm, nMm, headMm } = given;
+  const plainN = isSimple
+    ? modeOneSimpleN(trace, { momentNmm: given.momentNmm, mMm }, 0)
+    : modeOneN(trace, { momentNmm: given.momentNmm, mMm, nMm, headMm }, 0);
+  if (!piece) return plainN;
+  const mark = trace?.mark();
+  const { gammaM0 } = setting.node.partialFactors;
+  const lengthMm = backedOf(trace, rows, one.value, piece);
+  const momentNmm = tStubMomentNmm(trace, {
+    lengthMm,
+    thicknessMm: setting.thicknessMm,
+    yieldMpa: setting.steel.yieldMpa,
+    gammaM0,
+  });
+  const backingNmm = backingMomentNmm(trace, {
+    lengthMm,
+    thicknessMm: piece.thicknessMm,
+    yieldMpa: piece.yieldMpa,
+    gammaM0,
+  });
+  const backedN = isSimple
+    ? modeOneBackedSimpleN(trace, { momentNmm, mMm, backingNmm }, mark)
+    : modeOneBackedN(trace, { momentNmm, mMm, backingNmm, nMm, headMm }, mark);
+  return modeOneWithPlateN(trace, { plainN, backedN }, 0);
+}
+
 function modesOf(rows: readonly BoltRow[], one: Traced, two: Traced, setting: TStubSetting): Modes {
   const { node, thicknessMm, steel, mMm, nMm, steps } = setting;
   const plastic = (length: Traced) =>
@@ -130,10 +207,7 @@ function modesOf(rows: readonly BoltRow[], one: Traced, two: Traced, setting: TS
       ? null
       : traced(steps, (trace) => {
           trace?.include(momentOne.step);
-          const momentNmm = momentOne.value;
-          return simple
-            ? modeOneSimpleN(trace, { momentNmm, mMm }, 0)
-            : modeOneN(trace, { momentNmm, mMm, nMm, headMm }, 0);
+          return modeOneOf(trace, rows, one, setting, { momentNmm: momentOne.value, mMm, nMm, headMm });
         });
   const momentTwo = plastic(two);
   const boltsN = 2 * sum(rows.map((row) => row.fastener.tension.value));

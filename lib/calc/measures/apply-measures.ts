@@ -1,3 +1,4 @@
+import { applyBackingPlates } from "./backing-plates";
 import type { MeasureCase, NodeCase } from "../node";
 import { OutsideScope } from "../outcome";
 import { applyHeavierColumn } from "./heavier-column";
@@ -24,7 +25,7 @@ function apply(design: PanelDesign, measure: MeasureCase): PanelDesign {
     case "diagonal-stiffeners":
       return notYet("diagonal stiffeners");
     case "backing-plates":
-      return notYet("flange backing plates");
+      return applyBackingPlates(design, measure);
   }
 }
 
@@ -51,6 +52,7 @@ export function designOf(node: NodeCase, measures: readonly MeasureCase[]): Pane
     stiffeners: nowhere(),
     pairs: [],
     webPlates: null,
+    backing: nowhere(),
     bars: nowhere(),
   };
   const applied = measures.reduce(apply, bare);

@@ -3,6 +3,7 @@ import type { StiffenerPair } from "./stiffener-pairs";
 
 export type TransverseStiffeners = Extract<MeasureCase, { kind: "transverse-stiffeners" }>;
 export type WebPlates = Extract<MeasureCase, { kind: "web-plates" }>;
+export type BackingPlates = Extract<MeasureCase, { kind: "backing-plates" }>;
 export type ThroughBars = Extract<MeasureCase, { kind: "through-bars" }>;
 
 /** Something at each flange of each beam, or nothing there. */
@@ -15,6 +16,7 @@ export interface PanelDesign {
   /** The same as pieces: one pair may serve both beams. */
   readonly pairs: readonly StiffenerPair[];
   readonly webPlates: WebPlates | null;
+  readonly backing: BySideAndLevel<BackingPlates>;
   readonly bars: BySideAndLevel<ThroughBars>;
 }
 

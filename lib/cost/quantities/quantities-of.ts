@@ -43,7 +43,7 @@ export function quantitiesOf(
     bare,
   );
   const pieceMassKg = (sectionMassKgPerM(column) * fabrication.liftLengthMm) / 1000;
-  const context: MeasureContext = { column, joints: node.joints, pieceMassKg };
+  const context: MeasureContext = { column, joints: node.joints, measures, pieceMassKg };
   for (const measure of measures) takeMeasure(take, context, measure);
   if (column !== bare) takeHeavierColumn(take, bare, column, fabrication);
   // A heavier column alone changes a size on a drawing and needs no detail of its own.

@@ -70,12 +70,15 @@ describe("what an option adds", () => {
     expect(points("cross")).toHaveLength(2);
     expect(points("k")).toHaveLength(2);
   });
-  it("lays backing plates inside the flange at the level named", () => {
+  it("lays backing plates inside the flange about the rows of the level named, on the side named", () => {
     const plates = shapesOf(BACKING).flatMap((shape) => (shape.shape === "rect" ? [shape] : []));
     expect(plates.map(({ side, x, width, y, height }) => [side, x, width, y + height / 2])).toEqual([
-      ["left", -131, 15, expect.closeTo(7.3, 9)],
-      ["right", 116, 15, expect.closeTo(7.3, 9)],
+      // Evenly about the rows at -45 and 65.
+      ["left", -131, 15, expect.closeTo((-45 + 65) / 2, 9)],
+      ["right", 116, 15, expect.closeTo((-45 + 65) / 2, 9)],
     ]);
+    const right = shapesOf({ ...BACKING, at: "right" } as MeasureCase);
+    expect(right.map((shape) => shape.side)).toEqual(["right"]);
   });
   it("adds no piece for a heavier column: the column itself is drawn heavier", () => {
     expect(shapesOf(HEAVIER)).toEqual([]);

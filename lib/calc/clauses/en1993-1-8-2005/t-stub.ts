@@ -57,6 +57,65 @@ export const modeOneN = defineFormula({
   },
 });
 
+/** Plastic moment of a backing plate over the length that it backs, Nmm. Table 6.2. */
+export const backingMomentNmm = defineFormula({
+  id: id("table-6.2/M_bp,Rd"),
+  source: from("Table 6.2"),
+  symbols: {
+    lengthMm: ["l_eff,1", "mm"],
+    thicknessMm: ["t_bp", "mm"],
+    yieldMpa: ["f_y,bp", "N/mm2"],
+    gammaM0: ["γ_M0", "1"],
+  },
+  result: ["M_bp,Rd", "Nmm"],
+  expression: "0.25 * lengthMm * thicknessMm^2 * yieldMpa / gammaM0",
+  evaluate: (g) => (0.25 * g.lengthMm * g.thicknessMm * g.thicknessMm * g.yieldMpa) / g.gammaM0,
+  example: {
+    given: { lengthMm: 200, thicknessMm: 10, yieldMpa: 275, gammaM0: 1 },
+    gives: 1_375_000,
+    relTol: 1e-12,
+  },
+});
+
+const backedSymbols = { ...modeOneSymbols, backingNmm: ["M_bp,Rd", "Nmm"] } as const;
+
+/** Mode 1 with backing plates, method 1, N. Table 6.2. */
+export const modeOneBackedSimpleN = defineFormula({
+  id: id("table-6.2/F_T,1,Rd method 1 with backing plates"),
+  source: from("Table 6.2, method 1 with backing plates"),
+  symbols: backedSymbols,
+  result: ["F_T,1,Rd", "N"],
+  expression: "(4 * momentNmm + 2 * backingNmm) / mMm",
+  evaluate: (g) => (4 * g.momentNmm + 2 * g.backingNmm) / g.mMm,
+  example: {
+    given: { momentNmm: 1_000_000, mMm: 40, backingNmm: 500_000 },
+    gives: 125_000,
+    relTol: 1e-12,
+  },
+});
+
+/** Mode 1 with backing plates by method 2, N. Table 6.2. */
+export const modeOneBackedN = defineFormula({
+  id: id("table-6.2/F_T,1,Rd method 2 with backing plates"),
+  source: from("Table 6.2, method 2 with backing plates"),
+  symbols: { ...backedSymbols, nMm: ["n", "mm"], headMm: ["e_w", "mm"] },
+  result: ["F_T,1,Rd", "N"],
+  expression:
+    "((8 * nMm - 2 * headMm) * momentNmm + 4 * nMm * backingNmm) / (2 * mMm * nMm - headMm * (mMm + nMm))",
+  evaluate: (g) =>
+    ((8 * g.nMm - 2 * g.headMm) * g.momentNmm + 4 * g.nMm * g.backingNmm) /
+    (2 * g.mMm * g.nMm - g.headMm * (g.mMm + g.nMm)),
+  limitBroken: (g) =>
+    2 * g.mMm * g.nMm - g.headMm * (g.mMm + g.nMm) <= 0
+      ? "2 m n does not exceed e_w (m + n): mode 1 cannot occur"
+      : null,
+  example: {
+    given: { momentNmm: 1_000_000, mMm: 40, backingNmm: 500_000, nMm: 50, headMm: 10 },
+    gives: (380 * 1_000_000 + 200 * 500_000) / (4000 - 900),
+    relTol: 1e-12,
+  },
+});
+
 /** Mode 2, bolt failure with yielding of the flange, N. Table 6.2. */
 export const modeTwoN = defineFormula({
   id: id("table-6.2/F_T,2,Rd"),

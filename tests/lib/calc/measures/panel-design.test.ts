@@ -24,6 +24,7 @@ describe("the design of the panel", () => {
       stiffeners: nowhere(),
       pairs: [],
       webPlates: null,
+      backing: nowhere(),
       bars: nowhere(),
     };
     expect(hasBars(design)).toBe(false);

@@ -154,6 +154,14 @@ describe("backing plates", () => {
     ).toEqual([2, 2]);
     expect(take([backingPlates()]).weldRuns).toEqual([]);
   });
+
+  it("are parted in two by a stiffener at their level, and left out where no side is named", () => {
+    const parted = records([stiffeners({ levels: ["top"] }), backingPlates()], "plate").slice(1);
+    expect(parted.map((record) => record.values.parts)).toEqual([4, 4]);
+    const whole = records([backingPlates()], "plate");
+    expect(parted[0]?.values.massKg).toBeCloseTo(whole[0]?.values.massKg ?? NaN, 9);
+    expect(records([backingPlates({ at: "left" })], "plate")).toHaveLength(1);
+  });
 });
 
 describe("through bars", () => {
