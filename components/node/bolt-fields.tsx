@@ -1,9 +1,11 @@
 "use client";
 
+import { ChoiceField } from "@/components/forms/choice-field";
 import { FormRow, RowGroup } from "@/components/forms/form-grid";
 import { DraftCheck, DraftChoice, DraftQuantity, DraftRows, useDraftForm } from "./draft-form";
-import { textAt, valueAt, type DraftObject } from "./node-draft";
+import { textAt, type DraftObject } from "./node-draft";
 import { anySide, Both, isEndPlate, SIDE_WORDS, type SideName } from "./side-cells";
+import { withBoltsPerRow } from "./side-edits";
 
 const PER_ROW = [
   { value: "2", label: "2" },
@@ -16,24 +18,21 @@ const ASSEMBLIES = [
   { value: "HV", label: "HV" },
 ];
 
-/** Two bolts a row where nothing is said. */
+/** Two bolts a row where nothing is said; with four comes the gauge of the outer ones. */
 function PerRow({ side }: { readonly side: SideName }) {
-  const { draft, set, readOnly } = useDraftForm();
+  const { draft, edit, readOnly, errorAt, onFocus } = useDraftForm();
   const path = `${side}.connection.bolts.perRow`;
-  if (valueAt(draft, path) !== undefined)
-    return <DraftChoice path={path} label={`${SIDE_WORDS[side]} bolts a row`} choices={PER_ROW} />;
-  if (readOnly) return <p className="py-1">2</p>;
   return (
-    <select
-      aria-label={`${SIDE_WORDS[side]} bolts a row`}
-      data-path={path}
-      value="2"
-      onChange={(event) => set(path, event.target.value)}
-      className="control min-h-8 w-full min-w-0 py-0.5"
-    >
-      <option value="2">2</option>
-      <option value="4">4</option>
-    </select>
+    <ChoiceField
+      label={`${SIDE_WORDS[side]} bolts a row`}
+      path={path}
+      value={textAt(draft, path) || "2"}
+      choices={PER_ROW}
+      readOnly={readOnly}
+      error={errorAt(path)}
+      onFocus={() => onFocus(path)}
+      onChange={(chosen) => edit((now) => withBoltsPerRow(now, side, chosen === "4" ? "4" : "2"))}
+    />
   );
 }
 
@@ -102,14 +101,15 @@ export function BoltRows() {
         {() => <Both when={isEndPlate}>{(side) => <PerRow side={side} />}</Both>}
       </FormRow>
       {anySide(draft, hasFour) ? (
-        <FormRow label="Outer gauge" unit="mm">
-          {() => (
+        <FormRow label="Outer gauge" unit="mm" hint="Between the two outer bolts of a row.">
+          {(hintId) => (
             <Both when={hasFour}>
               {(side) => (
                 <DraftQuantity
                   {...cell(side, "outerGauge")}
                   label={`${SIDE_WORDS[side]} outer bolt gauge`}
                   unit="mm"
+                  hintId={hintId}
                 />
               )}
             </Both>

@@ -88,7 +88,9 @@ const WORD_FIELDS = new Set([
   "tStubModeOne",
 ]);
 /** Groups that may be left out as a whole: emptied field by field, they go. */
-const OPTIONAL_GROUPS = new Set(["stiffener", "top", "bottom", "fabrication", "choices"]);
+const OPTIONAL_GROUPS = new Set(["stiffener", "top", "bottom", "stiffened", "fabrication", "choices"]);
+/** Words that may be left out: chosen to be not stated, they go. */
+const OPTIONAL_WORDS = new Set(["assembly", "strengths", "tStubModeOne"]);
 
 /**
  * The number that a text means: decimal point or comma, true minus sign and blanks between thousands
@@ -105,7 +107,7 @@ export function numberTyped(text: string): number | null {
 
 function readValue(value: DraftValue, field: string, inList: boolean): unknown {
   if (typeof value === "string") {
-    if (WORD_FIELDS.has(field)) return value === "" && field === "assembly" ? undefined : value;
+    if (WORD_FIELDS.has(field)) return value === "" && OPTIONAL_WORDS.has(field) ? undefined : value;
     if (value.trim() === "" && !inList) return undefined;
     return numberTyped(value) ?? value;
   }

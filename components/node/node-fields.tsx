@@ -1,6 +1,6 @@
 "use client";
 
-import { FormRow, FormSection } from "@/components/forms/form-grid";
+import { FormRow, FormSection, RowGroup } from "@/components/forms/form-grid";
 import { DraftChoice, DraftQuantity, DraftSection, DraftSteel, DraftText, useDraftForm } from "./draft-form";
 import { isDraftObject, valueAt } from "./node-draft";
 
@@ -141,7 +141,47 @@ export function TargetFields() {
   );
 }
 
-/** Partial factors of the national annex. */
+const STRENGTHS = [
+  { value: "", label: "product standard" },
+  { value: "en1993-1-1-table-3.1", label: "EN 1993-1-1, Table 3.1" },
+];
+const T_STUB_METHODS = [
+  { value: "", label: "method 1" },
+  { value: "method-2", label: "method 2" },
+];
+
+/** Which reading is taken where the standard leaves a choice; nothing is written down where it is the usual one. */
+function ReadingRows() {
+  return (
+    <RowGroup title="Reading of the standard">
+      <FormRow label="Strengths" hint="Of grades by name, at the thickness of each part.">
+        {(hintId) => (
+          <DraftChoice
+            path="choices.strengths"
+            label="Strengths of grades"
+            choices={STRENGTHS}
+            hintId={hintId}
+          />
+        )}
+      </FormRow>
+      <FormRow
+        label="T-stub, mode 1"
+        hint="EN 1993-1-8, Table 6.2: with (2) or without (1) the washer’s width."
+      >
+        {(hintId) => (
+          <DraftChoice
+            path="choices.tStubModeOne"
+            label="T-stub method in mode 1"
+            choices={T_STUB_METHODS}
+            hintId={hintId}
+          />
+        )}
+      </FormRow>
+    </RowGroup>
+  );
+}
+
+/** Partial factors of the national annex, and the reading of the standard. */
 export function FactorFields() {
   return (
     <FormSection title="Partial factors">
@@ -163,6 +203,7 @@ export function FactorFields() {
           )}
         </FormRow>
       ))}
+      <ReadingRows />
     </FormSection>
   );
 }

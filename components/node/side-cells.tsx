@@ -1,6 +1,7 @@
 "use client";
 
 import type { ReactNode } from "react";
+import { FormRow } from "@/components/forms/form-grid";
 import { useDraftForm } from "./draft-form";
 import { isDraftObject, textAt, type DraftObject } from "./node-draft";
 
@@ -27,13 +28,27 @@ export function Both({ when, children }: BothProps) {
   );
 }
 
+export interface SideRowProps {
+  readonly label: string;
+  readonly unit?: string;
+  readonly hint?: string;
+  readonly when: (side: SideName, draft: DraftObject) => boolean;
+  readonly children: (side: SideName, hintId: string | undefined) => ReactNode;
+}
+
+/** A row of the form with one field a side. */
+export const SideRow = ({ when, children, ...row }: SideRowProps) => (
+  <FormRow {...row}>{(hintId) => <Both when={when}>{(side) => children(side, hintId)}</Both>}</FormRow>
+);
+
 /** The kind of a side's connection, or nothing. */
 export const kindOf = (side: SideName, draft: DraftObject): string =>
   textAt(draft, `${side}.connection.kind`);
 export const isEndPlate = (side: SideName, draft: DraftObject): boolean =>
   kindOf(side, draft) === "end-plate";
-export const hasWelds = (side: SideName, draft: DraftObject): boolean =>
-  kindOf(side, draft) !== "flange-cleats";
+export const hasWelds = (side: SideName, draft: DraftObject): boolean => !hasCleats(side, draft);
+export const hasCleats = (side: SideName, draft: DraftObject): boolean =>
+  kindOf(side, draft) === "flange-cleats";
 /** Whether a test holds on any side that has a beam. */
 export const anySide = (draft: DraftObject, test: (side: SideName, draft: DraftObject) => boolean): boolean =>
   SIDES.some((side) => isDraftObject(draft[side]) && test(side, draft));

@@ -1,4 +1,12 @@
-import { isDraftList, isDraftObject, withValue, type DraftObject, type DraftValue } from "./node-draft";
+import {
+  isDraftList,
+  isDraftObject,
+  numberTyped,
+  textAt,
+  withValue,
+  type DraftObject,
+  type DraftValue,
+} from "./node-draft";
 
 type SideName = "left" | "right";
 const NO_ACTIONS: DraftObject = { moment: 0, axialForce: 0, shear: 0 };
@@ -34,11 +42,35 @@ export const withoutSide = (draft: DraftObject, side: SideName): DraftObject =>
 
 const START_WELDS: DraftObject = { topFlange: 6, bottomFlange: 6, web: 4 };
 
-/** Changes the kind of a connection; welds are kept, an end plate starts from the beam's own sizes where there was none. */
+export type ConnectionKind = "end-plate" | "welded" | "flange-cleats";
+
+/** Angles to start from: as long as the beam is wide, with one row of bolts in each leg. */
+const startCleats = (steel: DraftValue, beamWidthMm: number): DraftObject => {
+  const gauge = Math.round(beamWidthMm / 20) * 10;
+  const bolts = { size: "M20", grade: "8.8", gauge };
+  return {
+    kind: "flange-cleats",
+    cleat: { section: "L 150x90x12", steel, length: Math.round(beamWidthMm) },
+    bolts: { ...bolts, distance: 55 },
+    beamBolts: { ...bolts, rows: [60] },
+    gap: 10,
+  };
+};
+
+/** Web cleats to start from; half as long as the beam is deep. */
+export const startWebCleats = (steel: DraftValue, beamDepthMm: number): DraftObject => ({
+  section: "L 90x90x8",
+  steel,
+  length: Math.round(beamDepthMm / 20) * 10,
+  bolts: { size: "M20", grade: "8.8", rows: [50] },
+  beamBolts: { size: "M20", grade: "8.8", rows: [50] },
+});
+
+/** Changes the kind of a connection; welds are kept, an end plate or cleats start from the beam's own sizes where there were none. */
 export function withConnectionKind(
   draft: DraftObject,
   side: SideName,
-  kind: "end-plate" | "welded",
+  kind: ConnectionKind,
   beamDepthMm: number,
   beamWidthMm: number,
 ): DraftObject {
@@ -47,6 +79,8 @@ export function withConnectionKind(
   const welds = isDraftObject(before.welds) ? before.welds : START_WELDS;
   if (kind === "welded") return withValue(draft, `${side}.connection`, { kind, welds });
   const steel = isDraftObject(holder) && isDraftObject(holder.beam) ? (holder.beam.steel ?? "S355") : "S355";
+  if (kind === "flange-cleats")
+    return withValue(draft, `${side}.connection`, startCleats(steel, beamWidthMm));
   const rows = [-45, 65, Math.round(beamDepthMm - 65)];
   return withValue(draft, `${side}.connection`, {
     kind,
@@ -60,6 +94,16 @@ export function withConnectionKind(
     bolts: { size: "M24", grade: "10.9", gauge: 120, rows },
     welds,
   });
+}
+
+/** Two bolts a row, or four with an outer gauge to start from: as far outside the inner bolts as those are apart. */
+export function withBoltsPerRow(draft: DraftObject, side: SideName, perRow: "2" | "4"): DraftObject {
+  const bolts = `${side}.connection.bolts`;
+  if (perRow === "2")
+    return withValue(withValue(draft, `${bolts}.perRow`, undefined), `${bolts}.outerGauge`, undefined);
+  const gauge = numberTyped(textAt(draft, `${bolts}.gauge`));
+  const four = withValue(draft, `${bolts}.perRow`, perRow);
+  return gauge === null ? four : withValue(four, `${bolts}.outerGauge`, String(gauge * 2));
 }
 
 /** A load case more: a copy of the last one under a name of its own, or the first of all. */

@@ -1,11 +1,23 @@
 "use client";
 
+import { useState } from "react";
 import { FormRow, FormSection, RowGroup } from "@/components/forms/form-grid";
 import { findSection } from "@/lib/catalog/find-section";
 import { DraftQuantity, DraftSection, DraftSteel, DraftWeld, useDraftForm } from "./draft-form";
-import { isDraftObject, valueAt } from "./node-draft";
-import { anySide, Both, hasWelds, isEndPlate, kindOf, SIDE_WORDS, type SideName } from "./side-cells";
+import { isDraftObject, valueAt, type DraftObject } from "./node-draft";
+import {
+  anySide,
+  Both,
+  hasCleats,
+  hasWelds,
+  isEndPlate,
+  kindOf,
+  SIDE_WORDS,
+  SideRow,
+  type SideName,
+} from "./side-cells";
 import { BoltRows } from "./bolt-fields";
+import { CleatFields } from "./cleat-fields";
 import { withConnectionKind, withoutSide, withSideCopied } from "./side-edits";
 
 const SMALL = "text-note font-normal text-petrol hover:underline";
@@ -45,10 +57,10 @@ function SideHead({ side }: { readonly side: SideName }) {
 const KINDS = [
   { value: "end-plate", label: "bolted end plate" },
   { value: "welded", label: "welded" },
-];
-const CLEATS = { value: "flange-cleats", label: "flange cleats" };
+  { value: "flange-cleats", label: "flange cleats" },
+] as const;
 
-/** The kind of connection. Cleats come with a document and are kept; they have no fields here yet. */
+/** The kind of connection; another kind starts from sizes that fit the beam. */
 function ConnectionKind({ side }: { readonly side: SideName }) {
   const { draft, catalog, readOnly, edit, errorAt } = useDraftForm();
   const kind = kindOf(side, draft);
@@ -56,10 +68,8 @@ function ConnectionKind({ side }: { readonly side: SideName }) {
   const row = typeof section === "string" ? findSection(catalog, section) : null;
   const sizeOf = (key: string, catalogued: number | undefined): number =>
     catalogued ?? (Number(valueAt(section, key)) || 300);
-  const choices = kind === "flange-cleats" ? [...KINDS, CLEATS] : KINDS;
   const label = `${SIDE_WORDS[side]} connection`;
-  if (readOnly)
-    return <p className="py-1">{choices.find((choice) => choice.value === kind)?.label ?? kind}</p>;
+  if (readOnly) return <p className="py-1">{KINDS.find((choice) => choice.value === kind)?.label ?? kind}</p>;
   return (
     <div>
       <select
@@ -67,8 +77,8 @@ function ConnectionKind({ side }: { readonly side: SideName }) {
         data-path={`${side}.connection.kind`}
         value={kind}
         onChange={(event) => {
-          const chosen = event.target.value;
-          if (chosen === "end-plate" || chosen === "welded") {
+          const chosen = KINDS.find(({ value }) => value === event.target.value)?.value;
+          if (chosen) {
             edit((now) =>
               withConnectionKind(now, side, chosen, sizeOf("h", row?.depthMm), sizeOf("b", row?.widthMm)),
             );
@@ -76,7 +86,7 @@ function ConnectionKind({ side }: { readonly side: SideName }) {
         }}
         className="control min-h-8 w-full min-w-0 py-0.5"
       >
-        {choices.map((choice) => (
+        {KINDS.map((choice) => (
           <option key={choice.value} value={choice.value}>
             {choice.label}
           </option>
@@ -188,6 +198,51 @@ function PlateRows() {
   );
 }
 
+const RIB_ROWS = [
+  ["top.thickness", "Above, thickness", "rib above the beam, thickness"],
+  ["top.length", "Above, length", "rib above the beam, length"],
+  ["bottom.thickness", "Below, thickness", "rib below the beam, thickness"],
+  ["bottom.length", "Below, length", "rib below the beam, length"],
+] as const;
+const hasRibs = (side: SideName, draft: DraftObject): boolean =>
+  isEndPlate(side, draft) && isDraftObject(valueAt(draft, `${side}.connection.plate.stiffener`));
+
+/** Ribs between the beam's flange and the plate past it. Few nodes have them, so their rows come when asked for. */
+function RibRows() {
+  const { draft, readOnly } = useDraftForm();
+  const [isAsked, setAsked] = useState(false);
+  if (!isAsked && !anySide(draft, hasRibs)) {
+    return readOnly ? null : (
+      <button type="button" className={`${SMALL} py-1`} onClick={() => setAsked(true)}>
+        + ribs on the plate past the beam
+      </button>
+    );
+  }
+  return (
+    <RowGroup title="Ribs past the beam">
+      {RIB_ROWS.map(([key, label, words], index) => (
+        <SideRow
+          key={key}
+          label={label}
+          unit="mm"
+          when={isEndPlate}
+          {...(index === 0 ? { hint: "Length along the beam. Empty: no rib." } : {})}
+        >
+          {(side, hintId) => (
+            <DraftQuantity
+              path={`${side}.connection.plate.stiffener.${key}`}
+              label={`${SIDE_WORDS[side]} ${words}`}
+              unit="mm"
+              placeholder="none"
+              hintId={hintId}
+            />
+          )}
+        </SideRow>
+      ))}
+    </RowGroup>
+  );
+}
+
 function WeldRows() {
   const rows = [
     ["topFlange", "Top flange", "top flange weld"],
@@ -223,7 +278,6 @@ function WeldRows() {
 /** Beams and connections, left and right side by side as on a schedule. */
 export function SideFields() {
   const { draft, errorAt } = useDraftForm();
-  const hasCleats = anySide(draft, (side, now) => kindOf(side, now) === "flange-cleats");
   const missing = errorAt("left") ?? errorAt("right");
   return (
     <FormSection
@@ -241,14 +295,11 @@ export function SideFields() {
       <RowGroup title="Connection">
         <FormRow label="Kind">{() => <Both>{(side) => <ConnectionKind side={side} />}</Both>}</FormRow>
       </RowGroup>
-      {hasCleats ? (
-        <p className="border-t border-rule py-2 text-note text-soft">
-          Cleats are kept as they came; change them in the node as JSON.
-        </p>
-      ) : null}
+      {anySide(draft, hasCleats) ? <CleatFields /> : null}
       {anySide(draft, isEndPlate) ? (
         <>
           <PlateRows />
+          <RibRows />
           <BoltRows />
         </>
       ) : null}

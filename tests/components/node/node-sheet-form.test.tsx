@@ -166,6 +166,72 @@ describe("the node sheet", () => {
     expect(field("Load case B, left moment (kNm)")).toHaveValue("-80");
   });
 
+  it("asks for ribs past the beam when they are wanted, and leaves them out again when emptied", () => {
+    const onSave = vi.fn();
+    render(<Sheet onSave={onSave} />);
+    expect(screen.queryByLabelText("Left rib above the beam, thickness (mm)")).toBeNull();
+    fireEvent.click(screen.getByText("+ ribs on the plate past the beam"));
+    type("Left rib above the beam, thickness (mm)", "12");
+    expect(field("Left rib above the beam, length (mm)")).toBeInvalid();
+    expect(field("Left rib above the beam, length (mm)")).toHaveAccessibleDescription(
+      /This field is missing/,
+    );
+    type("Left rib above the beam, length (mm)", "150");
+    fireEvent.keyDown(window, { key: "s", ctrlKey: true });
+    const saved = () => (onSave.mock.lastCall as [NodeDocument])[0].left?.connection;
+    expect(saved()).toMatchObject({ plate: { stiffener: { top: { thickness: 12, length: 150 } } } });
+    type("Left rib above the beam, thickness (mm)", "");
+    type("Left rib above the beam, length (mm)", "");
+    fireEvent.keyDown(window, { key: "s", ctrlKey: true });
+    expect(saved()).toEqual(buildNodeDocument().left?.connection);
+  });
+
+  it("takes four bolts a row with an outer gauge to start from, and goes back to two", () => {
+    render(<Sheet />);
+    fireEvent.change(field("Left bolts a row"), { target: { value: "4" } });
+    // As far outside the inner bolts as those are apart: 2 x 120.
+    expect(field("Left outer bolt gauge (mm)")).toHaveValue("240");
+    fireEvent.change(field("Left bolts a row"), { target: { value: "2" } });
+    expect(screen.queryByLabelText("Left outer bolt gauge (mm)")).toBeNull();
+    expect(screen.queryByTestId("faults")).toBeNull();
+  });
+
+  it("takes flange cleats with web cleats, draws them, and says beside the field what is wrong", () => {
+    const onSave = vi.fn();
+    render(<Sheet onSave={onSave} />);
+    fireEvent.change(field("Left connection"), { target: { value: "flange-cleats" } });
+    expect(screen.queryByTestId("faults")).toBeNull();
+    expect(screen.getByRole("group", { name: /Elevation/ })).toHaveAccessibleDescription(
+      /flange cleats 150 by 90/,
+    );
+    type("Left cleat bolts in the column, from the heel (mm)", "200");
+    expect(field("Left cleat bolts in the column, from the heel (mm)")).toHaveAccessibleDescription(
+      /passes the end of the 150 mm leg/,
+    );
+    type("Left cleat bolts in the column, from the heel (mm)", "60");
+    type("Left rib of the cleats, thickness (mm)", "10");
+    fireEvent.click(screen.getByLabelText("Add the left web cleats"));
+    type("Left web cleat length (mm)", "240");
+    fireEvent.keyDown(window, { key: "s", ctrlKey: true });
+    expect((onSave.mock.lastCall as [NodeDocument])[0].left?.connection).toMatchObject({
+      kind: "flange-cleats",
+      bolts: { size: "M20", distance: 60 },
+      stiffened: { thickness: 10 },
+      webCleats: { length: 240, bolts: { rows: [50] } },
+    });
+  });
+
+  it("writes a reading of the standard down only where it is not the usual one", () => {
+    const onSave = vi.fn();
+    render(<Sheet onSave={onSave} />);
+    fireEvent.change(field("T-stub method in mode 1"), { target: { value: "method-2" } });
+    fireEvent.keyDown(window, { key: "s", ctrlKey: true });
+    expect(onSave).toHaveBeenLastCalledWith(buildNodeDocument({ choices: { tStubModeOne: "method-2" } }));
+    fireEvent.change(field("T-stub method in mode 1"), { target: { value: "" } });
+    fireEvent.keyDown(window, { key: "s", ctrlKey: true });
+    expect(onSave).toHaveBeenLastCalledWith(buildNodeDocument());
+  });
+
   it("shows everything and changes nothing for those who may only look", () => {
     render(<Sheet canEdit={false} />);
     expect(screen.queryAllByRole("textbox")).toEqual([]);
