@@ -7,6 +7,9 @@ const sideWords = (at: "left" | "right" | "both" | undefined): string =>
 const weldWords = (weld: WeldInput): string => (weld === "butt" ? "butt weld" : `throat ${weld} mm`);
 const steelWords = (steel: SteelInput): string => (typeof steel === "string" ? steel : `f_y ${steel.fy}`);
 
+const rowWords = (rows: readonly number[] | undefined): string =>
+  rows === undefined ? "" : `, ${rows.length === 1 ? "row" : "rows"} ${rows.join(" and ")}`;
+
 /** A section by its name, or by its dimensions where it has none. */
 export const sectionWords = (section: SectionInput): string =>
   typeof section === "string"
@@ -25,7 +28,7 @@ export function measureSummary(measure: MeasureInput): string {
     case "backing-plates":
       return `backing ${measure.width} × ${measure.length} × ${measure.thickness} ${levelsWords(measure.levels)}${sideWords(measure.at)}`;
     case "through-bars":
-      return `bars ${measure.size} ${measure.grade} ${levelsWords(measure.levels)}${measure.innerNuts ? ", inner nuts" : ""}`;
+      return `bars ${measure.size} ${measure.grade} ${levelsWords(measure.levels)}${rowWords(measure.rows)}${measure.innerNuts ? ", inner nuts" : ""}`;
     case "heavier-column":
       return `${sectionWords(measure.section)} over the lift`;
   }
@@ -73,6 +76,7 @@ export function measureFacts(measure: MeasureInput): readonly (readonly [label: 
     case "through-bars":
       return [
         ["Levels", levelsWords(measure.levels)],
+        ["Rows", measure.rows?.join(", ") ?? "all of these levels"],
         ["Bars", `${measure.size} ${measure.grade}`],
         ["Inner nuts", measure.innerNuts ? "yes" : "no"],
       ];

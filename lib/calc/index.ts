@@ -7,5 +7,6 @@ export * from "./result";
 export { sectionProperties, type SectionProperties } from "./mechanics/section-properties";
 export { ELASTIC_MODULUS_MPA } from "./clauses/en1993-1-1-2005/members";
 export { areFacing } from "./mechanics/panel-levels";
+export { isBarRow } from "./measures/panel-design";
 export { pairsOfMeasure, type StiffenerPair } from "./measures/stiffener-pairs";
 export { CUT_THREAD_REDUCTION } from "./components/connection-view";

@@ -190,6 +190,13 @@ export type MeasureCase =
       readonly kind: "through-bars";
       readonly levels: readonly Level[];
       readonly at?: MeasureSides;
+      /** The bolt rows that bars replace; left out = every row of the levels. */
+      readonly rows?: {
+        /** As the document numbers them, on the joint the measure stands at. */
+        readonly numbers: readonly number[];
+        /** Below the top of the left beam. */
+        readonly heightsMm: readonly number[];
+      };
       readonly size: FastenerSize;
       readonly grade: FastenerGrade;
       readonly innerNuts: boolean;

@@ -1,3 +1,4 @@
+import { isBarRow } from "@/lib/calc";
 import type { FastenerSize, Level, MeasureCase } from "@/lib/calc/node";
 import type { Shape } from "./drawing";
 import { levelOfRow, outerFaceMm, type Frame, type PlacedJoint } from "./frame";
@@ -116,11 +117,12 @@ export function barShapes(
 }
 
 /** Rows of the whole node by height: a bar goes through both sides, so equal heights are one row. */
-function barRows(frame: Frame, { at }: ThroughBars, level: Level): { yMm: number; row: number }[] {
+function barRows(frame: Frame, bars: ThroughBars, level: Level): { yMm: number; row: number }[] {
+  const { at } = bars;
   const named = frame.joints.filter(({ side }) => at === undefined || at === "both" || at === side);
   const rows = named.flatMap((placed) =>
     placed.rowsMm.flatMap((yMm, index) =>
-      levelOfRow(placed, yMm) === level ? [{ yMm, row: index + 1 }] : [],
+      levelOfRow(placed, yMm) === level && isBarRow(bars, yMm) ? [{ yMm, row: index + 1 }] : [],
     ),
   );
   return rows.filter(({ yMm }, index) => rows.findIndex((other) => Math.abs(other.yMm - yMm) < 1) === index);

@@ -81,16 +81,52 @@ function backingPlates(
   return { kind, levels, ...(at === undefined ? {} : { at }), thicknessMm, widthMm, lengthMm, steel };
 }
 
+/** Heights of the rows that bars are to replace, numbered on the joint that the measure stands at, else the first one. */
+function barRows(
+  { problems }: Resolving,
+  numbers: readonly number[],
+  at: Input<"through-bars">["at"],
+  document: NodeDocument,
+  path: string,
+): NonNullable<Case<"through-bars">["rows"]> {
+  const side = at === "right" || !document.left ? "right" : "left";
+  const connection = document[side]?.connection;
+  const rows = connection?.kind === "end-plate" ? connection.bolts.rows : [];
+  const offset = side === "right" ? (document.right?.levelOffset ?? 0) : 0;
+  const heightsMm = numbers.flatMap((number, index) => {
+    const row = rows[number - 1];
+    if (row !== undefined) return [offset + row];
+    problems.add(
+      `${path}.rows.${index}`,
+      rows.length === 0
+        ? `The connection on the ${side} has no bolt rows for bars to replace.`
+        : `There is no bolt row ${number} on the ${side}: its rows are 1 to ${rows.length}.`,
+    );
+    return [];
+  });
+  return { numbers, heightsMm };
+}
+
 function throughBars(
   context: Resolving,
   input: Input<"through-bars">,
+  document: NodeDocument,
   path: string,
 ): Case<"through-bars"> | null {
+  const rows = input.rows && barRows(context, input.rows, input.at, document, path);
   const size = resolveFastenerSize(context, input.size, `${path}.size`);
   const grade = resolveFastenerGrade(context, input.grade, `${path}.grade`);
   if (!size || !grade) return null;
   const { kind, levels, at, innerNuts } = input;
-  return { kind, levels, ...(at === undefined ? {} : { at }), size, grade, innerNuts };
+  return {
+    kind,
+    levels,
+    ...(at === undefined ? {} : { at }),
+    ...(rows ? { rows } : {}),
+    size,
+    grade,
+    innerNuts,
+  };
 }
 
 /** The heavier column is of the column's own grade, with the strength of its own flange thickness. */
@@ -122,7 +158,7 @@ function resolveMeasure(
     case "backing-plates":
       return backingPlates(context, input, path);
     case "through-bars":
-      return throughBars(context, input, path);
+      return throughBars(context, input, document, path);
     case "heavier-column":
       return heavierColumn(context, input, document, path);
   }
@@ -215,6 +251,7 @@ function describeMeasure(measure: MeasureCase): MeasureInput {
         kind: measure.kind,
         levels: [...measure.levels],
         ...(measure.at === undefined ? {} : { at: measure.at }),
+        ...(measure.rows === undefined ? {} : { rows: [...measure.rows.numbers] }),
         size: measure.size.name,
         grade: measure.grade.name,
         innerNuts: measure.innerNuts,

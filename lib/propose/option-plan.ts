@@ -1,4 +1,4 @@
-import type { Level, NodeCase } from "@/lib/calc/node";
+import type { Level, MeasureCase, NodeCase } from "@/lib/calc/node";
 import { fixedShape, listSpace, type DesignSpace, type Shape } from "./design-space";
 import { forceLevels } from "./force-levels";
 import { partialLengthsMm, stiffenerSpace } from "./stiffener-space";
@@ -74,10 +74,29 @@ function webPlateOptions(node: NodeCase, stock: Stock): readonly PlannedOption[]
  */
 const BAR_SIZES: ReadonlySet<string> = new Set(["M16", "M20", "M24", "M27", "M30"]);
 
-function barSpace(stock: Stock, levels: readonly Level[]): readonly Shape[] {
+/** Every row of the levels, or at one level a single row of several: fewer bars where they do. */
+function rowsWorthTrying(node: NodeCase, levels: readonly Level[]): readonly BarRows[] {
+  const [lead] = node.joints;
+  const [level] = levels;
+  if (levels.length > 1 || lead?.connection.kind !== "end-plate") return [{}];
+  const middle = lead.beam.section.depthMm / 2;
+  const rows = lead.connection.bolts.rowsMm
+    .map((row, index) => ({ row, number: index + 1 }))
+    .filter(({ row }) => (row < middle ? "top" : "bottom") === level);
+  const single = rows.map(({ row, number }) => ({
+    rows: { numbers: [number], heightsMm: [lead.levelOffsetMm + row] },
+  }));
+  return rows.length > 1 ? [...single, {}] : [{}];
+}
+
+type BarRows = Pick<Extract<MeasureCase, { kind: "through-bars" }>, "rows">;
+
+function barSpace(node: NodeCase, stock: Stock, levels: readonly Level[]): readonly Shape[] {
   const bars = stock.bars.filter(({ size }) => BAR_SIZES.has(size.name));
-  return bars.map(({ size, grade }) =>
-    fixedShape([{ kind: "through-bars", levels, size, grade, innerNuts: true }]),
+  return rowsWorthTrying(node, levels).flatMap((rows) =>
+    bars.map(({ size, grade }) =>
+      fixedShape([{ kind: "through-bars", levels, ...rows, size, grade, innerNuts: true }]),
+    ),
   );
 }
 
@@ -87,7 +106,7 @@ function barOptions(node: NodeCase, stock: Stock): readonly PlannedOption[] {
   const bars = alone.map((levels) => ({
     key: levels.length === 2 ? "bars-both" : `bars-${levels[0]}`,
     name: `Bars ${levelWords(levels)}`,
-    space: listSpace(barSpace(stock, levels)),
+    space: listSpace(barSpace(node, stock, levels)),
   }));
   const mixed = BOTH.map((level) => {
     const other: Level = level === "top" ? "bottom" : "top";
@@ -96,7 +115,7 @@ function barOptions(node: NodeCase, stock: Stock): readonly PlannedOption[] {
       name: `Bars at ${level}, stiffeners at ${other}`,
       space: {
         kind: "product" as const,
-        first: barSpace(stock, [level]),
+        first: barSpace(node, stock, [level]),
         second: stiffenerSpace(node, stock, [other], ["full"]),
       },
     };

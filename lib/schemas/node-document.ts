@@ -172,6 +172,8 @@ export const MeasureInput = z.discriminatedUnion("kind", [
     kind: z.literal("through-bars"),
     levels: Levels,
     at,
+    /** Which bolt rows bars replace, by their number on the joint the measure stands at; left out = every row of the levels. */
+    rows: z.array(z.number().int().positive()).min(1).max(40).optional(),
     size: BoltSizeName,
     grade: BoltGradeName,
     innerNuts: z.boolean(),

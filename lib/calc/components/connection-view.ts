@@ -1,6 +1,12 @@
 import { boltTensionN } from "../clauses/en1993-1-8-2005/fasteners";
 import { columnBeyondMm } from "../mechanics/panel-levels";
-import type { BackingPlates, PanelDesign, ThroughBars, TransverseStiffeners } from "../measures/panel-design";
+import {
+  isBarRow,
+  type BackingPlates,
+  type PanelDesign,
+  type ThroughBars,
+  type TransverseStiffeners,
+} from "../measures/panel-design";
 import type {
   EndPlateConnection,
   FastenerGrade,
@@ -143,6 +149,9 @@ function fastenerOf(
   };
 }
 
+const barsInRow = (fastener: RowFastener | null, heightMm: number): RowFastener | null =>
+  fastener?.bars && isBarRow(fastener.bars, heightMm) ? fastener : null;
+
 /** A bolted end plate with its tension flange at `tensionLevel`. @throws OutsideScope where no row can take tension. */
 export function endPlateViewOf(
   node: NodeCase,
@@ -171,7 +180,7 @@ export function endPlateViewOf(
         fromFaceMm,
         leverMm,
         level,
-        fastener: fasteners[level] ?? fasteners.bolts,
+        fastener: barsInRow(fasteners[level], joint.levelOffsetMm + belowTopMm) ?? fasteners.bolts,
         isTension: leverMm >= SHEAR_ROW_SHARE * depthMm,
       };
     })

@@ -9,7 +9,7 @@ import { defineFormula } from "../trace/define-formula";
 import type { NodeCase, Side } from "../node";
 import type { ComponentCheck } from "../result";
 import { isBoltedCase, type BoltedSideCase, type SideCase } from "../side-case";
-import { SAME_HEIGHT_MM } from "./through-bars";
+import { SAME_HEIGHT_MM } from "./panel-design";
 import { traced, type Traced } from "../trace/traced";
 
 const CLAUSE = "through-bars: mechanics, no clause";

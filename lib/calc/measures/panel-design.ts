@@ -24,6 +24,13 @@ export interface PanelDesign {
 export const hasBars = ({ bars: { left, right } }: PanelDesign): boolean =>
   (left.top ?? left.bottom ?? right.top ?? right.bottom) !== null;
 
+/** Holes drilled through both flanges at once are at one height, to this tolerance. */
+export const SAME_HEIGHT_MM = 0.5;
+
+/** Whether the bars of a level stand in the row at this height, mm below the top of the left beam. */
+export const isBarRow = ({ rows }: ThroughBars, heightMm: number): boolean =>
+  rows === undefined || rows.heightsMm.some((bar) => Math.abs(bar - heightMm) < SAME_HEIGHT_MM);
+
 /** Nothing at any flange of any beam. */
 export const nowhere = <T>(): BySideAndLevel<T> => ({
   left: { top: null, bottom: null },

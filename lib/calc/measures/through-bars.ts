@@ -15,13 +15,20 @@ import type { EndPlateConnection, JointCase, Level, NodeCase } from "../node";
 import { OutsideScope } from "../outcome";
 import type { Trace } from "../trace/trace";
 import { traced, type Traced } from "../trace/traced";
-import { placedAt, type ApplyMeasure, type PanelDesign, type ThroughBars } from "./panel-design";
+import {
+  SAME_HEIGHT_MM,
+  isBarRow,
+  placedAt,
+  type ApplyMeasure,
+  type PanelDesign,
+  type ThroughBars,
+} from "./panel-design";
 
 /** Threaded bars in place of the bolts at the named levels. @throws OutsideScope without inner nuts. */
 export const applyThroughBars: ApplyMeasure<ThroughBars> = (design, measure) => {
   if (!measure.innerNuts) {
     throw new OutsideScope(
-      "bars without inner nuts leave the compression zone without help and the joint softer; they are not evaluated",
+      "bars without inner nuts are shown for information only and never proposed: they take the whole force of the tension zone past the column (under equal moments the web's tension vanishes), but the compression zone gets no help, the joint is softer by the bars' free length, and under a moment on one side the whole force pushes on the far flange",
     );
   }
   return { ...design, bars: placedAt(design.bars, measure.at ?? "both", measure.levels, measure) };
@@ -53,11 +60,17 @@ function endPlateOfJoint(joint: JointCase): EndPlateConnection {
   return connection.kind === "end-plate" ? connection : refuse("bolted end plates only");
 }
 
-/** Heights of a joint's rows at one of its levels, mm below the top of the left beam. */
-const rowHeightsMm = (joint: JointCase, connection: EndPlateConnection, level: Level): readonly number[] =>
+/** Heights of a joint's rows of bars at one of its levels, mm below the top of the left beam. */
+const rowHeightsMm = (
+  joint: JointCase,
+  connection: EndPlateConnection,
+  level: Level,
+  bars: ThroughBars,
+): readonly number[] =>
   connection.bolts.rowsMm
     .filter((row) => levelOfRow(row, joint.beam.section.depthMm) === level)
-    .map((row) => joint.levelOffsetMm + row);
+    .map((row) => joint.levelOffsetMm + row)
+    .filter((heightMm) => isBarRow(bars, heightMm));
 
 function refuseOutsideRowBounds(
   node: NodeCase,
@@ -65,13 +78,14 @@ function refuseOutsideRowBounds(
   connection: EndPlateConnection,
   joint: JointCase,
   level: Level,
+  bars: ThroughBars,
 ): void {
   const { perRow } = connection.bolts;
   if (perRow !== 2) refuse(`two bars a row (${perRow})`);
   const { thicknessMm } = connection.plate;
   if (thicknessMm < 12 || thicknessMm > 30) refuse(`end plate 12 to 30 mm (${thicknessMm} mm)`);
   const bottom = joint.levelOffsetMm + joint.beam.section.depthMm;
-  const rows = rowHeightsMm(joint, connection, level);
+  const rows = rowHeightsMm(joint, connection, level, bars);
   if (rows.length === 0)
     throw new OutsideScope(`there is no bolt row at the ${level} level for bars to replace`);
   const needed = 1.6 * panel.section.depthMm;
@@ -92,14 +106,14 @@ function refuseBlockedFarSide(
   bars: ThroughBars,
 ): void {
   const farPlate = endPlateOfJoint(far);
-  const rows = rowHeightsMm(own, ownPlate, level);
+  const rows = rowHeightsMm(own, ownPlate, level, bars);
   const farRows = farPlate.bolts.rowsMm.map((row) => far.levelOffsetMm + row);
   const top = far.levelOffsetMm - farPlate.plate.extensionTopMm;
   const bottom = far.levelOffsetMm + far.beam.section.depthMm + farPlate.plate.extensionBottomMm;
   const half = bars.size.washerDiameterMm / 2;
   const isFree = rows.every((row) => row + half <= top || row - half >= bottom);
   if (isFree && !areFacing(own, far, level)) return;
-  const facing = rowHeightsMm(far, farPlate, level);
+  const facing = rowHeightsMm(far, farPlate, level, bars);
   const isSame =
     areFacing(own, far, level) &&
     ownPlate.bolts.gaugeMm === farPlate.bolts.gaugeMm &&
@@ -107,9 +121,6 @@ function refuseBlockedFarSide(
     rows.every((row) => farRows.some((other) => Math.abs(row - other) < SAME_HEIGHT_MM));
   if (!isSame) refuse("the same rows and gauge left and right");
 }
-
-/** Holes drilled through both flanges at once are at one height. */
-export const SAME_HEIGHT_MM = 0.5;
 
 /** @throws OutsideScope naming the bound that a level of bars breaks. */
 export function refuseOutsideBarBounds(node: NodeCase, design: PanelDesign, panel: ColumnPanel): void {
@@ -121,7 +132,7 @@ export function refuseOutsideBarBounds(node: NodeCase, design: PanelDesign, pane
       if (design.webPlates) refuse("no web plate beside bars");
       const connection = endPlateOfJoint(joint);
       refuseOutsideColumnBounds(panel, connection.bolts.gaugeMm, bars);
-      refuseOutsideRowBounds(node, panel, connection, joint, level);
+      refuseOutsideRowBounds(node, panel, connection, joint, level, bars);
       for (const far of node.joints)
         if (far !== joint) refuseBlockedFarSide(joint, connection, far, level, bars);
     }

@@ -1,4 +1,4 @@
-import type { EndPlateConnection, JointCase, Level, MeasureCase } from "@/lib/calc";
+import { isBarRow, type EndPlateConnection, type JointCase, type Level, type MeasureCase } from "@/lib/calc";
 
 export interface BoltedSide {
   readonly joint: JointCase;
@@ -33,11 +33,12 @@ export interface BarRow {
 }
 
 /** Rows of bars, each once, whichever sides it serves. */
-export function barRowsOf(sides: readonly BoltedSide[], { levels, at }: ThroughBars): readonly BarRow[] {
+export function barRowsOf(sides: readonly BoltedSide[], measure: ThroughBars): readonly BarRow[] {
+  const { levels, at } = measure;
   const rows: { heightMm: number; sides: BoltedSide[] }[] = [];
   const named = sides.filter(({ joint }) => at === undefined || at === "both" || at === joint.side);
   for (const side of [...named, ...sides.filter((side) => !named.includes(side))]) {
-    for (const heightMm of rowHeightsMm(side, levels)) {
+    for (const heightMm of rowHeightsMm(side, levels).filter((height) => isBarRow(measure, height))) {
       const same = rows.find((row) => Math.abs(row.heightMm - heightMm) < 0.5);
       if (same) same.sides.push(side);
       else if (named.includes(side)) rows.push({ heightMm, sides: [side] });
