@@ -1,4 +1,5 @@
 import type { Sequelize } from "sequelize";
+import { initAccessToken } from "./access-token";
 import { initAngle } from "./angle";
 import { initAuditEntry } from "./audit-entry";
 import { initCarbonFactor } from "./carbon-factor";
@@ -33,6 +34,7 @@ const initialisers: readonly ((sequelize: Sequelize) => void)[] = [
   initOrganisation,
   initPerson,
   initSession,
+  initAccessToken,
   initSignInAttempt,
   initProject,
   initProjectMember,

@@ -31,6 +31,9 @@ export function AppHeader({ person, theme }: AppHeaderProps) {
       end={
         <>
           <span className="text-soft">{`${person.name}, ${person.role}`}</span>
+          <HeaderLink href="/tokens" isHere={pathname === "/tokens"}>
+            Access tokens
+          </HeaderLink>
           <ThemeSwitch initial={theme} />
           <button
             type="button"

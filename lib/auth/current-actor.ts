@@ -5,7 +5,6 @@ import { cookieValue, readSessionToken, SESSION_IDLE_SECONDS, sessionCookieName 
 
 /** Who asks, with what the pages show of them. */
 export interface SignedIn extends Actor {
-  readonly sessionId: string;
   readonly name: string;
   readonly email: string;
   readonly organisationName: string;
@@ -15,8 +14,8 @@ export interface SignedIn extends Actor {
 const TOUCH_EVERY_MS = 60_000;
 
 function asActor(session: LiveSession): SignedIn {
-  const { sessionId, personId, organisationId, role, name, email, organisationName } = session;
-  return { sessionId, personId, organisationId, role, name, email, organisationName };
+  const { personId, organisationId, role, name, email, organisationName } = session;
+  return { personId, organisationId, role, name, email, organisationName };
 }
 
 /**

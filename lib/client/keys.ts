@@ -1,5 +1,6 @@
 /** Every query key, made in one place: a mutation invalidates by the same factory that a query reads by. */
 export const meKey = ["me"] as const;
+export const tokensKey = ["tokens"] as const;
 export const catalogKey = ["catalog"] as const;
 export const pricesKey = ["prices"] as const;
 

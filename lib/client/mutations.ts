@@ -1,4 +1,9 @@
 import { mutationOptions, type QueryClient } from "@tanstack/react-query";
+import {
+  AccessTokensReply,
+  type CreateAccessToken,
+  CreatedAccessTokenReply,
+} from "@/lib/schemas/access-token";
 import { type SetStockPlates, StockPlatesReply } from "@/lib/schemas/catalog";
 import { ExclusionsReply, RecalculationReply } from "@/lib/schemas/comparison";
 import { type AddMember, MembersReply } from "@/lib/schemas/members";
@@ -6,7 +11,7 @@ import { DeletedReply, type Node, NodeReply, SavedDocument } from "@/lib/schemas
 import type { NodeDocument } from "@/lib/schemas/node-document";
 import { type CreateProject, type Project, ProjectReply, type UpdateProject } from "@/lib/schemas/project";
 import { ApiProblem } from "./api-problem";
-import { catalogKey, comparisonKeys, nodeKeys, projectKeys } from "./keys";
+import { catalogKey, comparisonKeys, nodeKeys, projectKeys, tokensKey } from "./keys";
 import { request } from "./request";
 
 /** A save either went through, or somebody else's came first: then theirs is here and nothing was written. */
@@ -124,6 +129,21 @@ export const removeMemberMutation = (queryClient: QueryClient, projectId: string
     mutationFn: ({ personId }: { readonly personId: string }) =>
       request(MembersReply, `/api/projects/${projectId}/members/${personId}`, { method: "DELETE" }),
     onSuccess: (reply) => queryClient.setQueryData(projectKeys.members(projectId), reply),
+  });
+
+/** The reply holds the key, this once; the cache keeps only what the list shows. */
+export const createTokenMutation = (queryClient: QueryClient) =>
+  mutationOptions({
+    mutationFn: (input: CreateAccessToken) =>
+      request(CreatedAccessTokenReply, "/api/tokens", { method: "POST", body: input }),
+    onSuccess: ({ tokens }) => queryClient.setQueryData(tokensKey, tokens),
+  });
+
+export const revokeTokenMutation = (queryClient: QueryClient) =>
+  mutationOptions({
+    mutationFn: async ({ tokenId }: { readonly tokenId: string }) =>
+      (await request(AccessTokensReply, `/api/tokens/${tokenId}`, { method: "DELETE" })).tokens,
+    onSuccess: (tokens) => queryClient.setQueryData(tokensKey, tokens),
   });
 
 export const setStockPlatesMutation = (queryClient: QueryClient) =>

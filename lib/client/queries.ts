@@ -1,4 +1,5 @@
 import { queryOptions } from "@tanstack/react-query";
+import { AccessTokensReply } from "@/lib/schemas/access-token";
 import { CatalogReply } from "@/lib/schemas/catalog";
 import { ComparisonReply, WorkingReply } from "@/lib/schemas/comparison";
 import { Me } from "@/lib/schemas/me";
@@ -6,7 +7,7 @@ import { MembersReply } from "@/lib/schemas/members";
 import { NodeListReply, NodeReply, NodeRevisionListReply, NodeRevisionReply } from "@/lib/schemas/node";
 import { PricesReply } from "@/lib/schemas/prices";
 import { ProjectListReply, ProjectReply } from "@/lib/schemas/project";
-import { catalogKey, comparisonKeys, meKey, nodeKeys, pricesKey, projectKeys } from "./keys";
+import { catalogKey, comparisonKeys, meKey, nodeKeys, pricesKey, projectKeys, tokensKey } from "./keys";
 import { request } from "./request";
 
 const MINUTE_MS = 60_000;
@@ -89,6 +90,13 @@ export const workingOptions = (nodeId: string, comparisonId: string, optionKey: 
         signal,
       }),
     staleTime: Infinity,
+  });
+
+/** One's own access tokens, without their keys. */
+export const tokensOptions = () =>
+  queryOptions({
+    queryKey: tokensKey,
+    queryFn: async ({ signal }) => (await request(AccessTokensReply, "/api/tokens", { signal })).tokens,
   });
 
 /** Sections, angles, steels, fasteners, stock plates: changes rarely, so one copy serves the visit. */

@@ -1,5 +1,6 @@
 import { randomUUID } from "node:crypto";
 import { z } from "zod";
+import { actorOfToken, bearerKey } from "@/lib/auth/access-token";
 import { currentActor, type SignedIn } from "@/lib/auth/current-actor";
 import { environment } from "@/lib/config/env";
 import { findProjectIdOfNode } from "@/lib/db/repositories/nodes";
@@ -38,6 +39,8 @@ interface Shapes<P extends z.ZodType, Q extends z.ZodType, B extends z.ZodType> 
   readonly body?: B;
   /** Status of a good reply: 201 where something was made. */
   readonly status?: number;
+  /** Whether a program may ask with an access token instead of a session. */
+  readonly acceptsToken?: boolean;
   /** Where the contract of a route gives bad input a shape of its own. */
   readonly invalidReply?: (fields: readonly FieldError[]) => Response;
 }
@@ -70,6 +73,29 @@ async function projectOf(
   const project = projectId === null ? null : await findProject(projectId);
   if (project === null || !canViewProject(actor, project)) throw notFound(thing);
   return project;
+}
+
+/**
+ * Who asks. A browser sends its session's cookie whoever made it write, so a write must come from this site; a token is
+ * sent only by whoever holds it, from wherever.
+ *
+ * @throws AppError other_origin, sign_in_needed
+ */
+async function askerOf(request: Request, acceptsToken: boolean): Promise<SignedIn> {
+  const authorization = request.headers.get("authorization");
+  if (authorization !== null && acceptsToken) {
+    const key = bearerKey(authorization);
+    const actor = key === null ? null : await actorOfToken(key);
+    if (actor !== null) return actor;
+    throw new AppError(
+      "sign_in_needed",
+      "That access token opens nothing: it was revoked, has expired or is not whole. Make a new one under Access tokens.",
+    );
+  }
+  checkOrigin(request, environment().baseUrl);
+  const actor = await currentActor(request);
+  if (actor !== null) return actor;
+  throw new AppError("sign_in_needed", "Sign in first.");
 }
 
 async function pathParams<P extends z.ZodType>(
@@ -115,7 +141,7 @@ function refusal(
 }
 
 /**
- * A route of the API. Always in this order: same origin on writes, signed in (401), member (404), shape
+ * A route of the API. Always in this order: same origin on writes, signed in or, where taken, a token (401), member (404), shape
  * (422), then `run`, which asks the policy (403). A fault is logged under the request id and never shown.
  * `run` answers the body of the reply, or a Response where it needs headers of its own.
  */
@@ -128,9 +154,7 @@ export function route<
   const handle = async (request: Request, context: PathContext): Promise<Response> => {
     const requestId = randomUUID();
     try {
-      checkOrigin(request, environment().baseUrl);
-      const actor = await currentActor(request);
-      if (actor === null) throw new AppError("sign_in_needed", "Sign in first.");
+      const actor = await askerOf(request, settings.acceptsToken ?? false);
       const params = await pathParams(settings.params, context);
       const project = await projectOf(settings.access, actor, params as Record<string, unknown>);
       const { query, body } = await shapes(request, settings);

@@ -36,6 +36,7 @@ const PAGES: readonly Shown[] = [
     ready: "main th:has-text('Verdict')",
   },
   { name: "catalogue", path: () => "/catalog", ready: "main tbody tr" },
+  { name: "tokens", path: () => "/tokens", ready: "main h2:has-text('No tokens')" },
 ];
 const WIDTHS = [1280, 1920, 820] as const;
 const SCHEMES = ["light", "dark"] as const;

@@ -14,6 +14,7 @@ const refused = (errors: readonly FieldError[]): Response => {
 /** A node document in, its result document out, priced at the rates of one's own organisation; nothing is kept. */
 export const POST = route({
   access: "signed-in",
+  acceptsToken: true,
   query: EvaluateQuery,
   body: z.unknown(),
   invalidReply: refused,

@@ -5,6 +5,8 @@ import { AuditEntry } from "@/models/audit-entry";
 export const AUDIT_ACTIONS = [
   "person.signed-in",
   "person.signed-out",
+  "access-token.issued",
+  "access-token.revoked",
   "project.created",
   "project.edited",
   "project.member-added",

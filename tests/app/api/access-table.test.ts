@@ -41,6 +41,14 @@ const save = { document: buildNodeDocument(), expectedVersion: 99 };
 /** Everything that needs a session: method and path, the roles that may, and a call that is in order. */
 const TABLE: Readonly<Record<string, Line>> = {
   "GET me": { allowed: all, hidesFromOthers: false },
+  "GET tokens": { allowed: all, hidesFromOthers: false },
+  "POST tokens": {
+    allowed: all,
+    hidesFromOthers: false,
+    call: () => ({ body: { name: "Table", days: 30 } }),
+  },
+  // A token that nobody has: past the door it is 404, for everybody alike.
+  "DELETE tokens/[tokenId]": { allowed: all, hidesFromOthers: true, past: [404] },
   "GET prices": { allowed: all, hidesFromOthers: false },
   "GET catalog": { allowed: all, hidesFromOthers: false },
   "PUT catalog/stock-plates": {
@@ -148,7 +156,7 @@ beforeAll(async () => {
 async function statusOf(name: string, cookie: string | null, change: Partial<Call> = {}): Promise<number> {
   const handler = handlers.get(name);
   if (!handler) throw new Error(`There is no route ${name}.`);
-  const params = { ...target, version: "1", personId: randomUUID() };
+  const params = { ...target, version: "1", personId: randomUUID(), tokenId: randomUUID() };
   const call = TABLE[name]?.call?.(target) ?? {};
   const answer = await callApi(handler, { method: name.split(" ")[0]!, cookie, params, ...call, ...change });
   return answer.status;
