@@ -119,7 +119,7 @@ function HeadRows({
           <td
             role="gridcell"
             key={column.option.key}
-            className={columnClass(column, "border-b border-b-ink pb-2.5")}
+            className={columnClass(column, "relative border-b border-b-ink pb-2.5")}
           >
             {column.isFolded ? (
               <FoldedName option={column.option} />

@@ -35,11 +35,13 @@ export function FoldedHead({ option, result, letter, column, onUnfold }: FoldedH
   );
 }
 
-/** The name of a folded option, turned as on the spine of a folder. The head above it says the same to a screen reader. */
+/**
+ * The name of a folded option, turned as on the spine of a folder: laid over its cell, so that a long
+ * name does not make the row of drawings taller. The head above it says the same to a screen reader. */
 export const FoldedName = ({ option }: { readonly option: OptionDocument }) => (
   <span
     aria-hidden="true"
-    className="mx-auto block max-h-[15rem] overflow-hidden text-note leading-tight text-soft [writing-mode:vertical-rl]"
+    className="absolute inset-x-1 top-0 bottom-2.5 overflow-hidden text-note leading-tight text-soft [writing-mode:vertical-rl]"
   >
     {option.name}
     {option.rank === null && option.notRanked !== null ? ` · ${option.notRanked}` : ""}

@@ -1,5 +1,6 @@
 import type { EstimateDocument } from "@/lib/schemas/result-document";
 import { formatFigures, formatNumber, moneyUnit } from "@/components/ui/format-number";
+import { unitText } from "@/components/trace/symbol-text";
 import { Table, Td, Th } from "@/components/ui/table";
 
 export interface BillOfOperationsProps {
@@ -22,7 +23,7 @@ function BillRow({ line }: { readonly line: Line }) {
           {[line.category, line.trade?.replaceAll("-", " ")].filter(Boolean).join(", ")}
         </span>
       </th>
-      <Td className="text-right whitespace-nowrap">{`${formatFigures(line.quantity, 3)} ${line.quantityUnit}`}</Td>
+      <Td className="text-right whitespace-nowrap">{`${formatFigures(line.quantity, 3)} ${unitText(line.quantityUnit)}`}</Td>
       <Td className="text-right">
         {line.minutes === 0 ? <span className="text-soft">–</span> : formatNumber(line.minutes, 1)}
       </Td>

@@ -1,7 +1,7 @@
 import { createElement, type ReactNode } from "react";
 import { formatFigures } from "@/components/ui/format-number";
 import { parseExpression, type Expression } from "./parse-expression";
-import { isLetter, splitSymbol, unitText } from "./symbol-text";
+import { factorsOf, isLetter, splitSymbol, unitText } from "./symbol-text";
 
 /* MathML: drawn by the browser itself, read aloud by screen readers, and free of style attributes. */
 const tag = (name: string, props: object | null, ...children: readonly ReactNode[]) =>
@@ -25,6 +25,11 @@ const OPERATORS: Readonly<Record<string, string>> = {
 type NameSetter = (name: string) => ReactNode;
 
 function symbolMath(symbol: string): ReactNode {
+  const factors = factorsOf(symbol);
+  return factors.length === 1 ? factorMath(symbol) : row(...factors.map(factorMath));
+}
+
+function factorMath(symbol: string): ReactNode {
   const { base, below } = splitSymbol(symbol);
   const letter = isLetter(base)
     ? tag("mi", { mathvariant: "normal", className: "italic" }, base)
@@ -62,16 +67,36 @@ function callMath(name: string, given: readonly Expression[], set: NameSetter): 
   return row(tag("mi", { mathvariant: "normal" }, name), operator("("), ...list, operator(")"));
 }
 
-function choiceMath(expression: Extract<Expression, { kind: "choice" }>, set: NameSetter): ReactNode {
-  const line = (value: Expression, words: ReactNode) =>
-    tag("mtr", null, tag("mtd", null, math(value, set)), tag("mtd", null, words));
-  return tag(
+type Choice = Extract<Expression, { kind: "choice" }>;
+
+/** A choice inside the last branch of a choice is one case more of the same list, as a standard prints it. */
+function casesOf(choice: Choice): readonly (readonly [value: Expression, condition: Expression | null])[] {
+  const last = withoutGroup(choice.otherwise);
+  return [
+    [choice.then, choice.condition],
+    ...(last.kind === "choice" ? casesOf(last) : ([[last, null]] as const)),
+  ];
+}
+
+const choiceMath = (choice: Choice, set: NameSetter): ReactNode =>
+  tag(
     "mtable",
     { className: "cases", displaystyle: "true" },
-    line(expression.then, row(tag("mtext", null, "where\u00a0"), math(expression.condition, set))),
-    line(expression.otherwise, tag("mtext", null, "otherwise")),
+    ...casesOf(choice).map(([value, condition]) =>
+      tag(
+        "mtr",
+        null,
+        tag("mtd", null, math(value, set)),
+        tag(
+          "mtd",
+          null,
+          condition === null
+            ? tag("mtext", null, "otherwise")
+            : row(tag("mtext", null, "where\u00a0"), math(condition, set)),
+        ),
+      ),
+    ),
   );
-}
 
 /** A product of fractions reads as one fraction: `a * b / c` arrives as (a * b) / c. */
 function operationMath(

@@ -1,3 +1,5 @@
+import { Fragment } from "react";
+
 const GREEK: Readonly<Record<string, string>> = {
   alpha: "α",
   beta: "β",
@@ -24,6 +26,12 @@ export function splitSymbol(symbol: string): { readonly base: string; readonly b
   return { base: GREEK[base] ?? base, below: at < 0 ? null : symbol.slice(at + 1) };
 }
 
+/** The factors of a symbol that is a product, such as "b_eff t_wc"; one that only carries words is left whole. */
+export function factorsOf(symbol: string): readonly string[] {
+  const factors = symbol.split(" ");
+  return factors.every((factor) => factor.includes("_")) ? factors : [symbol];
+}
+
 /** One letter, with whatever stands over it: set in italics, as symbols are. */
 export const isLetter = (base: string): boolean => /^\p{L}\p{M}*$/u.test(base);
 
@@ -35,11 +43,18 @@ export const sourceText = (source: { readonly document: string; readonly edition
 
 /** A symbol in running text, with its index below the line. */
 export function SymbolText({ symbol }: { readonly symbol: string }) {
-  const { base, below } = splitSymbol(symbol);
   return (
     <span>
-      {isLetter(base) ? <i>{base}</i> : base}
-      {below === null ? null : <sub className="text-[0.78em]">{below}</sub>}
+      {factorsOf(symbol).map((factor, index) => {
+        const { base, below } = splitSymbol(factor);
+        return (
+          <Fragment key={index}>
+            {index > 0 ? " " : null}
+            {isLetter(base) ? <i>{base}</i> : base}
+            {below === null ? null : <sub className="text-[0.78em]">{below}</sub>}
+          </Fragment>
+        );
+      })}
     </span>
   );
 }
@@ -47,6 +62,7 @@ export function SymbolText({ symbol }: { readonly symbol: string }) {
 const UNITS: Readonly<Record<string, string>> = {
   "1": "",
   "N/mm2": "N/mm²",
+  m2: "m²",
   mm2: "mm²",
   mm3: "mm³",
   mm4: "mm⁴",

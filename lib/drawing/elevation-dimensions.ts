@@ -114,7 +114,7 @@ function plateDimensions(placed: PlacedJoint, pixel: number): Dimension[] {
       {
         fromX,
         toX,
-        atY: plate.topMm - 24 * pixel,
+        atY: plate.topMm - 34 * pixel,
         extendFromY: plate.topMm - 2 * pixel,
         text: sign < 0 ? "beyond-left" : "beyond-right",
       },

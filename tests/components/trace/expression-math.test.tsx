@@ -4,6 +4,36 @@ import { ExpressionMath } from "@/components/trace/expression-math";
 
 const symbols = { yieldMpa: ["f_y,wc", "N/mm2"], areaMm2: ["A_vc", "mm2"] } as const;
 
+/** Text of each cell of a table of cases, row by row. */
+const casesShown = () =>
+  [...document.querySelectorAll("mtr")].map((line) =>
+    [...line.querySelectorAll(":scope > mtd")].map((cell) => cell.textContent),
+  );
+
+it("sets a choice within a choice as one list of cases", () => {
+  render(<ExpressionMath expression="a <= 1 ? 1 : (a <= 2 ? 2 : 3)" symbols={{ a: ["a", "1"] }} />);
+  expect(casesShown()).toEqual([
+    ["1", "where\u00a0a≤1"],
+    ["2", "where\u00a0a≤2"],
+    ["3", "otherwise"],
+  ]);
+  expect(document.querySelectorAll("mtable")).toHaveLength(1);
+});
+
+it("sets a symbol that is a product with an index to each factor, and one with words as it is", () => {
+  render(
+    <ExpressionMath expression="a * b" symbols={{ a: ["b_eff t_wc", "mm2"], b: ["F_c,Rd yielding", "N"] }} />,
+  );
+  const parts = [...document.querySelectorAll("msub")].map((sub) =>
+    [...sub.children].map((c) => c.textContent),
+  );
+  expect(parts).toEqual([
+    ["b", "eff"],
+    ["t", "wc"],
+    ["F", "c,Rd yielding"],
+  ]);
+});
+
 describe("a formula set as mathematics", () => {
   it("draws a quotient as a fraction, a root as a root, and symbols with their index", () => {
     const { container } = render(

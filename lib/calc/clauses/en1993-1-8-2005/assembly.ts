@@ -10,7 +10,7 @@ const numbered = (
     Object.entries(names).flatMap(([key, [symbol, unit]]) =>
       Array.from({ length: count }, (_, index) => [
         `${key}${index + 1}`,
-        [`${symbol},${index + 1}`, unit] as const,
+        [`${symbol}${symbol.includes("_") ? "," : "_"}${index + 1}`, unit] as const,
       ]),
     ),
   );
