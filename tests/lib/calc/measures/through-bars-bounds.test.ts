@@ -133,6 +133,22 @@ describe("what bars need around them", () => {
     expect(refused(buildNodeCase({ joints }), buildBars())).toMatch(/same rows and gauge left and right/);
   });
 
+  it("a free far flange where the beams' levels differ: half a washer clear of the other plate", () => {
+    // The left row stands at 340; M20 washers are 37 mm across.
+    const farAt = (levelOffsetMm: number) =>
+      buildNodeCase({
+        joints: [buildJoint("left"), { ...buildJoint("right"), levelOffsetMm }],
+      });
+    const bars = buildBars({ levels: ["bottom"], at: "left" });
+    // The right plate's top is levelOffset - 90, its bottom levelOffset + 400 + 90.
+    const above = 340 + 37 / 2 + 90;
+    expect(evaluatedCase(farAt(above), [bars]).joints).toHaveLength(2);
+    expect(refused(farAt(above - 0.1), bars)).toMatch(/same rows and gauge/);
+    const below = 340 - 37 / 2 - 490;
+    expect(evaluatedCase(farAt(below), [bars]).joints).toHaveLength(2);
+    expect(refused(farAt(below + 0.1), bars)).toMatch(/same rows and gauge/);
+  });
+
   it("no stiffener at their level and no web plate", () => {
     expect(refused(buildNodeCase(), buildBars(), buildStiffeners())).toMatch(
       /no bars at the level of a stiffener/,

@@ -61,6 +61,16 @@ describe("the share that bars take in tension", () => {
     expectHand(shareOf(2), 60 / hand.l_1);
     expectHand(shareOf(3), outer / hand.l_1);
   });
+
+  it("counts no bolts into the group of the bars", () => {
+    // The row at 250 stands nearer the bottom flange and keeps its bolts; the bars are the group of -45 and 60.
+    const option = evaluatedCase(rowsAt([-45, 60, 250, 340]), bars);
+    const end = 2 * hand.m + 0.625 * 80 + 0.5 * 105;
+    expect(option.joints[0]?.rows.map(({ row }) => row)).toEqual([1, 2, 3]);
+    for (const row of [1, 2])
+      expectHand(stepIn(checkLike(option, "bar-tension", { row }), "K_c").inputs.share, end / hand.l_1);
+    expect(checksOf(option, "bar-tension", { row: 3 })).toEqual([]);
+  });
 });
 
 describe("the mode factor", () => {
@@ -208,6 +218,16 @@ describe("the relief of the column's compression side", () => {
     const x = hand.xOf(53.25);
     const parts = partsOf(rowsAt([60, 340, 445]));
     expectHand(parts.yieldingN, strip / (1 - (1 - 0.9 * x) * 1.86 * hand.etaCOf(x)));
+  });
+
+  it("counts rows on both sides only where both stand within half the effective width", () => {
+    // 540: 146.75 mm from the middle of the flange, beyond b_eff / 2.
+    const x = hand.xOf(53.25);
+    expect(146.75).toBeGreaterThan(hand.b_c / 2);
+    const joints = buildJoints(
+      buildEndPlate({ plate: { extensionBottomMm: 190 }, bolts: { rowsMm: [60, 340, 540] } }),
+    );
+    expectHand(partsOf(buildNodeCase({ joints })).yieldingN, strip / (1 - (1 - 0.9 * x) * hand.etaCOf(x)));
   });
 
   it("ends where the row stands half the effective width away", () => {

@@ -182,4 +182,38 @@ describe("the height of web plates", () => {
     expect(evaluatedCase(node, at(needed - 0.4)).joints).toHaveLength(2);
     expect(refusalOf(node, at(needed - 0.6))).toMatch(/has to cover/);
   });
+
+  it("covers what the welded flanges of a beam spread into: t_fb + 2 sqrt 2 a + 5 (t_fc + r)", () => {
+    const welded = { kind: "welded", welds: buildEndPlate().welds } as const;
+    const node = buildNodeCase({ joints: buildJoints(welded) });
+    const needed = 400 - 13.5 + (13.5 + 2 * 6 * Math.SQRT2 + 5 * (14 + 27));
+    const at = (heightMm: number) => [buildWebPlates({ heightMm })];
+    expect(evaluatedCase(node, at(needed - 0.4)).joints).toHaveLength(2);
+    expect(refusalOf(node, at(needed - 0.6))).toMatch(new RegExp(`cover ${Math.ceil(needed)} mm`));
+  });
+
+  it("ends where the column ends", () => {
+    // 40 mm of column above the beam leave the tension flange less reach than the compression flange has.
+    const thick = { ...buildEndPlate().welds, topFlange: fillet(14) };
+    const node = buildNodeCase({ joints: buildJoints({ kind: "welded", welds: thick }) });
+    const top = { ...node, column: { ...node.column, endDistanceAboveMm: 40 } };
+    const inCompression = 13.5 + 2 * 6 * Math.SQRT2 + 5 * (14 + 27);
+    const inTension = 13.5 + 2 * 14 * Math.SQRT2 + 5 * (14 + 27);
+    const at = (heightMm: number) => [buildWebPlates({ heightMm })];
+    expect(refusalOf(node, at(400 - 13.5 + inTension - 0.6))).toMatch(/has to cover/);
+    expect(evaluatedCase(top, at(400 - 13.5 + inCompression - 0.4)).joints).toHaveLength(2);
+  });
+
+  it("is that of the beam which needs more", () => {
+    const outer = buildEndPlate({ plate: { extensionTopMm: 120 }, bolts: { rowsMm: [-75, 60, 340] } });
+    const needed = 2 * (400 / 2 + 75 + length / 2);
+    const at = (heightMm: number) => [buildWebPlates({ heightMm })];
+    for (const joints of [
+      [buildJoint("left", outer), buildJoint("right")],
+      [buildJoint("left"), buildJoint("right", outer)],
+    ]) {
+      expect(evaluatedCase(buildNodeCase({ joints }), at(needed - 0.4)).joints).toHaveLength(2);
+      expect(refusalOf(buildNodeCase({ joints }), at(needed - 0.6))).toMatch(/has to cover/);
+    }
+  });
 });

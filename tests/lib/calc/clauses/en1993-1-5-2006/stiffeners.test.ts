@@ -55,6 +55,19 @@ describe("the stiffener at the flange", () => {
     expect(Math.abs(crushing / 1000 - 1595)).toBeLessThanOrEqual(0.0005 * 12.8 * 265 + 0.5);
   });
 
+  it("has either part divided by gamma_M0", () =>
+    expectHand(
+      stiffenerCrushingN(null, {
+        netAreaMm2: 1752,
+        stiffenerYieldMpa: 275,
+        breadthMm: 275,
+        webThicknessMm: 8.5,
+        webYieldMpa: 235,
+        gammaM0: 1.1,
+      }),
+      (1752 * 275 + 275 * 8.5 * 235) / 1.1,
+    ));
+
   it("shears the web along both sides of its weld where it ends short", () =>
     expectHand(
       twoShearPlanesN(null, { lengthMm: 96, thicknessMm: 8.5, yieldMpa: 275, gammaM0: 1.1 }),
