@@ -71,6 +71,14 @@ describe("the share that bars take in tension", () => {
       expectHand(stepIn(checkLike(option, "bar-tension", { row }), "K_c").inputs.share, end / hand.l_1);
     expect(checksOf(option, "bar-tension", { row: 3 })).toEqual([]);
   });
+
+  it("finds the group of the bars where it does not begin with the first row", () => {
+    // Bars below the middle only: 210 and 260 take tension from the top as a group of two, 50 apart.
+    const option = evaluatedCase(rowsAt([60, 210, 260, 340]), [buildBars({ levels: ["bottom"] })]);
+    const end = 2 * hand.m + 0.625 * 80 + 0.5 * 50;
+    for (const row of [2, 3])
+      expectHand(stepIn(checkLike(option, "bar-tension", { row }), "K_c").inputs.share, end / hand.l_1);
+  });
 });
 
 describe("the mode factor", () => {

@@ -224,6 +224,30 @@ describe("a pair of partial depth", () => {
     ).toEqual([]));
 });
 
+describe("a pair behind a welded flange", () => {
+  const welds = buildEndPlate().welds;
+  const joints = buildJoints({ kind: "welded", welds });
+  const option = evaluatedCase(buildNodeCase({ joints }), [buildStiffeners()]);
+  const breadth = 13.5 + 2 * 6 * Math.SQRT2 + 5 * (14 + 27);
+  const whole = netArea * 275 + breadth * 8.5 * 275;
+
+  it("adds its net area to the web that the tension spreads into", () =>
+    expectHand(checkLike(option, "column-web-tension").resistance, whole));
+
+  it("takes its part of the flange's force, M / (h - t_fb) by area", () =>
+    expectHand(
+      checkLike(option, "transverse-stiffener").demand,
+      ((netArea * 275) / whole) * (50e6 / (400 - 13.5)),
+    ));
+
+  it("carries the flange, with no nut to pass", () => {
+    expect(checksOf(option, "column-flange-bending")).toEqual([]);
+    const rules = checksOf(option, "detailing").map((check) => check.what);
+    expect(rules).toContain("corner clip clears the root radius");
+    expect(rules).not.toContain("nut beside the stiffener");
+  });
+});
+
 describe("the detailing of a pair", () => {
   const rule = (what: RegExp, overrides: Parameters<typeof buildStiffeners>[0], node = buildNodeCase()) =>
     checksOf(evaluatedCase(node, [buildStiffeners(overrides)]), "detailing", { level: "top" }).find((check) =>
