@@ -25,6 +25,12 @@ const BACKING =
 const BEST_ESTIMATE = 0.83;
 const CAUTIOUS = 0.55;
 
+const ON_PLATE =
+  "The web plate is one piece and goes on first; stiffeners sit on it and are cut narrower by its thickness, counted so on both sides of the web.";
+
+const BARS_BESIDE_PLATE =
+  "The bar model was studied on plain webs: beside a web plate the relief is taken for a web as thick as web and plates together, the bars' force for the plain web.";
+
 const TOLERANCE = 0.1;
 
 /** Load cases whose forces on the node do not balance by more than a tenth of the largest term. */
@@ -92,6 +98,8 @@ export function cautionsOf(
     cautions.push(BACKING);
   }
   for (const pair of design.pairs) cautions.push(...pairCautions(design, pair, models));
+  if (design.webPlates && design.pairs.length > 0) cautions.push(ON_PLATE);
+  if (design.webPlates && hasBars(design)) cautions.push(BARS_BESIDE_PLATE);
   if (!isOnePanel(node.joints)) cautions.push(UNEQUAL);
   return cautions;
 }
@@ -121,7 +129,8 @@ function pairCautions(
   const flanges = served.map((model) => model.joint.view.joint.beam.section);
   const thickest = Math.max(...flanges.map(({ flangeThicknessMm }) => flangeThicknessMm));
   const widest = Math.max(...flanges.map(({ widthMm }) => widthMm));
-  const breadthMm = 2 * stiffener.widthMm + design.column.section.webThicknessMm;
+  const onPlateMm = design.webPlates?.thicknessMm ?? 0;
+  const breadthMm = 2 * (stiffener.widthMm + onPlateMm) + design.column.section.webThicknessMm;
   if (stiffener.thicknessMm < thickest) {
     cautions.push(
       `Stiffeners at the ${level} are thinner than the beam flange (${stiffener.thicknessMm} against ${thickest} mm); as guidance, match it.`,

@@ -17,7 +17,7 @@ import { backingDetailing, refuseUnheldBacking } from "./measures/backing-plates
 import { barChecks, barPressN } from "./measures/bar-checks";
 import { hasBars, type PanelDesign } from "./measures/panel-design";
 import { refuseOutsideBarBounds } from "./measures/through-bars";
-import { stiffenerChecks, stiffenerDetailing } from "./measures/transverse-stiffeners";
+import { pairIntoWebN, stiffenerChecks, stiffenerDetailing } from "./measures/transverse-stiffeners";
 import { refuseShortPlate, webPlateChecks, webPlateDetailing } from "./measures/web-plates";
 import type { BeamActions, JointCase, Level, LoadCase, MeasureCase, NodeCase, Side } from "./node";
 import { OutsideScope } from "./outcome";
@@ -176,8 +176,11 @@ function caseChecks(
   for (const pair of design.pairs) checks.push(...stiffenerChecks(node, panel, pair, sides, steps));
   const side = node.joints[0]?.side ?? "left";
   if (design.webPlates) {
+    let stiffenersN = 0;
+    for (const pair of design.pairs) stiffenersN = Math.max(stiffenersN, pairIntoWebN(panel, pair, sides));
+    const demand = { panelShearN: shearN, stiffenersN };
     checks.push(
-      ...webPlateChecks(node, panel, design.webPlates, shearN, { side, loadCase: loadCase.name }, steps),
+      ...webPlateChecks(node, panel, design.webPlates, demand, { side, loadCase: loadCase.name }, steps),
     );
   }
   if (hasBars(design)) {
@@ -202,7 +205,7 @@ function detailingChecks(
   for (const pair of design.pairs) checks.push(...stiffenerDetailing(panel, pair, models));
   checks.push(...backingDetailing(node, design, panel, models));
   const side = models[0]?.joint.view.joint.side ?? "left";
-  if (design.webPlates) checks.push(...webPlateDetailing(panel, design.webPlates, side));
+  if (design.webPlates) checks.push(...webPlateDetailing(panel, design.webPlates, side, models));
   return checks;
 }
 

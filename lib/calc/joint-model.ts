@@ -34,8 +34,10 @@ export interface BoltedModel extends ModelBase {
   readonly springs: readonly RowSprings[];
   readonly tension: TensionSpring;
   readonly shear: Traced;
-  /** Share of each tension row that bars carry; null for bolts. */
+  /** Share of each tension row that bars surely take off the column; null for bolts. */
   readonly barShares: readonly (Traced | null)[];
+  /** The most of it that they may have to carry. The same without a web plate. */
+  readonly barForceShares: readonly (Traced | null)[];
   readonly barCompression: BarCompression | null;
 }
 
@@ -93,6 +95,8 @@ export function jointModelOf(
     steps,
   );
   const springs = rowSpringsOf(panel, bolted, steps);
+  const barShares = barTensionShares(panel, bolted, panel.stiffestWebMm, steps);
+  const plainMm = panel.section.webThicknessMm;
   const tension = tensionSpringOf(bolted, springs, [], steps);
   return {
     joint: bolted,
@@ -111,7 +115,9 @@ export function jointModelOf(
     springs,
     tension,
     shear: boltShearResistance(node, panel, view, steps),
-    barShares: barTensionShares(panel, bolted, steps),
+    barShares,
+    barForceShares:
+      panel.stiffestWebMm === plainMm ? barShares : barTensionShares(panel, bolted, plainMm, steps),
     barCompression: barCompressionOf(node, panel, bolted, steps),
   };
 }

@@ -81,9 +81,11 @@ function stiffenerPlan(
   frame: Frame,
   measure: Extract<MeasureCase, { kind: "transverse-stiffeners" }>,
   level: Level,
+  plates: Extract<MeasureCase, { kind: "web-plates" }> | undefined,
 ): Shape[] {
   const inner = frame.innerFaceMm;
-  const near = frame.column.webThicknessMm / 2;
+  const half = frame.column.webThicknessMm / 2;
+  const outer = half + measure.widthMm;
   const spans =
     measure.length === "full"
       ? [{ from: -inner, to: inner, clipTo: true }]
@@ -96,29 +98,32 @@ function stiffenerPlan(
     const inward = Math.sign(to - from);
     const clip = Math.min(measure.clipMm, measure.widthMm);
     const farClip = clipTo ? clip : 0;
-    return [-1, 1].map((signY) =>
-      polygon(
+    return [-1, 1].map((signY) => {
+      // Where a web plate lies on this side, the stiffener sits on it.
+      const near = half + (plates && (plates.sides === 2 || signY < 0) ? plates.thicknessMm : 0);
+      return polygon(
         "stiffener",
         "stiffener",
         [
           { x: from + inward * clip, y: signY * near },
           { x: to - inward * farClip, y: signY * near },
           { x: to, y: signY * (near + farClip) },
-          { x: to, y: signY * (near + measure.widthMm) },
-          { x: from, y: signY * (near + measure.widthMm) },
+          { x: to, y: signY * outer },
+          { x: from, y: signY * outer },
           { x: from, y: signY * (near + clip) },
         ],
         { level },
-      ),
-    );
+      );
+    });
   });
 }
 
 function addedPlan(frame: Frame, measures: readonly MeasureCase[], level: Level): Shape[] {
   const near = frame.column.webThicknessMm / 2;
+  const plates = measures.find((measure) => measure.kind === "web-plates");
   return measures.flatMap((measure) => {
     if (measure.kind === "transverse-stiffeners" && measure.levels.includes(level))
-      return stiffenerPlan(frame, measure, level);
+      return stiffenerPlan(frame, measure, level, plates);
     if (measure.kind === "web-plates") {
       const leg = measure.weld.kind === "fillet" ? legMm(measure.weld.throatMm) : 0;
       return (measure.sides === 2 ? [-1, 1] : [-1]).flatMap((signY) => [
@@ -140,7 +145,9 @@ function addedPlan(frame: Frame, measures: readonly MeasureCase[], level: Level)
     }
     if (measure.kind === "backing-plates" && measure.levels.includes(level)) {
       const from = frame.column.widthMm / 2 - measure.widthMm;
-      return frame.joints.flatMap(({ sign, side }) =>
+      const { at = "both" } = measure;
+      const backed = frame.joints.filter(({ side }) => at === "both" || at === side);
+      return backed.flatMap(({ sign, side }) =>
         [-1, 1].map((signY) =>
           rectBetween(
             "backing-plate",

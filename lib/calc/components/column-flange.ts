@@ -70,7 +70,8 @@ export function columnFlangeOf(
   const half = view.joint.beam.section.flangeThicknessMm / 2;
   const stiffener = view.tensionStiffener;
   const isStiffened =
-    stiffener !== null && 2 * stiffener.widthMm + section.webThicknessMm >= WIDE_ENOUGH_SHARE * view.gaugeMm;
+    stiffener !== null &&
+    2 * (stiffener.widthMm + panel.webPlateMm) + section.webThicknessMm >= WIDE_ENOUGH_SHARE * view.gaugeMm;
   const positions = rows.map((_, index) => index);
   const outside = positions.filter((index) => (rows[index]?.fromFaceMm ?? 0) < half);
   const inside = positions.filter((index) => (rows[index]?.fromFaceMm ?? 0) >= half);

@@ -23,6 +23,10 @@ export interface ColumnPanel {
   readonly shearArea: Traced;
   /** V_wp,Rd on each side: the frame of flanges and stiffeners is that of the side's own beam. */
   readonly shear: Readonly<Record<Side, Traced>>;
+  /** Thickness that a web plate puts between web and stiffeners; 0 without one. */
+  readonly webPlateMm: number;
+  /** Web and plates together, as though they were one: nothing stiffer can be there. */
+  readonly stiffestWebMm: number;
   /** 1.5 or 2 times the web under web plates, 6.2.6.2(6). */
   readonly compressionWebMm: number;
   /** 1.4 or 1.3 (fillet), 1.5 or 2 (butt) times the web under web plates, 6.2.6.3(7). */
@@ -144,6 +148,8 @@ export function columnPanelOf(node: NodeCase, design: PanelDesign, steps: boolea
     epsilon,
     shearArea,
     shear: first?.side === "right" ? { left: other, right: own } : { left: own, right: other },
+    webPlateMm: plates?.thicknessMm ?? 0,
+    stiffestWebMm: section.webThicknessMm + (plates ? plates.sides * plates.thicknessMm : 0),
     compressionWebMm: (plates ? (plates.sides === 1 ? 1.5 : 2) : 1) * section.webThicknessMm,
     tensionWebMm: tensionWebMm(design),
   };

@@ -91,14 +91,20 @@ function cruciformBuckling(
     columnBeyondMm >= full / 2
       ? full
       : web.truncatedBreadthMm(trace, { fullMm: full, aboveMm: columnBeyondMm, belowMm: full });
-  const pair = {
-    widthMm: stiffener.widthMm,
-    thicknessMm: stiffener.thicknessMm,
+  const { widthMm, thicknessMm } = stiffener;
+  const areaMm2 = stiffenerRules.cruciformAreaMm2(trace, {
+    widthMm,
+    thicknessMm,
+    webThicknessMm: panel.compressionWebMm,
+    webLengthMm,
+  });
+  // A web plate under the stiffeners is part of the cross.
+  const inertiaMm4 = stiffenerRules.cruciformInertiaMm4(trace, {
+    widthMm: widthMm + panel.webPlateMm,
+    thicknessMm,
     webThicknessMm,
     webLengthMm,
-  };
-  const areaMm2 = stiffenerRules.cruciformAreaMm2(trace, pair);
-  const inertiaMm4 = stiffenerRules.cruciformInertiaMm4(trace, pair);
+  });
   const slenderness = strutSlenderness(trace, {
     bucklingLengthMm: (depthMm - 2 * flangeThicknessMm) / slopeCosine,
     gyrationMm: Math.sqrt(inertiaMm4 / areaMm2),
@@ -136,7 +142,7 @@ function stiffenedZoneOf(
           netAreaMm2: stiffenerRules.stiffenerNetAreaMm2(trace, { widthMm, clipMm, thicknessMm }),
           stiffenerYieldMpa: yieldMpa,
           breadthMm: breadth.value,
-          webThicknessMm: panel.section.webThicknessMm,
+          webThicknessMm: panel.compressionWebMm,
           webYieldMpa: panel.steel.yieldMpa,
           gammaM0: node.partialFactors.gammaM0,
         },

@@ -166,7 +166,7 @@ export function weldedJointOf(
               netAreaMm2,
               stiffenerYieldMpa,
               breadthMm: tensionBreadth.value,
-              webThicknessMm: panel.section.webThicknessMm,
+              webThicknessMm: panel.tensionWebMm,
               webYieldMpa: panel.steel.yieldMpa,
               gammaM0,
             },

@@ -44,6 +44,17 @@ function refuseRepeats(measures: readonly MeasureCase[]): void {
   }
 }
 
+/** Stiffeners as they are cut where a web plate lies under them: narrower by its thickness on either side of the web. */
+function fitted(measures: readonly MeasureCase[]): readonly MeasureCase[] {
+  const plate = measures.find((measure) => measure.kind === "web-plates");
+  if (!plate) return measures;
+  return measures.map((measure) =>
+    measure.kind === "transverse-stiffeners"
+      ? { ...measure, widthMm: measure.widthMm - plate.thicknessMm }
+      : measure,
+  );
+}
+
 /** The column panel as an option leaves it. @throws OutsideScope for a measure or combination not evaluated. */
 export function designOf(node: NodeCase, measures: readonly MeasureCase[]): PanelDesign {
   refuseRepeats(measures);
@@ -55,9 +66,8 @@ export function designOf(node: NodeCase, measures: readonly MeasureCase[]): Pane
     backing: nowhere(),
     bars: nowhere(),
   };
-  const applied = measures.reduce(apply, bare);
+  const applied = fitted(measures).reduce(apply, bare);
   const stiffeners = sharedWhereFacing(node.joints, applied.stiffeners);
   const pairs = stiffenerPairsOf(applied.column.section, node.joints, stiffeners);
-  if (applied.webPlates && pairs.length > 0) notYet("web plates together with transverse stiffeners");
   return { ...applied, stiffeners, pairs, bars: sharedWhereFacing(node.joints, applied.bars) };
 }

@@ -86,8 +86,10 @@ function rowBar(
   const far = farSideOf(own, index, farCase);
   if (!part) throw new RangeError(`No flange part at tension row ${index}`);
   const { symmetric } = own;
-  const relief = bar.reliefTension(null, { share: share.value, symmetric: symmetric.tension });
-  const pressShare = farCase && isBoltedCase(farCase) ? (farCase.model.barCompression?.share.value ?? 0) : 0;
+  const reliefShare = own.model.barShares[index]?.value ?? 0;
+  const relief = bar.reliefTension(null, { share: reliefShare, symmetric: symmetric.tension });
+  const pressShare =
+    farCase && isBoltedCase(farCase) ? (farCase.model.barCompression?.forceShare.value ?? 0) : 0;
   const rows = own.model.barShares.filter((candidate) => candidate !== null).length;
   const pressN = far.isCompression
     ? Math.max(0, (share.value * demandN + (pressShare * far.forceN) / rows) / 2)
@@ -113,7 +115,7 @@ function rowBar(
 
 function rowBars(own: BoltedSideCase, farCase: SideCase | undefined, steps: boolean): RowBar[] {
   return own.model.joint.view.tensionRows.flatMap((row, index) => {
-    const share = own.model.barShares[index];
+    const share = own.model.barForceShares[index];
     return share ? [rowBar(own, index, share, row, farCase, steps)] : [];
   });
 }
@@ -222,10 +224,10 @@ export function barChecks(
   const compression = own.model.barCompression;
   if (compression) {
     const force = traced(steps, (trace) => {
-      trace?.include(compression.share.step);
+      trace?.include(compression.forceShare.step);
       return bar.barCompressionForceN(
         trace,
-        { share: compression.share.value, forceN: Math.max(own.compressionDemandN, 0) },
+        { share: compression.forceShare.value, forceN: Math.max(own.compressionDemandN, 0) },
         0,
       );
     });

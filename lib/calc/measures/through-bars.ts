@@ -5,7 +5,11 @@ import {
   strutSlenderness,
 } from "../clauses/en1993-1-1-2005/members";
 import { circularMm, patternMm } from "../clauses/en1993-1-8-2005/yield-lines";
-import { flangeSpringMm, webTensionSpringMm } from "../clauses/en1993-1-8-2005/stiffness";
+import {
+  flangeSpringMm,
+  webCompressionSpringMm,
+  webTensionSpringMm,
+} from "../clauses/en1993-1-8-2005/stiffness";
 import type { BoltedJoint } from "../components/bolted-joint";
 import type { ColumnPanel } from "../components/column-panel";
 import { levelOfRow, type BoltRow } from "../components/connection-view";
@@ -129,7 +133,6 @@ export function refuseOutsideBarBounds(node: NodeCase, design: PanelDesign, pane
       const bars = design.bars[joint.side][level];
       if (!bars) continue;
       if (design.stiffeners[joint.side][level]) refuse("no bars at the level of a stiffener");
-      if (design.webPlates) refuse("no web plate beside bars");
       const connection = endPlateOfJoint(joint);
       refuseOutsideColumnBounds(panel, connection.bolts.gaugeMm, bars);
       refuseOutsideRowBounds(node, panel, connection, joint, level, bars);
@@ -157,10 +160,15 @@ function groupShare(joint: BoltedJoint, index: number): number {
   return best && alone ? Math.min(1, best.length / alone) : 1;
 }
 
-/** Share eta of each tension row that bars hold; null for a row of bolts. */
+/**
+ * Share eta of each tension row that bars hold; null for a row of bolts.
+ *
+ * @param webMm - the web's thickness: the stiffest it may be for the relief, the plain one for the bars' force.
+ */
 export function barTensionShares(
   panel: ColumnPanel,
   joint: BoltedJoint,
+  webMm: number,
   steps: boolean,
 ): readonly (Traced | null)[] {
   const { section, properties } = panel;
@@ -173,7 +181,7 @@ export function barTensionShares(
         mMm: joint.flange.mMm,
       });
       const webSpring = bar.barWebSpringMm(trace, {
-        webMm: section.webThicknessMm,
+        webMm,
         flangeMm: section.flangeThicknessMm,
         rootMm: section.rootMm,
         depthMm: section.depthMm,
@@ -205,10 +213,19 @@ const barStiffness = (trace: Trace | null, panel: ColumnPanel, bars: ThroughBars
 
 /** Bars beside the compression flange: what they take and what they withstand. */
 export interface BarCompression {
+  /** For the column's relief: the least it may be. */
   readonly share: Traced;
+  /** For the bars' own force: the most it may be. The same without a web plate. */
+  readonly forceShare: Traced;
   /** x of the further row. */
   readonly distanceRatio: number;
   readonly buckling: Traced;
+}
+
+/** Thickness of web where the beam flange presses, and where the bars' row stands. */
+interface BarWebs {
+  readonly pressedMm: number;
+  readonly besideMm: number;
 }
 
 function compressionShare(
@@ -217,6 +234,7 @@ function compressionShare(
   joint: BoltedJoint,
   bars: ThroughBars,
   distanceRatio: number,
+  webs: BarWebs,
 ): number {
   const { section, properties } = panel;
   const { mMm } = joint.flange;
@@ -226,7 +244,7 @@ function compressionShare(
   const flangeSpring = flangeSpringMm(trace, { lengthMm, thicknessMm: section.flangeThicknessMm, mMm });
   const webSpring = webTensionSpringMm(trace, {
     breadthMm: lengthMm,
-    thicknessMm: section.webThicknessMm,
+    thicknessMm: webs.besideMm,
     webDepthMm: properties.webDepthMm,
   });
   const columnNPerMm = bar.barColumnCompressionNPerMm(
@@ -234,7 +252,11 @@ function compressionShare(
     { elasticMpa: ELASTIC_MODULUS_MPA, flangeSpringMm: flangeSpring, webSpringMm: webSpring },
     mark,
   );
-  trace?.include(joint.compression.spring.step);
+  const compressionSpringMm = webCompressionSpringMm(trace, {
+    breadthMm: joint.compression.breadth.value,
+    thicknessMm: webs.pressedMm,
+    webDepthMm: properties.webDepthMm,
+  });
   const barNPerMm = barStiffness(trace, panel, bars);
   return bar.barShareCompression(
     trace,
@@ -242,7 +264,7 @@ function compressionShare(
       distanceRatio,
       barNPerMm,
       elasticMpa: ELASTIC_MODULUS_MPA,
-      compressionSpringMm: joint.compression.spring.value,
+      compressionSpringMm,
       columnNPerMm,
     },
     mark,
@@ -289,11 +311,18 @@ export function barCompressionOf(
   const half = compression.breadth.value / 2;
   const isBothSides = Number.isFinite(inner) && Number.isFinite(outer) && Math.max(inner, outer) / half <= 1;
   const distanceRatio = (isBothSides ? Math.max(inner, outer) : Math.min(inner, outer)) / half;
-  return {
-    share: traced(steps, (trace) => {
-      const one = compressionShare(trace, panel, joint, bars, distanceRatio);
+  const shareOf = (webs: BarWebs): Traced =>
+    traced(steps, (trace) => {
+      trace?.include(compression.breadth.step);
+      const one = compressionShare(trace, panel, joint, bars, distanceRatio, webs);
       return isBothSides ? bar.barShareBothSides(trace, { share: one }, 0) : one;
-    }),
+    });
+  const plainMm = panel.section.webThicknessMm;
+  const { stiffestWebMm } = panel;
+  const share = shareOf({ pressedMm: stiffestWebMm, besideMm: plainMm });
+  return {
+    share,
+    forceShare: stiffestWebMm === plainMm ? share : shareOf({ pressedMm: plainMm, besideMm: stiffestWebMm }),
     distanceRatio,
     buckling: traced(steps, (trace) => barBuckling(trace, node, panel, bars)),
   };

@@ -88,7 +88,7 @@ export function stiffenerDetailing(
     ),
     detailAtMost(
       { ...head, clause: "geometry", what: "stiffener within the column flange" },
-      stiffener.widthMm,
+      stiffener.widthMm + panel.webPlateMm,
       (section.widthMm - section.webThicknessMm) / 2,
     ),
     detailAtMost(
@@ -146,7 +146,7 @@ function tensionForce(side: BoltedSideCase, panel: ColumnPanel, steps: boolean):
       firstN: force(above),
       secondN: force(below),
       webLengthMm: ends(above) + ends(below),
-      webThicknessMm: panel.section.webThicknessMm,
+      webThicknessMm: panel.tensionWebMm,
       yieldMpa: panel.steel.yieldMpa,
     });
     return tensionStiffenerSharedN(
@@ -209,6 +209,22 @@ function weldLimit(
       0,
     ),
   );
+}
+
+/** What the forces of both sides leave to the web, N. */
+function netOf(forces: readonly PlateForce[]): number {
+  let total = 0;
+  // Towards the right is positive: tension on the left pulls left, compression on the left pushes right.
+  for (const { side, isTension, force } of forces) {
+    total += (side === "left" ? -1 : 1) * (isTension ? 1 : -1) * force.value;
+  }
+  return Math.abs(total);
+}
+
+/** Force that one pair brings into the web, or the web plates that it sits on, in one load case, N. */
+export function pairIntoWebN(panel: ColumnPanel, pair: StiffenerPair, sides: readonly SideCase[]): number {
+  const served = sides.filter((side) => pair.sides.includes(side.model.joint.view.joint.side));
+  return netOf(served.map((side) => plateForce(side, pair, panel, false)));
 }
 
 /** Plates and welds of one pair in one load case, the forces of the sides it serves with their signs. */
@@ -276,14 +292,7 @@ export function stiffenerChecks(
       );
     }
   });
-  // Towards the right is positive: tension on the left pulls left, compression on the left pushes right.
-  const net = Math.abs(
-    forces.reduce(
-      (total, { side, isTension, force }) =>
-        total + (side === "left" ? -1 : 1) * (isTension ? 1 : -1) * force.value,
-      0,
-    ),
-  );
+  const net = netOf(forces);
   const side = forces.reduce((larger, other) =>
     other.force.value > larger.force.value ? other : larger,
   ).side;

@@ -56,11 +56,27 @@ export function refuseShortPlate(plates: WebPlates, models: readonly JointModel[
 }
 
 /** Detailing of supplementary web plates. EN 1993-1-8:2005, 6.2.6.1(8) to (14). */
-export function webPlateDetailing(panel: ColumnPanel, plates: WebPlates, side: Side): ComponentCheck[] {
+export function webPlateDetailing(
+  panel: ColumnPanel,
+  plates: WebPlates,
+  side: Side,
+  models: readonly JointModel[],
+): ComponentCheck[] {
   const head = { side };
   const clear = panel.properties.webDepthMm;
   const epsilon = epsilonOf(null, { yieldMpa: plates.steel.yieldMpa });
   const reach = plates.weld.kind === "fillet" ? weldLegMm(plates.weld) : plates.thicknessMm;
+  const nuts = models.flatMap((model) =>
+    isBolted(model)
+      ? model.joint.view.rows.map((row) => ({
+          gaugeMm: model.joint.view.gaugeMm,
+          halfNutMm: row.fastener.size.acrossPointsMm / 2,
+        }))
+      : [],
+  );
+  const roomOf = ({ gaugeMm }: { readonly gaugeMm: number }): number =>
+    (gaugeMm - panel.section.webThicknessMm) / 2 - plates.thicknessMm;
+  const tightest = nuts.sort((a, b) => roomOf(a) - a.halfNutMm - (roomOf(b) - b.halfNutMm))[0];
   const sameGrade = plates.steel.grade === panel.steel.grade;
   return [
     detailAtMost(
@@ -93,6 +109,15 @@ export function webPlateDetailing(panel: ColumnPanel, plates: WebPlates, side: S
       1,
       sameGrade ? 1 : 0,
     ),
+    ...(tightest
+      ? [
+          detailAtLeast(
+            { ...head, clause: "geometry", what: "nut beside the web plate" },
+            tightest.halfNutMm,
+            Math.max(roomOf(tightest), 0),
+          ),
+        ]
+      : []),
     ...(plates.weld.kind === "fillet"
       ? [
           detailAtLeast(
@@ -105,17 +130,23 @@ export function webPlateDetailing(panel: ColumnPanel, plates: WebPlates, side: S
   ];
 }
 
-/** Shear in the plates and in their edge welds under the panel's shear. */
+/**
+ * Shear in the plates and in their edge welds: their share of the panel's shear, or what a pair of stiffeners that sits on
+ * them brings in on its side of the web, if that is more.
+ */
 export function webPlateChecks(
   node: NodeCase,
   panel: ColumnPanel,
   plates: WebPlates,
-  panelShearDemandN: number,
+  demand: { readonly panelShearN: number; readonly stiffenersN: number },
   head: { readonly side: Side; readonly loadCase: string },
   steps: boolean,
 ): ComponentCheck[] {
   const added = plates.widthMm * panel.section.webThicknessMm;
-  const perPlateN = (panelShearDemandN * added) / panel.shearArea.value / plates.sides;
+  const perPlateN = Math.max(
+    (demand.panelShearN * added) / panel.shearArea.value / plates.sides,
+    demand.stiffenersN / 2,
+  );
   const plate = traced(steps, (trace) =>
     panelShearN(trace, {
       shearAreaMm2: plates.widthMm * plates.thicknessMm,

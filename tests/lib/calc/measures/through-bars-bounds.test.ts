@@ -8,7 +8,6 @@ import {
   buildJoints,
   buildNodeCase,
   buildStiffeners,
-  buildWebPlates,
   withColumn,
   type EndPlateOverrides,
 } from "@/tests/factories/build-node-case";
@@ -149,10 +148,9 @@ describe("what bars need around them", () => {
     expect(refused(farAt(below + 0.1), bars)).toMatch(/same rows and gauge/);
   });
 
-  it("no stiffener at their level and no web plate", () => {
+  it("no stiffener at their level", () => {
     expect(refused(buildNodeCase(), buildBars(), buildStiffeners())).toMatch(
       /no bars at the level of a stiffener/,
     );
-    expect(refused(buildNodeCase(), buildBars(), buildWebPlates())).toMatch(/no web plate beside bars/);
   });
 });

@@ -144,6 +144,23 @@ describe("web plates", () => {
   });
 });
 
+describe("stiffeners on web plates", () => {
+  it("are narrower by the plate on each side that has one, and weld less to the flange", () => {
+    const massOf = (measures: readonly MeasureCase[]) =>
+      records(measures, "plate")
+        .filter((record) => record.values.partType === "transverse-stiffener")
+        .reduce((sum, record) => sum + record.values.massKg, 0);
+    const alone = stiffeners();
+    const clear = 290 - 2 * 14;
+    const less = (pieces: number, plateMm: number) => pieces * RHO * alone.thicknessMm * plateMm * clear;
+    const one = webPlates({ sides: 1 });
+    const levels = alone.levels.length;
+    expect(massOf([alone]) - massOf([one, alone])).toBeCloseTo(less(levels, one.thicknessMm), 9);
+    const two = webPlates({ sides: 2 });
+    expect(massOf([alone]) - massOf([two, alone])).toBeCloseTo(less(2 * levels, two.thicknessMm), 9);
+  });
+});
+
 describe("backing plates", () => {
   it("lie each side of the web behind each bolted flange, drilled for the rows of their level", () => {
     expect(records([backingPlates()], "plate").map((record) => record.values.parts)).toEqual([2, 2]);
