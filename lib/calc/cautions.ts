@@ -1,5 +1,6 @@
 import { isBolted, type JointModel } from "./joint-model";
 import { isOnePanel } from "./mechanics/panel-levels";
+import { fullPairAt } from "./measures/diagonal-stiffeners";
 import { hasBars, type PanelDesign } from "./measures/panel-design";
 import type { StiffenerPair } from "./measures/stiffener-pairs";
 import type { LoadCase, NodeCase } from "./node";
@@ -24,6 +25,9 @@ const BACKING =
 /** Shares of eta: the mean of the study, and what relief is taken at. */
 const BEST_ESTIMATE = 0.83;
 const CAUTIOUS = 0.55;
+
+const DIAGONALS =
+  "Diagonal stiffeners follow a guide rule (SCI/BCSA P398, step 6D), as EN 1993-1-8 gives none: the web works up to its resistance and the diagonals take the rest. Their welds are for the whole shear of the panel, at most what a diagonal carries; where a plate meets the flange at less than 60 degrees one run of two counts. A K's diagonals meet at mid-height, where their level parts cancel.";
 
 const ON_PLATE =
   "The web plate is one piece and goes on first; stiffeners sit on it and are cut narrower by its thickness, counted so on both sides of the web.";
@@ -98,6 +102,7 @@ export function cautionsOf(
     cautions.push(BACKING);
   }
   for (const pair of design.pairs) cautions.push(...pairCautions(design, pair, models));
+  if (design.diagonals) cautions.push(DIAGONALS, ...freeEndCautions(design));
   if (design.webPlates && design.pairs.length > 0) cautions.push(ON_PLATE);
   if (design.webPlates && hasBars(design)) cautions.push(BARS_BESIDE_PLATE);
   if (!isOnePanel(node.joints)) cautions.push(UNEQUAL);
@@ -117,6 +122,15 @@ function barEstimates(models: readonly JointModel[]): readonly string[] {
   });
   return [...new Set(words)];
 }
+
+/** Levels at which a diagonal ends without a pair in line. */
+const freeEndCautions = (design: PanelDesign): readonly string[] =>
+  (["top", "bottom"] as const)
+    .filter((level) => fullPairAt(design, level) === null)
+    .map(
+      (level) =>
+        `No full-depth stiffeners at the ${level}: as guidance, put a pair in line with every end of a diagonal; without one, only the web beside the end brings its force in.`,
+    );
 
 /** What a pair of stiffeners does not do as guidance would have it. */
 function pairCautions(

@@ -15,6 +15,7 @@ import { symmetricPart } from "./mechanics/through-bar-formulas";
 import { designOf } from "./measures/apply-measures";
 import { backingDetailing, refuseUnheldBacking } from "./measures/backing-plates";
 import { barChecks, barPressN } from "./measures/bar-checks";
+import { diagonalChecks, diagonalDetailing, refuseBesideDiagonals } from "./measures/diagonal-stiffeners";
 import { hasBars, type PanelDesign } from "./measures/panel-design";
 import { refuseOutsideBarBounds } from "./measures/through-bars";
 import { pairIntoWebN, stiffenerChecks, stiffenerDetailing } from "./measures/transverse-stiffeners";
@@ -178,11 +179,12 @@ function caseChecks(
   if (design.webPlates) {
     let stiffenersN = 0;
     for (const pair of design.pairs) stiffenersN = Math.max(stiffenersN, pairIntoWebN(panel, pair, sides));
-    const demand = { panelShearN: shearN, stiffenersN };
+    const demand = { panelShearN: Math.abs(shearN), stiffenersN };
     checks.push(
       ...webPlateChecks(node, panel, design.webPlates, demand, { side, loadCase: loadCase.name }, steps),
     );
   }
+  checks.push(...diagonalChecks(node, design, panel, shearN, { side, loadCase: loadCase.name }, steps));
   if (hasBars(design)) {
     sides.forEach((own, index) => checks.push(...barChecks(node, panel, own, sides[1 - index], steps)));
     checks.push(...pressedCompression(sides));
@@ -203,7 +205,7 @@ function detailingChecks(
     return connectionDetailing(side, panel.section.widthMm);
   });
   for (const pair of design.pairs) checks.push(...stiffenerDetailing(panel, pair, models));
-  checks.push(...backingDetailing(node, design, panel, models));
+  checks.push(...diagonalDetailing(panel, models), ...backingDetailing(node, design, panel, models));
   const side = models[0]?.joint.view.joint.side ?? "left";
   if (design.webPlates) checks.push(...webPlateDetailing(panel, design.webPlates, side, models));
   return checks;
@@ -214,6 +216,7 @@ function evaluate(node: NodeCase, measures: readonly MeasureCase[], steps: boole
   const panel = columnPanelOf(node, design, steps);
   refuseOutsideBarBounds(node, design, panel);
   refuseUnheldBacking(node, design);
+  refuseBesideDiagonals(design);
   const geometry = panelGeometryOf(node);
   const store = new ModelStore(node, design, panel, steps);
   const checks: ComponentCheck[] = [];

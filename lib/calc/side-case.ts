@@ -131,7 +131,8 @@ function tensionSide(model: BoltedModel, symmetric: number, steps: boolean): Ten
 }
 
 const panelSpringOf = (panel: ColumnPanel, beta: number, lever: Traced, steps: boolean): Traced | null =>
-  beta > 0
+  // Diagonals make k_1 infinite, Table 6.11.
+  beta > 0 && panel.diagonals === null
     ? traced(steps, (trace) => {
         trace?.include(panel.shearArea.step);
         return panelSpringMm(trace, { shearAreaMm2: panel.shearArea.value, beta, leverMm: lever.value }, 0);

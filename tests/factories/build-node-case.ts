@@ -184,3 +184,17 @@ export const buildBackingPlates = (
   steel: S275,
   ...overrides,
 });
+
+/** A pair of 100 x 12 from corner to corner, its top end to the right. */
+export const buildDiagonals = (
+  overrides: Partial<Measure<"diagonal-stiffeners">> = {},
+): Measure<"diagonal-stiffeners"> => ({
+  kind: "diagonal-stiffeners",
+  arrangement: "single",
+  towards: "right",
+  thicknessMm: 12,
+  widthMm: 100,
+  steel: S275,
+  weld: fillet(8),
+  ...overrides,
+});

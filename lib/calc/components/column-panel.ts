@@ -7,11 +7,13 @@ import {
 } from "../clauses/en1993-1-8-2005/column-web";
 import { tStubMomentNmm } from "../clauses/en1993-1-8-2005/t-stub";
 import { isOnePanel } from "../mechanics/panel-levels";
+import { bracedPanelShearN } from "../mechanics/diagonal-formulas";
 import { sectionProperties, type SectionProperties } from "../mechanics/section-properties";
 import type { PanelDesign, TransverseStiffeners } from "../measures/panel-design";
 import type { ISection, JointCase, NodeCase, Side, Steel } from "../node";
 import type { Trace } from "../trace/trace";
 import { traced, type Traced } from "../trace/traced";
+import { panelDiagonalsOf, type PanelDiagonals } from "./panel-diagonals";
 
 /** The column panel's own numbers, the same in every load case. */
 export interface ColumnPanel {
@@ -21,6 +23,9 @@ export interface ColumnPanel {
   readonly epsilon: number;
   /** With a web plate as enlarged by 6.2.6.1(6). */
   readonly shearArea: Traced;
+  /** V_wp,Rd of the web and its plates alone. */
+  readonly plainShear: Traced;
+  readonly diagonals: PanelDiagonals | null;
   /** V_wp,Rd on each side: the frame of flanges and stiffeners is that of the side's own beam. */
   readonly shear: Readonly<Record<Side, Traced>>;
   /** Thickness that a web plate puts between web and stiffeners; 0 without one. */
@@ -63,35 +68,18 @@ function tensionWebMm(design: PanelDesign): number {
 const bendingRank = ({ widthMm, thicknessMm, steel }: TransverseStiffeners): number =>
   widthMm * thicknessMm ** 2 * steel.yieldMpa;
 
-function shearResistance(
+/** What the frame of column flanges and full-depth pairs at both levels of a joint adds, N; 0 without them. */
+function frameShear(
   trace: Trace | null,
   node: NodeCase,
   design: PanelDesign,
-  panel: {
-    readonly shearAreaMm2: number;
-    readonly webDepthMm: number;
-    readonly epsilon: number;
-  },
   joint: JointCase | undefined,
 ): number {
   const { section, steel } = design.column;
   const { gammaM0 } = node.partialFactors;
-  const mark = trace?.mark();
-  const plain = panelShearN(
-    trace,
-    {
-      shearAreaMm2: panel.shearAreaMm2,
-      yieldMpa: steel.yieldMpa,
-      webDepthMm: panel.webDepthMm,
-      webThicknessMm: section.webThicknessMm,
-      epsilon: panel.epsilon,
-      gammaM0,
-    },
-    0,
-  );
-  if (!joint) return plain;
+  if (!joint) return 0;
   const { top, bottom } = design.stiffeners[joint.side];
-  if (!top || !bottom || top.length !== "full" || bottom.length !== "full") return plain;
+  if (!top || !bottom || top.length !== "full" || bottom.length !== "full") return 0;
   const frameMark = trace?.mark();
   const flangeMomentNmm = tStubMomentNmm(trace, {
     lengthMm: section.widthMm,
@@ -107,12 +95,41 @@ function shearResistance(
     gammaM0,
   });
   const { depthMm, flangeThicknessMm } = joint.beam.section;
-  const frame = panelFrameShearN(
+  return panelFrameShearN(
     trace,
     { flangeMomentNmm, stiffenerMomentNmm, spacingMm: depthMm - flangeThicknessMm },
     frameMark,
   );
-  return stiffenedPanelShearN(trace, { panelN: plain, frameN: frame }, mark);
+}
+
+/** The web's own resistance with what frame and diagonals add to it, N. */
+function shearResistance(
+  trace: Trace | null,
+  node: NodeCase,
+  design: PanelDesign,
+  plain: Traced,
+  diagonals: PanelDiagonals | null,
+  joint: JointCase | undefined,
+): number {
+  const mark = trace?.mark();
+  trace?.include(plain.step);
+  const frameN = frameShear(trace, node, design, joint);
+  if (!diagonals) {
+    return frameN > 0 ? stiffenedPanelShearN(trace, { panelN: plain.value, frameN }, mark) : plain.value;
+  }
+  trace?.include(diagonals.resistance.step);
+  trace?.include(diagonals.cosine.step);
+  return bracedPanelShearN(
+    trace,
+    {
+      panelN: plain.value,
+      frameN,
+      count: diagonals.count,
+      diagonalN: diagonals.resistance.value,
+      cosine: diagonals.cosine.value,
+    },
+    mark,
+  );
 }
 
 /** The panel as the option leaves it. @throws OutsideScope where the web is too slender (6.2.6.1(1)). */
@@ -131,12 +148,24 @@ export function columnPanelOf(node: NodeCase, design: PanelDesign, steps: boolea
         )
       : own;
   });
+  const plainShear = traced(steps, (trace) => {
+    trace?.include(shearArea.step);
+    return panelShearN(
+      trace,
+      {
+        shearAreaMm2: shearArea.value,
+        yieldMpa: steel.yieldMpa,
+        webDepthMm: properties.webDepthMm,
+        webThicknessMm: section.webThicknessMm,
+        epsilon,
+        gammaM0: node.partialFactors.gammaM0,
+      },
+      0,
+    );
+  });
+  const diagonals = design.diagonals && panelDiagonalsOf(node, section, design.diagonals, steps);
   const shearOf = (joint: JointCase | undefined): Traced =>
-    traced(steps, (trace) => {
-      trace?.include(shearArea.step);
-      const numbers = { shearAreaMm2: shearArea.value, webDepthMm: properties.webDepthMm, epsilon };
-      return shearResistance(trace, node, design, numbers, joint);
-    });
+    traced(steps, (trace) => shearResistance(trace, node, design, plainShear, diagonals, joint));
   const [first, second] = node.joints;
   const own = shearOf(first);
   const isAlike = !second || isOnePanel(node.joints);
@@ -147,6 +176,8 @@ export function columnPanelOf(node: NodeCase, design: PanelDesign, steps: boolea
     properties,
     epsilon,
     shearArea,
+    plainShear,
+    diagonals,
     shear: first?.side === "right" ? { left: other, right: own } : { left: own, right: other },
     webPlateMm: plates?.thicknessMm ?? 0,
     stiffestWebMm: section.webThicknessMm + (plates ? plates.sides * plates.thicknessMm : 0),

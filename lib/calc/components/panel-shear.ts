@@ -74,7 +74,7 @@ function zoneShear(zone: PanelZone, loadCase: LoadCase, sides: readonly SideCase
   );
 }
 
-/** Adds the panel's check for each side, in the zone it shears most, and returns the largest shear, N. */
+/** Adds the panel's check for each side, in the zone it shears most, and returns the largest shear with its sign, N. */
 export function panelChecks(
   checks: ComponentCheck[],
   panel: ColumnPanel,
@@ -94,7 +94,7 @@ export function panelChecks(
       if (!worst || Math.abs(force.value) > Math.abs(worst.value)) worst = force;
     });
     const { value, step } = (worst as Traced | null) ?? { value: 0, step: undefined };
-    largestN = Math.max(largestN, Math.abs(value));
+    if (Math.abs(value) > Math.abs(largestN)) largestN = value;
     checks.push(
       checkOf(
         {

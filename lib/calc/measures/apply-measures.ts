@@ -1,16 +1,13 @@
 import { applyBackingPlates } from "./backing-plates";
 import type { MeasureCase, NodeCase } from "../node";
 import { OutsideScope } from "../outcome";
+import { applyDiagonalStiffeners } from "./diagonal-stiffeners";
 import { applyHeavierColumn } from "./heavier-column";
 import { nowhere, type PanelDesign } from "./panel-design";
 import { sharedWhereFacing, stiffenerPairsOf } from "./stiffener-pairs";
 import { applyThroughBars } from "./through-bars";
 import { applyTransverseStiffeners } from "./transverse-stiffeners";
 import { applyWebPlates } from "./web-plates";
-
-const notYet = (what: string): never => {
-  throw new OutsideScope(`${what} are not evaluated yet`);
-};
 
 function apply(design: PanelDesign, measure: MeasureCase): PanelDesign {
   switch (measure.kind) {
@@ -23,7 +20,7 @@ function apply(design: PanelDesign, measure: MeasureCase): PanelDesign {
     case "heavier-column":
       return applyHeavierColumn(design, measure);
     case "diagonal-stiffeners":
-      return notYet("diagonal stiffeners");
+      return applyDiagonalStiffeners(design, measure);
     case "backing-plates":
       return applyBackingPlates(design, measure);
   }
@@ -62,6 +59,7 @@ export function designOf(node: NodeCase, measures: readonly MeasureCase[]): Pane
     column: node.column,
     stiffeners: nowhere(),
     pairs: [],
+    diagonals: null,
     webPlates: null,
     backing: nowhere(),
     bars: nowhere(),

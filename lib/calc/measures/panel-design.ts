@@ -2,6 +2,7 @@ import type { ISection, Level, MeasureCase, MeasureSides, Side, Steel } from "..
 import type { StiffenerPair } from "./stiffener-pairs";
 
 export type TransverseStiffeners = Extract<MeasureCase, { kind: "transverse-stiffeners" }>;
+export type DiagonalStiffeners = Extract<MeasureCase, { kind: "diagonal-stiffeners" }>;
 export type WebPlates = Extract<MeasureCase, { kind: "web-plates" }>;
 export type BackingPlates = Extract<MeasureCase, { kind: "backing-plates" }>;
 export type ThroughBars = Extract<MeasureCase, { kind: "through-bars" }>;
@@ -15,6 +16,7 @@ export interface PanelDesign {
   readonly stiffeners: BySideAndLevel<TransverseStiffeners>;
   /** The same as pieces: one pair may serve both beams. */
   readonly pairs: readonly StiffenerPair[];
+  readonly diagonals: DiagonalStiffeners | null;
   readonly webPlates: WebPlates | null;
   readonly backing: BySideAndLevel<BackingPlates>;
   readonly bars: BySideAndLevel<ThroughBars>;

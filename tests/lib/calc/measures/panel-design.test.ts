@@ -23,6 +23,7 @@ describe("the design of the panel", () => {
       column: buildNodeCase().column,
       stiffeners: nowhere(),
       pairs: [],
+      diagonals: null,
       webPlates: null,
       backing: nowhere(),
       bars: nowhere(),
