@@ -4,7 +4,7 @@ import { createRequire } from "node:module";
 import { afterAll, beforeAll, describe, expect, it } from "vitest";
 import type { AxeResults, RunOptions } from "axe-core";
 import { keepPicture, openBrowser, signIn, type TestBrowser } from "../support/browser";
-import { BEST_NODE, COMPARING_MS, nodePath, registerPath } from "./demo-project";
+import { BEST_NODE, COMPARING_MS, nodePath, openComparison, openSheet, registerPath } from "./demo-project";
 
 const AXE = readFileSync(createRequire(import.meta.url).resolve("axe-core/axe.min.js"), "utf8");
 const RULES: RunOptions = {
@@ -95,4 +95,43 @@ describe.each(PAGES)("$name", (shown) => {
       if (shown.scrollsSideways !== true) expect(await overhang()).toBe(0);
     },
   );
+});
+
+/** The right edge of the first element that a selector finds, and the width of the window, px. */
+const rightEdge = (selector: string): Promise<{ edge: number; window: number }> =>
+  browser.page
+    .locator(selector)
+    .first()
+    .evaluate((element) => ({
+      edge: element.getBoundingClientRect().right,
+      window: document.documentElement.clientWidth,
+    }));
+
+it.each(WIDTHS)("has what can be done with a node in the window of its register at %i px", async (width) => {
+  const { page } = browser;
+  await page.setViewportSize({ width, height: 900 });
+  await page.goto(places.register);
+  const { edge, window } = await rightEdge("main tbody tr button:has-text('Delete')");
+  expect(edge).toBeLessThanOrEqual(window);
+});
+
+it.each(WIDTHS)(
+  "has the winner among twelve options in the window of the comparison at %i px",
+  async (width) => {
+    const { page } = browser;
+    await page.setViewportSize({ width, height: 900 });
+    await openComparison(page, places.sheet);
+    expect(await page.getByText(/^12 options: /).count()).toBe(1);
+    const { edge, window } = await rightEdge("main thead th.best-edge");
+    expect(edge).toBeLessThanOrEqual(window);
+  },
+);
+
+it("leads from the depth of a catalogue section to the choice of sections", async () => {
+  const { page } = browser;
+  await page.setViewportSize({ width: 1280, height: 900 });
+  await openSheet(page, places.sheet);
+  await page.getByRole("button", { name: /column depth.*choose another section/ }).press("Enter");
+  const focused = await page.evaluate(() => document.activeElement?.getAttribute("aria-label"));
+  expect(focused).toBe("Column section");
 });
