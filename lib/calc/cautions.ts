@@ -16,6 +16,12 @@ const BARS = [
   "The bars work only with every inner nut tight on its flange: state the tightening order and its inspection, and nuts and bars to EN 1090-2. Outer nuts with washers on both flanges. Bar resistances are taken at 0.85 for cut threads.",
 ] as const;
 
+const CLEATS =
+  "Flange cleats: bolts along the beam slip in their clearance before the stiffness holds; the beam's shear is given to the bolts and the leg it bears on.";
+const WEB_CLEATS =
+  "The web angles are counted on neither for the moment nor for the shear; they may be given a share of the shear in a design of their own.";
+const STIFFENED_CLEATS =
+  "The plates that stiffen the angles are not counted on: the angles are taken as plain ones, on the safe side.";
 const UNEQUAL =
   "The beams differ in depth or level: the panel is cut into zones at their flanges, each with its own shear by equilibrium, and a joint's beta is that of the worst zone it shears.";
 
@@ -106,6 +112,7 @@ export function cautionsOf(
   if (design.webPlates && design.pairs.length > 0) cautions.push(ON_PLATE);
   if (design.webPlates && hasBars(design)) cautions.push(BARS_BESIDE_PLATE);
   if (!isOnePanel(node.joints)) cautions.push(UNEQUAL);
+  cautions.push(...cleatCautions(node));
   return cautions;
 }
 
@@ -131,6 +138,18 @@ const freeEndCautions = (design: PanelDesign): readonly string[] =>
       (level) =>
         `No full-depth stiffeners at the ${level}: as guidance, put a pair in line with every end of a diagonal; without one, only the web beside the end brings its force in.`,
     );
+
+/** What no resistance of a joint of angles counts on. */
+function cleatCautions(node: NodeCase): readonly string[] {
+  const cleats = node.joints.flatMap(({ connection }) =>
+    connection.kind === "flange-cleats" ? [connection] : [],
+  );
+  return [
+    ...(cleats.length > 0 ? [CLEATS] : []),
+    ...(cleats.some(({ webCleats }) => webCleats !== null) ? [WEB_CLEATS] : []),
+    ...(cleats.some(({ isStiffened }) => isStiffened) ? [STIFFENED_CLEATS] : []),
+  ];
+}
 
 /** What a pair of stiffeners does not do as guidance would have it. */
 function pairCautions(

@@ -1,5 +1,7 @@
 import { cautionsOf } from "./cautions";
 import { checkOf } from "./components/check";
+import { seatCheck } from "./components/cleat-seat";
+import { isCleatView } from "./components/cleat-view";
 import { columnPanelOf, type ColumnPanel } from "./components/column-panel";
 import { connectionDetailing, sideChecks } from "./components/joint-checks";
 import {
@@ -23,7 +25,7 @@ import { refuseShortPlate, webPlateChecks, webPlateDetailing } from "./measures/
 import type { BeamActions, JointCase, Level, LoadCase, MeasureCase, NodeCase, Side } from "./node";
 import { OutsideScope } from "./outcome";
 import type { ComponentCheck, JointResult, OptionOutcome } from "./result";
-import { boltedSideCase, jointResultOf, weldedSideCase, type SideCase } from "./side-case";
+import { boltedSideCase, isBoltedCase, jointResultOf, weldedSideCase, type SideCase } from "./side-case";
 import { connectionFailureOf, governingOf, reachesStiffness } from "./verdict";
 
 export interface EvaluateSettings {
@@ -172,7 +174,11 @@ function caseChecks(
   sides: readonly SideCase[],
   steps: boolean,
 ): void {
-  for (const side of sides) sideChecks(checks, side);
+  for (const side of sides) {
+    sideChecks(checks, side);
+    if (isBoltedCase(side) && isCleatView(side.model.joint.view))
+      checks.push(seatCheck(node, side, side.model.joint.view, steps));
+  }
   const shearN = panelChecks(checks, panel, geometry, loadCase, sides, steps);
   for (const pair of design.pairs) checks.push(...stiffenerChecks(node, panel, pair, sides, steps));
   const side = node.joints[0]?.side ?? "left";

@@ -1,11 +1,13 @@
-import { boltShearResistance } from "./components/bolt-shear";
-import { boltedJointOf, type BoltedJoint } from "./components/bolted-joint";
+import { boltShearResistance, legBearing, plateBearing } from "./components/bolt-shear";
+import { boltedJointOf, endPlateLimits, type BoltedJoint, type BoltedParts } from "./components/bolted-joint";
+import { cleatViewOf } from "./components/cleat-view";
 import { columnFlangeOf } from "./components/column-flange";
 import type { ColumnPanel } from "./components/column-panel";
 import { compressionZoneOf } from "./components/compression-zone";
-import { connectionWeldLimits, type ConnectionWeldLimits } from "./components/connection-welds";
-import { endPlateViewOf, jointViewOf } from "./components/connection-view";
+import { connectionWeldLimits, noWelds, type ConnectionWeldLimits } from "./components/connection-welds";
+import { endPlateViewOf, jointViewOf, type BoltedView } from "./components/connection-view";
 import { endPlateOf } from "./components/end-plate";
+import { cleatLegOf, cleatLimits, legBoltResistance, legSprings } from "./components/flange-cleat";
 import {
   classBoundsOf,
   rowSpringsOf,
@@ -17,7 +19,14 @@ import {
 import { weldedJointOf, type WeldedJoint } from "./components/welded-joint";
 import type { PanelDesign } from "./measures/panel-design";
 import { barCompressionOf, barTensionShares, type BarCompression } from "./measures/through-bars";
-import type { JointCase, Level, NodeCase } from "./node";
+import type {
+  EndPlateConnection,
+  FlangeCleatConnection,
+  JointCase,
+  Level,
+  NodeCase,
+  WeldedConnection,
+} from "./node";
 import { OutsideScope } from "./outcome";
 import type { Traced } from "./trace/traced";
 
@@ -34,6 +43,8 @@ export interface BoltedModel extends ModelBase {
   readonly springs: readonly RowSprings[];
   readonly tension: TensionSpring;
   readonly shear: Traced;
+  /** Springs of bolts that slip along the beam; none behind an end plate. */
+  readonly slip: readonly Traced[];
   /** Share of each tension row that bars surely take off the column; null for bolts. */
   readonly barShares: readonly (Traced | null)[];
   /** The most of it that they may have to carry. The same without a web plate. */
@@ -49,6 +60,119 @@ export type JointModel = BoltedModel | WeldedModel;
 
 export const isBolted = (model: JointModel): model is BoltedModel => model.joint.kind === "bolted";
 
+/** What every kind of joint is made from. */
+interface ModelSetting {
+  readonly node: NodeCase;
+  readonly design: PanelDesign;
+  readonly panel: ColumnPanel;
+  readonly joint: JointCase;
+  readonly tensionLevel: Level;
+  readonly steps: boolean;
+}
+
+const straightWebMm = ({ beam: { section } }: JointCase): number =>
+  section.depthMm - 2 * section.flangeThicknessMm - 2 * section.rootMm;
+
+function weldedModelOf(setting: ModelSetting, connection: WeldedConnection): WeldedModel {
+  const { node, design, panel, joint, tensionLevel, steps } = setting;
+  const view = jointViewOf(node, design, joint, tensionLevel);
+  const compression = compressionZoneOf(node, panel, view, steps);
+  const welded = weldedJointOf(node, panel, view, connection, compression, steps);
+  return {
+    joint: welded,
+    bounds: classBoundsOf(node, panel, joint, steps),
+    welds: connectionWeldLimits(
+      node,
+      joint,
+      connection.welds,
+      view.tensionWeld,
+      panel.steel,
+      straightWebMm(joint),
+      steps,
+    ),
+    leverMm: welded.leverMm,
+  };
+}
+
+/** A bolted joint of any kind from its parts. */
+function boltedModelOf(
+  setting: ModelSetting,
+  view: BoltedView,
+  parts: BoltedParts,
+  own: Pick<BoltedModel, "welds" | "shear" | "slip">,
+): BoltedModel {
+  const { node, panel, joint, steps } = setting;
+  const bolted = boltedJointOf(node, view, parts, steps);
+  const springs = rowSpringsOf(panel, bolted, steps);
+  const barShares = barTensionShares(panel, bolted, panel.stiffestWebMm, steps);
+  const plainMm = panel.section.webThicknessMm;
+  const { section } = joint.beam;
+  return {
+    joint: bolted,
+    bounds: classBoundsOf(node, panel, joint, steps),
+    welds: own.welds,
+    leverMm: section.depthMm - section.flangeThicknessMm,
+    springs,
+    tension: tensionSpringOf(bolted, springs, [], steps),
+    shear: own.shear,
+    slip: own.slip,
+    barShares,
+    barForceShares:
+      panel.stiffestWebMm === plainMm ? barShares : barTensionShares(panel, bolted, plainMm, steps),
+    barCompression: barCompressionOf(node, panel, bolted, steps),
+  };
+}
+
+function endPlateModelOf(setting: ModelSetting, connection: EndPlateConnection): BoltedModel {
+  const { node, design, panel, joint, tensionLevel, steps } = setting;
+  if (connection.bolts.perRow === 4) throw new OutsideScope("four bolts a row are not evaluated yet");
+  if (connection.plate.hasStiffenedExtension) {
+    throw new OutsideScope("end plates with a stiffened extension are not evaluated yet");
+  }
+  const view = endPlateViewOf(node, design, joint, connection, tensionLevel, steps);
+  const plate = endPlateOf(node, panel, view, steps);
+  const parts = {
+    flange: columnFlangeOf(node, panel, view, steps),
+    plate,
+    own: endPlateLimits(node, joint, plate, steps),
+    compression: compressionZoneOf(node, panel, view, steps),
+    seat: null,
+  };
+  return boltedModelOf(setting, view, parts, {
+    // The web weld's tension zone is its upper half or less; the rest is there for shear.
+    welds: connectionWeldLimits(
+      node,
+      joint,
+      connection.welds,
+      view.tensionWeld,
+      connection.plate.steel,
+      straightWebMm(joint) / 2,
+      steps,
+    ),
+    shear: boltShearResistance(node, panel, view, (row) => plateBearing(view, row), steps),
+    slip: [],
+  });
+}
+
+function cleatModelOf(setting: ModelSetting, connection: FlangeCleatConnection): BoltedModel {
+  const { node, design, panel, joint, tensionLevel, steps } = setting;
+  const view = cleatViewOf(node, design, joint, connection, tensionLevel, steps);
+  const plate = cleatLegOf(node, view, steps);
+  const legBolts = legBoltResistance(node, view, steps);
+  const parts = {
+    flange: columnFlangeOf(node, panel, view, steps),
+    plate,
+    own: cleatLimits(node, view, plate, legBolts, steps),
+    compression: compressionZoneOf(node, panel, view, steps),
+    seat: legBolts,
+  };
+  return boltedModelOf(setting, view, parts, {
+    welds: noWelds(node, joint),
+    shear: boltShearResistance(node, panel, view, () => legBearing(view), steps),
+    slip: legSprings(view, steps),
+  });
+}
+
 /** @throws OutsideScope with the reason where the joint is not covered. */
 export function jointModelOf(
   node: NodeCase,
@@ -58,66 +182,13 @@ export function jointModelOf(
   tensionLevel: Level,
   steps: boolean,
 ): JointModel {
+  const setting = { node, design, panel, joint, tensionLevel, steps };
   const { connection } = joint;
-  const { section } = joint.beam;
-  const bounds = classBoundsOf(node, panel, joint, steps);
-  const straightWeb = section.depthMm - 2 * section.flangeThicknessMm - 2 * section.rootMm;
-  if (connection.kind === "flange-cleats")
-    throw new OutsideScope("flange-cleat joints are not evaluated yet");
-  if (connection.kind === "welded") {
-    const view = jointViewOf(node, design, joint, tensionLevel);
-    const compression = compressionZoneOf(node, panel, view, steps);
-    const welded = weldedJointOf(node, panel, view, connection, compression, steps);
-    const welds = connectionWeldLimits(
-      node,
-      joint,
-      connection.welds,
-      view.tensionWeld,
-      panel.steel,
-      straightWeb,
-      steps,
-    );
-    return { joint: welded, bounds, welds, leverMm: welded.leverMm };
+  switch (connection.kind) {
+    case "welded":
+      return weldedModelOf(setting, connection);
+    case "end-plate":
+      return endPlateModelOf(setting, connection);
+    case "flange-cleats":
+      return cleatModelOf(setting, connection);
   }
-  if (connection.bolts.perRow === 4) throw new OutsideScope("four bolts a row are not evaluated yet");
-  if (connection.plate.hasStiffenedExtension) {
-    throw new OutsideScope("end plates with a stiffened extension are not evaluated yet");
-  }
-  const view = endPlateViewOf(node, design, joint, connection, tensionLevel, steps);
-  const bolted = boltedJointOf(
-    node,
-    view,
-    {
-      flange: columnFlangeOf(node, panel, view, steps),
-      plate: endPlateOf(node, panel, view, steps),
-      compression: compressionZoneOf(node, panel, view, steps),
-    },
-    steps,
-  );
-  const springs = rowSpringsOf(panel, bolted, steps);
-  const barShares = barTensionShares(panel, bolted, panel.stiffestWebMm, steps);
-  const plainMm = panel.section.webThicknessMm;
-  const tension = tensionSpringOf(bolted, springs, [], steps);
-  return {
-    joint: bolted,
-    bounds,
-    // The web weld's tension zone is its upper half or less; the rest is there for shear.
-    welds: connectionWeldLimits(
-      node,
-      joint,
-      connection.welds,
-      view.tensionWeld,
-      connection.plate.steel,
-      straightWeb / 2,
-      steps,
-    ),
-    leverMm: section.depthMm - section.flangeThicknessMm,
-    springs,
-    tension,
-    shear: boltShearResistance(node, panel, view, steps),
-    barShares,
-    barForceShares:
-      panel.stiffestWebMm === plainMm ? barShares : barTensionShares(panel, bolted, plainMm, steps),
-    barCompression: barCompressionOf(node, panel, bolted, steps),
-  };
-}

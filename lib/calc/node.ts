@@ -86,7 +86,7 @@ export interface WeldedConnection {
   readonly welds: ConnectionWelds;
 }
 
-/** Top and seat angles. The contract knows them and the sheet draws them; this version does not evaluate them. */
+/** Top and seat angles, alike. */
 export interface FlangeCleatConnection {
   readonly kind: "flange-cleats";
   readonly cleat: {
@@ -94,18 +94,30 @@ export interface FlangeCleatConnection {
     readonly columnLegMm: number;
     readonly beamLegMm: number;
     readonly thicknessMm: number;
+    readonly rootMm: number;
+    /** Along the flanges. */
     readonly lengthMm: number;
+    readonly steel: Steel;
   };
+  /** A plate between the legs of each angle. */
+  readonly isStiffened: boolean;
   /** Through the column's flange: distance from the heel of the angle. */
-  readonly bolts: { readonly size: FastenerSize; readonly gaugeMm: number; readonly distanceMm: number };
+  readonly bolts: {
+    readonly size: FastenerSize;
+    readonly grade: FastenerGrade;
+    readonly gaugeMm: number;
+    readonly distanceMm: number;
+  };
   /** Through the beam's flange: rows from the heel of the angle. */
   readonly beamBolts: {
     readonly size: FastenerSize;
+    readonly grade: FastenerGrade;
     readonly gaugeMm: number;
     readonly rowsMm: readonly number[];
   };
   /** From the column's face to the end of the beam. */
   readonly gapMm: number;
+  /** A pair of angles beside the beam's web, which no resistance counts on. */
   readonly webCleats: {
     readonly legMm: number;
     readonly thicknessMm: number;

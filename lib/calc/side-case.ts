@@ -113,7 +113,7 @@ function compressionOf(
 function reliefOf(model: BoltedModel, symmetric: number): { flange: number[]; web: number[] } {
   const { view } = model.joint;
   const barRows = model.barShares.filter((share) => share !== null).length;
-  const isClampedSingle = view.connection.bolts.preloaded && barRows === 1;
+  const isClampedSingle = view.attachment.isPreloaded && barRows === 1;
   const web = model.barShares.map((share) =>
     share ? reliefTension(null, { share: share.value, symmetric }) : 0,
   );
@@ -156,11 +156,12 @@ export function boltedSideCase(
   const limitN = Math.min(
     compression.value,
     joint.beamFlange.value,
+    joint.seat?.value ?? Infinity,
     panelLimit(panel, joint.view.joint.side, load.beta),
   );
   const rows = assembleRows(
     joint.view.tensionRows,
-    [column.flange, column.web, joint.plateLimits, joint.beamWeb],
+    [column.flange, column.web, ...joint.ownLimits],
     limitN,
     steps,
   );
@@ -183,7 +184,7 @@ export function boltedSideCase(
   const panelSpring = panelSpringOf(panel, load.beta, tension.leverMm, steps);
   const initial = initialStiffness(
     tension.leverMm,
-    [panelSpring, joint.compression.spring, tension.spring],
+    [panelSpring, joint.compression.spring, tension.spring, ...model.slip],
     steps,
   );
   return {
@@ -198,7 +199,7 @@ export function boltedSideCase(
     lever: tension.leverMm,
     panelSpring,
     initial,
-    secant: secantStiffness(momentNmm, resistance.value, initial, steps),
+    secant: secantStiffness(momentNmm, resistance.value, initial, joint.view.joint.connection.kind, steps),
     compression,
     compressionDemandN: sumN + load.actions.axialForceN / 2,
     tensionDemandN: sumN - load.actions.axialForceN / 2,
@@ -247,7 +248,7 @@ export function weldedSideCase(
     lever,
     panelSpring,
     initial,
-    secant: secantStiffness(momentNmm, resistance.value, initial, steps),
+    secant: secantStiffness(momentNmm, resistance.value, initial, joint.view.joint.connection.kind, steps),
     compression,
     compressionDemandN: momentNmm / joint.leverMm + load.actions.axialForceN / 2,
     tensionDemandN: momentNmm / joint.leverMm - load.actions.axialForceN / 2,

@@ -1,4 +1,4 @@
-import type { FastenerSize, FlangeCleatConnection } from "@/lib/calc/node";
+import type { FastenerGrade, FastenerSize, FlangeCleatConnection, Steel } from "@/lib/calc/node";
 import type { Connection } from "@/lib/schemas/node-document";
 import { shownMm } from "./resolve-errors";
 import {
@@ -17,17 +17,8 @@ interface Leg {
   readonly longestMm: number;
   readonly shortestMm: number;
   readonly innerFaceMm: number;
-}
-
-function legOf(context: Resolving, section: string, path: string): Leg | null {
-  const angle = resolveAngle(context, section, `${path}.section`);
-  return (
-    angle && {
-      longestMm: Math.max(angle.legAMm, angle.legBMm),
-      shortestMm: Math.min(angle.legAMm, angle.legBMm),
-      innerFaceMm: angle.thicknessMm,
-    }
-  );
+  readonly rootMm: number;
+  readonly steel: Steel;
 }
 
 function checkAngle(
@@ -35,9 +26,17 @@ function checkAngle(
   cleat: { readonly section: string; readonly steel: CleatInput["cleat"]["steel"] },
   path: string,
 ): Leg | null {
-  const leg = legOf(context, cleat.section, path);
-  if (leg) resolveSteel(context, cleat.steel, leg.innerFaceMm, `${path}.steel`);
-  return leg;
+  const angle = resolveAngle(context, cleat.section, `${path}.section`);
+  const steel = angle && resolveSteel(context, cleat.steel, angle.thicknessMm, `${path}.steel`);
+  return (
+    steel && {
+      longestMm: Math.max(angle.legAMm, angle.legBMm),
+      shortestMm: Math.min(angle.legAMm, angle.legBMm),
+      innerFaceMm: angle.thicknessMm,
+      rootMm: angle.rootRadiusMm,
+      steel,
+    }
+  );
 }
 
 /** Each hole must lie on the leg: beyond the other leg's inner face and short of the leg's toe. */
@@ -65,13 +64,19 @@ function checkHolesOnLeg(
   });
 }
 
-function sizeOf(
+interface BoltKind {
+  readonly size: FastenerSize;
+  readonly grade: FastenerGrade;
+}
+
+function boltsOf(
   context: Resolving,
   bolts: { readonly size: string; readonly grade: string },
   path: string,
-): FastenerSize | null {
-  resolveFastenerGrade(context, bolts.grade, `${path}.grade`);
-  return resolveFastenerSize(context, bolts.size, `${path}.size`);
+): BoltKind | null {
+  const grade = resolveFastenerGrade(context, bolts.grade, `${path}.grade`);
+  const size = resolveFastenerSize(context, bolts.size, `${path}.size`);
+  return size && grade && { size, grade };
 }
 
 function webCleatsOf(
@@ -79,8 +84,8 @@ function webCleatsOf(
   input: WebCleatInput,
   path: string,
 ): FlangeCleatConnection["webCleats"] {
-  sizeOf(context, input.bolts, `${path}.bolts`);
-  sizeOf(context, input.beamBolts, `${path}.beamBolts`);
+  boltsOf(context, input.bolts, `${path}.bolts`);
+  boltsOf(context, input.beamBolts, `${path}.beamBolts`);
   const leg = checkAngle(context, input, path);
   return leg && { legMm: leg.longestMm, thicknessMm: leg.innerFaceMm, lengthMm: input.length };
 }
@@ -93,37 +98,44 @@ function legsOf(leg: Leg, { bolts, beamBolts }: CleatInput): { columnLegMm: numb
     : { columnLegMm: leg.longestMm, beamLegMm: leg.shortestMm };
 }
 
-/** Looks every name of a cleat connection up and refuses holes off the angle; the calculation does not take cleats yet. */
+/** Looks every name of a cleat connection up and refuses holes off the angle. */
 export function resolveCleats(
   context: Resolving,
   input: CleatInput,
   path: string,
 ): FlangeCleatConnection | null {
   const leg = checkAngle(context, input.cleat, `${path}.cleat`);
-  const size = sizeOf(context, input.bolts, `${path}.bolts`);
-  const beamSize = sizeOf(context, input.beamBolts, `${path}.beamBolts`);
-  const hole = size?.holeMm ?? null;
-  const beamHole = beamSize?.holeMm ?? null;
+  const bolts = boltsOf(context, input.bolts, `${path}.bolts`);
+  const beamBolts = boltsOf(context, input.beamBolts, `${path}.beamBolts`);
+  const hole = bolts?.size.holeMm ?? null;
+  const beamHole = beamBolts?.size.holeMm ?? null;
   checkHolesOnLeg(context, leg, hole, [input.bolts.distance], () => `${path}.bolts.distance`);
   checkHolesOnLeg(context, leg, beamHole, input.beamBolts.rows, (index) => `${path}.beamBolts.rows.${index}`);
-  for (const [bolts, holeMm] of [
+  for (const [which, holeMm] of [
     ["bolts", hole],
     ["beamBolts", beamHole],
   ] as const) {
-    if (holeMm !== null && input[bolts].gauge + holeMm >= input.cleat.length) {
+    if (holeMm !== null && input[which].gauge + holeMm >= input.cleat.length) {
       context.problems.add(
-        `${path}.${bolts}.gauge`,
+        `${path}.${which}.gauge`,
         `The holes pass the end of the ${shownMm(input.cleat.length)} mm long cleat.`,
       );
     }
   }
   const webCleats = input.webCleats ? webCleatsOf(context, input.webCleats, `${path}.webCleats`) : null;
-  if (!leg || !size || !beamSize) return null;
+  if (!leg || !bolts || !beamBolts) return null;
   return {
     kind: "flange-cleats",
-    cleat: { ...legsOf(leg, input), thicknessMm: leg.innerFaceMm, lengthMm: input.cleat.length },
-    bolts: { size, gaugeMm: input.bolts.gauge, distanceMm: input.bolts.distance },
-    beamBolts: { size: beamSize, gaugeMm: input.beamBolts.gauge, rowsMm: input.beamBolts.rows },
+    cleat: {
+      ...legsOf(leg, input),
+      thicknessMm: leg.innerFaceMm,
+      rootMm: leg.rootMm,
+      lengthMm: input.cleat.length,
+      steel: leg.steel,
+    },
+    isStiffened: input.stiffened !== undefined,
+    bolts: { ...bolts, gaugeMm: input.bolts.gauge, distanceMm: input.bolts.distance },
+    beamBolts: { ...beamBolts, gaugeMm: input.beamBolts.gauge, rowsMm: input.beamBolts.rows },
     gapMm: input.gap,
     webCleats,
   };

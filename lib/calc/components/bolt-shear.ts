@@ -11,7 +11,8 @@ import type { Trace } from "../trace/trace";
 import { traced, type Traced } from "../trace/traced";
 import { rowEnds } from "./column-flange";
 import type { ColumnPanel } from "./column-panel";
-import type { BoltRow, EndPlateView } from "./connection-view";
+import type { CleatView } from "./cleat-view";
+import type { BoltRow, BoltedView, EndPlateView } from "./connection-view";
 
 /** Share of its shear resistance that a bolt in full tension keeps. EN 1993-1-8:2005, 6.2.2(2). */
 const TENSION_ROW_SHARE = 0.4 / 1.4;
@@ -100,17 +101,47 @@ function bearing(
 /** Stands for "no end in reach" in the bearing factors: far beyond any end distance that could govern. */
 const NO_END_MM = 100_000;
 
+/** What one row's bolts bear on beside the column's flange: distances in the direction of the shear and across it. */
+export interface BearingPart {
+  readonly endMm: number;
+  readonly edgeMm: number;
+  readonly thicknessMm: number;
+  readonly ultimateMpa: number;
+}
+
+/** An end plate, under a shear along the column. */
+export function plateBearing(view: EndPlateView, row: BoltRow): BearingPart {
+  const { plate } = view.connection;
+  const below = view.joint.beam.section.depthMm + plate.extensionBottomMm - row.belowTopMm;
+  return {
+    endMm: Math.min(row.belowTopMm + plate.extensionTopMm, below),
+    edgeMm: (plate.widthMm - view.gaugeMm) / 2,
+    thicknessMm: plate.thicknessMm,
+    ultimateMpa: plate.steel.ultimateMpa,
+  };
+}
+
+/** The leg of an angle, under a shear along the column. */
+export function legBearing(view: CleatView): BearingPart {
+  const { cleat, bolts } = view.connection;
+  return {
+    endMm: cleat.columnLegMm - bolts.distanceMm,
+    edgeMm: (cleat.lengthMm - view.gaugeMm) / 2,
+    thicknessMm: cleat.thicknessMm,
+    ultimateMpa: cleat.steel.ultimateMpa,
+  };
+}
+
 function rowShear(
   trace: Trace | null,
   node: NodeCase,
   panel: ColumnPanel,
-  view: EndPlateView,
+  view: BoltedView,
   row: BoltRow,
+  part: BearingPart,
   pitchMm: number,
 ): number {
-  const { plate } = view.connection;
   const { size, grade, reduction } = row.fastener;
-  const beamDepth = view.joint.beam.section.depthMm;
   const ends = rowEnds(view, row);
   const mark = trace?.mark();
   const shearN = boltShearN(trace, {
@@ -123,13 +154,10 @@ function rowShear(
   const plateN = bearing(trace, node, row, {
     pitchMm,
     gaugeMm: view.gaugeMm,
-    endMm: Math.min(
-      row.belowTopMm + plate.extensionTopMm,
-      beamDepth + plate.extensionBottomMm - row.belowTopMm,
-    ),
-    edgeMm: (plate.widthMm - view.gaugeMm) / 2,
-    thicknessMm: plate.thicknessMm,
-    ultimateMpa: plate.steel.ultimateMpa,
+    endMm: part.endMm,
+    edgeMm: part.edgeMm,
+    thicknessMm: part.thicknessMm,
+    ultimateMpa: part.ultimateMpa,
   });
   const flangeN = bearing(trace, node, row, {
     pitchMm,
@@ -142,11 +170,12 @@ function rowShear(
   return boltsOfRowN(trace, { share: row.isTension ? TENSION_ROW_SHARE : 1, shearN, plateN, flangeN }, mark);
 }
 
-/** Vertical shear that the bolts of an end plate carry beside the moment, N. 6.2.2, Table 3.4. */
+/** Vertical shear that the bolts of a joint carry beside the moment, N. 6.2.2, Table 3.4. `partOf` = what a row bears on. */
 export function boltShearResistance(
   node: NodeCase,
   panel: ColumnPanel,
-  view: EndPlateView,
+  view: BoltedView,
+  partOf: (row: BoltRow) => BearingPart,
   steps: boolean,
 ): Traced {
   const byHeight = [...view.rows].sort((a, b) => a.belowTopMm - b.belowTopMm);
@@ -155,7 +184,7 @@ export function boltShearResistance(
   return traced(steps, (trace) => {
     const rowN = byHeight.map((row, index) => {
       const pitchMm = Math.min(toNeighbour(row, byHeight[index - 1]), toNeighbour(row, byHeight[index + 1]));
-      return rowShear(trace, node, panel, view, row, pitchMm);
+      return rowShear(trace, node, panel, view, row, partOf(row), pitchMm);
     });
     return shearOfRowsN(trace, { rowN }, 0);
   });

@@ -9,12 +9,13 @@ import { omegaOf, webTensionN } from "../clauses/en1993-1-8-2005/column-web";
 import { relievedN } from "../mechanics/through-bar-formulas";
 import { sectionProperties } from "../mechanics/section-properties";
 import type { JointCase, NodeCase } from "../node";
+import type { ComponentId } from "../result";
 import { OutsideScope } from "../outcome";
 import { traced, type Traced } from "../trace/traced";
 import type { ColumnFlange } from "./column-flange";
 import type { ColumnPanel } from "./column-panel";
 import type { CompressionZone } from "./compression-zone";
-import type { EndPlateView } from "./connection-view";
+import type { BoltedView } from "./connection-view";
 import type { EndPlate } from "./end-plate";
 import { assembleRows } from "./row-assembly";
 import type { RowFamily, RowFamilyLimits } from "./row-groups";
@@ -23,18 +24,32 @@ import type { TStubPart } from "./t-stub-part";
 /** A bolted joint with its tension flange at one level: all that no load case changes. */
 export interface BoltedJoint {
   readonly kind: "bolted";
-  readonly view: EndPlateView;
+  readonly view: BoltedView;
   readonly flange: ColumnFlange;
+  /** End plate, or the leg of the angle. */
   readonly plate: EndPlate;
-  /** The end plate's own resistances, row by row and group by group. */
-  readonly plateLimits: RowFamilyLimits;
+  /** What the connection's own side limits, row by row and group by group. */
+  readonly own: readonly OwnLimits[];
+  /** Of these, the limits alone. */
+  readonly ownLimits: readonly RowFamilyLimits[];
   /** The column flange's resistances where no bars relieve it. */
   readonly flangeLimits: RowFamilyLimits;
-  readonly beamWeb: RowFamilyLimits;
   readonly compression: CompressionZone;
   readonly beamFlange: Traced;
+  /** Bolts between the beam's compression flange and its angle; null without one. */
+  readonly seat: Traced | null;
   /** What the connection's own side could carry on a column that never gives way, Nmm. */
   readonly connectionMomentNmm: number;
+}
+
+/** One component of the connection's own side over the tension rows. */
+export interface OwnLimits {
+  readonly component: ComponentId;
+  readonly clause: string;
+  readonly what?: string;
+  readonly limits: RowFamilyLimits;
+  /** Whether the attachment's spring, k_5 or k_6, is this component's. */
+  readonly hasSpring: boolean;
 }
 
 const deepBeamMm = 600;
@@ -96,38 +111,74 @@ function beamWebLimits(node: NodeCase, joint: JointCase, plate: EndPlate, steps:
   };
 }
 
-const resistancesOf = (family: RowFamily): RowFamilyLimits => ({
+/** What the parts of a family resist. */
+export const resistancesOf = (family: RowFamily): RowFamilyLimits => ({
   alone: family.alone.map((part) => part.resistance),
   groupsEndingAt: family.groupsEndingAt.map((groups) =>
     groups.map(({ first, part }) => ({ first, part, limit: part.resistance })),
   ),
 });
 
+/** End plate in bending and beam web in tension. EN 1993-1-8:2005, 6.2.6.5, 6.2.6.8. */
+export const endPlateLimits = (
+  node: NodeCase,
+  joint: JointCase,
+  plate: EndPlate,
+  steps: boolean,
+): readonly OwnLimits[] => [
+  {
+    component: "end-plate-bending",
+    clause: "EN 1993-1-8, 6.2.6.5",
+    limits: resistancesOf(plate.family),
+    hasSpring: true,
+  },
+  {
+    component: "beam-web-tension",
+    clause: "EN 1993-1-8, 6.2.6.8",
+    limits: beamWebLimits(node, joint, plate, steps),
+    hasSpring: false,
+  },
+];
+
+/** What a bolted joint is made of. */
+export interface BoltedParts {
+  readonly flange: ColumnFlange;
+  readonly plate: EndPlate;
+  readonly own: readonly OwnLimits[];
+  readonly compression: CompressionZone;
+  readonly seat: Traced | null;
+}
+
 /** Everything about a bolted joint that does not depend on the load case. */
 export function boltedJointOf(
   node: NodeCase,
-  view: EndPlateView,
-  parts: { readonly flange: ColumnFlange; readonly plate: EndPlate; readonly compression: CompressionZone },
+  view: BoltedView,
+  parts: BoltedParts,
   steps: boolean,
 ): BoltedJoint {
-  const beamWeb = beamWebLimits(node, view.joint, parts.plate, steps);
   const beamFlange = beamCompression(node, view.joint, steps);
-  const plateLimits = resistancesOf(parts.plate.family);
-  const own = assembleRows(view.tensionRows, [plateLimits, beamWeb], beamFlange.value, false);
+  const ownLimits = parts.own.map(({ limits }) => limits);
+  const alone = assembleRows(
+    view.tensionRows,
+    ownLimits,
+    Math.min(beamFlange.value, parts.seat?.value ?? Infinity),
+    false,
+  );
   const connectionMomentNmm = boltedMomentNmm(null, {
     leverMm: view.tensionRows.map((row) => row.leverMm),
-    forceN: own.forces.map((force) => force.value),
+    forceN: alone.forces.map((force) => force.value),
   });
   return {
     kind: "bolted",
     view,
     flange: parts.flange,
     plate: parts.plate,
+    own: parts.own,
+    ownLimits,
     compression: parts.compression,
-    plateLimits,
     flangeLimits: resistancesOf(parts.flange.family),
-    beamWeb,
     beamFlange,
+    seat: parts.seat,
     connectionMomentNmm,
   };
 }

@@ -12,7 +12,7 @@ export interface CheckHead {
   readonly level?: Level;
   readonly row?: number;
   readonly rows?: readonly number[];
-  readonly what?: string;
+  readonly what?: string | undefined;
   readonly unit?: ComponentCheck["unit"];
 }
 

@@ -6,7 +6,7 @@ import { OutsideScope } from "../outcome";
 import { traced, type Traced } from "../trace/traced";
 import { backingPiecesOf } from "./backing-pieces";
 import type { ColumnPanel } from "./column-panel";
-import type { BoltRow, EndPlateView } from "./connection-view";
+import type { BoltRow, BoltedView } from "./connection-view";
 import { rowFamilyOf, type GroupPosition, type RowFamily } from "./row-groups";
 import type { PatternLengths } from "./t-stub-part";
 
@@ -32,7 +32,7 @@ interface RowEnds {
 }
 
 /** From a row to the column's ends, mm. */
-export function rowEnds(view: EndPlateView, row: BoltRow): RowEnds {
+export function rowEnds(view: BoltedView, row: BoltRow): RowEnds {
   const { depthMm, flangeThicknessMm } = view.joint.beam.section;
   return {
     outwardMm: view.columnBeyondTensionMm - flangeThicknessMm / 2 + row.fromFaceMm,
@@ -41,7 +41,7 @@ export function rowEnds(view: EndPlateView, row: BoltRow): RowEnds {
 }
 
 /** Distance from a row to the face of the tension stiffener less 0.8 of its weld, mm. */
-export function rowToStiffenerMm(view: EndPlateView, row: BoltRow): number {
+export function rowToStiffenerMm(view: BoltedView, row: BoltRow): number {
   const stiffener = view.tensionStiffener;
   if (!stiffener) return Infinity;
   const toMiddle = Math.abs(row.fromFaceMm - view.joint.beam.section.flangeThicknessMm / 2);
@@ -55,7 +55,7 @@ export function rowToStiffenerMm(view: EndPlateView, row: BoltRow): number {
 export function columnFlangeOf(
   node: NodeCase,
   panel: ColumnPanel,
-  view: EndPlateView,
+  view: BoltedView,
   steps: boolean,
 ): ColumnFlange {
   const { section, steel } = panel;
@@ -66,7 +66,7 @@ export function columnFlangeOf(
     lines.leverMm(trace, { clearMm: (view.gaugeMm - section.webThicknessMm) / 2, filletMm: section.rootMm }),
   );
   const mMm = lever.value;
-  const nMm = Math.min(eMm, (view.connection.plate.widthMm - view.gaugeMm) / 2, 1.25 * mMm);
+  const nMm = Math.min(eMm, (view.attachment.widthMm - view.gaugeMm) / 2, 1.25 * mMm);
   const half = view.joint.beam.section.flangeThicknessMm / 2;
   const stiffener = view.tensionStiffener;
   const isStiffened =

@@ -5,6 +5,7 @@ import {
   strutSlenderness,
 } from "../clauses/en1993-1-1-2005/members";
 import * as stiffenerRules from "../clauses/en1993-1-5-2006/stiffeners";
+import { cleatBreadthMm } from "../clauses/en1993-1-8-2005/flange-cleat";
 import * as web from "../clauses/en1993-1-8-2005/column-web";
 import { webCompressionSpringMm } from "../clauses/en1993-1-8-2005/stiffness";
 import { alongSlopeN } from "../mechanics/sloped-plates";
@@ -35,6 +36,18 @@ export interface StiffenedZone {
 }
 
 function breadthOf(panel: ColumnPanel, view: JointView | EndPlateView, steps: boolean): Traced {
+  const { connection } = view.joint;
+  if (connection.kind === "flange-cleats") {
+    const { thicknessMm, rootMm } = connection.cleat;
+    const column = { columnFlangeMm: panel.section.flangeThicknessMm, rootMm: panel.section.rootMm };
+    return traced(steps, (trace) =>
+      cutAtColumnEnd(
+        trace,
+        cleatBreadthMm(trace, { legMm: thicknessMm, angleRootMm: rootMm, ...column }, 0),
+        view,
+      ),
+    );
+  }
   const weldLeg = weldLegMm(view.compressionWeld);
   const common = {
     beamFlangeMm: view.joint.beam.section.flangeThicknessMm,

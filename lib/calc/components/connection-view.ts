@@ -68,15 +68,25 @@ export interface BoltRow {
   readonly isTension: boolean;
 }
 
-export interface EndPlateView extends JointView {
-  readonly connection: EndPlateConnection;
+/** A joint bolted to the column's flange. */
+export interface BoltedView extends JointView {
   readonly gaugeMm: number;
-  readonly extensionTensionMm: number;
-  readonly extensionCompressionMm: number;
+  /** What lies on the column's flange: the end plate, or the leg of an angle. */
+  readonly attachment: {
+    readonly thicknessMm: number;
+    readonly widthMm: number;
+    readonly isPreloaded: boolean;
+  };
   /** Every row, furthest from the centre of compression first. */
   readonly rows: readonly BoltRow[];
   /** Those that take tension. */
   readonly tensionRows: readonly BoltRow[];
+}
+
+export interface EndPlateView extends BoltedView {
+  readonly connection: EndPlateConnection;
+  readonly extensionTensionMm: number;
+  readonly extensionCompressionMm: number;
 }
 
 /** Cut threads not known to be to EN 1090. EN 1993-1-8:2005, 3.6.1(3). */
@@ -85,10 +95,10 @@ export const CUT_THREAD_REDUCTION = 0.85;
 const SHEAR_ROW_SHARE = 0.25;
 
 const other = (level: Level): Level => (level === "top" ? "bottom" : "top");
-const flangeWeld = (joint: JointCase, level: Level): Weld => {
-  const { connection } = joint;
-  if (connection.kind === "flange-cleats")
-    throw new OutsideScope("flange-cleat joints are not evaluated yet");
+/** Angles are bolted to the beam: no weld of theirs has a leg, as a butt weld has none. */
+const NO_WELD: Weld = { kind: "butt" };
+const flangeWeld = ({ connection }: JointCase, level: Level): Weld => {
+  if (connection.kind === "flange-cleats") return NO_WELD;
   return level === "top" ? connection.welds.topFlange : connection.welds.bottomFlange;
 };
 
@@ -124,13 +134,14 @@ export function jointViewOf(
 export const levelOfRow = (belowTopMm: number, beamDepthMm: number): Level =>
   belowTopMm < beamDepthMm / 2 ? "top" : "bottom";
 
-function fastenerOf(
+/** Bolts, or the bars in their place. */
+export function fastenerOf(
   node: NodeCase,
-  connection: EndPlateConnection,
+  bolts: { readonly size: FastenerSize; readonly grade: FastenerGrade },
   bars: ThroughBars | null,
   steps: boolean,
 ): RowFastener {
-  const { size, grade } = bars ?? connection.bolts;
+  const { size, grade } = bars ?? bolts;
   const reduction = bars ? CUT_THREAD_REDUCTION : 1;
   return {
     size,
@@ -165,9 +176,9 @@ export function endPlateViewOf(
   const { depthMm, flangeThicknessMm } = joint.beam.section;
   const { top, bottom } = design.bars[joint.side];
   const fasteners = {
-    bolts: fastenerOf(node, connection, null, steps),
-    top: top ? fastenerOf(node, connection, top, steps) : null,
-    bottom: bottom ? fastenerOf(node, connection, bottom, steps) : null,
+    bolts: fastenerOf(node, connection.bolts, null, steps),
+    top: top ? fastenerOf(node, connection.bolts, top, steps) : null,
+    bottom: bottom ? fastenerOf(node, connection.bolts, bottom, steps) : null,
   };
   const rows = connection.bolts.rowsMm
     .map((belowTopMm, index): BoltRow => {
@@ -208,6 +219,11 @@ export function endPlateViewOf(
     backing: view.backing,
     connection,
     gaugeMm: connection.bolts.gaugeMm,
+    attachment: {
+      thicknessMm: connection.plate.thicknessMm,
+      widthMm: connection.plate.widthMm,
+      isPreloaded: connection.bolts.preloaded,
+    },
     extensionTensionMm: tensionLevel === "top" ? extensionTopMm : extensionBottomMm,
     extensionCompressionMm: tensionLevel === "top" ? extensionBottomMm : extensionTopMm,
     rows,

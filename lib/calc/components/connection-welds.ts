@@ -18,6 +18,13 @@ export interface ConnectionWeldLimits {
 
 const weaker = (a: Steel, b: Steel): Steel => (a.ultimateMpa / a.betaW <= b.ultimateMpa / b.betaW ? a : b);
 
+/** A beam that is bolted by its flanges has no welds. */
+export const noWelds = (node: NodeCase, { beam: { section, steel } }: JointCase): ConnectionWeldLimits => ({
+  tensionFlange: null,
+  webShear: null,
+  flangeYieldN: (section.widthMm * section.flangeThicknessMm * steel.yieldMpa) / node.partialFactors.gammaM0,
+});
+
 /**
  * EN 1993-1-8:2005, 4.5.3.2 for the flange, 4.5.3.3 for the web.
  *

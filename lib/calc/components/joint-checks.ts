@@ -2,6 +2,8 @@ import type { ComponentCheck } from "../result";
 import { isBoltedCase, type BoltedSideCase, type SideCase, type WeldedSideCase } from "../side-case";
 import type { Traced } from "../trace/traced";
 import { checkOf, detailAtLeast, type CheckHead } from "./check";
+import { cleatDetailing } from "./cleat-seat";
+import { isCleatView } from "./cleat-view";
 import type { RowFamilyLimits } from "./row-groups";
 
 const sum = (values: readonly number[]): number => values.reduce((total, value) => total + value, 0);
@@ -10,11 +12,11 @@ const sum = (values: readonly number[]): number => values.reduce((total, value) 
 function familyChecks(
   checks: ComponentCheck[],
   sideCase: BoltedSideCase,
-  head: Pick<CheckHead, "component" | "clause">,
+  head: Pick<CheckHead, "component" | "clause" | "what">,
   limits: RowFamilyLimits,
   coefficient: (index: number) => number | undefined,
 ): void {
-  const { component, clause } = head;
+  const { component, clause, what } = head;
   const side = sideCase.model.joint.view.joint.side;
   const level = sideCase.model.joint.view.tensionLevel;
   const loadCase = sideCase.loadCase.name;
@@ -24,9 +26,14 @@ function familyChecks(
     const row = rows[index];
     if (!limit || !row) return;
     checks.push(
-      checkOf({ component, clause, side, level, loadCase, row: row.row }, rowDemandsN[index] ?? 0, limit, {
-        stiffnessCoefficientMm: coefficient(index),
-      }),
+      checkOf(
+        { component, clause, what, side, level, loadCase, row: row.row },
+        rowDemandsN[index] ?? 0,
+        limit,
+        {
+          stiffnessCoefficientMm: coefficient(index),
+        },
+      ),
     );
   });
   for (const ending of limits.groupsEndingAt) {
@@ -35,7 +42,7 @@ function familyChecks(
       for (let index = first; index < first + part.rows.length; index += 1)
         demandN += rowDemandsN[index] ?? 0;
       checks.push(
-        checkOf({ component, clause, side, level, loadCase, rows: part.rowNumbers }, demandN, limit),
+        checkOf({ component, clause, what, side, level, loadCase, rows: part.rowNumbers }, demandN, limit),
       );
     }
   }
@@ -137,20 +144,11 @@ function boltedChecks(checks: ComponentCheck[], sideCase: BoltedSideCase): void 
     sideCase.column.web,
     (index) => springs[index]?.webTension.value,
   );
-  familyChecks(
-    checks,
-    sideCase,
-    { component: "end-plate-bending", clause: "EN 1993-1-8, 6.2.6.5" },
-    joint.plateLimits,
-    (index) => springs[index]?.plate.value,
-  );
-  familyChecks(
-    checks,
-    sideCase,
-    { component: "beam-web-tension", clause: "EN 1993-1-8, 6.2.6.8" },
-    joint.beamWeb,
-    () => undefined,
-  );
+  for (const own of joint.own) {
+    familyChecks(checks, sideCase, own, own.limits, (index) =>
+      own.hasSpring ? springs[index]?.plate.value : undefined,
+    );
+  }
   const { side } = view.joint;
   const loadCase = sideCase.loadCase.name;
   view.tensionRows.forEach((row, index) => {
@@ -179,6 +177,22 @@ function boltedChecks(checks: ComponentCheck[], sideCase: BoltedSideCase): void 
       shear,
     ),
   );
+  if (joint.seat) {
+    checks.push(
+      checkOf(
+        {
+          component: "bolt-shear",
+          side,
+          level: view.compressionLevel,
+          loadCase,
+          clause: "EN 1993-1-8, 3.7 and Table 3.4",
+          what: "bolts to the beam's compression flange",
+        },
+        sideCase.compressionDemandN,
+        joint.seat,
+      ),
+    );
+  }
 }
 
 function weldedChecks(side: WeldedSideCase): ComponentCheck[] {
@@ -234,7 +248,10 @@ export function connectionDetailing(side: SideCase, columnFlangeWidthMm: number)
           ),
         ];
   }
-  const { connection, gaugeMm, rows } = side.model.joint.view;
+  const { gaugeMm, rows, joint } = side.model.joint.view;
+  const { connection } = joint;
+  if (isCleatView(side.model.joint.view)) return cleatDetailing(side.model.joint.view, columnFlangeWidthMm);
+  if (connection.kind !== "end-plate") return [];
   const holeMm = Math.max(...rows.map((row) => row.fastener.size.holeMm));
   const heights = rows.map((row) => row.belowTopMm).sort((a, b) => a - b);
   const pitches = heights.slice(1).map((height, index) => height - (heights[index] ?? 0));

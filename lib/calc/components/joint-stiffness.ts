@@ -8,7 +8,8 @@ import {
 import * as rules from "../clauses/en1993-1-8-2005/stiffness";
 import { barColumnSpringMm } from "../mechanics/through-bar-formulas";
 import { sectionProperties } from "../mechanics/section-properties";
-import type { JointCase, NodeCase } from "../node";
+import { cleatSpringMm } from "../clauses/en1993-1-8-2005/flange-cleat";
+import type { ConnectionCase, JointCase, NodeCase } from "../node";
 import type { StiffnessClass, StrengthClass } from "../result";
 import { defineFormula } from "../trace/define-formula";
 import { traced, type Traced } from "../trace/traced";
@@ -33,6 +34,8 @@ export interface RowBarShare {
 /** Springs of each tension row, the same in every load case. Table 6.11. */
 export function rowSpringsOf(panel: ColumnPanel, joint: BoltedJoint, steps: boolean): readonly RowSprings[] {
   const { flange, plate, view } = joint;
+  const attachmentSpringMm =
+    view.joint.connection.kind === "flange-cleats" ? cleatSpringMm : rules.endPlateSpringMm;
   return view.tensionRows.map((row, index) => {
     const flangeLength = shortestLengthMm(flange.family, index);
     const { size, headHeightMm } = row.fastener;
@@ -52,15 +55,15 @@ export function rowSpringsOf(panel: ColumnPanel, joint: BoltedJoint, steps: bool
         }),
       ),
       plate: traced(steps, (trace) =>
-        rules.endPlateSpringMm(trace, {
+        attachmentSpringMm(trace, {
           lengthMm: shortestLengthMm(plate.family, index),
-          thicknessMm: view.connection.plate.thicknessMm,
+          thicknessMm: view.attachment.thicknessMm,
           mMm: plate.leverByRowMm[index] ?? flange.mMm,
         }),
       ),
       bolts: traced(steps, (trace) => {
         const lengthMm = rules.boltLengthMm(trace, {
-          plateMm: view.connection.plate.thicknessMm,
+          plateMm: view.attachment.thicknessMm,
           flangeMm: panel.section.flangeThicknessMm,
           washerMm: size.washerThicknessMm,
           headMm: headHeightMm,
@@ -169,19 +172,22 @@ export function initialStiffness(
   });
 }
 
-/** ψ of end-plate and welded joints, Table 6.8. */
+/** ψ of end-plate and welded joints, and of joints with flange cleats. Table 6.8. */
 const PSI = 2.7;
+const PSI_CLEATS = 3.1;
 
 /** S_j at the load case's moment, Nmm/rad; null above the resistance. 6.3.1(6). */
 export function secantStiffness(
   momentNmm: number,
   resistanceNmm: number,
   initial: Traced,
+  connection: ConnectionCase["kind"],
   steps: boolean,
 ): Traced | null {
   if (momentNmm > resistanceNmm) return null;
+  const psi = connection === "flange-cleats" ? PSI_CLEATS : PSI;
   return traced(steps, (trace) => {
-    const mu = rules.stiffnessRatioMu(trace, { momentNmm, resistanceNmm, psi: PSI });
+    const mu = rules.stiffnessRatioMu(trace, { momentNmm, resistanceNmm, psi });
     trace?.include(initial.step);
     return rules.secantStiffnessNmmPerRad(trace, { initialNmmPerRad: initial.value, mu }, 0);
   });

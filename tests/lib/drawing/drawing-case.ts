@@ -74,9 +74,10 @@ export const END_PLATE: EndPlateConnection = {
 /** Angles of 150 by 90 by 12, the long leg on the beam; M24 in both legs. */
 export const CLEATS: FlangeCleatConnection = {
   kind: "flange-cleats",
-  cleat: { columnLegMm: 90, beamLegMm: 150, thicknessMm: 12, lengthMm: 180 },
-  bolts: { size: M24, gaugeMm: 100, distanceMm: 55 },
-  beamBolts: { size: M24, gaugeMm: 90, rowsMm: [60, 120] },
+  cleat: { columnLegMm: 90, beamLegMm: 150, thicknessMm: 12, rootMm: 12, lengthMm: 180, steel: STEEL },
+  isStiffened: false,
+  bolts: { size: M24, grade: GRADE, gaugeMm: 100, distanceMm: 55 },
+  beamBolts: { size: M24, grade: GRADE, gaugeMm: 90, rowsMm: [60, 120] },
   gapMm: 10,
   webCleats: { legMm: 90, thicknessMm: 8, lengthMm: 230 },
 };

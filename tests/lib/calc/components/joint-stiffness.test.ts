@@ -40,7 +40,8 @@ describe("initial stiffness, 6.3.1(4)", () => {
 });
 
 describe("secant stiffness, 6.3.1(6)", () => {
-  const secant = (moment: number): number | undefined => secantStiffness(moment, 300, of(9e10), false)?.value;
+  const secant = (moment: number): number | undefined =>
+    secantStiffness(moment, 300, of(9e10), "end-plate", false)?.value;
 
   it("is the initial one up to two thirds of the resistance", () => {
     expect(secant(0)).toBe(9e10);
@@ -51,6 +52,10 @@ describe("secant stiffness, 6.3.1(6)", () => {
     expectHand(secant(250), 9e10 / ((1.5 * 250) / 300) ** 2.7);
     expectHand(secant(300), 9e10 / 1.5 ** 2.7);
     expect(secant(301)).toBeUndefined();
+  });
+
+  it("falls faster with flange cleats, by 3.1", () => {
+    expectHand(secantStiffness(250, 300, of(9e10), "flange-cleats", false)?.value, 9e10 / 1.25 ** 3.1);
   });
 });
 
