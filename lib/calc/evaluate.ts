@@ -96,10 +96,10 @@ interface LoadedSide {
 
 /** Outward force at the top flange, N. */
 const topForceN = (side: LoadedSide): number => side.actions.momentNmm / side.model.leverMm;
-/** z of 6.3.3.1 with several rows, between the flanges where welded. */
+/** By geometry alone, so that no plate that stiffens a row shifts the shear from one beam to the other. */
 const shearOf = ({ actions, model }: LoadedSide): JointShear => ({
   momentNmm: actions.momentNmm,
-  leverMm: isBolted(model) ? model.tension.leverMm.value : model.leverMm,
+  leverMm: model.leverMm,
 });
 
 /** How far the forces left and right are symmetric at one level; a flange that faces none stands alone. */

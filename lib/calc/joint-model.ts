@@ -192,3 +192,4 @@ export function jointModelOf(
     case "flange-cleats":
       return cleatModelOf(setting, connection);
   }
+}

@@ -86,10 +86,19 @@ const measureOf = (steel: string): fc.Arbitrary<MeasureInput[]> =>
     ]),
   );
 
+/** Top and seat angles, alike; the beams' flanges are 150 mm wide or more. */
+const cleats = (steel: string, size: string, gauge: number) => ({
+  kind: "flange-cleats" as const,
+  cleat: { section: "L 150x90x12", steel, length: 170 },
+  bolts: { size, grade: "10.9", gauge, distance: 55 },
+  beamBolts: { size: "M20", grade: "8.8", rows: [60, 115], gauge: 80 },
+  gap: 10,
+});
+
 const sideOf = (
   beam: string,
   steel: string,
-  isWelded: boolean,
+  kind: "end-plate" | "welded" | "flange-cleats",
   thickness: number,
   size: string,
   gauge: number,
@@ -98,14 +107,17 @@ const sideOf = (
   const welds = { topFlange: 6, bottomFlange: 6, web: 4 };
   return {
     beam: { section: beam, steel, span: 7000 },
-    connection: isWelded
-      ? { kind: "welded" as const, welds }
-      : {
-          kind: "end-plate" as const,
-          plate: { steel, thickness, width: 190, extensionTop: 90, extensionBottom: 90 },
-          bolts: { size, grade: "10.9", gauge, rows: [-45, 65, depth - 65, depth + 45] },
-          welds,
-        },
+    connection:
+      kind === "flange-cleats"
+        ? cleats(steel, size, gauge)
+        : kind === "welded"
+          ? { kind: "welded" as const, welds }
+          : {
+              kind: "end-plate" as const,
+              plate: { steel, thickness, width: 190, extensionTop: 90, extensionBottom: 90 },
+              bolts: { size, grade: "10.9", gauge, rows: [-45, 65, depth - 65, depth + 45] },
+              welds,
+            },
   };
 };
 
@@ -134,7 +146,14 @@ export const randomNodeDocument: fc.Arbitrary<NodeDocument> = fc
     beam: fc.constantFrom(...beams),
     steel: fc.constantFrom(...steels),
     isTwoSided: fc.boolean(),
-    isWelded: fc.integer({ min: 0, max: 4 }).map((n) => n === 0),
+    kind: fc.constantFrom(
+      "welded" as const,
+      "flange-cleats" as const,
+      "end-plate" as const,
+      "end-plate" as const,
+      "end-plate" as const,
+    ),
+
     thickness: fc.constantFrom(12, 15, 20, 25),
     size: fc.constantFrom("M16", "M20", "M24"),
     gauge: fc.constantFrom(100, 110),
@@ -148,8 +167,8 @@ export const randomNodeDocument: fc.Arbitrary<NodeDocument> = fc
     fc
       .tuple(rightBeam(pick.beam), fc.array(measureOf(pick.steel), { minLength: 1, maxLength: 3 }))
       .map(([other, measures]): NodeDocument => {
-        const right = sideOf(other.beam, pick.steel, pick.isWelded, pick.thickness, pick.size, pick.gauge);
-        const side = sideOf(pick.beam, pick.steel, pick.isWelded, pick.thickness, pick.size, pick.gauge);
+        const right = sideOf(other.beam, pick.steel, pick.kind, pick.thickness, pick.size, pick.gauge);
+        const side = sideOf(pick.beam, pick.steel, pick.kind, pick.thickness, pick.size, pick.gauge);
         const actions = (value: number) => ({ moment: value, axialForce: 0, shear: 80 });
         return {
           reference: "random",

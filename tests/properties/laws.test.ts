@@ -167,13 +167,15 @@ type Check = EvaluatedOptionDocument["components"][number];
 
 /**
  * Demands with a kink: a bar once the flange yields and the far side that it pulls, a tension stiffener once the web
- * has taken its part, welds behind it, and the weld of a tension flange that never has to exceed the flange.
+ * has taken its part, welds behind it, the weld of a tension flange that never has to exceed the flange, and a seat
+ * once the beam's reaction stands beyond its root.
  */
 const hasKink = ({ component, clause, what = "" }: Check): boolean =>
   ["detailing", "bar-tension", "far-flange", "stiffener-weld"].includes(component) ||
   clause === "SCI/BCSA P398, tension stiffeners" ||
   what === "column web in shear along a partial-depth stiffener" ||
-  what === "tension flange weld";
+  what === "tension flange weld" ||
+  what === "seat under the beam's reaction";
 
 const straightChecks = (option: OptionDocument | undefined): Check[] =>
   option && isInScope(option) ? option.components.filter((check) => !hasKink(check)) : [];
@@ -202,6 +204,7 @@ describe("random nodes", () => {
       "",
       "end-plate",
       "welded",
+      "flange-cleats",
       "transverse-stiffeners",
       "web-plates",
       "through-bars",
