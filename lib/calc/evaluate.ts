@@ -190,7 +190,9 @@ function caseChecks(
       ...webPlateChecks(node, panel, design.webPlates, demand, { side, loadCase: loadCase.name }, steps),
     );
   }
-  checks.push(...diagonalChecks(node, design, panel, shearN, { side, loadCase: loadCase.name }, steps));
+  if (panel.diagonals) {
+    checks.push(...diagonalChecks(node, design, panel, shearN, { side, loadCase: loadCase.name }, steps));
+  }
   if (hasBars(design)) {
     sides.forEach((own, index) => checks.push(...barChecks(node, panel, own, sides[1 - index], steps)));
     checks.push(...pressedCompression(sides));

@@ -1,4 +1,5 @@
 import type { Level, MeasureCase, NodeCase } from "@/lib/calc/node";
+import { backingPlateSpace } from "./backing-plate-space";
 import { fixedShape, listSpace, type DesignSpace, type Shape } from "./design-space";
 import { forceLevels } from "./force-levels";
 import { partialLengthsMm, stiffenerSpace } from "./stiffener-space";
@@ -10,15 +11,26 @@ export interface PlannedOption {
   /** Stays the same as long as the kind of stiffening does. */
   readonly key: string;
   readonly name: string;
+  /** What it is made of: an option that holds all parts of another holds the other. */
+  readonly parts: readonly string[];
   readonly space: DesignSpace;
 }
 
-const BOTH: readonly Level[] = ["top", "bottom"];
-const levelWords = (levels: readonly Level[]): string =>
+export const BOTH: readonly Level[] = ["top", "bottom"];
+export const levelWords = (levels: readonly Level[]): string =>
   levels.length === 2 ? "top and bottom" : `at ${levels[0] ?? ""}`;
 
+export const stiffenerParts = (levels: readonly Level[]): readonly string[] =>
+  levels.map((level) => `stiffeners ${level}`);
+export const barParts = (levels: readonly Level[]): readonly string[] =>
+  levels.map((level) => `bars ${level}`);
+export const WEB_PLATE_PARTS = { 1: ["web plate"], 2: ["web plate", "second web plate"] } as const;
+
+export const BACKING_PARTS = ["backing plates"] as const;
+export const COLUMN_PARTS = ["column"] as const;
+
 /** Single levels by what the loads do there; where they do both, by where they are. */
-function singleLevels(node: NodeCase): readonly { readonly key: string; readonly level: Level }[] {
+export function singleLevels(node: NodeCase): readonly { readonly key: string; readonly level: Level }[] {
   const { tension, compression } = forceLevels(node);
   const [pulled] = tension;
   const [pushed] = compression;
@@ -38,9 +50,15 @@ function stiffenerOptions(node: NodeCase, stock: Stock): readonly PlannedOption[
   const full = single.map(({ key, level }) => ({
     key: `stiffeners-${key}`,
     name: `Stiffeners ${levelWords([level])}`,
+    parts: stiffenerParts([level]),
     space: space([level]),
   }));
-  const both = { key: "stiffeners-both", name: `Stiffeners ${levelWords(BOTH)}`, space: space(BOTH) };
+  const both = {
+    key: "stiffeners-both",
+    name: `Stiffeners ${levelWords(BOTH)}`,
+    parts: stiffenerParts(BOTH),
+    space: space(BOTH),
+  };
   // With a beam on both sides each flange needs its own short pair: more parts than one of full depth.
   const isOneSided = node.joints.length === 1;
   const partial = !isOneSided
@@ -48,6 +66,7 @@ function stiffenerOptions(node: NodeCase, stock: Stock): readonly PlannedOption[
     : single.map(({ key, level }) => ({
         key: `stiffeners-${key}-partial`,
         name: `Partial-depth stiffeners ${levelWords([level])}`,
+        parts: [`partial stiffeners ${level}`],
         space: listSpace(stiffenerSpace(node, stock, [level], partialLengthsMm(node))),
       }));
   return [...full, both, ...partial];
@@ -58,11 +77,13 @@ function webPlateOptions(node: NodeCase, stock: Stock): readonly PlannedOption[]
     {
       key: "web-plate-one-side",
       name: "Web plate, one side",
+      parts: WEB_PLATE_PARTS[1],
       space: listSpace(webPlateSpace(node, stock, 1)),
     },
     {
       key: "web-plate-both-sides",
       name: "Web plates, both sides",
+      parts: WEB_PLATE_PARTS[2],
       space: listSpace(webPlateSpace(node, stock, 2)),
     },
   ];
@@ -91,7 +112,7 @@ function rowsWorthTrying(node: NodeCase, levels: readonly Level[]): readonly Bar
 
 type BarRows = Pick<Extract<MeasureCase, { kind: "through-bars" }>, "rows">;
 
-function barSpace(node: NodeCase, stock: Stock, levels: readonly Level[]): readonly Shape[] {
+export function barSpace(node: NodeCase, stock: Stock, levels: readonly Level[]): readonly Shape[] {
   const bars = stock.bars.filter(({ size }) => BAR_SIZES.has(size.name));
   return rowsWorthTrying(node, levels).flatMap((rows) =>
     bars.map(({ size, grade }) =>
@@ -100,42 +121,39 @@ function barSpace(node: NodeCase, stock: Stock, levels: readonly Level[]): reado
   );
 }
 
+/** Bars replace the bolts of every joint. */
+export const canTakeBars = (node: NodeCase): boolean =>
+  node.joints.every(({ connection }) => connection.kind === "end-plate");
+
 function barOptions(node: NodeCase, stock: Stock): readonly PlannedOption[] {
-  if (!node.joints.every(({ connection }) => connection.kind === "end-plate")) return [];
-  const alone = [["top"], ["bottom"], BOTH] as const;
-  const bars = alone.map((levels) => ({
+  if (!canTakeBars(node)) return [];
+  return [["top"] as const, ["bottom"] as const, BOTH].map((levels) => ({
     key: levels.length === 2 ? "bars-both" : `bars-${levels[0]}`,
     name: `Bars ${levelWords(levels)}`,
+    parts: barParts(levels),
     space: listSpace(barSpace(node, stock, levels)),
   }));
-  const mixed = BOTH.map((level) => {
-    const other: Level = level === "top" ? "bottom" : "top";
-    return {
-      key: `bars-${level}-stiffeners-${other}`,
-      name: `Bars at ${level}, stiffeners at ${other}`,
-      space: {
-        kind: "product" as const,
-        first: barSpace(node, stock, [level]),
-        second: stiffenerSpace(node, stock, [other], ["full"]),
-      },
-    };
-  });
-  return [...bars, ...mixed];
 }
 
-/** Every kind of option that makes sense on this node, the bare column first; at most 14. */
+export const isEmpty = (space: DesignSpace): boolean =>
+  space.kind === "list" ? space.shapes.length === 0 : space.first.length * space.second.length === 0;
+
+/** Every single kind of option that makes sense on this node, the bare column first. */
 export function planOptions(node: NodeCase, stock: Stock): readonly PlannedOption[] {
   const heavier = stock.columns.map(({ section, steel }) =>
     fixedShape([{ kind: "heavier-column", section, steel }]),
   );
   return [
-    { key: "bare", name: "Bare column", space: listSpace([fixedShape([])]) },
+    { key: "bare", name: "Bare column", parts: [], space: listSpace([fixedShape([])]) },
     ...stiffenerOptions(node, stock),
     ...webPlateOptions(node, stock),
+    {
+      key: "backing-plates",
+      name: "Backing plates",
+      parts: BACKING_PARTS,
+      space: listSpace(backingPlateSpace(node, stock)),
+    },
     ...barOptions(node, stock),
-    { key: "heavier-column", name: "Heavier column", space: listSpace(heavier) },
-  ].filter(
-    ({ space }) =>
-      (space.kind === "list" ? space.shapes.length : space.first.length * space.second.length) > 0,
-  );
+    { key: "heavier-column", name: "Heavier column", parts: COLUMN_PARTS, space: listSpace(heavier) },
+  ].filter(({ space }) => !isEmpty(space));
 }

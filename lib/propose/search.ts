@@ -38,10 +38,15 @@ export class Search {
   cheapestIn(space: DesignSpace): Found | null {
     const [first] = space.kind === "list" ? space.shapes : shapesOf(space);
     if (first === undefined) return null;
-    const meeting = this.confirmed(space, () => ({ kind: "target" }));
+    const meeting = this.cheapestMeeting(space);
     if (meeting !== null) return { measures: meeting, meetsTarget: true };
     const best = this.confirmed(space, () => this.nearestGoal(space));
     return { measures: best ?? buildLightest(first), meetsTarget: false };
+  }
+
+  /** The cheapest candidate that meets the target in every load case; null where none does. */
+  cheapestMeeting(space: DesignSpace): readonly MeasureCase[] | null {
+    return this.confirmed(space, () => ({ kind: "target" }));
   }
 
   /** Searches in the watched load cases until what it finds holds in every case. */

@@ -154,13 +154,14 @@ function modeOneOf(
   given: ModeOneGiven,
 ): number {
   const isSimple = setting.node.tStubModeOne === "method-1";
-  const piece = setting.backing.find((candidate) =>
-    rows.every((row) => row.fromFaceMm > candidate.fromMm && row.fromFaceMm < candidate.toMm),
-  );
   const { mMm, nMm, headMm } = given;
   const plainN = isSimple
     ? modeOneSimpleN(trace, { momentNmm: given.momentNmm, mMm }, 0)
     : modeOneN(trace, { momentNmm: given.momentNmm, mMm, nMm, headMm }, 0);
+  if (setting.backing.length === 0) return plainN;
+  const piece = setting.backing.find((candidate) =>
+    rows.every((row) => row.fromFaceMm > candidate.fromMm && row.fromFaceMm < candidate.toMm),
+  );
   if (!piece) return plainN;
   const mark = trace?.mark();
   const { gammaM0 } = setting.node.partialFactors;
