@@ -54,6 +54,21 @@ export class Judge {
     return outcome.kind === "evaluated" ? outcome.utilisation : null;
   }
 
+  /**
+   * May a smaller or middling size of the candidate do in the watched load cases? Not where the strongest is too weak: only
+   * detailing can be better with less.
+   */
+  mayDo(measures: readonly MeasureCase[]): boolean {
+    const outcome = this.remember(this.watched, measures);
+    if (outcome.kind !== "evaluated" || outcome.passes) return true;
+    return (
+      outcome.stiffnessReached &&
+      outcome.checks.every(
+        ({ component, utilisation }) => component === "detailing" || utilisation <= this.targetUtilisation,
+      )
+    );
+  }
+
   /** Is the candidate good enough in the watched load cases? */
   meets(measures: readonly MeasureCase[], goal: Goal): boolean {
     return reaches(this.remember(this.watched, measures), goal);

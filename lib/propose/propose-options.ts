@@ -56,7 +56,7 @@ function sizedCombinations(
       parts.every((part) => plan.parts.includes(part)),
     );
     const space = isPartEnough ? null : spaceOf(plan);
-    const measures = space && search.cheapestMeeting(space);
+    const measures = space && search.cheapestCombination(space);
     if (!measures) continue;
     const { key, name, parts } = plan;
     found.push({ key, name, parts, measures, outcome: judge.outcomeOf(measures), sizing: null });

@@ -49,6 +49,17 @@ export class Search {
     return this.confirmed(space, () => ({ kind: "target" }));
   }
 
+  /** The same for a combination, which is not searched where the extremes of its parts are all too weak. */
+  cheapestCombination(space: DesignSpace): readonly MeasureCase[] | null {
+    const extremes =
+      space.kind === "list"
+        ? extremesOf(space.shapes)
+        : extremesOf(space.first).flatMap((a) => extremesOf(space.second).map((b) => joinShapes(a, b)));
+    return extremes.some((shape) => this.judge.mayDo(buildStrongest(shape)))
+      ? this.cheapestMeeting(space)
+      : null;
+  }
+
   /** Searches in the watched load cases until what it finds holds in every case. */
   private confirmed(space: DesignSpace, goalNow: () => Goal | null): readonly MeasureCase[] | null {
     for (;;) {

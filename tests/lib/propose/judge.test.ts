@@ -64,6 +64,28 @@ describe("Judge", () => {
     expect(seen).toEqual([["ULS 3"], ["ULS 1", "ULS 2", "ULS 3"], ["ULS 3", "ULS 2"]]);
   });
 
+  it("says that less may do only where detailing alone is in the way", () => {
+    const asked = (outcome: Partial<EvaluatedOption>) =>
+      new Judge(
+        node,
+        () => 0,
+        () => ({ kind: "evaluated", passes: false, stiffnessReached: true, checks: [], ...outcome }) as never,
+      ).mayDo([]);
+    const check = (component: "detailing" | "web-plate", utilisation: number) =>
+      ({ component, utilisation }) as EvaluatedOption["checks"][number];
+    expect(asked({ checks: [check("detailing", 3), check("web-plate", 1)] })).toBe(true);
+    expect(asked({ checks: [check("detailing", 3), check("web-plate", 1.01)] })).toBe(false);
+    expect(asked({ stiffnessReached: false })).toBe(false);
+    expect(asked({ passes: true, checks: [check("web-plate", 1.01)] })).toBe(true);
+    expect(
+      new Judge(
+        node,
+        () => 0,
+        () => ({ kind: "outside-scope" }) as never,
+      ).mayDo([]),
+    ).toBe(true);
+  });
+
   it("evaluates and prices each candidate once", () => {
     const seen: string[][] = [];
     let prices = 0;
