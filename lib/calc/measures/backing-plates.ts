@@ -20,7 +20,7 @@ export const applyBackingPlates: ApplyMeasure<BackingPlates> = (design, measure)
 const rowsAt = (joint: JointCase, level: Level): readonly number[] => {
   const { connection, beam } = joint;
   if (connection.kind !== "end-plate") {
-    throw new OutsideScope("backing plates stand behind bolted joints only (6.2.4.3)");
+    throw new OutsideScope("backing plates are evaluated behind bolted end plates only (6.2.4.3)");
   }
   return connection.bolts.rowsMm.filter((row) => levelOfRow(row, beam.section.depthMm) === level);
 };

@@ -157,7 +157,7 @@ describe("backing plates outside scope", () => {
     expect(reason(node(leftOnly), [buildBackingPlates()])).toBe("in scope");
     const { welds } = buildEndPlate();
     const welded = node({ joints: buildJoints({ kind: "welded", welds }) });
-    expect(reason(welded, [buildBackingPlates()])).toMatch(/bolted joints only/);
+    expect(reason(welded, [buildBackingPlates()])).toMatch(/bolted end plates only/);
     expect(reason(node(), [buildBackingPlates({ at: "left" }), buildBackingPlates()])).toMatch(/twice/);
     expect(reason(node(), [buildBackingPlates({ at: "left" }), buildBackingPlates({ at: "right" })])).toBe(
       "in scope",
