@@ -31,9 +31,80 @@ const levels = fc
 /** Which beam's flanges, where they differ in level. */
 const at = fc.constantFrom({}, { at: "left" as const }, { at: "right" as const });
 
+const backingPlates = (steel: string): fc.Arbitrary<MeasureInput> =>
+  fc
+    .record({
+      kind: fc.constant("backing-plates" as const),
+      levels,
+      thickness: fc.constantFrom(6, 10, 15),
+      width: fc.constantFrom(60, 75),
+      length: fc.constantFrom(160, 250, 400),
+      steel: fc.constant(steel),
+    })
+    .chain((measure) => at.map((where): MeasureInput => ({ ...measure, ...where })));
+
+const diagonals = (steel: string): fc.Arbitrary<MeasureInput> =>
+  fc.record({
+    kind: fc.constant("diagonal-stiffeners" as const),
+    arrangement: fc.constantFrom("single" as const, "cross" as const, "k" as const),
+    towards: fc.constantFrom("left" as const, "right" as const),
+    thickness: fc.constantFrom(10, 12, 20),
+    width: fc.constantFrom(40, 60, 80),
+    steel: fc.constant(steel),
+    weld: fc.constantFrom(5, 8, "butt" as const),
+  });
+
+const webPlate = (steel: string): MeasureInput => ({
+  kind: "web-plates",
+  sides: 1,
+  thickness: 15,
+  width: 120,
+  height: 1000,
+  steel,
+  weld: 12,
+});
+
+const stiffenerPair = (steel: string, levels: ("top" | "bottom")[]): MeasureInput => ({
+  kind: "transverse-stiffeners",
+  levels,
+  thickness: 12,
+  width: 80,
+  length: "full",
+  clip: 27,
+  steel,
+  flangeWeld: 6,
+  webWeld: 5,
+});
+
+const barsAt = (at: "top" | "bottom"): MeasureInput => ({
+  kind: "through-bars",
+  levels: [at],
+  size: "M20",
+  grade: "8.8",
+  innerNuts: true,
+});
+
+/** Two or three measures together. */
+const combinationOf = (steel: string): fc.Arbitrary<MeasureInput[]> =>
+  fc.oneof(
+    levels.map((where) => [webPlate(steel), stiffenerPair(steel, where)]),
+    level.map((where) => [webPlate(steel), barsAt(where)]),
+    fc.tuple(levels, backingPlates(steel)).map(([where, backing]) => [stiffenerPair(steel, where), backing]),
+    backingPlates(steel).map((backing) => [webPlate(steel), backing]),
+    fc.tuple(levels, diagonals(steel)).map(([where, brace]) => [stiffenerPair(steel, where), brace]),
+    level.map((where) => [
+      webPlate(steel),
+      stiffenerPair(steel, [where === "top" ? "bottom" : "top"]),
+      barsAt(where),
+    ]),
+  );
+
 const measureOf = (steel: string): fc.Arbitrary<MeasureInput[]> =>
   fc.oneof(
     fc.constant<MeasureInput[]>([]),
+    backingPlates(steel).map((measure): MeasureInput[] => [measure]),
+    diagonals(steel).map((measure): MeasureInput[] => [measure]),
+    combinationOf(steel),
     fc
       .record({
         kind: fc.constant("transverse-stiffeners" as const),
@@ -70,20 +141,7 @@ const measureOf = (steel: string): fc.Arbitrary<MeasureInput[]> =>
     fc
       .constantFrom("HE 360 M", "HE 400 B")
       .map((section): MeasureInput[] => [{ kind: "heavier-column", section }]),
-    level.map((at): MeasureInput[] => [
-      { kind: "through-bars", levels: [at], size: "M20", grade: "8.8", innerNuts: true },
-      {
-        kind: "transverse-stiffeners",
-        levels: [at === "top" ? "bottom" : "top"],
-        thickness: 12,
-        width: 80,
-        length: "full",
-        clip: 27,
-        steel,
-        flangeWeld: 6,
-        webWeld: 5,
-      },
-    ]),
+    level.map((at): MeasureInput[] => [barsAt(at), stiffenerPair(steel, [at === "top" ? "bottom" : "top"])]),
   );
 
 /** Top and seat angles, alike; the beams' flanges are 150 mm wide or more. */

@@ -34,7 +34,11 @@ const expectFinite = (options: readonly OptionDocument[]): void => {
 const otherSide = { left: "right", right: "left", both: "both" } as const;
 
 const mirroredMeasure = (measure: MeasureInput): MeasureInput =>
-  "at" in measure && measure.at !== undefined ? { ...measure, at: otherSide[measure.at] } : measure;
+  measure.kind === "diagonal-stiffeners"
+    ? { ...measure, towards: otherSide[measure.towards] }
+    : "at" in measure && measure.at !== undefined
+      ? { ...measure, at: otherSide[measure.at] }
+      : measure;
 
 const mirrored = (document: NodeDocument): NodeDocument => {
   const { left, right, ...rest } = document;
@@ -64,8 +68,13 @@ const mirrored = (document: NodeDocument): NodeDocument => {
 
 const otherLevel = { top: "bottom", bottom: "top" } as const;
 
+/** A single diagonal turned upside down leans the other way; a K keeps its sides. */
 const turnedMeasure = (measure: MeasureInput): MeasureInput =>
-  "levels" in measure ? { ...measure, levels: measure.levels.map((level) => otherLevel[level]) } : measure;
+  measure.kind === "diagonal-stiffeners" && measure.arrangement === "single"
+    ? { ...measure, towards: otherSide[measure.towards] }
+    : "levels" in measure
+      ? { ...measure, levels: measure.levels.map((level) => otherLevel[level]) }
+      : measure;
 
 const turnedSide = <S extends NonNullable<NodeDocument["left"]>>(side: S): S => {
   const { connection } = side;
@@ -167,13 +176,15 @@ type Check = EvaluatedOptionDocument["components"][number];
 
 /**
  * Demands with a kink: a bar once the flange yields and the far side that it pulls, a tension stiffener once the web
- * has taken its part, welds behind it, the weld of a tension flange that never has to exceed the flange, and a seat
- * once the beam's reaction stands beyond its root.
+ * has taken its part, the web plate under it and welds behind it, a diagonal once the web yields, the weld of a tension
+ * flange that never has to exceed the flange, and a seat once the beam's reaction stands beyond its root.
  */
 const hasKink = ({ component, clause, what = "" }: Check): boolean =>
-  ["detailing", "bar-tension", "far-flange", "stiffener-weld"].includes(component) ||
+  ["detailing", "bar-tension", "far-flange", "stiffener-weld", "diagonal-stiffener"].includes(component) ||
   clause === "SCI/BCSA P398, tension stiffeners" ||
   what === "column web in shear along a partial-depth stiffener" ||
+  what === "level part of the diagonal's force" ||
+  what.endsWith("or from the stiffeners on it") ||
   what === "tension flange weld" ||
   what === "seat under the beam's reaction";
 
@@ -209,10 +220,18 @@ describe("random nodes", () => {
       "web-plates",
       "through-bars",
       "heavier-column",
+      "backing-plates",
+      "diagonal-stiffeners",
+      "through-bars + transverse-stiffeners",
+      "web-plates + transverse-stiffeners",
+      "web-plates + through-bars",
+      "transverse-stiffeners + backing-plates",
+      "web-plates + backing-plates",
+      "transverse-stiffeners + diagonal-stiffeners",
+      "web-plates + transverse-stiffeners + through-bars",
     ]) {
       expect([...kinds]).toContain(kind);
     }
-    expect([...kinds]).toContain("through-bars + transverse-stiffeners");
   }, 300_000);
 
   it("give finite numbers in 500 full proposals", () => {
@@ -277,16 +296,24 @@ describe("random nodes", () => {
   }, 120_000);
 
   it("never lose resistance to a thicker plate", () => {
-    const thicker = (measure: MeasureInput): MeasureInput =>
-      measure.kind === "transverse-stiffeners"
-        ? { ...measure, thickness: measure.thickness + 5 }
-        : measure.kind === "web-plates"
-          ? {
-              ...measure,
-              thickness: measure.thickness + 5,
-              weld: measure.weld === "butt" ? "butt" : measure.weld + 5,
-            }
-          : measure;
+    // A thicker web plate narrows the stiffeners on it and is taken to leave less to bars beside it: by itself only.
+    const isByItself = (measures: readonly MeasureInput[]): boolean =>
+      !measures.some(({ kind }) => kind === "transverse-stiffeners" || kind === "through-bars");
+    const thicker = (measure: MeasureInput, _: number, measures: readonly MeasureInput[]): MeasureInput => {
+      switch (measure.kind) {
+        case "transverse-stiffeners":
+        case "backing-plates":
+        case "diagonal-stiffeners":
+          return { ...measure, thickness: measure.thickness + 5 };
+        case "web-plates": {
+          if (!isByItself(measures)) return measure;
+          const weld = measure.weld === "butt" ? "butt" : measure.weld + 5;
+          return { ...measure, thickness: measure.thickness + 5, weld };
+        }
+        default:
+          return measure;
+      }
+    };
     fc.assert(
       fc.property(randomNodeDocument, (document) => {
         const before = optionsOf(document);
@@ -300,6 +327,7 @@ describe("random nodes", () => {
             "column-web-shear",
             "column-flange-bending",
             "transverse-stiffener",
+            "diagonal-stiffener",
           ]) {
             const more = resistancesOf(after[index], component);
             resistancesOf(option, component).forEach((value, place) => {
@@ -312,6 +340,52 @@ describe("random nodes", () => {
       }),
       { numRuns: 400, seed: SEED },
     );
+  }, 120_000);
+
+  it("never lose bending of the column flange to a backing plate, nor shear of the panel to a diagonal", () => {
+    let raised = 0;
+    const compareWith = (document: NodeDocument, measure: MeasureInput, component: string): void => {
+      const before = optionsOf(document);
+      const after = optionsOf({
+        ...document,
+        options: document.options?.map((option) => ({ ...option, measures: [...option.measures, measure] })),
+      });
+      before.forEach((option, index) => {
+        const more = after[index];
+        if (!more || !isInScope(more)) return;
+        const twins = resistancesOf(more, component);
+        resistancesOf(option, component).forEach((value, place) => {
+          const twin = twins[place] ?? NaN;
+          if (!(twin >= value * (1 - 1e-9))) throw new Error(`${component}: ${value} fell to ${twin}`);
+          if (twin > value * (1 + 1e-6)) raised += 1;
+        });
+      });
+    };
+    fc.assert(
+      fc.property(randomNodeDocument, (document) => {
+        const steel = document.column.steel;
+        compareWith(
+          document,
+          { kind: "backing-plates", levels: ["top", "bottom"], thickness: 10, width: 75, length: 300, steel },
+          "column-flange-bending",
+        );
+        compareWith(
+          document,
+          {
+            kind: "diagonal-stiffeners",
+            arrangement: "single",
+            towards: "left",
+            thickness: 12,
+            width: 60,
+            steel,
+            weld: 8,
+          },
+          "column-web-shear",
+        );
+      }),
+      { numRuns: 300, seed: SEED },
+    );
+    expect(raised).toBeGreaterThan(100);
   }, 120_000);
 
   it("have demands in proportion to their loads and the same resistances, where the column carries nothing", () => {

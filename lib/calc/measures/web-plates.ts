@@ -143,6 +143,7 @@ export function webPlateChecks(
   steps: boolean,
 ): ComponentCheck[] {
   const added = plates.widthMm * panel.section.webThicknessMm;
+  const orStiffeners = demand.stiffenersN > 0 ? ", or from the stiffeners on it" : "";
   const perPlateN = Math.max(
     (demand.panelShearN * added) / panel.shearArea.value / plates.sides,
     demand.stiffenersN / 2,
@@ -159,7 +160,12 @@ export function webPlateChecks(
   );
   const checks = [
     checkOf(
-      { ...head, component: "web-plate", clause: "EN 1993-1-8, 6.2.6.1(6)", what: "shear in one web plate" },
+      {
+        ...head,
+        component: "web-plate",
+        clause: "EN 1993-1-8, 6.2.6.1(6)",
+        what: `shear in one web plate${orStiffeners}`,
+      },
       perPlateN,
       plate,
     ),
@@ -177,7 +183,7 @@ export function webPlateChecks(
           ...head,
           component: "web-plate-weld",
           clause: "EN 1993-1-8, 4.5.3.3",
-          what: "shear flow along one plate edge",
+          what: `shear flow along one plate edge${orStiffeners}`,
         },
         perPlateN,
         traced(steps, (trace) =>
