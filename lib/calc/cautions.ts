@@ -17,7 +17,7 @@ const BARS = [
 ] as const;
 
 const CLEATS =
-  "Flange cleats: bolts along the beam slip in their clearance before the stiffness holds; the beam's shear is given to the bolts and the leg it bears on.";
+  "Flange cleats: bolts along the beam slip in their clearance before the stiffness holds; the beam's shear is given to the angle it bears on, its leg and its bolts to the column. Check the beam's web over that leg to EN 1993-1-5, section 6, and the beam's net section at the bolts.";
 const WEB_CLEATS =
   "The web angles are counted on neither for the moment nor for the shear; they may be given a share of the shear in a design of their own.";
 const STIFFENED_CLEATS =

@@ -42,7 +42,8 @@ export interface BoltedModel extends ModelBase {
   readonly joint: BoltedJoint;
   readonly springs: readonly RowSprings[];
   readonly tension: TensionSpring;
-  readonly shear: Traced;
+  /** Of the bolts that take a beam's shear, by the level it bears on: the same at both behind an end plate. */
+  readonly shear: Readonly<Record<Level, Traced>>;
   /** Springs of bolts that slip along the beam; none behind an end plate. */
   readonly slip: readonly Traced[];
   /** Share of each tension row that bars surely take off the column; null for bolts. */
@@ -138,6 +139,7 @@ function endPlateModelOf(setting: ModelSetting, connection: EndPlateConnection):
     compression: compressionZoneOf(node, panel, view, steps),
     seat: null,
   };
+  const shear = boltShearResistance(node, panel, view, view.rows, (row) => plateBearing(view, row), steps);
   return boltedModelOf(setting, view, parts, {
     // The web weld's tension zone is its upper half or less; the rest is there for shear.
     welds: connectionWeldLimits(
@@ -149,7 +151,7 @@ function endPlateModelOf(setting: ModelSetting, connection: EndPlateConnection):
       straightWebMm(joint) / 2,
       steps,
     ),
-    shear: boltShearResistance(node, panel, view, (row) => plateBearing(view, row), steps),
+    shear: { top: shear, bottom: shear },
     slip: [],
   });
 }
@@ -166,9 +168,14 @@ function cleatModelOf(setting: ModelSetting, connection: FlangeCleatConnection):
     compression: compressionZoneOf(node, panel, view, steps),
     seat: legBolts,
   };
+  // A beam bears on one angle: the other, above its reaction, has nothing to bring it a share. 6.2.2.
+  const shearAt = (level: Level): Traced => {
+    const rows = view.rows.filter((row) => row.level === level);
+    return boltShearResistance(node, panel, view, rows, () => legBearing(view), steps);
+  };
   return boltedModelOf(setting, view, parts, {
     welds: noWelds(node, joint),
-    shear: boltShearResistance(node, panel, view, () => legBearing(view), steps),
+    shear: { top: shearAt("top"), bottom: shearAt("bottom") },
     slip: legSprings(view, steps),
   });
 }

@@ -170,15 +170,16 @@ function rowShear(
   return boltsOfRowN(trace, { share: row.isTension ? TENSION_ROW_SHARE : 1, shearN, plateN, flangeN }, mark);
 }
 
-/** Vertical shear that the bolts of a joint carry beside the moment, N. 6.2.2, Table 3.4. `partOf` = what a row bears on. */
+/** Vertical shear that rows of bolts of a joint carry beside the moment, N. 6.2.2, Table 3.4. `partOf` = what a row bears on. */
 export function boltShearResistance(
   node: NodeCase,
   panel: ColumnPanel,
   view: BoltedView,
+  rows: readonly BoltRow[],
   partOf: (row: BoltRow) => BearingPart,
   steps: boolean,
 ): Traced {
-  const byHeight = [...view.rows].sort((a, b) => a.belowTopMm - b.belowTopMm);
+  const byHeight = [...rows].sort((a, b) => a.belowTopMm - b.belowTopMm);
   const toNeighbour = (row: BoltRow, other: BoltRow | undefined): number =>
     other ? Math.abs(other.belowTopMm - row.belowTopMm) : NO_END_MM;
   return traced(steps, (trace) => {

@@ -4,7 +4,7 @@ import type { ComponentCheck } from "../result";
 import { defineFormula } from "../trace/define-formula";
 import { traced } from "../trace/traced";
 import { checkOf, detailAtLeast } from "./check";
-import type { CleatView } from "./cleat-view";
+import { bearingLevelOf, type CleatView } from "./cleat-view";
 
 const seatMomentNmm = defineFormula({
   id: "flange-cleats/seat moment",
@@ -82,7 +82,7 @@ export function seatCheck(
     {
       component: "flange-cleat-bending",
       side: view.joint.side,
-      level: side.actions.shearN >= 0 ? "bottom" : "top",
+      level: bearingLevelOf(side.actions.shearN),
       loadCase: side.loadCase.name,
       clause: "equilibrium of the seat's leg",
       what: "seat under the beam's reaction",
@@ -123,6 +123,11 @@ export function cleatDetailing(view: CleatView, columnFlangeWidthMm: number): Co
     least("end distance in the leg on the beam, 1.2 d_0", 1.2 * beamHole, cleat.beamLegMm - last),
     least("end distance in the beam's flange, 1.2 d_0", 1.2 * beamHole, first - gapMm),
     least("gauge in the beam's flange, 2.4 d_0", 2.4 * beamHole, beamBolts.gaugeMm),
+    detailAtLeast(
+      { side: head.side, clause: "EN 1993-1-8, 6.2.2", what: "leg as thick as the gap, to take the shear" },
+      gapMm,
+      cleat.thicknessMm,
+    ),
   ];
   if (pitches.length > 0)
     checks.push(least("distance between bolt rows, 2.2 d_0", 2.2 * beamHole, Math.min(...pitches)));

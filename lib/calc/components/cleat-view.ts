@@ -10,6 +10,9 @@ export interface CleatView extends BoltedView {
 export const isCleatView = (view: BoltedView): view is CleatView =>
   view.joint.connection.kind === "flange-cleats";
 
+/** The level whose angle a beam bears on: the lower one, or the upper one under uplift. */
+export const bearingLevelOf = (shearN: number): Level => (shearN >= 0 ? "bottom" : "top");
+
 /**
  * One row of bolts in the leg of each angle. The tension angle's row pulls; the other, beside the centre of
  * compression in the middle of the leg on the compression flange, carries shear. EN 1993-1-8:2005, 6.2.7.1, Figure 6.15.

@@ -151,7 +151,7 @@ export function legBoltResistance(node: NodeCase, view: CleatView, steps: boolea
   const { section, steel } = view.joint.beam;
   const bolts = legBoltsOf(view);
   const { size, grade } = beamBolts;
-  return traced(steps, (trace) => {
+  const resistance = traced(steps, (trace) => {
     const shearN = boltShearN(trace, {
       alphaV: grade.alphaV,
       ultimateMpa: grade.ultimateMpa,
@@ -175,6 +175,51 @@ export function legBoltResistance(node: NodeCase, view: CleatView, steps: boolea
     });
     return legBoltsN(trace, { count: 2 * bolts.rows, shearN, legN, flangeN }, 0);
   });
+  if (resistance.value <= 0)
+    throw new OutsideScope("the bolts along the beam stand too close to an edge to bear on anything");
+  return resistance;
+}
+
+/** Block torn out of a part of a width by the bolts along the beam: between the two lines of bolts, or the two strips beside them. */
+function tornBlockN(
+  trace: Trace | null,
+  node: NodeCase,
+  view: CleatView,
+  part: {
+    readonly steel: Steel;
+    readonly widthMm: number;
+    readonly thicknessMm: number;
+    /** From the edge that the bolts push towards to the row furthest from it. */
+    readonly alongMm: number;
+  },
+): number {
+  const { size, gaugeMm, rowsMm } = view.connection.beamBolts;
+  const { holeMm } = size;
+  const acrossMm = Math.min(gaugeMm, part.widthMm - gaugeMm) - holeMm;
+  const shearMm = part.alongMm - (rowsMm.length - 0.5) * holeMm;
+  if (acrossMm <= 0 || shearMm <= 0) throw new OutsideScope("bolt holes along the beam run into one another");
+  return rules.blockTearingN(trace, {
+    tensionAreaMm2: acrossMm * part.thicknessMm,
+    shearAreaMm2: 2 * shearMm * part.thicknessMm,
+    yieldMpa: part.steel.yieldMpa,
+    ultimateMpa: part.steel.ultimateMpa,
+    gammaM0: node.partialFactors.gammaM0,
+    gammaM2: node.partialFactors.gammaM2,
+  });
+}
+
+/** Blocks of the beam's flange between the bolts and the beam's end, N. */
+function flangeTearing(node: NodeCase, view: CleatView, steps: boolean): Traced {
+  const { section, steel } = view.joint.beam;
+  const { beamBolts, gapMm } = view.connection;
+  return traced(steps, (trace) =>
+    tornBlockN(trace, node, view, {
+      steel,
+      widthMm: section.widthMm,
+      thicknessMm: section.flangeThicknessMm,
+      alongMm: Math.max(...beamBolts.rowsMm) - gapMm,
+    }),
+  );
 }
 
 /** The pulled leg on the beam's flange: across its holes, and the block between bolts and toe, N. */
@@ -182,7 +227,6 @@ function legTension(node: NodeCase, view: CleatView, steps: boolean): Traced {
   const { cleat, beamBolts } = view.connection;
   const { gammaM0, gammaM2 } = node.partialFactors;
   const { holeMm } = beamBolts.size;
-  const bolts = legBoltsOf(view);
   const { yieldMpa, ultimateMpa } = cleat.steel;
   return traced(steps, (trace) => {
     const acrossN = rules.partInTensionN(trace, {
@@ -194,15 +238,11 @@ function legTension(node: NodeCase, view: CleatView, steps: boolean): Traced {
       gammaM0,
       gammaM2,
     });
-    const sorted = [...beamBolts.rowsMm].sort((a, b) => a - b);
-    const alongMm = cleat.beamLegMm - (sorted[0] ?? 0);
-    const blockN = rules.blockTearingN(trace, {
-      tensionAreaMm2: (beamBolts.gaugeMm - holeMm) * cleat.thicknessMm,
-      shearAreaMm2: 2 * (alongMm - (bolts.rows - 0.5) * holeMm) * cleat.thicknessMm,
-      yieldMpa,
-      ultimateMpa,
-      gammaM0,
-      gammaM2,
+    const blockN = tornBlockN(trace, node, view, {
+      steel: cleat.steel,
+      widthMm: cleat.lengthMm,
+      thicknessMm: cleat.thicknessMm,
+      alongMm: cleat.beamLegMm - Math.min(...beamBolts.rowsMm),
     });
     return lesserN(trace, { acrossN, blockN }, 0);
   });
@@ -239,6 +279,13 @@ export function cleatLimits(
       clause: "EN 1993-1-1, 6.2.3 and EN 1993-1-8, 3.10.2",
       what: "leg on the beam in tension",
       limits: alone(legTension(node, view, steps)),
+      hasSpring: false,
+    },
+    {
+      component: "bolt-shear",
+      clause: "EN 1993-1-8, 3.10.2",
+      what: "beam flange torn out between bolts and end",
+      limits: alone(flangeTearing(node, view, steps)),
       hasSpring: false,
     },
     {

@@ -1,9 +1,10 @@
+import type { Level } from "../node";
 import type { ComponentCheck } from "../result";
 import { isBoltedCase, type BoltedSideCase, type SideCase, type WeldedSideCase } from "../side-case";
 import type { Traced } from "../trace/traced";
 import { checkOf, detailAtLeast, type CheckHead } from "./check";
 import { cleatDetailing } from "./cleat-seat";
-import { isCleatView } from "./cleat-view";
+import { bearingLevelOf, isCleatView } from "./cleat-view";
 import type { RowFamilyLimits } from "./row-groups";
 
 const sum = (values: readonly number[]): number => values.reduce((total, value) => total + value, 0);
@@ -127,6 +128,16 @@ function commonChecks(checks: ComponentCheck[], side: SideCase): void {
   );
 }
 
+function shearHeadOf({ model, loadCase }: BoltedSideCase, bearsOn: Level): CheckHead {
+  const { view } = model.joint;
+  const component = "bolt-shear";
+  const { side } = view.joint;
+  const clause = "EN 1993-1-8, 6.2.2 and Table 3.4";
+  return isCleatView(view)
+    ? { component, side, level: bearsOn, loadCase: loadCase.name, clause }
+    : { component, side, loadCase: loadCase.name, clause };
+}
+
 function boltedChecks(checks: ComponentCheck[], sideCase: BoltedSideCase): void {
   const { joint, springs, shear } = sideCase.model;
   const { view } = joint;
@@ -151,6 +162,7 @@ function boltedChecks(checks: ComponentCheck[], sideCase: BoltedSideCase): void 
   }
   const { side } = view.joint;
   const loadCase = sideCase.loadCase.name;
+  const bearsOn = bearingLevelOf(sideCase.actions.shearN);
   view.tensionRows.forEach((row, index) => {
     const { value, step } = row.fastener.tension;
     const pair: Traced = { value: 2 * value, step };
@@ -170,13 +182,7 @@ function boltedChecks(checks: ComponentCheck[], sideCase: BoltedSideCase): void 
       ),
     );
   });
-  checks.push(
-    checkOf(
-      { component: "bolt-shear", side, loadCase, clause: "EN 1993-1-8, 6.2.2 and Table 3.4" },
-      Math.abs(sideCase.actions.shearN),
-      shear,
-    ),
-  );
+  checks.push(checkOf(shearHeadOf(sideCase, bearsOn), Math.abs(sideCase.actions.shearN), shear[bearsOn]));
   if (joint.seat) {
     checks.push(
       checkOf(

@@ -100,6 +100,30 @@ describe("the parts along the beam", () => {
     expectHand(check.resistance, Math.min(across, block));
   });
 
+  it("are torn out beside the bolts where these stand far apart", () => {
+    const wide = balanced({ beamBolts: { ...cleats.beamBolts, gauge: 120 } });
+    // Two strips of (180 - 120)/2 less half a hole each: weaker than the 120 - 22 between the bolts. 3.10.2(2), Figure 3.8.
+    expectHand(
+      checkLike(wide, "flange-cleat-bending", { what: "leg on the beam in tension" }).resistance,
+      (410 * (180 - 120 - 22) * 12) / 1.25 + (275 * 2 * (95 - 1.5 * 22) * 12) / Math.sqrt(3),
+    );
+  });
+
+  it("tear the beam's flange out of its end", () => {
+    // Beside the bolts 170 - 90 - 22 against 90 - 22 between; from the last row to the beam's end 115 - 10.
+    expectHand(
+      checkLike(balanced(), "bolt-shear", { what: "beam flange torn out between bolts and end" }).resistance,
+      (410 * (170 - 90 - 22) * 12.7) / 1.25 + (275 * 2 * (105 - 1.5 * 22) * 12.7) / Math.sqrt(3),
+    );
+  });
+
+  it("are refused where a bolt has nothing to bear on", () => {
+    expect(refusalOf(nodeOf({ beamBolts: { ...cleats.beamBolts, gauge: 155 } }))).toMatch(/close to an edge/);
+    expect(refusalOf(nodeOf({ beamBolts: { ...cleats.beamBolts, rows: [55, 70, 85, 100, 115] } }))).toMatch(
+      /close to an edge|run into one another/,
+    );
+  });
+
   it("carry by two rows of two bolts in shear or bearing, on either flange", () => {
     // alpha_v of 8.8 is 0.6; leg: toe 150 - 115 = 35, edge (180 - 90)/2; flange: beam end 55 - 10 = 45, edge (170 - 90)/2.
     const F_v = (0.6 * 800 * 245) / 1.25;
@@ -200,14 +224,26 @@ describe("the joint", () => {
     expectHand(balanced().joints[0]?.initialStiffnessNmmPerRad, (210_000 * z ** 2) / flexibility);
   });
 
-  it("carries shear by both angles' bolts, the pulled ones at 0.4/1.4", () => {
+  it("carries shear by the bolts of the angle that the beam bears on, at 0.4/1.4 where that one is pulled", () => {
     const F_v = (0.6 * 800 * 245) / 1.25;
     // Bearing on the leg: end 90 - 50 = 40, edge (180 - 110)/2 = 35; on 14 mm of flange, edge 95, no end in reach.
     const leg =
       (Math.min((2.8 * 35) / 22 - 1.7, (1.4 * 110) / 22 - 1.7, 2.5) * Math.min(40 / 66, 1) * 410 * 20 * 12) /
       1.25;
-    const byHand = 2 * Math.min((0.4 / 1.4) * F_v, leg) + 2 * Math.min(F_v, leg);
-    expectHand(checkLike(balanced(), "bolt-shear", { what: undefined }).resistance, byHand);
+    const pushed = checkLike(balanced(), "bolt-shear", { what: undefined, row: undefined });
+    expectHand(pushed.resistance, 2 * Math.min(F_v, leg));
+    expect(pushed.level).toBe("bottom");
+    const uplift = checkLike(balanced({}, -80), "bolt-shear", { what: undefined, row: undefined });
+    expectHand(uplift.resistance, 2 * Math.min((0.4 / 1.4) * F_v, leg));
+    expectHand(uplift.demand, 80e3);
+    expect(uplift.level).toBe("top");
+  });
+
+  it("takes shear by an angle only over a gap up to its thickness, 6.2.2", () => {
+    const detail = (gap: number) =>
+      checkLike(balanced({ gap }), "detailing", { what: "leg as thick as the gap, to take the shear" });
+    expectHand(detail(12).utilisation, 1);
+    expect(detail(13).utilisation).toBeGreaterThan(1);
   });
 
   it("swaps its angles' parts when the moment turns", () => {
