@@ -70,10 +70,10 @@ describe("b_eff,c,wc behind an end plate, Eq. (6.11)", () => {
     expectHand(check.resistance, rhoOf(b) * b * 8.5 * 275);
   });
 
-  it("is cut where the column ends 50 mm beyond the flange", () => {
-    const node = buildNodeCase({ column: { ...buildNodeCase().column, endDistanceBelowMm: 50 } });
-    const b = breadthBeyond(90) / 2 + (50 + 13.5 / 2);
-    expect(50 + 13.5 / 2).toBeLessThan(breadthBeyond(90) / 2);
+  // The whole spread is 275.5 mm, half of it on either side of the flange's middle.
+  it.each([50, 125, 135])("is cut where the column ends %f mm beyond the flange", (endDistanceBelowMm) => {
+    const node = buildNodeCase({ column: { ...buildNodeCase().column, endDistanceBelowMm } });
+    const b = breadthBeyond(90) / 2 + Math.min(endDistanceBelowMm + 13.5 / 2, breadthBeyond(90) / 2);
     expectHand(compressionOf(node).resistance, rhoOf(b) * b * 8.5 * 275);
   });
 });
