@@ -80,29 +80,33 @@ class Ingredients {
   });
 }
 
-/** Sizes of one ingredient tried in a combination of three: more would be a search for its own sake. */
-const SIZES_OF_THREE = 4;
+/**
+ * Sizes of one ingredient tried in a combination of three, and of bars with web plates, which is the dearest of pairs: more
+ * would be a search for its own sake.
+ */
+const FEW_SIZES = 4;
 
 /** Few shapes in place of many, the extremes among them. */
 export function thinned(shapes: readonly Shape[]): readonly Shape[] {
   const last = shapes.length - 1;
-  if (last < SIZES_OF_THREE) return shapes;
-  const kept = Array.from({ length: SIZES_OF_THREE }, (_, step) =>
-    Math.round((step * last) / (SIZES_OF_THREE - 1)),
-  );
+  if (last < FEW_SIZES) return shapes;
+  const kept = Array.from({ length: FEW_SIZES }, (_, step) => Math.round((step * last) / (FEW_SIZES - 1)));
   return shapes.filter((_, index) => kept.includes(index));
 }
 
 const capital = (words: string): string => words.charAt(0).toUpperCase() + words.slice(1);
 
-function combine(first: Ingredient, ...others: readonly Ingredient[]): PlannedCombination {
-  const all = [first, ...others];
+const isBars = ({ parts }: Ingredient): boolean => parts.some((part) => part.startsWith("bars"));
+const isWebPlate = ({ parts }: Ingredient): boolean => parts.includes("web plate");
+
+function combine(...all: readonly Ingredient[]): PlannedCombination {
+  const isCoarse = all.length > 2 || (all.some(isBars) && all.some(isWebPlate));
   return {
     key: all.map(({ key }) => key).join("-"),
     name: capital(all.map(({ words }) => words).join(", ")),
     parts: all.flatMap(({ parts }) => parts),
     space: () => {
-      const lists = all.map(({ shapes }) => (all.length > 2 ? thinned(shapes()) : shapes()));
+      const lists = all.map(({ shapes }) => (isCoarse ? thinned(shapes()) : shapes()));
       const [lead = [], second = [], ...more] = lists;
       const rest = more.reduce((a, b) => a.flatMap((one) => b.map((two) => joinShapes(one, two))), second);
       return { kind: "product", first: lead, second: rest };
