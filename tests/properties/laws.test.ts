@@ -3,21 +3,10 @@ import { describe, expect, it } from "vitest";
 import { evaluateDocument } from "@/lib/evaluation/evaluate-document";
 import type { MeasureInput, NodeDocument } from "@/lib/schemas/node-document";
 import type { EvaluatedOptionDocument, OptionDocument } from "@/lib/schemas/result-document";
-import { loadSeedCatalog } from "@/seeders/data/load-catalog";
-import { loadSeedPrices } from "@/seeders/data/load-prices";
 import { randomNodeDocument } from "@/tests/factories/random-node-document";
+import { SEED, isInScope, optionsOf, resistancesOf, shop } from "@/tests/support/random-options";
 
 /** Laws that hold on every node, tried on random ones. */
-const shop = { catalog: loadSeedCatalog(), prices: loadSeedPrices() };
-const SEED = 20261201;
-
-function optionsOf(document: NodeDocument): readonly OptionDocument[] {
-  const evaluated = evaluateDocument(document, shop, { steps: "none" });
-  if (!evaluated.ok) throw new Error(JSON.stringify(evaluated.errors));
-  return evaluated.result.options;
-}
-
-const isInScope = (option: OptionDocument): option is EvaluatedOptionDocument => !("outsideScope" in option);
 
 /** Every number of a document, wherever it stands. */
 function* numbersOf(value: unknown): Generator<number> {
@@ -151,11 +140,6 @@ const hasZeroMoment = (document: NodeDocument): boolean =>
 
 const close = (a: number, b: number): boolean =>
   Math.abs(a - b) <= 1e-9 * Math.max(Math.abs(a), Math.abs(b), 1e-9);
-
-const resistancesOf = (option: OptionDocument | undefined, component: string): number[] =>
-  option && isInScope(option)
-    ? option.components.filter((check) => check.component === component).map((check) => check.resistance)
-    : [];
 
 /** The same node with nothing in the column and every other load so many times as large: k_wc stays 1. */
 const scaled = (document: NodeDocument, factor: number): NodeDocument => {
@@ -293,99 +277,6 @@ describe("random nodes", () => {
       ),
       { numRuns: 300, seed: SEED },
     );
-  }, 120_000);
-
-  it("never lose resistance to a thicker plate", () => {
-    // A thicker web plate narrows the stiffeners on it and is taken to leave less to bars beside it: by itself only.
-    const isByItself = (measures: readonly MeasureInput[]): boolean =>
-      !measures.some(({ kind }) => kind === "transverse-stiffeners" || kind === "through-bars");
-    const thicker = (measure: MeasureInput, _: number, measures: readonly MeasureInput[]): MeasureInput => {
-      switch (measure.kind) {
-        case "transverse-stiffeners":
-        case "backing-plates":
-        case "diagonal-stiffeners":
-          return { ...measure, thickness: measure.thickness + 5 };
-        case "web-plates": {
-          if (!isByItself(measures)) return measure;
-          const weld = measure.weld === "butt" ? "butt" : measure.weld + 5;
-          return { ...measure, thickness: measure.thickness + 5, weld };
-        }
-        default:
-          return measure;
-      }
-    };
-    fc.assert(
-      fc.property(randomNodeDocument, (document) => {
-        const before = optionsOf(document);
-        const after = optionsOf({
-          ...document,
-          options: document.options?.map((option) => ({ ...option, measures: option.measures.map(thicker) })),
-        });
-        before.forEach((option, index) => {
-          for (const component of [
-            "column-web-compression",
-            "column-web-shear",
-            "column-flange-bending",
-            "transverse-stiffener",
-            "diagonal-stiffener",
-          ]) {
-            const more = resistancesOf(after[index], component);
-            resistancesOf(option, component).forEach((value, place) => {
-              const raised = more[place] ?? NaN;
-              if (!(raised >= value * (1 - 1e-9)))
-                throw new Error(`${component}: ${value} fell to ${raised}`);
-            });
-          }
-        });
-      }),
-      { numRuns: 400, seed: SEED },
-    );
-  }, 120_000);
-
-  it("never lose bending of the column flange to a backing plate, nor shear of the panel to a diagonal", () => {
-    let raised = 0;
-    const compareWith = (document: NodeDocument, measure: MeasureInput, component: string): void => {
-      const before = optionsOf(document);
-      const after = optionsOf({
-        ...document,
-        options: document.options?.map((option) => ({ ...option, measures: [...option.measures, measure] })),
-      });
-      before.forEach((option, index) => {
-        const more = after[index];
-        if (!more || !isInScope(more)) return;
-        const twins = resistancesOf(more, component);
-        resistancesOf(option, component).forEach((value, place) => {
-          const twin = twins[place] ?? NaN;
-          if (!(twin >= value * (1 - 1e-9))) throw new Error(`${component}: ${value} fell to ${twin}`);
-          if (twin > value * (1 + 1e-6)) raised += 1;
-        });
-      });
-    };
-    fc.assert(
-      fc.property(randomNodeDocument, (document) => {
-        const steel = document.column.steel;
-        compareWith(
-          document,
-          { kind: "backing-plates", levels: ["top", "bottom"], thickness: 10, width: 75, length: 300, steel },
-          "column-flange-bending",
-        );
-        compareWith(
-          document,
-          {
-            kind: "diagonal-stiffeners",
-            arrangement: "single",
-            towards: "left",
-            thickness: 12,
-            width: 60,
-            steel,
-            weld: 8,
-          },
-          "column-web-shear",
-        );
-      }),
-      { numRuns: 300, seed: SEED },
-    );
-    expect(raised).toBeGreaterThan(100);
   }, 120_000);
 
   it("have demands in proportion to their loads and the same resistances, where the column carries nothing", () => {
