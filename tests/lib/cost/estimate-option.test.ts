@@ -265,14 +265,14 @@ describe("minutes", () => {
   it("share one nest set-up among plates of one thickness", () => {
     const cut = (measures: readonly MeasureCase[]) =>
       line(estimate(measures, { fabrication: buildFabrication({ quantity: 1 }) }).lines, "Cut plate").minutes;
-    const [stiffener, web12, web10] = [
-      cut([stiffeners()]),
+    const [backing, web12, web10] = [
+      cut([backingPlates()]),
       cut([webPlates({ thicknessMm: 12 })]),
       cut([webPlates()]),
     ];
     const nest = 3;
-    expect(cut([stiffeners(), webPlates({ thicknessMm: 12 })])).toBeCloseTo(stiffener + web12 - nest, 9);
-    expect(cut([stiffeners(), webPlates()])).toBeCloseTo(stiffener + web10, 9);
+    expect(cut([backingPlates(), webPlates({ thicknessMm: 12 })])).toBeCloseTo(backing + web12 - nest, 9);
+    expect(cut([backingPlates(), webPlates()])).toBeCloseTo(backing + web10, 9);
   });
 
   it("of a detail are 45 for the first node and 5 for each further one", () => {
