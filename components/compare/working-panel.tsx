@@ -14,6 +14,7 @@ import { componentLabel, sentenceCase } from "./component-labels";
 import { isEvaluated, type LoadCaseChoice, type Opening } from "./comparison-cells";
 import { checksOf, whereWords } from "./comparison-rows";
 import { measureFacts, measureName } from "./measure-words";
+import { MomentRotation } from "./moment-rotation";
 import { UtilisationFigure } from "./utilisation-bar";
 
 /** Where the working of one option stands: it is fetched when it is first asked for. */
@@ -71,7 +72,28 @@ function CheckItem({
   );
 }
 
-function JointItem({ joint, isOpen }: { readonly joint: JointDocument; readonly isOpen: boolean }) {
+/** What the standard says of the joint's rotation, in words. */
+function rotationWords({ rotationCapacity }: JointDocument): string {
+  if (rotationCapacity === undefined) return "";
+  if (rotationCapacity === "enough") return "; rotation capacity enough for plastic analysis (6.4)";
+  if (rotationCapacity === "not-shown") return "; rotation capacity not shown by 6.4";
+  return `; rotates at least ${formatNumber(1000 * rotationCapacity.atLeast, 1)} mrad (6.4)`;
+}
+
+const rigidWords = ({ rigidFrom }: JointDocument): string =>
+  rigidFrom === undefined
+    ? ""
+    : rigidFrom === null
+      ? "; no joint of this beam can be rigid in this frame"
+      : `; rigid from ${formatNumber(rigidFrom)} kNm/rad`;
+
+interface JointItemProps {
+  readonly joint: JointDocument;
+  readonly momentKnm: number | undefined;
+  readonly isOpen: boolean;
+}
+
+function JointItem({ joint, momentKnm, isOpen }: JointItemProps) {
   return (
     <li className="border-t border-rule py-2 first:border-t-0">
       <details open={isOpen}>
@@ -90,13 +112,25 @@ function JointItem({ joint, isOpen }: { readonly joint: JointDocument; readonly 
           {joint.rows.length > 0
             ? `; rows ${joint.rows.map(({ row, force }) => `${row}: ${formatNumber(force, 1)} kN`).join(", ")}`
             : ""}
-          .
+          {rigidWords(joint)}
+          {rotationWords(joint)}.
         </p>
+        {isOpen ? <MomentRotation joint={joint} momentKnm={momentKnm} /> : null}
         {joint.steps && joint.steps.length > 0 ? <StepTree steps={joint.steps} openDepth={2} /> : null}
       </details>
     </li>
   );
 }
+
+/** M_Ed of a joint in its load case, from its own check. */
+const momentOf = (option: EvaluatedOptionDocument, joint: JointDocument): number | undefined =>
+  option.components.find(
+    (check) =>
+      check.component === "joint-moment" &&
+      check.unit === "kNm" &&
+      check.side === joint.side &&
+      check.loadCase === joint.loadCase,
+  )?.demand;
 
 function StepsSection({
   opening,
@@ -124,7 +158,12 @@ function StepsSection({
             .filter((joint) => choice.kind === "envelope" || joint.loadCase === choice.name)
             .sort((a, b) => a.initialStiffness - b.initialStiffness)
             .map((joint, index) => (
-              <JointItem key={`${joint.side}-${joint.loadCase}`} joint={joint} isOpen={index === 0} />
+              <JointItem
+                key={`${joint.side}-${joint.loadCase}`}
+                joint={joint}
+                momentKnm={momentOf(option, joint)}
+                isOpen={index === 0}
+              />
             ))}
         </ol>
       )}

@@ -1,3 +1,4 @@
+import { isLargeAxialForce } from "./components/axial-force";
 import { isBolted, type JointModel } from "./joint-model";
 import { isOnePanel } from "./mechanics/panel-levels";
 import { fullPairAt } from "./measures/diagonal-stiffeners";
@@ -16,6 +17,10 @@ const BARS = [
   "The bars work only with every inner nut tight on its flange: state the tightening order and its inspection, and nuts and bars to EN 1090-2. Outer nuts with washers on both flanges. Bar resistances are taken at 0.85 for cut threads.",
 ] as const;
 
+const FOUR_BOLTS =
+  "Rows of four bolts are taken as rows of two: EN 1993-1-8 has no T-stub with four bolts a row, so the outer ones are not counted on, on the safe side.";
+const RIBS =
+  "The ribs on the end plate are not counted on: its extensions are taken as unstiffened, on the safe side.";
 const CLEATS =
   "Flange cleats: bolts along the beam slip in their clearance before the stiffness holds; the beam's shear is given to the angle it bears on, its leg and its bolts to the column. Check the beam's web over that leg to EN 1993-1-5, section 6, and the beam's net section at the bolts.";
 const WEB_CLEATS =
@@ -112,7 +117,13 @@ export function cautionsOf(
   if (design.webPlates && design.pairs.length > 0) cautions.push(ON_PLATE);
   if (design.webPlates && hasBars(design)) cautions.push(BARS_BESIDE_PLATE);
   if (!isOnePanel(node.joints)) cautions.push(UNEQUAL);
-  cautions.push(...cleatCautions(node));
+  cautions.push(...cleatCautions(node), ...endPlateCautions(node));
+  const pulled = axialForceCases(node);
+  if (pulled.length > 0) {
+    cautions.push(
+      `A beam's axial force exceeds 5 % of its plastic resistance in ${pulled.join(", ")}: moment and force are checked together (6.2.7.1(3)), and the stiffness and its class do not hold there (6.3.1(4)).`,
+    );
+  }
   return cautions;
 }
 
@@ -138,6 +149,25 @@ const freeEndCautions = (design: PanelDesign): readonly string[] =>
       (level) =>
         `No full-depth stiffeners at the ${level}: as guidance, put a pair in line with every end of a diagonal; without one, only the web beside the end brings its force in.`,
     );
+
+/** Load cases in which a beam's axial force is more than the joint may pass over. */
+const axialForceCases = (node: NodeCase): readonly string[] =>
+  node.loadCases
+    .filter((loadCase) =>
+      node.joints.some((joint) => isLargeAxialForce(node, joint, loadCase[joint.side]?.axialForceN ?? 0)),
+    )
+    .map(({ name }) => name);
+
+/** Parts of an end plate that no resistance counts on. */
+function endPlateCautions(node: NodeCase): readonly string[] {
+  const plates = node.joints.flatMap(({ connection }) =>
+    connection.kind === "end-plate" ? [connection] : [],
+  );
+  return [
+    ...(plates.some(({ bolts }) => bolts.perRow === 4) ? [FOUR_BOLTS] : []),
+    ...(plates.some(({ plate }) => plate.hasStiffenedExtension) ? [RIBS] : []),
+  ];
+}
 
 /** What no resistance of a joint of angles counts on. */
 function cleatCautions(node: NodeCase): readonly string[] {

@@ -6,6 +6,7 @@ export type * from "./node";
 export * from "./result";
 export { sectionProperties, type SectionProperties } from "./mechanics/section-properties";
 export { ELASTIC_MODULUS_MPA } from "./clauses/en1993-1-1-2005/members";
+export { momentRotationCurve, type CurvePoint } from "./mechanics/moment-rotation";
 export { areFacing } from "./mechanics/panel-levels";
 export { isBarRow } from "./measures/panel-design";
 export { pairsOfMeasure, type StiffenerPair } from "./measures/stiffener-pairs";

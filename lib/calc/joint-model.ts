@@ -27,7 +27,6 @@ import type {
   NodeCase,
   WeldedConnection,
 } from "./node";
-import { OutsideScope } from "./outcome";
 import type { Traced } from "./trace/traced";
 
 interface ModelBase {
@@ -126,10 +125,6 @@ function boltedModelOf(
 
 function endPlateModelOf(setting: ModelSetting, connection: EndPlateConnection): BoltedModel {
   const { node, design, panel, joint, tensionLevel, steps } = setting;
-  if (connection.bolts.perRow === 4) throw new OutsideScope("four bolts a row are not evaluated yet");
-  if (connection.plate.hasStiffenedExtension) {
-    throw new OutsideScope("end plates with a stiffened extension are not evaluated yet");
-  }
   const view = endPlateViewOf(node, design, joint, connection, tensionLevel, steps);
   const plate = endPlateOf(node, panel, view, steps);
   const parts = {

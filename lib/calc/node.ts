@@ -76,6 +76,8 @@ export interface EndPlateConnection {
     /** Distance of each row below the outer face of the beam's top flange. */
     readonly rowsMm: readonly number[];
     readonly perRow: 2 | 4;
+    /** Between the two outer bolts of a row of four; no resistance counts on them, their distances are checked. */
+    readonly outerGaugeMm?: number;
     readonly preloaded: boolean;
   };
   readonly welds: ConnectionWelds;

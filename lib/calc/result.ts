@@ -55,6 +55,9 @@ export interface ComponentCheck {
 export type StiffnessClass = "pinned" | "semi-rigid" | "rigid";
 export type StrengthClass = "pinned" | "partial-strength" | "full-strength";
 
+/** What the standard says of a joint's rotation: enough for plastic analysis, not shown, or a least rotation. */
+export type RotationCapacity = "enough" | "not-shown" | { readonly atLeastRad: number };
+
 /** One joint in one load case. */
 export interface JointResult {
   readonly side: Side;
@@ -66,6 +69,11 @@ export interface JointResult {
   readonly leverArmMm: number;
   readonly stiffnessClass: StiffnessClass;
   readonly strengthClass: StrengthClass;
+  /** S_j,ini from which the joint counts as rigid; null where no joint can. */
+  readonly rigidFromNmmPerRad: number | null;
+  readonly rotationCapacity: RotationCapacity;
+  /** ψ of Table 6.8: how fast the joint softens beyond two thirds of its resistance. */
+  readonly stiffnessExponent: number;
   readonly rows: readonly { readonly row: number; readonly forceN: number }[];
   /** Steps of M_j,Rd, S_j,ini and the classification. */
   readonly steps?: readonly Step[];

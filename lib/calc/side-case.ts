@@ -7,6 +7,7 @@ import type { ColumnPanel } from "./components/column-panel";
 import { compressionResistance } from "./components/compression-zone";
 import {
   initialStiffness,
+  psiOf,
   secantStiffness,
   stiffnessClassOf,
   strengthClassOf,
@@ -18,7 +19,7 @@ import { weldedTension } from "./components/welded-joint";
 import { isBolted, type BoltedModel, type JointModel, type WeldedModel } from "./joint-model";
 import { reliefBuckling, reliefCrushing, reliefTension } from "./mechanics/through-bar-formulas";
 import type { BeamActions, Level, LoadCase, NodeCase, Side } from "./node";
-import type { JointResult } from "./result";
+import type { JointResult, RotationCapacity } from "./result";
 import type { Step } from "./trace/trace";
 import { traced, type Traced } from "./trace/traced";
 
@@ -62,7 +63,8 @@ export type SideCase = BoltedSideCase | WeldedSideCase;
 
 export const isBoltedCase = (side: SideCase): side is BoltedSideCase => isBolted(side.model);
 
-interface SideLoad {
+/** What one joint is loaded with in one case. */
+export interface SideLoad {
   readonly loadCase: LoadCase;
   readonly actions: BeamActions;
   readonly beta: number;
@@ -256,8 +258,8 @@ export function weldedSideCase(
   };
 }
 
-/** What the result document says of one joint in one load case. */
-export function jointResultOf(side: SideCase): JointResult {
+/** What the result says of one joint in one load case. */
+export function jointResultOf(side: SideCase, rotationCapacity: RotationCapacity): JointResult {
   const { bounds } = side.model;
   const steps = [side.resistance.step, side.initial.step, side.secant?.step, bounds.rigid?.step].filter(
     (step): step is Step => step !== undefined,
@@ -271,6 +273,9 @@ export function jointResultOf(side: SideCase): JointResult {
     leverArmMm: side.lever.value,
     stiffnessClass: stiffnessClassOf(side.initial.value, bounds),
     strengthClass: strengthClassOf(side.resistance.value, bounds),
+    rigidFromNmmPerRad: bounds.rigid?.value ?? null,
+    rotationCapacity,
+    stiffnessExponent: psiOf(side.model.joint.view.joint.connection.kind),
     rows: isBoltedCase(side)
       ? side.model.joint.view.tensionRows.map((row, index) => ({
           row: row.row,

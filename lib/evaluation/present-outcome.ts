@@ -48,6 +48,12 @@ export function presentJoint(joint: JointResult, withSteps: boolean): JointDocum
     leverArm: joint.leverArmMm,
     stiffnessClass: joint.stiffnessClass,
     strengthClass: joint.strengthClass,
+    rigidFrom: joint.rigidFromNmmPerRad === null ? null : joint.rigidFromNmmPerRad / NMM_PER_KNM,
+    rotationCapacity:
+      typeof joint.rotationCapacity === "string"
+        ? joint.rotationCapacity
+        : { atLeast: joint.rotationCapacity.atLeastRad },
+    stiffnessExponent: joint.stiffnessExponent,
     rows: joint.rows.map(({ row, forceN }) => ({ row, force: forceN / 1000 })),
     ...(withSteps && joint.steps ? { steps: joint.steps as Step[] } : {}),
   };

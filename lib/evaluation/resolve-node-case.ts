@@ -66,6 +66,7 @@ function endPlateOf(context: Resolving, input: EndPlateInput, path: string): End
       gaugeMm: bolts.gauge,
       rowsMm: bolts.rows,
       perRow: bolts.perRow ?? 2,
+      ...(bolts.outerGauge === undefined ? {} : { outerGaugeMm: bolts.outerGauge }),
       preloaded: bolts.preloaded ?? false,
     },
     welds: weldsOf(input.welds),

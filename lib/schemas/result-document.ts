@@ -50,6 +50,12 @@ export const JointDocument = z.object({
   leverArm: z.number(),
   stiffnessClass: z.enum(["pinned", "semi-rigid", "rigid"]),
   strengthClass: z.enum(["pinned", "partial-strength", "full-strength"]),
+  /** S_j,ini from which the joint is rigid, kNm/rad; null where no joint can be. Left out of results of older engines. */
+  rigidFrom: z.number().nullable().optional(),
+  /** Of 6.4: enough for plastic analysis, not shown, or the least rotation in rad. Left out of results of older engines. */
+  rotationCapacity: z.union([z.enum(["enough", "not-shown"]), z.object({ atLeast: z.number() })]).optional(),
+  /** ψ of Table 6.8. Left out of results of older engines. */
+  stiffnessExponent: z.number().optional(),
   rows: z.array(z.object({ row: z.number().int(), force: z.number() })),
   steps: z.array(StepDocument).optional(),
 });

@@ -82,6 +82,9 @@ export const buildJoint = (changes: Partial<JointDocument> = {}): JointDocument 
     { row: 1, force: 310.2 },
     { row: 2, force: 288.4 },
   ],
+  rigidFrom: 120_000,
+  rotationCapacity: "enough",
+  stiffnessExponent: 2.7,
   ...changes,
 });
 

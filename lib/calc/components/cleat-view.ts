@@ -61,7 +61,12 @@ export function cleatViewOf(
     backing: view.backing,
     connection,
     gaugeMm: bolts.gaugeMm,
-    attachment: { thicknessMm: cleat.thicknessMm, widthMm: cleat.lengthMm, isPreloaded: false },
+    attachment: {
+      thicknessMm: cleat.thicknessMm,
+      widthMm: cleat.lengthMm,
+      yieldMpa: cleat.steel.yieldMpa,
+      isPreloaded: false,
+    },
     rows: [pulled, pulled === top ? bottom : top],
     tensionRows: [pulled],
   };

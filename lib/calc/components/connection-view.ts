@@ -75,6 +75,7 @@ export interface BoltedView extends JointView {
   readonly attachment: {
     readonly thicknessMm: number;
     readonly widthMm: number;
+    readonly yieldMpa: number;
     readonly isPreloaded: boolean;
   };
   /** Every row, furthest from the centre of compression first. */
@@ -222,6 +223,7 @@ export function endPlateViewOf(
     attachment: {
       thicknessMm: connection.plate.thicknessMm,
       widthMm: connection.plate.widthMm,
+      yieldMpa: connection.plate.steel.yieldMpa,
       isPreloaded: connection.bolts.preloaded,
     },
     extensionTensionMm: tensionLevel === "top" ? extensionTopMm : extensionBottomMm,

@@ -266,7 +266,8 @@ export function connectionDetailing(side: SideCase, columnFlangeWidthMm: number)
     (heights[0] ?? 0) + connection.plate.extensionTopMm,
     depthMm + connection.plate.extensionBottomMm - (heights[heights.length - 1] ?? 0),
   ];
-  const edge = Math.min((connection.plate.widthMm - gaugeMm) / 2, (columnFlangeWidthMm - gaugeMm) / 2);
+  const outerMm = connection.bolts.outerGaugeMm ?? gaugeMm;
+  const edge = (Math.min(connection.plate.widthMm, columnFlangeWidthMm) - outerMm) / 2;
   const clause = "EN 1993-1-8, Table 3.3";
   return [
     detailAtLeast({ ...head, clause, what: "edge distance of the bolts, 1.2 d_0" }, 1.2 * holeMm, edge),
@@ -276,6 +277,15 @@ export function connectionDetailing(side: SideCase, columnFlangeWidthMm: number)
       Math.min(...ends),
     ),
     detailAtLeast({ ...head, clause, what: "gauge, 2.4 d_0" }, 2.4 * holeMm, gaugeMm),
+    ...(outerMm > gaugeMm
+      ? [
+          detailAtLeast(
+            { ...head, clause, what: "inner to outer bolts, 2.4 d_0" },
+            2.4 * holeMm,
+            (outerMm - gaugeMm) / 2,
+          ),
+        ]
+      : []),
     ...(pitches.length > 0
       ? [
           detailAtLeast(

@@ -176,6 +176,10 @@ export function initialStiffness(
 const PSI = 2.7;
 const PSI_CLEATS = 3.1;
 
+/** How fast the joint softens beyond two thirds of its resistance. Table 6.8. */
+export const psiOf = (connection: ConnectionCase["kind"]): number =>
+  connection === "flange-cleats" ? PSI_CLEATS : PSI;
+
 /** S_j at the load case's moment, Nmm/rad; null above the resistance. 6.3.1(6). */
 export function secantStiffness(
   momentNmm: number,
@@ -185,7 +189,7 @@ export function secantStiffness(
   steps: boolean,
 ): Traced | null {
   if (momentNmm > resistanceNmm) return null;
-  const psi = connection === "flange-cleats" ? PSI_CLEATS : PSI;
+  const psi = psiOf(connection);
   return traced(steps, (trace) => {
     const mu = rules.stiffnessRatioMu(trace, { momentNmm, resistanceNmm, psi });
     trace?.include(initial.step);

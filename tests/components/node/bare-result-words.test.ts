@@ -95,6 +95,9 @@ describe("the bare column in words", () => {
       stiffnessClass: "semi-rigid" as const,
       strengthClass: "partial-strength" as const,
       rows: [],
+      rigidFromNmmPerRad: 60_000e6,
+      rotationCapacity: "not-shown" as const,
+      stiffnessExponent: 2.7,
     };
     const soft = outcome(
       [check("detailing", 0.9, { loadCase: EVERY_CASE }), check("column-web-shear", 0.4)],
