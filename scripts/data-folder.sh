@@ -32,8 +32,8 @@ prepare_data_folder() {
     if ((EUID == 0)); then chmod 711 "$data_folder"; else chmod 700 "$data_folder"; fi
   fi
   [[ -w $data_folder ]] ||
-    fail "the data folder $data_folder belongs to somebody else." \
-      "It is owned by $(stat -c %U "$data_folder"); you are $(id -un)." \
+    fail "the data folder $data_folder cannot be written to." \
+      "It is owned by $(stat -c %U "$data_folder"), you are $(id -un); or its disk is read-only." \
       "Start as the same user as before, or choose another folder with PANELWRIGHT_DATA_DIR=/some/folder."
   secrets_folder=$data_folder/secrets
   for folder in "$secrets_folder" "$data_folder/files" "$data_folder/dumps"; do

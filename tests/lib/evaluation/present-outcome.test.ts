@@ -81,6 +81,9 @@ describe("a joint in the result document", () => {
     leverArmMm: 400,
     stiffnessClass: "semi-rigid",
     strengthClass: "partial-strength",
+    rigidFromNmmPerRad: 8e10,
+    rotationCapacity: { atLeastRad: 0.015 },
+    stiffnessExponent: 2.7,
     rows: [{ row: 2, forceN: 300_000 }],
     steps: [step],
   };
@@ -95,8 +98,16 @@ describe("a joint in the result document", () => {
       leverArm: 400,
       stiffnessClass: "semi-rigid",
       strengthClass: "partial-strength",
+      rigidFrom: 80_000,
+      rotationCapacity: { atLeast: 0.015 },
+      stiffnessExponent: 2.7,
       rows: [{ row: 2, force: 300 }],
     }));
+
+  it("has no bound where no joint can be rigid, and the words of the rotation as they are", () => {
+    const plain = presentJoint({ ...joint, rigidFromNmmPerRad: null, rotationCapacity: "enough" }, false);
+    expect(plain).toMatchObject({ rigidFrom: null, rotationCapacity: "enough" });
+  });
 
   it("has no secant stiffness above its resistance, and its working where wanted", () => {
     expect(presentJoint({ ...joint, secantStiffnessNmmPerRad: null }, false).secantStiffness).toBeNull();

@@ -35,7 +35,12 @@ describe("flange cleats", () => {
     const connection = resolved.ok ? resolved.node.joints[0]?.connection : undefined;
     if (connection?.kind !== "flange-cleats") throw new Error("The sample has cleats.");
     // The hole at 120 mm does not fit on a leg of 90 mm, so the leg of 150 mm lies along the beam.
-    expect(connection.cleat).toMatchObject({ columnLegMm: 90, beamLegMm: 150, thicknessMm: 12, lengthMm: 180 });
+    expect(connection.cleat).toMatchObject({
+      columnLegMm: 90,
+      beamLegMm: 150,
+      thicknessMm: 12,
+      lengthMm: 180,
+    });
     expect(connection.bolts).toMatchObject({ distanceMm: 60, gaugeMm: 100, size: { name: "M20" } });
     expect(connection.beamBolts).toMatchObject({ rowsMm: [60, 120], gaugeMm: 90 });
     expect(connection.webCleats).toEqual({ legMm: 90, thicknessMm: 8, lengthMm: 230 });
