@@ -86,11 +86,13 @@ const WORD_FIELDS = new Set([
   "at",
   "strengths",
   "tStubModeOne",
+  "triangularLimit",
+  "flangeWelds",
 ]);
 /** Groups that may be left out as a whole: emptied field by field, they go. */
 const OPTIONAL_GROUPS = new Set(["stiffener", "top", "bottom", "stiffened", "fabrication", "choices"]);
 /** Words that may be left out: chosen to be not stated, they go. */
-const OPTIONAL_WORDS = new Set(["assembly", "strengths", "tStubModeOne"]);
+const OPTIONAL_WORDS = new Set(["assembly", "strengths", "tStubModeOne", "triangularLimit", "flangeWelds"]);
 
 /**
  * The number that a text means: decimal point or comma, true minus sign and blanks between thousands

@@ -146,8 +146,16 @@ const STRENGTHS = [
   { value: "en1993-1-1-table-3.1", label: "EN 1993-1-1, Table 3.1" },
 ];
 const T_STUB_METHODS = [
-  { value: "", label: "method 1" },
-  { value: "method-2", label: "method 2" },
+  { value: "", label: "method 2" },
+  { value: "method-1", label: "method 1" },
+];
+const TRIANGULAR_LIMITS = [
+  { value: "", label: "always" },
+  { value: "united-kingdom", label: "as in the United Kingdom" },
+];
+const FLANGE_WELDS = [
+  { value: "", label: "directional method" },
+  { value: "simplified", label: "simplified method" },
 ];
 
 /** Which reading is taken where the standard leaves a choice; nothing is written down where it is the usual one. */
@@ -173,6 +181,29 @@ function ReadingRows() {
             path="choices.tStubModeOne"
             label="T-stub method in mode 1"
             choices={T_STUB_METHODS}
+            hintId={hintId}
+          />
+        )}
+      </FormRow>
+      <FormRow
+        label="Straight line of rows"
+        hint="EN 1993-1-8, 6.2.7.2(9): below a row close to the failure of its bolts; the United Kingdom lifts it for thin plates and flanges."
+      >
+        {(hintId) => (
+          <DraftChoice
+            path="choices.triangularLimit"
+            label="Straight line of bolt rows"
+            choices={TRIANGULAR_LIMITS}
+            hintId={hintId}
+          />
+        )}
+      </FormRow>
+      <FormRow label="Flange welds" hint="EN 1993-1-8, 4.5.3.2 or 4.5.3.3.">
+        {(hintId) => (
+          <DraftChoice
+            path="choices.flangeWelds"
+            label="Method for flange welds"
+            choices={FLANGE_WELDS}
             hintId={hintId}
           />
         )}

@@ -31,6 +31,8 @@ const WORDS: Readonly<Record<string, string>> = {
   distance: "from the heel",
   strengths: "strengths",
   tStubModeOne: "T-stub, mode 1",
+  triangularLimit: "straight line of rows",
+  flangeWelds: "flange welds",
   bolts: "bolts",
   size: "size",
   grade: "grade",

@@ -102,7 +102,7 @@ function boltedModelOf(
   own: Pick<BoltedModel, "welds" | "shear" | "slip">,
 ): BoltedModel {
   const { node, panel, joint, steps } = setting;
-  const bolted = boltedJointOf(node, view, parts, steps);
+  const bolted = boltedJointOf(node, panel, view, parts, steps);
   const springs = rowSpringsOf(panel, bolted, steps);
   const barShares = barTensionShares(panel, bolted, panel.stiffestWebMm, steps);
   const plainMm = panel.section.webThicknessMm;

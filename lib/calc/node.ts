@@ -237,4 +237,8 @@ export interface NodeCase {
     readonly stiffness: "any" | "rigid" | { readonly nmmPerRad: number };
   };
   readonly tStubModeOne: "method-1" | "method-2";
+  /** Whether a row close to the failure of its bolts bounds the rows below it always, or as the United Kingdom's annex has it. */
+  readonly triangularLimit: "always" | "united-kingdom";
+  /** How fillets along the tension flange resist: 4.5.3.2 or 4.5.3.3. */
+  readonly flangeWelds: "directional" | "simplified";
 }

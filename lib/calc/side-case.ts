@@ -165,6 +165,7 @@ export function boltedSideCase(
     joint.view.tensionRows,
     [column.flange, column.web, ...joint.ownLimits],
     limitN,
+    joint.hasTriangularLimit,
     steps,
   );
   const resistance = traced(steps, (trace) => {

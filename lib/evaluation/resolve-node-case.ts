@@ -168,6 +168,8 @@ export function resolveNodeCase(document: NodeDocument, catalog: Catalog): Resol
     bracing: document.frame.bracing,
     target: targetOf(document),
     tStubModeOne: document.choices?.tStubModeOne ?? "method-2",
+    triangularLimit: document.choices?.triangularLimit ?? "always",
+    flangeWelds: document.choices?.flangeWelds ?? "directional",
   };
   return { ok: true, node };
 }

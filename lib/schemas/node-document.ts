@@ -221,6 +221,8 @@ export const NodeDocument = z
       .strictObject({
         strengths: z.enum(["product-standard", "en1993-1-1-table-3.1"]).optional(),
         tStubModeOne: z.enum(["method-1", "method-2"]).optional(),
+        triangularLimit: z.enum(["always", "united-kingdom"]).optional(),
+        flangeWelds: z.enum(["directional", "simplified"]).optional(),
       })
       .optional(),
     options: z

@@ -107,6 +107,8 @@ export function buildNode(sides: readonly Side[] = ["left", "right"]): NodeCase 
     bracing: "unbraced",
     target: { utilisation: 1, stiffness: "any" },
     tStubModeOne: "method-1",
+    triangularLimit: "always",
+    flangeWelds: "directional",
   };
 }
 

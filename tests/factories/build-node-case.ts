@@ -124,6 +124,8 @@ export const buildNodeCase = (overrides: Partial<NodeCase> = {}): NodeCase => ({
   bracing: "unbraced",
   target: { utilisation: 1, stiffness: "any" },
   tStubModeOne: "method-2",
+  triangularLimit: "always",
+  flangeWelds: "directional",
   ...overrides,
 });
 

@@ -11,6 +11,7 @@ import { sectionProperties } from "../mechanics/section-properties";
 import type { JointCase, NodeCase } from "../node";
 import type { ComponentId } from "../result";
 import { OutsideScope } from "../outcome";
+import { defineFormula } from "../trace/define-formula";
 import { traced, type Traced } from "../trace/traced";
 import type { ColumnFlange } from "./column-flange";
 import type { ColumnPanel } from "./column-panel";
@@ -32,6 +33,8 @@ export interface BoltedJoint {
   readonly own: readonly OwnLimits[];
   /** Of these, the limits alone. */
   readonly ownLimits: readonly RowFamilyLimits[];
+  /** Whether a row close to the failure of its bolts bounds the rows below it. 6.2.7.2(9). */
+  readonly hasTriangularLimit: boolean;
   /** The column flange's resistances where no bars relieve it. */
   readonly flangeLimits: RowFamilyLimits;
   readonly compression: CompressionZone;
@@ -140,6 +143,42 @@ export const endPlateLimits = (
   },
 ];
 
+/** Thickest plate or flange that bends before its bolts break, by the United Kingdom's annex, mm. */
+const bendsFirstMm = defineFormula({
+  id: "en1993-1-8:2005/6.2.7.2/t of the annex",
+  source: {
+    document: "National Annex to BS EN 1993-1-8",
+    edition: "2008",
+    ref: "to 6.2.7.2(9), as SCI/BCSA P398 (2013) prints it",
+  },
+  symbols: {
+    diameterMm: ["d", "mm"],
+    boltUltimateMpa: ["f_ub", "N/mm2"],
+    yieldMpa: ["f_y", "N/mm2"],
+  },
+  result: ["t", "mm"],
+  expression: "diameterMm / 1.9 * sqrt(boltUltimateMpa / yieldMpa)",
+  evaluate: (g) => (g.diameterMm / 1.9) * Math.sqrt(g.boltUltimateMpa / g.yieldMpa),
+  example: { given: { diameterMm: 19, boltUltimateMpa: 900, yieldMpa: 225 }, gives: 20, relTol: 1e-12 },
+});
+
+/** Whether rows follow a straight line below one close to the failure of its bolts. 6.2.7.2(9). */
+function isTriangular(node: NodeCase, panel: ColumnPanel, view: BoltedView): boolean {
+  const fastener = view.tensionRows[0]?.fastener;
+  if (node.triangularLimit === "always" || !fastener) return true;
+  const mostMm = (yieldMpa: number): number =>
+    bendsFirstMm(null, {
+      diameterMm: fastener.size.diameterMm,
+      boltUltimateMpa: fastener.grade.ultimateMpa,
+      yieldMpa,
+    });
+  const { attachment } = view;
+  return (
+    attachment.thicknessMm > mostMm(attachment.yieldMpa) &&
+    panel.section.flangeThicknessMm > mostMm(panel.steel.yieldMpa)
+  );
+}
+
 /** What a bolted joint is made of. */
 export interface BoltedParts {
   readonly flange: ColumnFlange;
@@ -152,16 +191,19 @@ export interface BoltedParts {
 /** Everything about a bolted joint that does not depend on the load case. */
 export function boltedJointOf(
   node: NodeCase,
+  panel: ColumnPanel,
   view: BoltedView,
   parts: BoltedParts,
   steps: boolean,
 ): BoltedJoint {
   const beamFlange = beamCompression(node, view.joint, steps);
+  const hasTriangularLimit = isTriangular(node, panel, view);
   const ownLimits = parts.own.map(({ limits }) => limits);
   const alone = assembleRows(
     view.tensionRows,
     ownLimits,
     Math.min(beamFlange.value, parts.seat?.value ?? Infinity),
+    hasTriangularLimit,
     false,
   );
   const connectionMomentNmm = boltedMomentNmm(null, {
@@ -175,6 +217,7 @@ export function boltedJointOf(
     plate: parts.plate,
     own: parts.own,
     ownLimits,
+    hasTriangularLimit,
     compression: parts.compression,
     flangeLimits: resistancesOf(parts.flange.family),
     beamFlange,

@@ -26,7 +26,7 @@ export const noWelds = (node: NodeCase, { beam: { section, steel } }: JointCase)
 });
 
 /**
- * EN 1993-1-8:2005, 4.5.3.2 for the flange, 4.5.3.3 for the web.
+ * EN 1993-1-8:2005, 4.5.3.2 or, where the node asks for it, 4.5.3.3 for the flange; 4.5.3.3 for the web.
  *
  * @param other - the part the beam is welded to: end plate or column flange.
  * @param shearDepthMm - depth of web left for shear.
@@ -53,7 +53,10 @@ export function connectionWeldLimits(
             weldForceN(
               trace,
               {
-                strengthMpa: filletTransverseStrengthMpa(trace, strength),
+                strengthMpa:
+                  node.flangeWelds === "directional"
+                    ? filletTransverseStrengthMpa(trace, strength)
+                    : filletShearStrengthMpa(trace, strength),
                 throatMm: tensionWeld.throatMm,
                 lengthMm: section.widthMm + Math.max(inner, 0),
               },

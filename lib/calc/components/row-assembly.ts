@@ -64,11 +64,13 @@ export interface AssembledRows {
  * EN 1993-1-8:2005, 6.2.7.2(6) to (9).
  *
  * @param limitN - what the rows may add up to: compression zones and panel, N.
+ * @param hasTriangularLimit - whether a row close to the failure of its bolts bounds the rows below it, (9).
  */
 export function assembleRows(
   rows: readonly BoltRow[],
   families: readonly RowFamilyLimits[],
   limitN: number,
+  hasTriangularLimit: boolean,
   steps: boolean,
 ): AssembledRows {
   const free: Traced[] = [];
@@ -92,7 +94,11 @@ export function assembleRows(
         }
         free.forEach((earlier, place) => {
           const before = rows[place];
-          if (before && earlier.value > NEAR_BOLT_FAILURE * before.fastener.tension.value) {
+          if (
+            hasTriangularLimit &&
+            before &&
+            earlier.value > NEAR_BOLT_FAILURE * before.fastener.tension.value
+          ) {
             partN.push(
               triangularN(trace, {
                 earlierN: earlier.value,

@@ -224,9 +224,9 @@ describe("the node sheet", () => {
   it("writes a reading of the standard down only where it is not the usual one", () => {
     const onSave = vi.fn();
     render(<Sheet onSave={onSave} />);
-    fireEvent.change(field("T-stub method in mode 1"), { target: { value: "method-2" } });
+    fireEvent.change(field("T-stub method in mode 1"), { target: { value: "method-1" } });
     fireEvent.keyDown(window, { key: "s", ctrlKey: true });
-    expect(onSave).toHaveBeenLastCalledWith(buildNodeDocument({ choices: { tStubModeOne: "method-2" } }));
+    expect(onSave).toHaveBeenLastCalledWith(buildNodeDocument({ choices: { tStubModeOne: "method-1" } }));
     fireEvent.change(field("T-stub method in mode 1"), { target: { value: "" } });
     fireEvent.keyDown(window, { key: "s", ctrlKey: true });
     expect(onSave).toHaveBeenLastCalledWith(buildNodeDocument());

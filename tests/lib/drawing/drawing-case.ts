@@ -105,6 +105,8 @@ export const buildDrawingCase = (more: Partial<NodeCase> = {}): NodeCase => ({
   bracing: "unbraced",
   target: { utilisation: 1, stiffness: "any" },
   tStubModeOne: "method-1",
+  triangularLimit: "always",
+  flangeWelds: "directional",
   ...more,
 });
 

@@ -97,6 +97,8 @@ export function sampleNode(
     bracing: "unbraced",
     target: { utilisation: 1, stiffness: "any" },
     tStubModeOne: "method-2",
+    triangularLimit: "always",
+    flangeWelds: "directional",
   };
 }
 

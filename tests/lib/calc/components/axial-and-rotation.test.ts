@@ -169,6 +169,45 @@ describe("moment and rotation, 6.3.1(6)", () => {
   });
 });
 
+describe("choices of the node", () => {
+  it("takes the tension flange's weld by either method", () => {
+    const weldOf = (flangeWelds: "directional" | "simplified"): number =>
+      checkLike(evaluatedCase(nodeOf(buildSide(), {}, { choices: { flangeWelds } })), "connection-weld", {
+        what: "tension flange weld",
+      }).resistance;
+    expectHand(weldOf("directional"), (470 / (Math.SQRT2 * 0.9 * 1.25)) * 8 * (190 + 190 - 9.4 - 42));
+    expectHand(weldOf("simplified"), (470 / (Math.sqrt(3) * 0.9 * 1.25)) * 8 * (190 + 190 - 9.4 - 42));
+  });
+
+  it("lifts the straight line of rows where plate or flange is thin against the bolts, as the United Kingdom has it", () => {
+    // M16 8.8 behind 40 mm of plate and a heavy flange: rows at the bolts' strength. 16/1.9 sqrt(800/355) = 12.6 mm.
+    const small = (thickness: number): Joint =>
+      plated((connection) => ({
+        ...connection,
+        plate: { ...connection.plate, thickness },
+        bolts: { ...connection.bolts, size: "M16", grade: "8.8", rows: [-45, 65, 165, 385] },
+      }));
+    const moment = (
+      thickness: number,
+      column: string,
+      triangularLimit: "always" | "united-kingdom",
+    ): number =>
+      evaluatedCase(
+        nodeOf(
+          small(thickness),
+          { right: 100 },
+          {
+            column: { section: column, steel: "S355", storeyHeight: 3600 },
+            choices: { triangularLimit },
+          },
+        ),
+      ).joints[0]?.momentResistanceNmm ?? NaN;
+    expect(moment(40, "HE 400 M", "united-kingdom")).toBe(moment(40, "HE 400 M", "always"));
+    // A flange of 9 mm (HE 160 A) lifts it, whatever the plate.
+    expect(moment(40, "HE 160 A", "united-kingdom")).toBeGreaterThanOrEqual(moment(40, "HE 160 A", "always"));
+  });
+});
+
 describe("what is not counted on", () => {
   const four = (outerGauge: number): Joint =>
     plated((connection) => ({

@@ -27,7 +27,7 @@ const family = (alone: readonly (number | null)[], groups: readonly Group[] = []
 });
 
 const forces = (families: readonly RowFamilyLimits[], limitN = Infinity, steps = false): number[] =>
-  assembleRows(rows, families, limitN, steps).forces.map(({ value }) => value);
+  assembleRows(rows, families, limitN, true, steps).forces.map(({ value }) => value);
 
 describe("rows of a joint, 6.2.7.2", () => {
   it("take the least of their parts, passing over a part that does not limit", () => {
@@ -59,18 +59,23 @@ describe("rows of a joint, 6.2.7.2", () => {
     expect(forces([family([600, 478, 470])])).toEqual([600, 478, 478 * 0.75]);
   });
 
+  it("follow no line where the annex lifts it", () => {
+    const { forces: lifted } = assembleRows(rows, [family([480, 470, 470])], Infinity, false, false);
+    expect(lifted.map(({ value }) => value)).toEqual([480, 470, 470]);
+  });
+
   it("are cut from the lowest row up by what the compression side and the panel carry", () => {
     const flange = family([300, 200, 100]);
     expect(forces([flange], 600)).toEqual([300, 200, 100]);
     expect(forces([flange], 540)).toEqual([300, 200, 40]);
     expect(forces([flange], 420)).toEqual([300, 120, 0]);
     expect(forces([flange], 250)).toEqual([250, 0, 0]);
-    expect(assembleRows(rows, [flange], 420, false).totalN).toBe(420);
+    expect(assembleRows(rows, [flange], 420, true, false).totalN).toBe(420);
   });
 
   it("show the same numbers with their working", () => {
     const flange = family([480, 300, 300], [{ first: 0, last: 1, limit: 700 }]);
-    const { forces: shown } = assembleRows(rows, [flange], 800, true);
+    const { forces: shown } = assembleRows(rows, [flange], 800, true, true);
     expect(shown.map(({ value }) => value)).toEqual(forces([flange], 800));
     expect(shown.map(({ step }) => step?.id)).toEqual([
       "en1993-1-8:2005/6.2.7.2/F_tr,Rd",
