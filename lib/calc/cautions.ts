@@ -1,4 +1,5 @@
 import { isLargeAxialForce } from "./components/axial-force";
+import { pryingLengthMm } from "./clauses/en1993-1-8-2005/t-stub";
 import { isBolted, type JointModel } from "./joint-model";
 import { isOnePanel } from "./mechanics/panel-levels";
 import { fullPairAt } from "./measures/diagonal-stiffeners";
@@ -117,6 +118,7 @@ export function cautionsOf(
   if (design.webPlates && design.pairs.length > 0) cautions.push(ON_PLATE);
   if (design.webPlates && hasBars(design)) cautions.push(BARS_BESIDE_PLATE);
   if (!isOnePanel(node.joints)) cautions.push(UNEQUAL);
+  cautions.push(...pryingCautions(design, models));
   cautions.push(...cleatCautions(node), ...endPlateCautions(node));
   const pulled = axialForceCases(node);
   if (pulled.length > 0) {
@@ -157,6 +159,43 @@ const axialForceCases = (node: NodeCase): readonly string[] =>
       node.joints.some((joint) => isLargeAxialForce(node, joint, loadCase[joint.side]?.axialForceN ?? 0)),
     )
     .map(({ name }) => name);
+
+/** Rows whose bolts are too long for prying to develop for certain: it is assumed all the same, as the standard allows here. */
+function pryingCautions(design: PanelDesign, models: readonly JointModel[]): readonly string[] {
+  const words = models.flatMap((model) => {
+    if (!isBolted(model)) return [];
+    const { view, flange, plate } = model.joint;
+    const rows = view.tensionRows.flatMap((row, index) => {
+      const spring = model.springs[index];
+      const { stressAreaMm2 } = row.fastener.size;
+      if (!spring || row.fastener.bars) return [];
+      // Table 6.11: k_10 = 1.6 A_s / L_b.
+      const boltMm = (1.6 * stressAreaMm2) / spring.bolts.value;
+      const sides = [
+        { part: flange.family.alone[index], thicknessMm: design.column.section.flangeThicknessMm },
+        { part: plate.family.alone[index], thicknessMm: view.attachment.thicknessMm },
+      ];
+      const isLong = sides.some(
+        ({ part, thicknessMm }) =>
+          part &&
+          boltMm >
+            pryingLengthMm(null, {
+              mMm: part.mMm,
+              stressAreaMm2,
+              rows: 1,
+              lengthMm: part.lengthOneMm.value,
+              thicknessMm,
+            }),
+      );
+      return isLong ? [row.row] : [];
+    });
+    if (rows.length === 0) return [];
+    return [
+      `Bolts of ${rows.length === 1 ? "row" : "rows"} ${rows.join(", ")} on the ${view.joint.side} are longer than L_b* of Table 6.2, so prying need not develop; it is assumed, as the standard allows for beam-to-column joints.`,
+    ];
+  });
+  return [...new Set(words)];
+}
 
 /** Parts of an end plate that no resistance counts on. */
 function endPlateCautions(node: NodeCase): readonly string[] {

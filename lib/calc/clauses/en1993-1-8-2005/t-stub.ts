@@ -168,3 +168,24 @@ export const tStubWithoutModeOneN = defineFormula({
   evaluate: (g) => Math.min(g.twoN, g.threeN),
   example: { given: { twoN: 2, threeN: 4 }, gives: 2, relTol: 1e-12 },
 });
+
+/** Bolt length up to which prying forces develop, mm. Table 6.2, from memory. */
+export const pryingLengthMm = defineFormula({
+  id: id("table-6.2/L_b*"),
+  source: from("Table 6.2, L_b* (from memory)"),
+  symbols: {
+    mMm: ["m", "mm"],
+    stressAreaMm2: ["A_s", "mm2"],
+    rows: ["n_b", "1"],
+    lengthMm: ["Σl_eff,1", "mm"],
+    thicknessMm: ["t_f", "mm"],
+  },
+  result: ["L_b*", "mm"],
+  expression: "8.8 * mMm^3 * stressAreaMm2 * rows / (lengthMm * thicknessMm^3)",
+  evaluate: (g) => (8.8 * g.mMm ** 3 * g.stressAreaMm2 * g.rows) / (g.lengthMm * g.thicknessMm ** 3),
+  example: {
+    given: { mMm: 40, stressAreaMm2: 200, rows: 1, lengthMm: 160, thicknessMm: 10 },
+    gives: 704,
+    relTol: 1e-12,
+  },
+});

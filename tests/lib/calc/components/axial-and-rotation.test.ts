@@ -249,3 +249,23 @@ describe("what is not counted on", () => {
     expect(option.cautions.join(" ")).toMatch(/ribs on the end plate are not counted on/);
   });
 });
+
+describe("length of the bolts, Table 6.2", () => {
+  it("is told where it lets prying be doubted: thick parts, short levers", () => {
+    const thick = plated((connection) => ({
+      ...connection,
+      plate: { ...connection.plate, thickness: 40 },
+    }));
+    // Plate row 1: m_x = 45 - 0.8 x 8 sqrt2, t 40: L_b* is a few millimetres; L_b of an M24 through 54 mm some 80.
+    expect(evaluatedCase(nodeOf(thick)).cautions.join(" ")).toMatch(
+      /rows? .* on the left are longer than L_b\*/,
+    );
+    const slim = { column: { section: "HE 160 A", steel: "S355", storeyHeight: 3600 } };
+    const gauge = plated((connection) => ({
+      ...connection,
+      plate: { ...connection.plate, thickness: 8 },
+      bolts: { ...connection.bolts, size: "M16", gauge: 110 },
+    }));
+    expect(evaluatedCase(nodeOf(gauge, {}, slim)).cautions.join(" ")).not.toMatch(/L_b\*/);
+  });
+});
