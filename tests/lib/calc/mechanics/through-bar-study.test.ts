@@ -76,6 +76,18 @@ describe("the finite-element study of the through-bars", () => {
   );
 });
 
+describe("what the method page says of an HE 300 A with M20 bars at gauge 140", () => {
+  const each = cases.find(({ name }) => name === "HE 300 A, gauge 140, M20")!;
+
+  it("is a relative displacement of the nuts cut by 73 %", () => {
+    const row = each.rows.find(({ loading }) => loading === "symmetric")!;
+    const relative = (sides: readonly number[]): number => sides[0]! + sides[1]!;
+    expect(1 - relative(row.withBarsMm) / relative(row.withoutBarsMm)).toBeCloseTo(0.73, 2);
+  });
+
+  it("is a cautious design value of 40 %", () => expect(0.55 * closedForm(each).share).toBeCloseTo(0.4, 2));
+});
+
 describe("the stub that the finite elements are run on", () => {
   const { section, gaugeMm, bar } = cases.find((each) => each.section.name === "HE 300 A")!;
 
