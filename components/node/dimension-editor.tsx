@@ -26,9 +26,13 @@ export function DimensionEditor({ dimension, extent, onCommit, onCancel }: Dimen
       box.style.left = `${Math.min(92, Math.max(8, across * 100))}%`;
       box.style.top = `${down * 100}%`;
     }
+  }, [dimension, extent]);
+
+  // Once only: the drawing is made anew while somebody types, and a second select would swallow what they typed.
+  useEffect(() => {
     inputRef.current?.focus();
     inputRef.current?.select();
-  }, [dimension, extent]);
+  }, []);
 
   const settle = (finish: () => void) => {
     if (settled.current) return;

@@ -1,8 +1,9 @@
 "use client";
 
+import { ChoiceField } from "@/components/forms/choice-field";
 import { FormRow, FormSection, RowGroup } from "@/components/forms/form-grid";
 import { DraftChoice, DraftQuantity, DraftSection, DraftSteel, DraftText, useDraftForm } from "./draft-form";
-import { isDraftObject, valueAt } from "./node-draft";
+import { isDraftObject, shownText, valueAt } from "./node-draft";
 
 /** Name and number of the node. */
 export function NodeFacts() {
@@ -212,11 +213,51 @@ function ReadingRows() {
   );
 }
 
+/** Factors of EN 1993-1-8 as published, and of national annexes; the annex in force comes first. */
+const FACTOR_SETS = [
+  { value: "recommended", label: "recommended values", factors: ["1.0", "1.0", "1.25"] },
+  { value: "germany", label: "Germany (from memory)", factors: ["1.0", "1.1", "1.25"] },
+] as const;
+const FACTOR_NAMES = ["gammaM0", "gammaM1", "gammaM2"] as const;
+
+/** Fills the three factors at once. The United Kingdom and others keep the recommended values (from memory). */
+function FactorSet() {
+  const { draft, readOnly, edit, onFocus } = useDraftForm();
+  const typed = FACTOR_NAMES.map((name) => Number(shownText(valueAt(draft, `partialFactors.${name}`))));
+  const found = FACTOR_SETS.find(({ factors }) =>
+    factors.every((factor, index) => Number(factor) === typed[index]),
+  );
+  return (
+    <FormRow label="Set of factors" hint="Fills the three below; your national annex decides.">
+      {(hintId) => (
+        <ChoiceField
+          label="Set of partial factors"
+          path="partialFactors"
+          hintId={hintId}
+          value={found?.value ?? "own"}
+          choices={[...FACTOR_SETS, ...(found ? [] : [{ value: "own", label: "as typed below" }])]}
+          readOnly={readOnly}
+          onFocus={() => onFocus("partialFactors")}
+          onChange={(value) => {
+            const chosen = FACTOR_SETS.find((set) => set.value === value);
+            if (!chosen) return;
+            const partialFactors = Object.fromEntries(
+              FACTOR_NAMES.map((name, index) => [name, chosen.factors[index] ?? ""]),
+            );
+            edit((now) => ({ ...now, partialFactors }));
+          }}
+        />
+      )}
+    </FormRow>
+  );
+}
+
 /** Partial factors of the national annex, and the reading of the standard. */
 export function FactorFields() {
   return (
     <FormSection title="Partial factors">
-      {(["gammaM0", "gammaM1", "gammaM2"] as const).map((name) => (
+      <FactorSet />
+      {FACTOR_NAMES.map((name) => (
         <FormRow
           key={name}
           label={

@@ -221,6 +221,20 @@ describe("the node sheet", () => {
     });
   });
 
+  it("fills the partial factors from a set, and says when they are of none", () => {
+    const onSave = vi.fn();
+    render(<Sheet onSave={onSave} />);
+    expect(field("Set of partial factors")).toHaveValue("recommended");
+    fireEvent.change(field("Set of partial factors"), { target: { value: "germany" } });
+    expect(field("Partial factor gamma M1")).toHaveValue("1.1");
+    fireEvent.keyDown(window, { key: "s", ctrlKey: true });
+    expect(onSave).toHaveBeenLastCalledWith(
+      buildNodeDocument({ partialFactors: { gammaM0: 1, gammaM1: 1.1, gammaM2: 1.25 } }),
+    );
+    type("Partial factor gamma M2", "1.3");
+    expect(field("Set of partial factors")).toHaveValue("own");
+  });
+
   it("writes a reading of the standard down only where it is not the usual one", () => {
     const onSave = vi.fn();
     render(<Sheet onSave={onSave} />);
