@@ -47,18 +47,7 @@ export function cleatViewOf(
   const bottom = rowAt("bottom", 2);
   const pulled = tensionLevel === "top" ? top : bottom;
   return {
-    joint,
-    tensionLevel,
-    compressionLevel: view.compressionLevel,
-    tensionWeld: view.tensionWeld,
-    compressionWeld: view.compressionWeld,
-    columnBeyondTensionMm: view.columnBeyondTensionMm,
-    columnBeyondCompressionMm: view.columnBeyondCompressionMm,
-    tensionStiffener: view.tensionStiffener,
-    compressionStiffener: view.compressionStiffener,
-    tensionSlopeCosine: view.tensionSlopeCosine,
-    compressionSlopeCosine: view.compressionSlopeCosine,
-    backing: view.backing,
+    ...view,
     connection,
     gaugeMm: bolts.gaugeMm,
     attachment: {
