@@ -19,6 +19,10 @@ export function reportLines(results: StudyResults): string[] {
       (mesh) =>
         `mesh of ${mesh.bricks} bricks${mesh.isHoleCut ? ", hole cut" : ""}: K_c ${(mesh.columnNPerMm / 1000).toFixed(1)} kN/mm, share ${mesh.share.toFixed(4)}, ${mesh.seconds.toFixed(1)} s`,
     ),
+    ...results.holeChecks.map(
+      (check) =>
+        `hole, ${check.section}, ${check.gaugeMm}, ${check.bar}: share over closed form ${(check.share / check.closedFormShare).toFixed(3)}, with hole ${(check.shareWithHole / check.closedFormShare).toFixed(3)}`,
+    ),
     `share over closed form: ${range(ratios)}`,
     `column stiffness over closed form: ${range(stiffness)}`,
     ...results.direct.map((run) =>

@@ -44,6 +44,16 @@ export interface MeshCheck {
   readonly seconds: number;
 }
 
+/** The same case on the finest mesh without and with its bolt hole, equal forces on both sides. */
+export interface HoleCheck {
+  readonly section: string;
+  readonly gaugeMm: number;
+  readonly bar: string;
+  readonly share: number;
+  readonly shareWithHole: number;
+  readonly closedFormShare: number;
+}
+
 export interface StudyResults {
   readonly about: string;
   readonly solver: string;
@@ -56,6 +66,7 @@ export interface StudyResults {
     readonly bar: string;
     readonly meshes: readonly MeshCheck[];
   };
+  readonly holeChecks: readonly HoleCheck[];
   readonly cases: readonly CaseResult[];
   readonly direct: readonly DirectRun[];
 }

@@ -8,14 +8,19 @@ import { reportLines } from "./report";
 import type { Fineness } from "./section-mesh";
 import { solve, solverVersion } from "./solve";
 import { meshStub } from "./stub-mesh";
-import type { CaseResult, DirectRun, MeshCheck, StudyResults } from "./study-results";
+import type { CaseResult, DirectRun, HoleCheck, MeshCheck, StudyResults } from "./study-results";
 
 /** `npm run verify:fe`: column stubs in finite elements beside the closed form of the through-bar model; writes results.json. */
 const FORCE_N = 100_000;
 const FINENESS: Fineness = { throughFlange: 3, throughHalfWeb: 2, alongHalfFillet: 3, sizeMm: 6 };
 const COARSE: Fineness = { throughFlange: 2, throughHalfWeb: 1, alongHalfFillet: 2, sizeMm: 8 };
 const FINE: Fineness = { throughFlange: 4, throughHalfWeb: 2, alongHalfFillet: 4, sizeMm: 4 };
-const MESHES = [
+interface MeshPlan {
+  readonly fineness: Fineness;
+  readonly isHoleCut: boolean;
+}
+
+const MESHES: readonly MeshPlan[] = [
   { fineness: COARSE, isHoleCut: false },
   { fineness: FINENESS, isHoleCut: false },
   { fineness: FINE, isHoleCut: false },
@@ -89,21 +94,40 @@ function directRun(study: StudyCase, unit: UnitAnswers, loading: Loading): Direc
   };
 }
 
-function meshCheck(study: StudyCase): MeshCheck[] {
+function meshRun(study: StudyCase, { fineness, isHoleCut }: MeshPlan): MeshCheck {
   const { barsNPerMm } = closedForm(study);
-  return MESHES.map(({ fineness, isHoleCut }) => {
-    const mesh = meshStub({ ...study, depth: "half", isHoleCut }, fineness);
-    const answer = solve({ mesh, midDepth: "symmetric", rowForcesN: [FORCE_N], barNPerMm: null });
-    const symmetricMmPerN = answer.nutsMm[0]! / FORCE_N;
-    const unit = { symmetricMmPerN, antisymmetricMmPerN: 0 };
-    return {
-      fineness,
-      isHoleCut,
-      bricks: mesh.bricks.length,
-      columnNPerMm: 1 / symmetricMmPerN,
-      share: coupleBars(unit, barsNPerMm, [FORCE_N, FORCE_N]).barsN / FORCE_N,
-      seconds: answer.seconds,
-    };
+  const mesh = meshStub({ ...study, depth: "half", isHoleCut }, fineness);
+  const answer = solve({ mesh, midDepth: "symmetric", rowForcesN: [FORCE_N], barNPerMm: null });
+  const symmetricMmPerN = answer.nutsMm[0]! / FORCE_N;
+  const unit = { symmetricMmPerN, antisymmetricMmPerN: 0 };
+  return {
+    fineness,
+    isHoleCut,
+    bricks: mesh.bricks.length,
+    columnNPerMm: 1 / symmetricMmPerN,
+    share: coupleBars(unit, barsNPerMm, [FORCE_N, FORCE_N]).barsN / FORCE_N,
+    seconds: answer.seconds,
+  };
+}
+
+/** What the hole changes, with the thickest and the thinnest bar of each section at its widest gauge. */
+function holeChecks(studies: readonly StudyCase[]): HoleCheck[] {
+  return [...new Set(studies.map((study) => study.section))].flatMap((section) => {
+    const own = studies.filter((study) => study.section === section);
+    const widest = Math.max(...own.map((study) => study.gaugeMm));
+    const there = own.filter((study) => study.gaugeMm === widest);
+    return [there[0]!, there.at(-1)!].map((study) => {
+      process.stdout.write(`hole: ${section.name}, gauge ${widest}, ${study.bar.name}\n`);
+      const share = (isHoleCut: boolean): number => meshRun(study, { fineness: FINE, isHoleCut }).share;
+      return {
+        section: section.name,
+        gaugeMm: widest,
+        bar: study.bar.name,
+        share: share(false),
+        shareWithHole: share(true),
+        closedFormShare: closedForm(study).share,
+      };
+    });
   });
 }
 
@@ -125,7 +149,7 @@ function runStudy(): StudyResults {
   const reference = studies.find(isReference);
   if (!reference)
     throw new Error("The study lacks its reference case: see REFERENCE in scripts/fe/study.ts.");
-  const meshes = meshCheck(reference);
+  const meshes = MESHES.map((plan) => meshRun(reference, plan));
   const cases: CaseResult[] = [];
   const direct: DirectRun[] = [];
   for (const study of studies) {
@@ -136,12 +160,13 @@ function runStudy(): StudyResults {
   }
   return {
     about:
-      "Column stubs in linear-elastic C3D8I bricks, one row of two bars, no plate, no hole but in one mesh of the mesh check. Forces as nut pressure on the annulus between hole and across flats; bars as springs between the mean displacements of these. Written by npm run verify:fe.",
+      "Column stubs in linear-elastic C3D8I bricks, one row of two bars, no plate, no hole but where it is said. Forces as nut pressure on the annulus between hole and across flats; bars as springs between the mean displacements of these. Written by npm run verify:fe.",
     solver,
     date: new Date().toISOString().slice(0, 10),
     forceN: FORCE_N,
     fineness: FINENESS,
     meshCheck: { ...REFERENCE, meshes },
+    holeChecks: holeChecks(studies),
     cases,
     direct,
   };
