@@ -62,9 +62,9 @@ export default function MethodPage() {
         <p className="mt-1">
           It is common practice, without a source, to count on inner nuts to cut the relative flange
           displacement of an HE 300 A with M20 bars under equal forces by about 40 %; linear finite elements
-          without play give 73 % at the nuts without an end plate (in the program’s source, run again by one
-          command) and gave 57 to 65 % with one. The cautious design value 0.55 η gives 40 % there: that it
-          agrees with the practice proves neither of them.
+          without play gave 57 to 65 % in the study that the model was fitted to, and give 73 % at the nuts
+          without an end plate in the one that is in the program’s source. The cautious design value 0.55 η
+          gives 40 % there: that it agrees with the practice proves neither of them.
         </p>
       </section>
       <nav aria-label="Documents" className="mt-6 flex flex-wrap gap-x-6 gap-y-1">
