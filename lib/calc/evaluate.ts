@@ -3,7 +3,8 @@ import { checkOf } from "./components/check";
 import { seatCheck } from "./components/cleat-seat";
 import { isCleatView } from "./components/cleat-view";
 import { columnPanelOf, type ColumnPanel } from "./components/column-panel";
-import { connectionDetailing, sideChecks } from "./components/joint-checks";
+import { connectionDetailing } from "./components/connection-detailing";
+import { sideChecks } from "./components/joint-checks";
 import { axialCheck, isLargeAxialForce } from "./components/axial-force";
 import { panelChecks, panelGeometryOf, type PanelGeometry } from "./components/panel-shear";
 import { rotationCapacityOf } from "./components/rotation-capacity";
@@ -101,7 +102,7 @@ function detailingChecks(
   const checks = sides.flatMap((side) => {
     if (seen.has(side.model)) return [];
     seen.add(side.model);
-    return connectionDetailing(side, panel.section.widthMm);
+    return connectionDetailing(side, panel);
   });
   for (const pair of design.pairs) checks.push(...stiffenerDetailing(panel, pair, models));
   checks.push(...diagonalDetailing(panel, models), ...backingDetailing(node, design, panel, models));

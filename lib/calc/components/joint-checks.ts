@@ -2,8 +2,7 @@ import type { Level } from "../node";
 import type { ComponentCheck } from "../result";
 import { isBoltedCase, type BoltedSideCase, type SideCase, type WeldedSideCase } from "../side-case";
 import type { Traced } from "../trace/traced";
-import { checkOf, detailAtLeast, type CheckHead } from "./check";
-import { cleatDetailing } from "./cleat-seat";
+import { checkOf, type CheckHead } from "./check";
 import { bearingLevelOf, isCleatView } from "./cleat-view";
 import type { RowFamilyLimits } from "./row-groups";
 
@@ -231,69 +230,4 @@ export function sideChecks(checks: ComponentCheck[], side: SideCase): void {
   if (isBoltedCase(side)) boltedChecks(checks, side);
   else checks.push(...weldedChecks(side));
   weldChecks(checks, side);
-}
-
-/** Rules of bolt spacing and of welded flanges that no load case changes. */
-export function connectionDetailing(side: SideCase, columnFlangeWidthMm: number): ComponentCheck[] {
-  const { view } = side.model.joint;
-  const head = { side: view.joint.side };
-  if (!isBoltedCase(side)) {
-    const { joint } = side.model;
-    return joint.stiffener
-      ? []
-      : [
-          detailAtLeast(
-            {
-              ...head,
-              level: view.tensionLevel,
-              clause: "EN 1993-1-8, 4.10(3)",
-              what: "breadth of column flange that works without a stiffener",
-            },
-            joint.leastBreadthMm,
-            joint.flangeBreadthMm,
-          ),
-        ];
-  }
-  const { gaugeMm, rows, joint } = side.model.joint.view;
-  const { connection } = joint;
-  if (isCleatView(side.model.joint.view)) return cleatDetailing(side.model.joint.view, columnFlangeWidthMm);
-  if (connection.kind !== "end-plate") return [];
-  const holeMm = Math.max(...rows.map((row) => row.fastener.size.holeMm));
-  const heights = rows.map((row) => row.belowTopMm).sort((a, b) => a - b);
-  const pitches = heights.slice(1).map((height, index) => height - (heights[index] ?? 0));
-  const { depthMm } = view.joint.beam.section;
-  const ends = [
-    (heights[0] ?? 0) + connection.plate.extensionTopMm,
-    depthMm + connection.plate.extensionBottomMm - (heights[heights.length - 1] ?? 0),
-  ];
-  const outerMm = connection.bolts.outerGaugeMm ?? gaugeMm;
-  const edge = (Math.min(connection.plate.widthMm, columnFlangeWidthMm) - outerMm) / 2;
-  const clause = "EN 1993-1-8, Table 3.3";
-  return [
-    detailAtLeast({ ...head, clause, what: "edge distance of the bolts, 1.2 d_0" }, 1.2 * holeMm, edge),
-    detailAtLeast(
-      { ...head, clause, what: "end distance in the plate, 1.2 d_0" },
-      1.2 * holeMm,
-      Math.min(...ends),
-    ),
-    detailAtLeast({ ...head, clause, what: "gauge, 2.4 d_0" }, 2.4 * holeMm, gaugeMm),
-    ...(outerMm > gaugeMm
-      ? [
-          detailAtLeast(
-            { ...head, clause, what: "inner to outer bolts, 2.4 d_0" },
-            2.4 * holeMm,
-            (outerMm - gaugeMm) / 2,
-          ),
-        ]
-      : []),
-    ...(pitches.length > 0
-      ? [
-          detailAtLeast(
-            { ...head, clause, what: "distance between bolt rows, 2.2 d_0" },
-            2.2 * holeMm,
-            Math.min(...pitches),
-          ),
-        ]
-      : []),
-  ];
 }

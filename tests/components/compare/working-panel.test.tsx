@@ -85,6 +85,21 @@ describe("the working of a number", () => {
     expect(outer?.querySelector("details")?.textContent).toContain("3728 mm²");
   });
 
+  it("draws a joint's moment against its rotation, in figures too, and tells its classes' bounds", async () => {
+    const { panel } = await open({ opening: { about: "joint" } });
+    const table = within(panel).getAllByRole("table", { name: "Moment and rotation, in figures" })[0];
+    // The softest joint is open: M_j,Rd over S_j,ini, softened 1.5^2.7 times at the resistance.
+    const [softest] = [...worked.joints].sort((a, b) => a.initialStiffness - b.initialStiffness);
+    const { momentResistance, initialStiffness } = softest ?? {
+      momentResistance: NaN,
+      initialStiffness: NaN,
+    };
+    const last = ((momentResistance / initialStiffness) * 1000 * 1.5 ** 2.7).toFixed(1);
+    expect(within(table as HTMLElement).getByText(last)).toBeVisible();
+    expect(panel.textContent).toMatch(/rigid from 120.000 kNm\/rad/);
+    expect(panel.textContent).toContain("rotation capacity enough for plastic analysis (6.4)");
+  });
+
   it("says that it loads, and offers another try when that failed", async () => {
     await open({ working: { state: "loading" } });
     expect(screen.getByRole("status")).toHaveTextContent("Loading the working");

@@ -216,6 +216,22 @@ describe("detailing of the bolts, Table 3.3", () => {
     expectHand(check.utilisation, needed / actual);
   });
 
+  it("keeps washers off the column's root and off the beam's welds", () => {
+    const option = evaluatedCase(nodeOf(oneSided(buildSide())));
+    // ISO 7089: 44 mm for M24. Beside the root (120 - 8.5)/2 - 27; row 1 above the flange 45 - 8 sqrt2.
+    const root = checkLike(option, "detailing", { what: "washer flat on the column's flange" });
+    expectHand(root.demand, 22);
+    expectHand(root.resistance, (120 - 8.5) / 2 - 27);
+    const welds = checkLike(option, "detailing", { what: "washer clear of the beam and its welds" });
+    const byHand = Math.min(
+      45 - 8 * Math.SQRT2,
+      65 - 14.6 - 8 * Math.SQRT2,
+      450 - 14.6 - 385 - 6 * Math.SQRT2,
+      (120 - 9.4) / 2 - 5 * Math.SQRT2,
+    );
+    expectHand(welds.resistance, byHand);
+  });
+
   it("fails the option where a distance is short", () => {
     const close = plated((connection) => ({
       ...connection,
