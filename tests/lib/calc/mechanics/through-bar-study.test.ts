@@ -7,11 +7,13 @@ import { meshStub } from "@/scripts/fe/stub-mesh";
 
 /**
  * Holds the two-spring model of the through-bars against finite elements that know nothing of it: the committed
- * results of `npm run verify:fe`. The bounds are those the model states for a row without a plate, finite-element
- * share over η from 0.99 to 1.05 and relief of the web over η at least 0.99, with this study's own mesh error.
+ * results of `npm run verify:fe`. The bounds are this study's own for a row without a plate: finite-element share over
+ * η from 0.98 to 1.08. The model was fitted to 0.99 to 1.05; on finer meshes the two worst cases (M16 at wide gauges)
+ * come to 1.07, so its upper bound does not hold without a plate. Behind end plates, which the program asks for, the
+ * share is smaller.
  */
-const LOWEST = 0.99;
-const HIGHEST = 1.05;
+const LOWEST = 0.98;
+const HIGHEST = 1.08;
 const MESH_ERROR = 0.02;
 
 const cases = results.cases.map((each) => ({
@@ -57,12 +59,20 @@ describe("the finite-element study of the through-bars", () => {
     const { share } = closedForm(each);
     for (const row of each.rows) {
       const expected = share * symmetricParts[row.loading]!;
-      expect(row.share).toBeGreaterThanOrEqual((LOWEST - MESH_ERROR) * expected);
-      expect(row.share).toBeLessThanOrEqual((HIGHEST + MESH_ERROR) * expected);
+      expect(row.share).toBeGreaterThanOrEqual(LOWEST * expected);
+      expect(row.share).toBeLessThanOrEqual(HIGHEST * expected);
     }
   });
 
-  // Beyond the model's 1.05: this study's own measured bound, 1.00 to 1.10, with the bolt hole cut out of a flange without a plate.
+  // This study's own measured bounds: 0.88 to 1.09 on its mesh, 0.86 on the finest.
+  it.each(cases)("comes near the column's stiffness K_c, and has the bar's K_b: $name", (each) => {
+    const { columnNPerMm, barsNPerMm } = closedForm(each);
+    expect(each.columnNPerMm / columnNPerMm).toBeGreaterThan(0.86);
+    expect(each.columnNPerMm / columnNPerMm).toBeLessThan(1.1);
+    expect(Math.abs(each.barsNPerMm / barsNPerMm - 1)).toBeLessThan(1e-3);
+  });
+
+  // Beyond the model's 1.05: this study's own measured bound, 1.00 to 1.11 on the finest mesh, with the bolt hole cut out of a flange without a plate.
   it.each(results.holeChecks)("carries at most a tenth more with the hole: $section, $bar", (check) => {
     const ratio = check.shareWithHole / check.closedFormShare;
     expect(check.shareWithHole).toBeGreaterThan(check.share);
@@ -78,8 +88,8 @@ describe("the finite-element study of the through-bars", () => {
     "relieves the web by the bars' share: $name",
     (run) => {
       const { share } = closedForm(caseOf(run));
-      expect(run.shareByWebForce).toBeGreaterThan((LOWEST - MESH_ERROR) * share);
-      expect(run.webRelief).toBeGreaterThan((LOWEST - MESH_ERROR) * share);
+      expect(run.shareByWebForce).toBeGreaterThan(LOWEST * share);
+      expect(run.webRelief).toBeGreaterThan(LOWEST * share);
     },
   );
 });
