@@ -95,6 +95,7 @@ export function rotationCapacityOf(node: NodeCase, panel: ColumnPanel, side: Sid
   const isCovered =
     panel.steel.yieldMpa <= STRONGEST_MPA &&
     joint.beam.steel.yieldMpa <= STRONGEST_MPA &&
+    (!isBoltedCase(side) || side.model.joint.view.attachment.yieldMpa <= STRONGEST_MPA) &&
     !isLargeAxialForce(node, joint, side.actions.axialForceN);
   if (!isCovered) return "not-shown";
   const totalN = isBoltedCase(side)
