@@ -2,9 +2,8 @@ import { sectionProperties } from "../mechanics/section-properties";
 import type { JointCase, NodeCase } from "../node";
 import type { ComponentCheck } from "../result";
 import { OutsideScope } from "../outcome";
-import { isBoltedCase, type BoltedSideCase, type SideCase } from "../side-case";
+import { isBoltedCase, type SideCase } from "../side-case";
 import { defineFormula } from "../trace/define-formula";
-import type { Trace } from "../trace/trace";
 import { traced } from "../trace/traced";
 import { checkOf } from "./check";
 
@@ -52,62 +51,17 @@ const togetherRatio = defineFormula({
   },
 });
 
-const lesserPatternN = defineFormula({
-  id: "axial-force/N_j,Rd of shared rows",
-  source: {
-    document: "EN 1993-1-8",
-    edition: "2005",
-    ref: "6.2.7.1(3): N_j,Rd by equilibrium; rows that serve both flanges are counted once, as a mix of the two patterns of row forces",
-  },
-  symbols: { firstN: ["ΣF_tr,Rd, one flange pulled", "N"], secondN: ["ΣF_tr,Rd, the other", "N"] },
-  result: ["N_j,Rd", "N"],
-  expression: "min(firstN, secondN)",
-  evaluate: (g) => Math.min(g.firstN, g.secondN),
-  example: { given: { firstN: 400_000, secondN: 300_000 }, gives: 300_000, relTol: 1e-12 },
-});
-
-/** Sum of the row forces at the moment resistance, and where it acts below the beam's top, N and mm. */
-function rowsTogether(side: BoltedSideCase): { readonly totalN: number; readonly belowTopMm: number } {
-  let totalN = 0;
-  let momentNmm = 0;
-  side.model.joint.view.tensionRows.forEach((row, index) => {
-    const forceN = side.rowForces[index]?.value ?? 0;
-    totalN += forceN;
-    momentNmm += forceN * row.belowTopMm;
-  });
-  return { totalN, belowTopMm: momentNmm / totalN };
-}
-
-/** Whether a bolt row takes tension whichever flange is pulled. */
-function hasSharedRow(side: BoltedSideCase, turned: BoltedSideCase): boolean {
-  const own = new Set(side.model.joint.view.tensionRows.map(({ row }) => row));
-  return turned.model.joint.view.tensionRows.some(({ row }) => own.has(row));
-}
-
 /**
- * What the joint carries when the beam pulls along its axis, N.
+ * What one flange's zone of a welded beam carries when the beam pulls, N.
  *
- * @throws OutsideScope where no mix of the two patterns of row forces has its resultant on the axis.
+ * @throws OutsideScope behind bolts: rows and welds under a pull along the axis are not evaluated.
  */
-function pulledN(trace: Trace | null, side: SideCase, turned: SideCase): number {
-  if (!isBoltedCase(side) || !isBoltedCase(turned)) {
-    const zone = (of: SideCase): number =>
-      isBoltedCase(of)
-        ? rowsTogether(of).totalN
-        : Math.min(of.webTension.value, of.model.joint.flangeBending?.value ?? Infinity);
-    return twoFlangesN(trace, { firstN: zone(side), secondN: zone(turned) });
-  }
-  const own = rowsTogether(side);
-  const other = rowsTogether(turned);
-  const given = { firstN: own.totalN, secondN: other.totalN };
-  if (!hasSharedRow(side, turned)) return twoFlangesN(trace, given);
-  const axisMm = side.model.joint.view.joint.beam.section.depthMm / 2;
-  if ((own.belowTopMm - axisMm) * (other.belowTopMm - axisMm) > 0) {
-    throw new OutsideScope(
-      `the bolt rows on the ${side.model.joint.view.joint.side} all act on one side of the beam's axis: its pull in ${side.loadCase.name} cannot be taken along the axis`,
-    );
-  }
-  return lesserPatternN(trace, given);
+function pulledN(side: SideCase): number {
+  if (!isBoltedCase(side))
+    return Math.min(side.webTension.value, side.model.joint.flangeBending?.value ?? Infinity);
+  throw new OutsideScope(
+    `the ${side.model.joint.view.joint.side} beam pulls at its bolts with more than 5 % of its plastic resistance in ${side.loadCase.name}, which is not evaluated`,
+  );
 }
 
 const compressionN = (side: SideCase): number => {
@@ -119,16 +73,14 @@ const compressionN = (side: SideCase): number => {
  * Moment and axial force together. EN 1993-1-8:2005, 6.2.7.1(3), Eq. (6.24).
  *
  * @param turned - the same side with its tension flange at the other level.
- * @throws OutsideScope where the rows cannot take a pull along the beam's axis.
+ * @throws OutsideScope for a pull at bolts.
  */
 export function axialCheck(side: SideCase, turned: SideCase, steps: boolean): ComponentCheck {
   const { axialForceN } = side.actions;
   const ratio = traced(steps, (trace) => {
     trace?.include(side.resistance.step);
-    const resistanceN =
-      axialForceN > 0
-        ? twoFlangesN(trace, { firstN: compressionN(side), secondN: compressionN(turned) })
-        : pulledN(trace, side, turned);
+    const zone = axialForceN > 0 ? compressionN : pulledN;
+    const resistanceN = twoFlangesN(trace, { firstN: zone(side), secondN: zone(turned) });
     return togetherRatio(
       trace,
       {
