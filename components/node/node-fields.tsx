@@ -1,6 +1,6 @@
 "use client";
 
-import { ChoiceField } from "@/components/forms/choice-field";
+import { ChoiceField, type Choice } from "@/components/forms/choice-field";
 import { FormRow, FormSection, RowGroup } from "@/components/forms/form-grid";
 import { DraftChoice, DraftQuantity, DraftSection, DraftSteel, DraftText, useDraftForm } from "./draft-form";
 import { isDraftObject, shownText, valueAt } from "./node-draft";
@@ -142,73 +142,68 @@ export function TargetFields() {
   );
 }
 
-const STRENGTHS = [
-  { value: "", label: "product standard" },
-  { value: "en1993-1-1-table-3.1", label: "EN 1993-1-1, Table 3.1" },
-];
-const T_STUB_METHODS = [
-  { value: "", label: "method 2" },
-  { value: "method-1", label: "method 1" },
-];
-const TRIANGULAR_LIMITS = [
-  { value: "", label: "always" },
-  { value: "united-kingdom", label: "as in the United Kingdom" },
-];
-const FLANGE_WELDS = [
-  { value: "", label: "directional method" },
-  { value: "simplified", label: "simplified method" },
+interface Reading {
+  readonly path: string;
+  readonly label: string;
+  /** For a screen reader, which hears no heading above. */
+  readonly fullLabel: string;
+  readonly hint: string;
+  /** The usual one first, which is not written down. */
+  readonly choices: readonly Choice[];
+}
+
+const READINGS: readonly Reading[] = [
+  {
+    path: "choices.strengths",
+    label: "Strengths",
+    fullLabel: "Strengths of grades",
+    hint: "Of grades by name, at the thickness of each part.",
+    choices: [
+      { value: "", label: "product standard" },
+      { value: "en1993-1-1-table-3.1", label: "EN 1993-1-1, Table 3.1" },
+    ],
+  },
+  {
+    path: "choices.tStubModeOne",
+    label: "T-stub, mode 1",
+    fullLabel: "T-stub method in mode 1",
+    hint: "EN 1993-1-8, Table 6.2: with (2) or without (1) the washer’s width.",
+    choices: [
+      { value: "", label: "method 2" },
+      { value: "method-1", label: "method 1" },
+    ],
+  },
+  {
+    path: "choices.triangularLimit",
+    label: "Straight line of rows",
+    fullLabel: "Straight line of bolt rows",
+    hint: "EN 1993-1-8, 6.2.7.2(9): below a row close to the failure of its bolts; the United Kingdom lifts it for thin plates and flanges.",
+    choices: [
+      { value: "", label: "always" },
+      { value: "united-kingdom", label: "as in the United Kingdom" },
+    ],
+  },
+  {
+    path: "choices.flangeWelds",
+    label: "Flange welds",
+    fullLabel: "Method for flange welds",
+    hint: "EN 1993-1-8, 4.5.3.2 or 4.5.3.3.",
+    choices: [
+      { value: "", label: "directional method" },
+      { value: "simplified", label: "simplified method" },
+    ],
+  },
 ];
 
 /** Which reading is taken where the standard leaves a choice; nothing is written down where it is the usual one. */
 function ReadingRows() {
   return (
     <RowGroup title="Reading of the standard">
-      <FormRow label="Strengths" hint="Of grades by name, at the thickness of each part.">
-        {(hintId) => (
-          <DraftChoice
-            path="choices.strengths"
-            label="Strengths of grades"
-            choices={STRENGTHS}
-            hintId={hintId}
-          />
-        )}
-      </FormRow>
-      <FormRow
-        label="T-stub, mode 1"
-        hint="EN 1993-1-8, Table 6.2: with (2) or without (1) the washer’s width."
-      >
-        {(hintId) => (
-          <DraftChoice
-            path="choices.tStubModeOne"
-            label="T-stub method in mode 1"
-            choices={T_STUB_METHODS}
-            hintId={hintId}
-          />
-        )}
-      </FormRow>
-      <FormRow
-        label="Straight line of rows"
-        hint="EN 1993-1-8, 6.2.7.2(9): below a row close to the failure of its bolts; the United Kingdom lifts it for thin plates and flanges."
-      >
-        {(hintId) => (
-          <DraftChoice
-            path="choices.triangularLimit"
-            label="Straight line of bolt rows"
-            choices={TRIANGULAR_LIMITS}
-            hintId={hintId}
-          />
-        )}
-      </FormRow>
-      <FormRow label="Flange welds" hint="EN 1993-1-8, 4.5.3.2 or 4.5.3.3.">
-        {(hintId) => (
-          <DraftChoice
-            path="choices.flangeWelds"
-            label="Method for flange welds"
-            choices={FLANGE_WELDS}
-            hintId={hintId}
-          />
-        )}
-      </FormRow>
+      {READINGS.map(({ path, label, fullLabel, hint, choices }) => (
+        <FormRow key={path} label={label} hint={hint}>
+          {(hintId) => <DraftChoice path={path} label={fullLabel} choices={choices} hintId={hintId} />}
+        </FormRow>
+      ))}
     </RowGroup>
   );
 }

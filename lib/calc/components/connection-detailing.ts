@@ -5,6 +5,7 @@ import { isBoltedCase, type SideCase } from "../side-case";
 import { detailAtLeast } from "./check";
 import { cleatDetailing } from "./cleat-seat";
 import { isCleatView } from "./cleat-view";
+import { rowEnds } from "./column-flange";
 import type { ColumnPanel } from "./column-panel";
 import type { BoltedView } from "./connection-view";
 import type { WeldedJoint } from "./welded-joint";
@@ -45,6 +46,14 @@ function spacingDetails(
   ];
   if (outerMm > view.gaugeMm)
     checks.push(least("inner to outer bolts, 2.4 d_0", 2.4, (outerMm - view.gaugeMm) / 2));
+  const toColumnEnd = Math.min(
+    ...view.rows.map((row) => {
+      const { outwardMm, inwardMm } = rowEnds(view, row);
+      return Math.min(outwardMm, inwardMm);
+    }),
+  );
+  if (Number.isFinite(toColumnEnd))
+    checks.push(least("end distance in the column's flange, 1.2 d_0", 1.2, toColumnEnd));
   if (pitches.length > 0)
     checks.push(least("distance between bolt rows, 2.2 d_0", 2.2, Math.min(...pitches)));
   return checks;

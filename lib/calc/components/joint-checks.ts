@@ -1,7 +1,6 @@
 import type { Level } from "../node";
 import type { ComponentCheck } from "../result";
 import { isBoltedCase, type BoltedSideCase, type SideCase, type WeldedSideCase } from "../side-case";
-import type { Traced } from "../trace/traced";
 import { checkOf, type CheckHead } from "./check";
 import { bearingLevelOf, isCleatView } from "./cleat-view";
 import type { RowFamilyLimits } from "./row-groups";
@@ -163,8 +162,11 @@ function boltedChecks(checks: ComponentCheck[], sideCase: BoltedSideCase): void 
   const loadCase = sideCase.loadCase.name;
   const bearsOn = bearingLevelOf(sideCase.actions.shearN);
   view.tensionRows.forEach((row, index) => {
-    const { value, step } = row.fastener.tension;
-    const pair: Traced = { value: 2 * value, step };
+    // Pulled apart, or punched through the flange or the plate, whichever comes first.
+    const inFlange = joint.flange.family.alone[index]?.modeThree;
+    const inPlate = joint.plate.family.alone[index]?.modeThree;
+    if (!inFlange || !inPlate) return;
+    const pair = inPlate.value < inFlange.value ? inPlate : inFlange;
     checks.push(
       checkOf(
         {

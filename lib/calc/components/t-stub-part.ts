@@ -47,6 +47,8 @@ export interface TStubPart {
   readonly momentTwoNmm: number;
   readonly boltsN: number;
   readonly resistance: Traced;
+  /** Mode 3 alone: bolts in tension or punching through. */
+  readonly modeThree: Traced;
   /** 1, 2 or 3: which mode gives the resistance. */
   readonly mode: 1 | 2 | 3;
   /** Effective length of that mode (that of mode 2 where the bolts fail). */
@@ -300,6 +302,7 @@ export function tStubPartOf(
     momentTwoNmm: modes.momentTwoNmm,
     boltsN: modes.boltsN,
     resistance: own.resistance,
+    modeThree: modes.three,
     mode: own.mode,
     modeLengthMm: own.modeLengthMm,
     relieved,

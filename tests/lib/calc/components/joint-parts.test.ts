@@ -86,6 +86,28 @@ describe("bolts in shear, 6.2.2(2) and Table 3.4", () => {
   });
 });
 
+describe("bolts in tension, Table 3.4", () => {
+  const pulled = (thickness: number): number =>
+    checkLike(
+      evaluatedCase(
+        nodeOf(
+          oneSided(plated((connection) => ({ ...connection, plate: { ...connection.plate, thickness } }))),
+        ),
+      ),
+      "bolt-tension",
+      { row: 1 },
+    ).resistance;
+  const F_t = (0.9 * 1000 * M24.area) / 1.25;
+
+  it("are pulled apart behind thick parts and punch through thin ones", () => {
+    // d_m of M24: (36 + 39.55) / 2; B_p of 14 mm of flange is above F_t, of a 6 mm plate below.
+    const B_p = (t: number): number => (0.6 * Math.PI * ((36 + 39.55) / 2) * t * 470) / 1.25;
+    expect(B_p(14)).toBeGreaterThan(F_t);
+    expectHand(pulled(20), 2 * F_t);
+    expectHand(pulled(6), 2 * B_p(6));
+  });
+});
+
 describe("welds of the beam", () => {
   it("of the tension flange resist square to their length, by the directional method", () => {
     const weld = checkLike(evaluatedCase(nodeOf(oneSided(buildSide()))), "connection-weld", {
@@ -230,6 +252,22 @@ describe("detailing of the bolts, Table 3.3", () => {
       (120 - 9.4) / 2 - 5 * Math.SQRT2,
     );
     expectHand(welds.resistance, byHand);
+  });
+
+  it("counts to the column's end in its flange, where it ends", () => {
+    const what = "end distance in the column's flange, 1.2 d_0";
+    const ending = evaluatedCase(
+      nodeOf(
+        oneSided(buildSide(), 200, {
+          column: { section: "HE 300 A", steel: "S355", endDistanceAbove: 75, storeyHeight: 3600 },
+        }),
+      ),
+    );
+    const end = checkLike(ending, "detailing", { what });
+    expectHand(end.demand, 1.2 * 26);
+    expectHand(end.resistance, 75 - 45);
+    expect(ending.passes).toBe(false);
+    expect(checksOf(evaluatedCase(nodeOf(oneSided(buildSide()))), "detailing", { what })).toEqual([]);
   });
 
   it("fails the option where a distance is short", () => {
