@@ -210,7 +210,7 @@ function ReadingRows() {
 
 /** Factors of EN 1993-1-8 as published, and of national annexes; the annex in force comes first. */
 const FACTOR_SETS = [
-  { value: "recommended", label: "recommended values", factors: ["1.0", "1.0", "1.25"] },
+  { value: "recommended", label: "recommended", factors: ["1.0", "1.0", "1.25"] },
   { value: "germany", label: "Germany (from memory)", factors: ["1.0", "1.1", "1.25"] },
 ] as const;
 const FACTOR_NAMES = ["gammaM0", "gammaM1", "gammaM2"] as const;
